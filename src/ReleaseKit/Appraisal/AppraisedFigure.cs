@@ -1,0 +1,93 @@
+using ReleaseKit.Noise;
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>A published figure with its error worked out: what every page, chart, download and sentence is made from.</summary>
+public sealed record AppraisedFigure
+{
+    public required FigureRef Ref { get; init; }
+    public required Table Table { get; init; }
+    public required Measure Measure { get; init; }
+    public int Row => Ref.Row;
+
+    /// <summary>Canonical address: "arrears/in_arrears?district=Aldermoor&amp;ward=All", all stub columns named in stub order.</summary>
+    public required string Address { get; init; }
+
+    /// <summary>Stable id in its page: MEASURE.VALUE.VALUE of slugs.</summary>
+    public required string Id { get; init; }
+
+    /// <summary>The exact published value; meaningless if HasNumber is false.</summary>
+    public required PublishedValue Value { get; init; }
+
+    /// <summary>SDMX CL_OBS_STATUS letter.</summary>
+    public required char Status { get; init; }
+    public required bool HasNumber { get; init; }
+
+    /// <summary>The law of its error; null for exact, public, not stated and no number. Shared by all figures alike.</summary>
+    public FigureError? Error { get; init; }
+
+    /// <summary>The mechanism whose noise it carries (for a sum of parts, the parts' if they share one), or null.</summary>
+    public Mechanism? Mechanism { get; init; }
+
+    /// <summary>For a sum of parts published as such: how many draws it holds; 1 for a draw of its own.</summary>
+    public int Draws { get; init; } = 1;
+
+    /// <summary>Ranges at the lower, main and upper coverage, in that order; empty where there is no margin.</summary>
+    public required IReadOnlyList<FigureRange> Ranges { get; init; }
+    public FigureRange? Main => Ranges.Count == 0 ? null : Ranges[1];
+    public required Reliability Reliability { get; init; }
+
+    /// <summary>What is special about it: decides part 3 of the reading and the marks.</summary>
+    public required FigureCase Case { get; init; }
+}
+
+/// <summary>The range at one coverage: margins and ends unrounded for files, and as printed on pages.</summary>
+public sealed record FigureRange
+{
+    public required Coverage Coverage { get; init; }
+
+    /// <summary>Published − uncut low, and uncut high − published; equal unless the range is uneven.</summary>
+    public required double MarginDown { get; init; }
+    public required double MarginUp { get; init; }
+    public double Margin => Math.Max(MarginDown, MarginUp);
+    public required double Low { get; init; }
+    public required double High { get; init; }
+    public required double UncutLow { get; init; }
+    public required double UncutHigh { get; init; }
+
+    /// <summary>Attained coverage, a lower bound.</summary>
+    public required double Attained { get; init; }
+    public required PrintedRange Printed { get; init; }
+}
+
+/// <summary>The digits that stand on pages: the value and its margin(s) to one unit, the ends outward. Half-width and ends agree digit for digit.</summary>
+public sealed record PrintedRange(PublishedValue Value, PublishedValue MarginDown, PublishedValue MarginUp, PublishedValue Low, PublishedValue High, bool LowIsCut, bool HighIsCut)
+{
+    public bool IsUneven => MarginDown != MarginUp;
+
+    /// <summary>The larger side: the margin of the light-digits rule.</summary>
+    public PublishedValue Margin => MarginDown.Unscaled > MarginUp.Unscaled ? MarginDown : MarginUp;
+}
+
+/// <summary>The first special case that fits a figure, in the order of the readings.</summary>
+public enum SpecialCase
+{
+    None,
+    NoNumber,
+    Exact,
+    Public,
+    NoMargin,
+    BelowZero,
+    Zero,
+    FromThreshold,
+    NotPublishedBelow,
+    FlooredSum,
+    MostlyUnchanged,
+    Capped,
+    MarginAsLargeAsFigure,
+}
+
+/// <summary>The first special case, and everything else that applies.</summary>
+public sealed record FigureCase(SpecialCase First, bool Rounded, bool Floored, bool Capped, bool Threshold);

@@ -1,0 +1,34 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Wording;
+
+/// <summary>Everything a page says in one language: readings, numbers, and the page's own words by key from the wording file.</summary>
+public interface ILanguage
+{
+    /// <summary>BCP 47 tag.</summary>
+    string Tag { get; }
+
+    Reading ReadingOf(AppraisedFigure figure);
+
+    /// <summary>A number as the language writes it in tables: "1,842", "−7" (U+2212).</summary>
+    string Number(PublishedValue value);
+
+    /// <summary>A number as the language writes it in running text: "minus 7".</summary>
+    string NumberInProse(PublishedValue value);
+
+    /// <summary>"1,240 households": number, non-breaking space, unit in the right form.</summary>
+    string WithUnit(PublishedValue value, Unit unit);
+
+    /// <summary>"±&#160;19", or "−12 +17" if uneven.</summary>
+    string Margin(PrintedRange range);
+
+    /// <summary>A coverage in words: "95 in 100".</summary>
+    string Share(Noise.Coverage coverage);
+
+    /// <summary>A text of the wording file by key, its {names} filled in; a missing key is the stop that names it.</summary>
+    string Text(string key, params (string Name, string Value)[] fill);
+
+    /// <summary>"16 March 2032".</summary>
+    string Date(DateOnly date);
+}
