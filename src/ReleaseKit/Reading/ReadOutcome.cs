@@ -1,0 +1,16 @@
+using ReleaseKit.Releases;
+using ReleaseKit.Review;
+
+namespace ReleaseKit.Reading;
+
+/// <summary>
+/// What came out of reading a folder. The release is null if it cannot be formed at all (one of its two files missing or broken);
+/// the noise account is there as soon as mechanisms.json can be read, so that each half is reviewed alone.
+/// Beside a stop a table can have no rows: check RowCount before taking a first or a smallest row.
+/// </summary>
+public sealed record ReadOutcome(Release? Release, IReadOnlyList<Finding> Findings)
+{
+    public NoiseAccount? Noise { get; init; }
+
+    public bool HasStops => Findings.Any(finding => finding.Level == FindingLevel.Stop);
+}

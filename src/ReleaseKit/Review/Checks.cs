@@ -1,0 +1,9 @@
+namespace ReleaseKit.Review;
+
+/// <summary>Every check that a review runs after reading. What reading itself finds (structure) is not repeated here.</summary>
+public static class Checks
+{
+    public static IReadOnlyList<IReviewCheck> All { get; } =
+    [
+    ];
+}

@@ -1,0 +1,32 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Reading;
+
+namespace ReleaseKit.Review;
+
+/// <summary>The whole review: what reading found and what every check finds, by owner, then by place.</summary>
+public static class ReleaseReview
+{
+    public static IReadOnlyList<Finding> Of(ReadOutcome read, IAppraisedRelease? appraised)
+    {
+        var subject = new ReviewSubject(read, appraised);
+        var findings = read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject)));
+        return [.. findings.Distinct().Order(ByOwnerThenPlace)];
+    }
+
+    private static Comparer<Finding> ByOwnerThenPlace { get; } = Comparer<Finding>.Create(Compare);
+
+    private static int Compare(Finding left, Finding right)
+    {
+        var byOwner = left.For.CompareTo(right.For);
+        return byOwner != 0 ? byOwner : ComparePlaces(left, right);
+    }
+
+    private static int ComparePlaces(Finding left, Finding right) =>
+        (string.CompareOrdinal(left.At.File, right.At.File), left.At.Line - right.At.Line, left.At.Column - right.At.Column) switch
+        {
+            (not 0 and var byFile, _, _) => byFile,
+            (_, not 0 and var byLine, _) => byLine,
+            (_, _, not 0 and var byColumn) => byColumn,
+            _ => string.CompareOrdinal(left.Slug, right.Slug),
+        };
+}
