@@ -9,6 +9,32 @@ public readonly record struct PublishedValue(long Unscaled, byte Decimals)
 
     public bool IsNegative => Unscaled < 0;
 
+    /// <summary>The same number in decimal arithmetic, exactly; its scale is <see cref="Decimals"/>.</summary>
+    public decimal ToDecimal()
+    {
+        var magnitude = unchecked((ulong)(IsNegative ? -Unscaled : Unscaled));
+        return new decimal(unchecked((int)magnitude), unchecked((int)(magnitude >> 32)), 0, IsNegative, Decimals);
+    }
+
+    /// <summary>The number with the digits it is written with: 2.50 keeps two.</summary>
+    /// <exception cref="OverflowException">The digits do not fit into 64 bits.</exception>
+    public static PublishedValue Of(decimal number)
+    {
+        var scale = number.Scale;
+        return new((long)(number * PowerOfTenExactly(scale)), scale);
+    }
+
+    /// <summary>The number in as few digits as it takes: 2.50 becomes 2.5.</summary>
+    public static PublishedValue Shortest(decimal number) => Of(number / 1.0000000000000000000000000000m);
+
+    private static decimal PowerOfTenExactly(int exponent)
+    {
+        var power = 1m;
+        for (var step = 0; step < exponent; step++)
+            power *= 10;
+        return power;
+    }
+
     /// <summary>The number in the files' notation: "-12.50", ASCII minus, point, no group marks.</summary>
     public override string ToString()
     {

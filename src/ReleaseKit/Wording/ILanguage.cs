@@ -31,4 +31,7 @@ public interface ILanguage
 
     /// <summary>"16 March 2032".</summary>
     string Date(DateOnly date);
+
+    /// <summary>"wards, districts and Norrvale".</summary>
+    string List(IReadOnlyList<string> items);
 }

@@ -1,0 +1,31 @@
+using ReleaseKit.Noise;
+
+namespace ReleaseKit.Wording;
+
+/// <summary>A chance as "95 of 100".</summary>
+public readonly record struct NaturalFrequency(long Cases, long All)
+{
+    private const long LargestAll = 1_000_000;
+
+    /// <summary>A coverage as declared: of 100 if that is a whole number, else of 1,000 and so on. Never rounded up.</summary>
+    public static NaturalFrequency Of(Coverage coverage)
+    {
+        var share = (decimal)coverage.Share;
+        for (var all = 100L; ; all *= 10)
+            if (share * all == decimal.Floor(share * all) || all == LargestAll)
+                return new((long)decimal.Floor(share * all), all);
+    }
+
+    /// <summary>
+    /// A chance worked out, rounded down, of the smallest of 100, 1,000, … 1,000,000 that does not make it look certain or impossible.
+    /// </summary>
+    public static NaturalFrequency About(double chance)
+    {
+        for (var all = 100L; ; all *= 10)
+        {
+            var cases = (long)Math.Floor(Math.Round(chance * all, 9));
+            if (all == LargestAll || (cases > 0 && cases < all))
+                return new(Math.Min(cases, all - 1), all);
+        }
+    }
+}
