@@ -56,7 +56,10 @@ public sealed record Mechanism
     public required string Id { get; init; }
     public required LawName Law { get; init; }
 
-    /// <summary>Parameters by key: scale, sigma, halfWidth, epsilon, sensitivity, gamma, cutoff, grid.</summary>
+    /// <summary>
+    /// Parameters by key: scale, sigma, halfWidth, epsilon, sensitivity, gamma, cutoff, grid. The staircase law's "sensitivity" (the width of a stair)
+    /// shares its key with the mechanism's sensitivity object, so it is taken from there: perCell, or l1 where that is what is given.
+    /// </summary>
     public required IReadOnlyDictionary<string, NumberOrColumn> Parameters { get; init; }
 
     /// <summary>For a tabulated law: steps (multiples of the grid) and their chances, read in decimal.</summary>
