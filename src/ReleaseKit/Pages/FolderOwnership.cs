@@ -1,0 +1,33 @@
+namespace ReleaseKit.Pages;
+
+/// <summary>Which folders may be replaced, and how they are removed.</summary>
+internal static class FolderOwnership
+{
+    /// <exception cref="SiteFolderException">The target is there and is not an empty folder or one of ours.</exception>
+    public static void Demand(string target)
+    {
+        if (File.Exists(target))
+            throw SiteFolderException.IsFile(target);
+        if (new DirectoryInfo(target).LinkTarget is not null)
+            throw SiteFolderException.IsLink(target);
+        if (Directory.Exists(target) && !IsOurs(target))
+            throw SiteFolderException.NotOurs(target);
+    }
+
+    /// <summary>Removes a folder of ours, the marker last, so that a removal cut off half-way can be taken up again.</summary>
+    /// <exception cref="SiteFolderException">The folder is there and is not ours.</exception>
+    public static void Remove(string folder)
+    {
+        if (!Directory.Exists(folder))
+            return;
+        Demand(folder);
+        foreach (var inner in Directory.EnumerateDirectories(folder))
+            Directory.Delete(inner, recursive: true);
+        foreach (var file in Directory.EnumerateFiles(folder).Where(file => Path.GetFileName(file) != SiteFolder.Marker))
+            File.Delete(file);
+        Directory.Delete(folder, recursive: true);
+    }
+
+    private static bool IsOurs(string folder) =>
+        File.Exists(Path.Combine(folder, SiteFolder.Marker)) || !Directory.EnumerateFileSystemEntries(folder).Any();
+}

@@ -1,0 +1,187 @@
+using System.Text;
+using ReleaseKit.Pages;
+using Xunit;
+
+namespace ReleaseKit.Tests.Pages;
+
+public sealed class SiteFolderTests : IDisposable
+{
+    private readonly TemporaryFolder folder = new();
+
+    private string Target => folder["site"];
+
+    public void Dispose() => folder.Dispose();
+
+    [Fact]
+    public void Target_missing_is_made_with_the_marker()
+    {
+        Compose("one");
+        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.True(File.Exists(folder["site/.releasekit"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Target_empty_is_filled()
+    {
+        Directory.CreateDirectory(Target);
+        Compose("one");
+        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+    }
+
+    [Fact]
+    public void Target_composed_before_is_replaced_whole()
+    {
+        Compose("one", "old.html");
+        Compose("two");
+        Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
+        Assert.False(File.Exists(folder["site/old.html"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Target_with_files_of_others_is_refused_and_untouched()
+    {
+        Directory.CreateDirectory(Target);
+        File.WriteAllText(folder["site/letter.txt"], "mine");
+        var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
+        Assert.Contains("holds files that were not composed here", fault.Message, StringComparison.Ordinal);
+        Assert.DoesNotContain('\n', fault.Message);
+        Assert.Equal("mine", File.ReadAllText(folder["site/letter.txt"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Target_that_is_a_file_is_refused()
+    {
+        File.WriteAllText(Target, "mine");
+        Assert.Contains("is a file", Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target)).Message, StringComparison.Ordinal);
+        Assert.Equal("mine", File.ReadAllText(Target));
+    }
+
+    [Fact]
+    public void Target_that_is_a_link_is_refused()
+    {
+        Directory.CreateDirectory(folder["elsewhere"]);
+        File.CreateSymbolicLink(Target, folder["elsewhere"]);
+        Assert.Contains("is a link", Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target)).Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Target_that_is_a_root_is_refused() =>
+        Assert.Contains("root", Assert.Throws<SiteFolderException>(() => SiteFolder.Open("/")).Message, StringComparison.Ordinal);
+
+    [Fact]
+    public void Target_held_by_another_run_is_refused()
+    {
+        using var first = SiteFolder.Open(Target);
+        Assert.Contains("another run", Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target)).Message, StringComparison.Ordinal);
+        first.Write("index.html", "one"u8);
+        first.Finish();
+        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+    }
+
+    [Fact]
+    public void Composition_not_finished_leaves_what_stood()
+    {
+        Compose("one");
+        using (var site = SiteFolder.Open(Target))
+            site.Write("index.html", "half"u8);
+        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Run_cut_off_while_writing_is_cleared_away()
+    {
+        Compose("one");
+        LeaveBehind(".site.releasekit-new", "half");
+        Compose("two");
+        Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Run_cut_off_between_two_renames_is_put_back_at_the_next_start()
+    {
+        LeaveBehind(".site.releasekit-old", "one");
+        LeaveBehind(".site.releasekit-new", "two");
+        using var site = SiteFolder.Open(Target);
+        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.False(Directory.Exists(folder[".site.releasekit-old"]));
+    }
+
+    [Fact]
+    public void Run_cut_off_after_the_swap_is_cleared_away()
+    {
+        Compose("two");
+        LeaveBehind(".site.releasekit-old", "one");
+        using (SiteFolder.Open(Target))
+            Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Swap_by_two_renames_replaces_whole()
+    {
+        Compose("one");
+        LeaveBehind(".site.releasekit-new", "two");
+        FolderSwap.RenameTwice(SwapPaths.Beside(Target));
+        Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void Exchange_swaps_two_folders_in_one_step_on_Linux()
+    {
+        LeaveBehind("a", "one");
+        LeaveBehind("b", "two");
+        Assert.Equal(OperatingSystem.IsLinux(), FolderSwap.TryExchange(folder["a"], folder["b"]));
+        Assert.Equal(OperatingSystem.IsLinux() ? "two" : "one", File.ReadAllText(folder["a/index.html"]));
+    }
+
+    [Theory]
+    [InlineData("../escape.html")]
+    [InlineData("/etc/escape.html")]
+    [InlineData("tables/../../escape.html")]
+    [InlineData("tables//a.html")]
+    [InlineData("a\\b.html")]
+    [InlineData(".hidden")]
+    [InlineData("a b.html")]
+    [InlineData("é.html")]
+    [InlineData("a\0.html")]
+    [InlineData("name.")]
+    [InlineData("")]
+    public void Path_that_could_leave_or_mislead_is_refused(string path)
+    {
+        using var site = SiteFolder.Open(Target);
+        Assert.Throws<ArgumentException>(() => site.Write(path, "x"u8));
+    }
+
+    [Fact]
+    public void Path_written_twice_is_refused_whatever_its_case()
+    {
+        using var site = SiteFolder.Open(Target);
+        site.Write("a.html", "x"u8);
+        Assert.Throws<ArgumentException>(() => site.Write("A.html", "y"u8));
+    }
+
+    private void Compose(string home, params string[] others)
+    {
+        using var site = SiteFolder.Open(Target);
+        site.Write("index.html", Encoding.UTF8.GetBytes(home));
+        foreach (var other in others)
+            site.Write(other, "x"u8);
+        site.Finish();
+    }
+
+    private void LeaveBehind(string name, string home)
+    {
+        Directory.CreateDirectory(folder[name]);
+        File.WriteAllText(folder[$"{name}/{SiteFolder.Marker}"], "");
+        File.WriteAllText(folder[$"{name}/index.html"], home);
+    }
+
+    private string[] Neighbours() =>
+        [.. Directory.EnumerateFileSystemEntries(folder.Path).Select(Path.GetFileName).Order(StringComparer.Ordinal).Select(name => name!)];
+}
