@@ -48,8 +48,8 @@ public static class QuarterTable
         long[] before = [.. Cells.Select(cell => Mean(
             households.Where(household => household.District == cell.District), cell.Quarter, Norrvale.Districts[cell.District].ListedIn2030))];
         var after = noise.DiscreteGaussian("quarter-use", 6000, before);
-        long[] wholeBefore = [.. Answers.Quarters.Select((_, quarter) => 
-            Mean(households.Where(household => (quarter, household.District) != NotCollected), quarter, Listed(quarter)))];
+        long[] wholeBefore = [.. Answers.Quarters.Select((_, quarter) => Mean(
+            households.Where(household => (quarter, household.District) != NotCollected), quarter, Listed(quarter)))];
         var whole = noise.DiscreteGaussian("quarter-use-norrvale", 1000, wholeBefore);
         var cells = Cells.Select((cell, i) => (cell, SampleCell.Steps(after[i], before[i], Fine, 1))).ToDictionary();
         foreach (var quarter in Enumerable.Range(0, Answers.Quarters.Count))
