@@ -7,6 +7,9 @@ namespace ReleaseKit.Noise;
 /// </summary>
 public readonly record struct Coverage : IComparable<Coverage>
 {
+    /// <summary>How far below the share a probability still counts as reaching it; a pure number.</summary>
+    internal const double Slack = 1e-12;
+
     private Coverage(double share) => Share = share;
 
     /// <summary>The coverage as a share, 0 &lt; share &lt; 1.</summary>
@@ -21,6 +24,12 @@ public readonly record struct Coverage : IComparable<Coverage>
     public static Coverage OfShare(double share) => share is > 0 and < 1
         ? new Coverage(share)
         : throw new ArgumentOutOfRangeException(nameof(share), share, "A coverage lies strictly between 0 and 1.");
+
+    /// <summary>
+    /// Whether a probability reaches this coverage: P ≥ share − 1e-12, so that a tie is decided alike by everyone who works it out in doubles.
+    /// </summary>
+    /// <param name="probability">The lower end of what the probability can be, in [0, 1].</param>
+    public bool IsReachedBy(double probability) => probability >= Share - Slack;
 
     /// <inheritdoc/>
     public int CompareTo(Coverage other) => Share.CompareTo(other.Share);

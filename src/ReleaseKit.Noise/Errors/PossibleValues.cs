@@ -11,4 +11,19 @@ public readonly record struct PossibleValues(double Lowest, double Highest, bool
 
     /// <summary>Whole numbers from 0.</summary>
     public static PossibleValues Counts { get; } = new(0, double.PositiveInfinity, true);
+
+    /// <summary>
+    /// A range cut to the possible values. Whole numbers are taken inward, which loses none of them; a range that would hold nothing is taken
+    /// outward, or shrinks to the nearest possible value.
+    /// </summary>
+    internal ErrorRange Cut(double low, double high, double attained)
+    {
+        var (cutLow, cutHigh) = (Math.Clamp(low, Lowest, Highest), Math.Clamp(high, Lowest, Highest));
+        if (!Whole)
+            return new ErrorRange(cutLow, cutHigh, low, high, attained);
+        var (wholeLow, wholeHigh) = (Lattice.Ceiling(cutLow), Lattice.Floor(cutHigh));
+        return wholeLow <= wholeHigh
+            ? new ErrorRange(wholeLow, wholeHigh, low, high, attained)
+            : new ErrorRange(Math.Floor(cutLow), Math.Ceiling(cutHigh), low, high, attained);
+    }
 }
