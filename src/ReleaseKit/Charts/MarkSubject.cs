@@ -1,0 +1,58 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Laws;
+
+namespace ReleaseKit.Charts;
+
+/// <summary>One range of a mark: its ends before they are cut to the possible.</summary>
+public readonly record struct MarkRange(double Low, double High);
+
+/// <summary>What a mark shows of a figure, in the figure's unit.</summary>
+public sealed record MarkSubject
+{
+    public required double Value { get; init; }
+
+    /// <summary>Ranges at the lower, main and upper coverage; empty for a figure without a margin, which is a stem alone.</summary>
+    public required IReadOnlyList<MarkRange> Ranges { get; init; }
+
+    /// <summary>The thickness of the body, 0 to 1, at an offset of the noise (published − before noise); null: a line with stops.</summary>
+    public Func<double, double>? Density { get; init; }
+
+    /// <summary>The grid of a law on whole steps, 0 for a law with a density.</summary>
+    public double Grid { get; init; }
+
+    /// <summary>Too noisy to use alone: drawn hollow.</summary>
+    public bool Weak { get; init; }
+    public double Lowest { get; init; } = double.NegativeInfinity;
+    public double Highest { get; init; } = double.PositiveInfinity;
+
+    public bool IsStemAlone => Ranges.Count == 0;
+    public MarkRange Core => Ranges[0];
+    public MarkRange Body => Ranges[1];
+    public MarkRange Tail => Ranges[2];
+
+    public static MarkSubject Of(AppraisedFigure figure) => new()
+    {
+        Value = figure.Value.ToDouble() * figure.Measure.Multiplier,
+        Ranges = [.. figure.Ranges.Select(RangeOf)],
+        Density = figure.Error is { } error ? error.RelativeDensity : null,
+        Grid = figure.Error?.Law is LatticeLaw law ? law.Grid : 0,
+        Weak = figure.Reliability == Reliability.Weak,
+        Lowest = figure.Measure.Lowest ?? double.NegativeInfinity,
+        Highest = figure.Measure.Highest ?? double.PositiveInfinity,
+    };
+
+    /// <summary>The thickness at a place; between the steps of a grid on the straight line from one to the next.</summary>
+    public double ThicknessAt(double place)
+    {
+        var offset = Value - place;
+        if (Grid <= 0)
+            return Density!(offset);
+        var step = Math.Floor((offset / Grid) + 1e-9);
+        var share = Math.Max(0, (offset / Grid) - step);
+        var here = Density!(step * Grid);
+        return share < 1e-9 ? here : here + (share * (Density((step + 1) * Grid) - here));
+    }
+
+    // A range of a figure below the possible ends higher than the law alone would have it, so the larger of both ends is drawn.
+    private static MarkRange RangeOf(FigureRange range) => new(Math.Min(range.UncutLow, range.Low), Math.Max(range.UncutHigh, range.High));
+}
