@@ -1,0 +1,77 @@
+using System.Text;
+using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+
+namespace ReleaseKit.Charts;
+
+/// <summary>The mark of the leading figure at one width: the rule, and under it one measured line for each coverage.</summary>
+internal sealed record HeroMark(MarkSize Size, double Width, double Height, double LeastInset, double FirstLine, double LineStep, bool IsWide)
+{
+    private const double LabelGap = 8;
+    private const double LabelSize = 15;
+    private const double CapHalf = 5;
+
+    public static HeroMark Wide { get; } = new(MarkSize.Lead, 1160, 214, 180, 146, 27, true);
+
+    public static HeroMark Narrow { get; } = new(MarkSize.LeadNarrow, 340, 178, 60, 112, 26, false);
+
+    public string Draw(AppraisedFigure figure, ILanguage language)
+    {
+        var subject = MarkSubject.Of(figure);
+        var scale = ScaleOf(subject, figure, language);
+        var svg = Marks.Open(IsWide ? "hero-bar only-wide" : "hero-bar only-narrow", Width, subject.IsStemAlone ? Size.Middle * 2 : Height, Marks.Description(figure, language));
+        svg.AppendPath("hair", $"M0 {SvgMark.Number(Size.Middle)}H{SvgMark.Number(Width)}");
+        AppendGuides(svg, figure, scale);
+        svg.Append(SvgMark.Paint(SwelledRule.Of(subject, scale, Size).Shapes));
+        for (var index = 0; index < figure.Ranges.Count; index++)
+            AppendMeasure(svg, figure.Ranges[index], scale, language, index);
+        return svg.Append("</svg>").ToString();
+    }
+
+    // The tails fill the drawing between the insets, which leave room for the longest label; a mark that goes below the possible keeps its whole length.
+    private Scale ScaleOf(MarkSubject subject, AppraisedFigure figure, ILanguage language)
+    {
+        if (subject.IsStemAlone)
+            return new(subject.Value - 1, subject.Value + 1, 0, Width);
+        var longest = figure.Ranges.Max(range => Math.Max(NumberWidth(language, range.Printed.Low), NumberWidth(language, range.Printed.High)));
+        var inset = Math.Max(LeastInset, longest + (2 * LabelGap) + figure.Ranges.Max(range => LabelWidth.Of(ShareOf(range, language), LabelSize)));
+        return new(subject.Tail.Low, subject.Tail.High, inset, Width - inset);
+    }
+
+    private static double NumberWidth(ILanguage language, PublishedValue value) => LabelWidth.Of(language.Number(value), LabelSize);
+
+    // A narrow drawing has room for the number of cases alone: "95" for "95 in 100", which stands in the description.
+    private string ShareOf(FigureRange range, ILanguage language) => IsWide
+        ? language.Share(range.Coverage)
+        : language.Number(new(NaturalFrequency.Of(range.Coverage).Cases, 0));
+
+    private void AppendGuides(StringBuilder svg, AppraisedFigure figure, Scale scale)
+    {
+        if (figure.Main is not { } main)
+            return;
+        foreach (var end in new[] { main.Low, main.High })
+            svg.AppendPath("guide", $"M{SvgMark.Number(scale.At(end))} {SvgMark.Number(Size.Middle + 20)}V{SvgMark.Number(FirstLine + LineStep - 8)}");
+    }
+
+    private void AppendMeasure(StringBuilder svg, FigureRange range, Scale scale, ILanguage language, int index)
+    {
+        var y = FirstLine + (index * LineStep);
+        var (left, right) = (scale.At(range.Low), scale.At(range.High));
+        var (line, label) = index == 1 ? ("dim dim-main", "dimnum dimnum-main") : ("dim", "dimnum");
+        svg.AppendPath(line, $"M{SvgMark.Number(left)} {y}H{SvgMark.Number(right)}{Cap(left, y)}{Cap(right, y)}")
+            .AppendLabel(label, left - LabelGap, y + 5, language.Number(range.Printed.Low), atEnd: true)
+            .AppendLabel(label, right + LabelGap, y + 5, language.Number(range.Printed.High));
+        AppendWords(svg, range, language, index, y + 5);
+    }
+
+    private void AppendWords(StringBuilder svg, FigureRange range, ILanguage language, int index, double y)
+    {
+        var kind = index == 1 ? "dimlab dimnum-main" : "dimlab";
+        svg.AppendLabel(kind, 0, y, ShareOf(range, language));
+        if (IsWide)
+            svg.AppendLabel(kind, Width, y, language.Text("marks.margin", ("margin", language.Margin(range.Printed))), atEnd: true);
+    }
+
+    private static string Cap(double x, double y) => $"M{SvgMark.Number(x)} {SvgMark.Number(y - CapHalf)}V{SvgMark.Number(y + CapHalf)}";
+}
