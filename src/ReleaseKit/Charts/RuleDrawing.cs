@@ -105,9 +105,9 @@ internal sealed class RuleDrawing(MarkSubject subject, Scale scale, MarkSize siz
     // An arrow says that the mark goes on where the value can still lie; at a limit of the possible the mark just ends.
     private void AddArrows()
     {
-        if (subject.Body.Low < scale.From && subject.Lowest < scale.From)
+        if (subject.Tail.Low < scale.From && subject.Lowest < scale.From)
             AddArrow(scale.Start, -1);
-        if (subject.Body.High > scale.To && subject.Highest > scale.To)
+        if (subject.Tail.High > scale.To && subject.Highest > scale.To)
             AddArrow(scale.End, 1);
     }
 
