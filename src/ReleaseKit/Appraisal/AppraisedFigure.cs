@@ -18,8 +18,11 @@ public sealed record AppraisedFigure
     /// <summary>Stable id in its page: MEASURE.VALUE.VALUE of slugs.</summary>
     public required string Id { get; init; }
 
-    /// <summary>The exact published value; meaningless if HasNumber is false.</summary>
+    /// <summary>The exact published value in the figure's unit (after a multiplier; shares as the CSV has them); meaningless if HasNumber is false.</summary>
     public required PublishedValue Value { get; init; }
+
+    /// <summary>The value as it stands on pages: to the unit of its main margin, or to the measure's decimals where there is none. Shares in 100.</summary>
+    public required PublishedValue Printed { get; init; }
 
     /// <summary>SDMX CL_OBS_STATUS letter.</summary>
     public required char Status { get; init; }
@@ -38,6 +41,18 @@ public sealed record AppraisedFigure
     public required IReadOnlyList<FigureRange> Ranges { get; init; }
     public FigureRange? Main => Ranges.Count == 0 ? null : Ranges[1];
     public required Reliability Reliability { get; init; }
+
+    /// <summary>Main margin ÷ figure, rounded up at the 12th digit; null where there is no margin or the figure is not above 0 though it cannot be negative.</summary>
+    public double? MarginToFigure { get; init; }
+
+    /// <summary>What the value before noise can be, in the unit of Ranges.</summary>
+    public required PossibleValues Possible { get; init; }
+
+    /// <summary>The chance that noise leaves the value as it was, where that is the usual case (a margin of zero, raised to one grid step).</summary>
+    public double? LeftAsItWas { get; init; }
+
+    /// <summary>For a weak figure: the published figure of the next larger whole that is not weak, or null.</summary>
+    public FigureRef? UseInstead { get; init; }
 
     /// <summary>What is special about it: decides part 3 of the reading and the marks.</summary>
     public required FigureCase Case { get; init; }
@@ -62,7 +77,10 @@ public sealed record FigureRange
     public required PrintedRange Printed { get; init; }
 }
 
-/// <summary>The digits that stand on pages: the value and its margin(s) to one unit, the ends outward. Half-width and ends agree digit for digit.</summary>
+/// <summary>
+/// The digits that stand on pages, shares in 100: the value and its margin(s) to one unit, the ends outward. An end that is not cut is value ∓ margin,
+/// digit for digit; a cut one stands at what is possible, or further out where the half-width does not reach what is possible.
+/// </summary>
 public sealed record PrintedRange(PublishedValue Value, PublishedValue MarginDown, PublishedValue MarginUp, PublishedValue Low, PublishedValue High, bool LowIsCut, bool HighIsCut)
 {
     public bool IsUneven => MarginDown != MarginUp;
@@ -80,6 +98,7 @@ public enum SpecialCase
     Public,
     NoMargin,
     BelowZero,
+    AboveHighest,
     Zero,
     FromThreshold,
     NotPublishedBelow,
@@ -89,5 +108,8 @@ public enum SpecialCase
     MarginAsLargeAsFigure,
 }
 
-/// <summary>The first special case, and everything else that applies.</summary>
+/// <summary>
+/// The first special case, and everything else that applies: rounded on purpose, published as the bound of a floor or ceiling,
+/// amounts capped, near a threshold of publication.
+/// </summary>
 public sealed record FigureCase(SpecialCase First, bool Rounded, bool Floored, bool Capped, bool Threshold);

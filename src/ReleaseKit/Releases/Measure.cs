@@ -19,6 +19,9 @@ public sealed record Measure
     /// <summary>True if a share stands in the CSV as 0 to 1 ("in": "ones").</summary>
     public bool InOnes { get; init; }
 
+    /// <summary>Pages print shares of one in 100.</summary>
+    public int PrintFactor => InOnes ? 100 : 1;
+
     /// <summary>Factor from the CSV's number to the figure's unit; 1 unless the CSV counts in thousands.</summary>
     public double Multiplier { get; init; } = 1;
 

@@ -8,9 +8,15 @@ namespace ReleaseKit.Wording;
 public sealed class Language : ILanguage
 {
     private readonly WordingTexts texts;
-    private readonly Numerals numerals;
+    private readonly Voice voice;
+    private readonly ReadingWriter readings;
 
-    private Language(WordingTexts texts) => (this.texts, numerals) = (texts, new Numerals(texts));
+    private Language(WordingTexts texts)
+    {
+        this.texts = texts;
+        voice = new Voice(texts);
+        readings = new ReadingWriter(voice);
+    }
 
     public string Tag => texts.Tag;
 
@@ -18,24 +24,19 @@ public sealed class Language : ILanguage
     /// <exception cref="WordingException">No such language, or its files cannot be used.</exception>
     public static ILanguage Load(string siteTemplatesFolder, string tag) => new Language(WordingTexts.Load(siteTemplatesFolder, tag));
 
-    public Reading ReadingOf(AppraisedFigure figure) => throw new NotSupportedException();
+    public Reading ReadingOf(AppraisedFigure figure) => readings.Write(figure);
 
-    public string Number(PublishedValue value) => numerals.InTable(value);
+    public string Number(PublishedValue value) => voice.Numerals.InTable(value);
 
-    public string NumberInProse(PublishedValue value) => numerals.InProse(value);
+    public string NumberInProse(PublishedValue value) => voice.Numerals.InProse(value);
 
-    public string WithUnit(PublishedValue value, Unit unit) =>
-        $"{numerals.InProse(value)}{Numerals.NoBreak}{PluralCategory.Form(unit, Tag, value)}";
+    public string WithUnit(PublishedValue value, Unit unit) => voice.WithUnit(value, unit);
 
     public string Margin(PrintedRange range) => range.IsUneven
-        ? texts.Fill("margin.uneven", ("down", numerals.InTable(range.MarginDown)), ("up", numerals.InTable(range.MarginUp)))
-        : texts.Fill("margin.even", ("margin", numerals.InTable(range.Margin)));
+        ? texts.Fill("margin.uneven", ("down", voice.Numerals.InTable(range.MarginDown)), ("up", voice.Numerals.InTable(range.MarginUp)))
+        : texts.Fill("margin.even", ("margin", voice.Numerals.InTable(range.Margin)));
 
-    public string Share(Coverage coverage)
-    {
-        var (cases, of) = NaturalFrequency.Of(coverage);
-        return texts.Fill("coverage.share", ("cases", numerals.Whole(cases)), ("all", numerals.Whole(of)));
-    }
+    public string Share(Coverage coverage) => voice.Frequency("coverage.share", NaturalFrequency.Of(coverage));
 
     public string Text(string key, params (string Name, string Value)[] fill) => texts.Fill(key, fill);
 

@@ -1,0 +1,60 @@
+using System.Globalization;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>
+/// The unit u = 10^exponent to which the numbers of one figure are printed. All work is in decimal arithmetic on numbers rounded to 12 digits,
+/// so that the same digits come out on every machine.
+/// </summary>
+internal readonly record struct PrintUnit(int Exponent)
+{
+    private const int Digits = 12;
+
+    public static PrintUnit One { get; } = new(0);
+
+    /// <summary>The unit that leaves a margin two digits, but no finer than so many decimals.</summary>
+    public static PrintUnit OfTwoDigits(decimal margin, int? decimals)
+    {
+        var leading = LeadingPlace(margin);
+        return new(Math.Max(leading - 1, decimals is { } finest ? -finest : int.MinValue));
+    }
+
+    /// <summary>A number of the arithmetic as a decimal of 12 significant digits.</summary>
+    /// <exception cref="OverflowException">It is infinite or beyond what can be printed.</exception>
+    public static decimal Rounded(double number) =>
+        decimal.Parse(number.ToString($"E{Digits - 1}", CultureInfo.InvariantCulture), NumberStyles.Float, CultureInfo.InvariantCulture);
+
+    public decimal Nearest(decimal number) => decimal.Round(Steps(number), 0, MidpointRounding.AwayFromZero);
+
+    public decimal Down(decimal number) => decimal.Floor(Steps(number));
+
+    public decimal Up(decimal number) => decimal.Ceiling(Steps(number));
+
+    /// <summary>So many units as a number with the digits of the unit.</summary>
+    public PublishedValue Print(decimal steps) => Exponent >= 0
+        ? new((long)(steps * Power(Exponent)), 0)
+        : new((long)steps, (byte)-Exponent);
+
+    public decimal Value(decimal steps) => Exponent >= 0 ? steps * Power(Exponent) : steps / Power(-Exponent);
+
+    private decimal Steps(decimal number) => Exponent >= 0 ? number / Power(Exponent) : number * Power(-Exponent);
+
+    private static int LeadingPlace(decimal positive)
+    {
+        var place = 0;
+        for (; positive >= 10; positive /= 10)
+            place++;
+        for (; positive < 1; positive *= 10)
+            place--;
+        return place;
+    }
+
+    private static decimal Power(int exponent)
+    {
+        var power = 1m;
+        for (var step = 0; step < exponent; step++)
+            power *= 10;
+        return power;
+    }
+}

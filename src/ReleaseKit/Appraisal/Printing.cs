@@ -1,0 +1,50 @@
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>
+/// How the figures of one measure are printed: to whole numbers, or to the place that leaves the main margin two digits.
+/// Factor turns the figure's unit into the one that is printed (100 for shares that the files hold in ones).
+/// </summary>
+internal sealed record Printing(bool Whole, int? Decimals, decimal Factor, PossibleValues Possible)
+{
+    public static Printing Of(Measure measure, bool onWholeGrid) => new(
+        measure.Kind == MeasureKind.Count || onWholeGrid,
+        measure.Decimals,
+        measure.InOnes ? 100 : 1,
+        PossibleOf.Measure(measure));
+
+    public PrintUnit UnitFor(double mainMargin) =>
+        Whole ? PrintUnit.One : PrintUnit.OfTwoDigits(Scaled(mainMargin), Decimals);
+
+    /// <summary>Value and half-widths to one unit, the half-widths so large that nothing of the range is lost; ends outward, or at what is possible.</summary>
+    public PrintedRange Print(decimal value, double marginDown, double marginUp, ErrorRange range, PrintUnit unit)
+    {
+        var figure = value * Factor;
+        var printed = unit.Nearest(figure);
+        var shift = unit.Value(printed) - figure;
+        var down = unit.Up(Scaled(marginDown) + shift);
+        var up = unit.Up(Scaled(marginUp) - shift);
+        if (marginDown == marginUp)
+            down = up = Math.Max(down, up);
+        var (low, lowIsCut) = LowEnd(printed - down, range, unit);
+        var (high, highIsCut) = HighEnd(printed + up, range, unit);
+        return new(unit.Print(printed), unit.Print(Math.Max(down, 0)), unit.Print(Math.Max(up, 0)), unit.Print(low), unit.Print(high), lowIsCut, highIsCut);
+    }
+
+    /// <summary>The end of the half-width, but where the possible ends first, or where the range reaches further than the half-width.</summary>
+    private (decimal Steps, bool IsCut) LowEnd(decimal uncut, ErrorRange range, PrintUnit unit) =>
+        IsBelow(unit.Value(uncut), Possible.Lowest) || range.Low < range.UncutLow
+            ? (unit.Down(Scaled(range.Low)), true)
+            : (uncut, false);
+
+    private (decimal Steps, bool IsCut) HighEnd(decimal uncut, ErrorRange range, PrintUnit unit) =>
+        IsBelow(-unit.Value(uncut), -Possible.Highest) || range.High > range.UncutHigh
+            ? (unit.Up(Scaled(range.High)), true)
+            : (uncut, false);
+
+    private bool IsBelow(decimal end, double bound) => double.IsFinite(bound) && end < Scaled(bound);
+
+    private decimal Scaled(double number) => PrintUnit.Rounded(number) * Factor;
+}

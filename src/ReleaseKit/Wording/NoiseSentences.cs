@@ -1,0 +1,73 @@
+using ReleaseKit.Appraisal;
+
+namespace ReleaseKit.Wording;
+
+/// <summary>Part 2 of a reading: how far the noise reaches, then the range that follows from it.</summary>
+internal sealed class NoiseSentences(Voice voice)
+{
+    public IEnumerable<string> Of(AppraisedFigure figure) => figure.Main is { } main ? [.. Noise(figure, main), .. Range(figure, main)] : [];
+
+    private IEnumerable<string> Noise(AppraisedFigure figure, FigureRange main)
+    {
+        if (figure.Draws > 1)
+            yield return voice.Say("reading.noise.sum-of", ("draws", voice.Numerals.Whole(figure.Draws)));
+        yield return Reach(figure, main);
+        if (IsBeyondMargin(figure, main))
+            yield return Beyond(figure);
+    }
+
+    private string Reach(AppraisedFigure figure, FigureRange main)
+    {
+        var printed = main.Printed;
+        if (figure.Case.Threshold)
+            return voice.Say("reading.noise.threshold");
+        // A range that reaches further down than up comes from noise that reaches further up than down.
+        if (printed.IsUneven)
+            return voice.Say(
+                Together(figure, "reading.noise.uneven"),
+                ("upward", Number(printed.MarginDown)), ("downward", Number(printed.MarginUp)), ("cases", voice.Cases(main)));
+        var key = figure.Draws > 1 ? "reading.noise.sum" : Together(figure, "reading.noise");
+        return voice.Say(key, ("margin", Number(printed.Margin)), ("cases", voice.Cases(main)));
+    }
+
+    private IEnumerable<string> Range(AppraisedFigure figure, FigureRange main)
+    {
+        var (low, high) = (main.Printed.Low, main.Printed.High);
+        var key = IsBeyondMargin(figure, main) || figure.Case.Threshold ? "reading.range.alone" : "reading.range";
+        yield return low == high
+            ? voice.Say($"{key}.single", ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("cases", voice.SuchCases(main)))
+            : voice.Say(key, ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("high", Number(high)), ("cases", voice.SuchCases(main)));
+        if (figure.Case.First is not SpecialCase.BelowZero && !IsBeyondMargin(figure, main))
+            foreach (var cut in Cut(figure, main.Printed))
+                yield return cut;
+    }
+
+    /// <summary>The half-width does not even reach what is possible: here the noise was certainly larger.</summary>
+    private static bool IsBeyondMargin(AppraisedFigure figure, FigureRange main) =>
+        main.UncutHigh < figure.Possible.Lowest || main.UncutLow > figure.Possible.Highest;
+
+    private string Beyond(AppraisedFigure figure)
+    {
+        var isBelow = figure.Value.ToDouble() < figure.Possible.Lowest;
+        return voice.Say(
+            isBelow ? "reading.noise.more-below" : "reading.noise.more-above",
+            ("kind", voice.Kind(figure.Measure)),
+            ("bound", isBelow ? voice.Lowest(figure) : voice.Highest(figure)));
+    }
+
+    /// <summary>An end that was cut is said to be cut.</summary>
+    private IEnumerable<string> Cut(AppraisedFigure figure, PrintedRange printed)
+    {
+        var kind = ("kind", voice.Kind(figure.Measure));
+        if (printed is { LowIsCut: true, HighIsCut: true })
+            yield return voice.Say("reading.range.cut-both", kind, ("lowest", voice.Lowest(figure)), ("highest", voice.Highest(figure)));
+        else if (printed.LowIsCut)
+            yield return voice.Say("reading.range.cut-low", kind, ("bound", voice.Lowest(figure)));
+        else if (printed.HighIsCut)
+            yield return voice.Say("reading.range.cut-high", kind, ("bound", voice.Highest(figure)));
+    }
+
+    private static string Together(AppraisedFigure figure, string key) => figure.Case.Rounded ? $"{key}.rounded" : key;
+
+    private string Number(Releases.PublishedValue value) => voice.Numerals.InProse(value);
+}

@@ -1,0 +1,58 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Wording;
+
+/// <summary>Part 4 of a reading: one fixed word tied to margin ÷ figure, and what to do instead when it is weak.</summary>
+internal sealed class ReliabilitySentences(Voice voice)
+{
+    public IEnumerable<string> Of(AppraisedFigure figure) => figure.Reliability switch
+    {
+        Reliability.Close => [Graded(figure, "reading.close")],
+        Reliability.Rough => [Graded(figure, "reading.rough")],
+        Reliability.Weak => [Weak(figure), .. Advice(figure)],
+        _ => [],
+    };
+
+    private string Weak(AppraisedFigure figure) => figure.MarginToFigure switch
+    {
+        null => voice.Say("reading.weak.not-above-zero"),
+        >= 1 => voice.Say("reading.weak.as-large"),
+        _ => Graded(figure, "reading.weak"),
+    };
+
+    private string Graded(AppraisedFigure figure, string key)
+    {
+        var inHundred = InHundred(figure.MarginToFigure!.Value, out var isExact);
+        if (inHundred == 0)
+            return voice.Say($"{key}.tiny");
+        return voice.Say(isExact ? key : $"{key}.about", ("cases", voice.Numerals.Whole(inHundred)));
+    }
+
+    /// <summary>Margin in each 100 of the figure, rounded up; 0 stands for less than 1.</summary>
+    private static long InHundred(double share, out bool isExact)
+    {
+        var inHundred = PrintUnit.Rounded(share) * 100;
+        isExact = decimal.Floor(inHundred) == inHundred;
+        return inHundred < 1 ? 0 : (long)decimal.Ceiling(inHundred);
+    }
+
+    /// <summary>A published figure of a larger whole, else not to use it alone (said once).</summary>
+    private IEnumerable<string> Advice(AppraisedFigure figure)
+    {
+        if (figure.UseInstead is { } total)
+            yield return voice.Say(AdviceKey(figure.Measure), ("place", NameOf(figure.Table, total.Row)));
+        else if (figure.Case.First is not SpecialCase.MarginAsLargeAsFigure)
+            yield return voice.Say("reading.not-alone");
+    }
+
+    private static string AdviceKey(Measure measure) =>
+        measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount ? "reading.use-total" : "reading.use-figure";
+
+    /// <summary>The names of a row that are not "all", or the name of "all" where nothing else is left.</summary>
+    private string NameOf(Table table, int row)
+    {
+        var named = table.Stub.Where(column => !column.IsAll(row)).Select(column => column.LabelOf(row).In(voice.Tag)).ToList();
+        return string.Join(voice.Say("list.names"), named.Count > 0 ? named : [table.Stub[0].LabelOf(row).In(voice.Tag)]);
+    }
+}

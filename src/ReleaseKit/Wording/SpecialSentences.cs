@@ -1,0 +1,114 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Wording;
+
+/// <summary>Part 3 of a reading: the first special case that fits, then everything else that applies.</summary>
+internal sealed class SpecialSentences(Voice voice)
+{
+    public IEnumerable<string> Of(AppraisedFigure figure) => [.. First(figure), .. AlsoTrue(figure)];
+
+    private IEnumerable<string> First(AppraisedFigure figure) => figure.Case.First switch
+    {
+        SpecialCase.NoNumber => [voice.Say($"reading.status.{figure.Status}")],
+        SpecialCase.NotPublishedBelow => [voice.Say("reading.below-publication")],
+        SpecialCase.Exact => [voice.Say("reading.exact"), voice.Say("reading.exact.promise")],
+        SpecialCase.Public => [voice.Say("reading.public")],
+        SpecialCase.NoMargin => [voice.Say("reading.no-margin")],
+        SpecialCase.BelowZero => [Outside(figure, "below", voice.Lowest(figure)), ReadAs(figure)],
+        SpecialCase.AboveHighest => [Outside(figure, "above", voice.Highest(figure)), ReadAs(figure)],
+        SpecialCase.Zero => [voice.Say("reading.zero"), .. SetToZero(figure)],
+        SpecialCase.FromThreshold => [Threshold(figure)],
+        SpecialCase.FlooredSum => [voice.Say("reading.floored-sum")],
+        SpecialCase.MostlyUnchanged => [MostlyUnchanged(figure)],
+        SpecialCase.Capped => Capped(figure),
+        SpecialCase.MarginAsLargeAsFigure => [voice.Say("reading.margin-as-large")],
+        _ => [],
+    };
+
+    private IEnumerable<string> AlsoTrue(AppraisedFigure figure)
+    {
+        var (first, rounded, floored, capped, threshold) = figure.Case;
+        if (figure.Main is null)
+            return Marked(figure);
+        return
+        [
+            .. threshold && first is not (SpecialCase.FromThreshold or SpecialCase.Zero) ? [Threshold(figure)] : Nothing,
+            .. capped && first is not SpecialCase.Capped ? Capped(figure) : Nothing,
+            .. rounded ? Rounded(figure) : Nothing,
+            .. floored && first is not SpecialCase.Zero ? SetToBound(figure) : Nothing,
+            .. Marked(figure),
+        ];
+    }
+
+    private static IEnumerable<string> Nothing => [];
+
+    private string Outside(AppraisedFigure figure, string side, string bound) => bound == "0" && side == "below"
+        ? voice.Say("reading.below-zero")
+        : voice.Say($"reading.{side}-bound", ("kind", voice.Kind(figure.Measure)), ("bound", bound));
+
+    private string ReadAs(AppraisedFigure figure)
+    {
+        var key = figure.Case.First is SpecialCase.BelowZero && figure.Possible.Lowest == 0 ? "reading.read-as.small" : "reading.read-as";
+        var printed = figure.Main!.Printed;
+        return voice.Say(key, ("low", voice.Numerals.InProse(printed.Low)), ("high", voice.Numerals.InProse(printed.High)));
+    }
+
+    private string Threshold(AppraisedFigure figure) => voice.Say("reading.threshold", ("threshold", InPrint(figure, ThresholdOf(figure))));
+
+    private string MostlyUnchanged(AppraisedFigure figure) => voice.Say(
+        "reading.mostly-unchanged",
+        ("kind", voice.Kind(figure.Measure)),
+        ("cases", voice.Frequency("coverage.cases", NaturalFrequency.About(figure.LeftAsItWas!.Value))));
+
+    private IEnumerable<string> Capped(AppraisedFigure figure)
+    {
+        var clipped = figure.Mechanism!.Clipped!;
+        yield return voice.Say("reading.capped", ("highest", Amount(figure, clipped.To)), ("counted", InPrint(figure, clipped.To)));
+        if (clipped.From != 0)
+            yield return voice.Say("reading.capped.below", ("lowest", Amount(figure, clipped.From)), ("counted", InPrint(figure, clipped.From)));
+    }
+
+    /// <summary>What a published zero can stand for.</summary>
+    private IEnumerable<string> SetToZero(AppraisedFigure figure)
+    {
+        if (figure.Error is { } error && error.Steps.OfType<AfterStep.ZeroBelow>().FirstOrDefault() is { } zero)
+            yield return voice.Say("reading.set-to-bound.below", ("bound", InPrint(figure, zero.Threshold)), ("as", voice.Numerals.Whole(0)));
+        else if (figure.Case.Floored)
+            foreach (var sentence in SetToBound(figure))
+                yield return sentence;
+    }
+
+    private IEnumerable<string> SetToBound(AppraisedFigure figure)
+    {
+        var value = figure.Value.ToDouble();
+        if (figure.Error!.Steps.OfType<AfterStep.NotBelow>().Any(step => step.Bound == value))
+            yield return voice.Say("reading.set-to-bound.below", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
+        if (figure.Error.Steps.OfType<AfterStep.NotAbove>().Any(step => step.Bound == value))
+            yield return voice.Say("reading.set-to-bound.above", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
+    }
+
+    private IEnumerable<string> Rounded(AppraisedFigure figure) => figure.Mechanism!.Afterwards
+        .OfType<AfterStep.RoundTo>()
+        .Select(step => voice.Say("reading.rounded", ("unit", InPrint(figure, step.Unit))));
+
+    /// <summary>A number that the office marks (provisional, estimated …) says so.</summary>
+    private IEnumerable<string> Marked(AppraisedFigure figure)
+    {
+        if (figure.HasNumber && figure.Status != 'A')
+            yield return voice.Say("reading.marked", ("status", voice.Say($"status.{figure.Status}")));
+    }
+
+    private static double ThresholdOf(AppraisedFigure figure) => figure.Error!.Steps.Max(step => step switch
+    {
+        AfterStep.ZeroBelow zero => zero.Threshold,
+        AfterStep.PublishedFrom from => from.Threshold,
+        _ => double.NegativeInfinity,
+    });
+
+    private string Amount(AppraisedFigure figure, double number) =>
+        voice.WithUnit(PublishedValue.Shortest((decimal)(number * figure.Measure.PrintFactor)), figure.Measure.Unit);
+
+    private string InPrint(AppraisedFigure figure, double number) => voice.Numerals.Plain(number * figure.Measure.PrintFactor);
+}

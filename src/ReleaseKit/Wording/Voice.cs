@@ -1,0 +1,49 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Noise;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Wording;
+
+/// <summary>The pieces that sentences of one language are put together from.</summary>
+internal sealed class Voice(WordingTexts texts)
+{
+    /// <summary>Above its nominal value by more than this, a coverage is said to be "at least" so large.</summary>
+    private const double CoverageSlack = 1e-9;
+
+    public string Tag => texts.Tag;
+
+    public Numerals Numerals { get; } = new(texts);
+
+    public bool Has(string key) => texts.Has(key);
+
+    public string Say(string key, params ReadOnlySpan<(string Name, string Value)> fill) => texts.Fill(key, fill);
+
+    public string WithUnit(PublishedValue value, Unit unit)
+    {
+        var form = PluralCategory.Form(unit, Tag, value);
+        return form.Length == 0 ? Numerals.InProse(value) : $"{Numerals.InProse(value)}{Numerals.NoBreak}{form}";
+    }
+
+    /// <summary>"count", "amount", "share" … of "the count before noise".</summary>
+    public string Kind(Measure measure) => Say($"kind.{measure.Kind.ToString().ToLowerInvariant()}");
+
+    /// <summary>"95 of 100 cases", "at least 95 of 100 cases".</summary>
+    public string Cases(FigureRange range) => CasesAs("cases", range);
+
+    /// <summary>"95 of 100 such cases", "at least 95 of 100 such cases".</summary>
+    public string SuchCases(FigureRange range) => CasesAs("such-cases", range);
+
+    /// <summary>The least a value before noise can be, as printed.</summary>
+    public string Lowest(AppraisedFigure figure) => Numerals.Plain(figure.Possible.Lowest * figure.Measure.PrintFactor);
+
+    public string Highest(AppraisedFigure figure) => Numerals.Plain(figure.Possible.Highest * figure.Measure.PrintFactor);
+
+    public string Frequency(string key, NaturalFrequency frequency) =>
+        Say(key, ("cases", Numerals.Whole(frequency.Cases)), ("all", Numerals.Whole(frequency.All)));
+
+    private string CasesAs(string which, FigureRange range)
+    {
+        var more = range.Attained > range.Coverage.Share + CoverageSlack;
+        return Frequency(more ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));
+    }
+}
