@@ -2,16 +2,30 @@ using ReleaseKit.Releases;
 
 namespace ReleaseKit.Appraisal;
 
-/// <summary>The release with the error of every figure at hand. Figures are worked out when asked for, from error laws computed once per distinct law.</summary>
-public interface IAppraisedRelease
+/// <summary>A release appraised. Immutable to its readers; what it works out once it keeps; safe between threads.</summary>
+public sealed class AppraisedRelease : IAppraisedRelease
 {
-    Release Release { get; }
+    private readonly AppraisedFigures figures;
 
-    AppraisedFigure Figure(FigureRef at);
+    private AppraisedRelease(Release release) => (Release, figures) = (release, new AppraisedFigures(release));
 
-    /// <summary>The one figure an address (or short name) means.</summary>
-    AppraisedFigure FigureAt(string address);
+    public Release Release { get; }
 
-    /// <summary>All figures a selection means, in row order.</summary>
-    IReadOnlyList<FigureRef> Select(string address);
+    public static IAppraisedRelease Of(Release release) => new AppraisedRelease(release);
+
+    public AppraisedFigure Figure(FigureRef at) => figures.Of(at);
+
+    /// <exception cref="AddressException">The address matches nothing, or several figures.</exception>
+    public AppraisedFigure FigureAt(string address)
+    {
+        var found = FigureAddress.Of(Release, address).ResolveOne(Release);
+        return Figure(new(found.Table, found.Measure, found.Rows[0]));
+    }
+
+    /// <exception cref="AddressException">The address matches nothing.</exception>
+    public IReadOnlyList<FigureRef> Select(string address)
+    {
+        var found = FigureAddress.Of(Release, address).Resolve(Release);
+        return [.. found.Rows.Select(row => new FigureRef(found.Table, found.Measure, row))];
+    }
 }

@@ -16,4 +16,11 @@ internal static class ReliabilityRule
             return Reliability.Close;
         return width <= (decimal)thresholds.Rough * size ? Reliability.Rough : Reliability.Weak;
     }
+
+    /// <summary>Margin ÷ figure; null where the figure is not above 0 though it cannot be negative, or is 0.</summary>
+    public static double? Share(decimal figure, double margin, bool canBeNegative)
+    {
+        var size = canBeNegative ? Math.Abs(figure) : Math.Max(figure, 0);
+        return size == 0 ? null : (double)(PrintUnit.Rounded(margin) / size);
+    }
 }

@@ -24,6 +24,25 @@ public readonly record struct PublishedValue(long Unscaled, byte Decimals)
         return new((long)(number * PowerOfTenExactly(scale)), scale);
     }
 
+    public bool IsWhole => ToDecimal() == decimal.Floor(ToDecimal());
+
+    /// <summary>The number times a factor, exactly; digits after the point that the factor moved before it are gone: 12.4 × 1000 is 12400.</summary>
+    public PublishedValue Times(double factor)
+    {
+        if (factor == 1)
+            return this;
+        var product = Shortest(ToDecimal() * (decimal)factor);
+        var kept = Math.Max(0, Decimals - (int)Math.Floor(Math.Log10(factor)));
+        return product.Decimals >= kept ? product : product.RoundedTo(kept);
+    }
+
+    /// <summary>The number to so many decimals, ties away from zero; fewer than it has are filled up with zeros.</summary>
+    public PublishedValue RoundedTo(int decimals)
+    {
+        var rounded = decimal.Round(ToDecimal(), decimals, MidpointRounding.AwayFromZero);
+        return new((long)(rounded * PowerOfTenExactly(decimals)), (byte)decimals);
+    }
+
     /// <summary>The number in as few digits as it takes: 2.50 becomes 2.5.</summary>
     public static PublishedValue Shortest(decimal number) => Of(number / 1.0000000000000000000000000000m);
 

@@ -25,9 +25,9 @@ internal sealed class NoiseSentences(Voice voice)
         if (printed.IsUneven)
             return voice.Say(
                 Together(figure, "reading.noise.uneven"),
-                ("upward", Number(printed.MarginDown)), ("downward", Number(printed.MarginUp)), ("cases", voice.Cases(main)));
+                ("upward", Number(printed.MarginDown)), ("downward", Number(printed.MarginUp)), ("cases", voice.Cases(figure, main)));
         var key = figure.Draws > 1 ? "reading.noise.sum" : Together(figure, "reading.noise");
-        return voice.Say(key, ("margin", Number(printed.Margin)), ("cases", voice.Cases(main)));
+        return voice.Say(key, ("margin", Number(printed.Margin)), ("cases", voice.Cases(figure, main)));
     }
 
     private IEnumerable<string> Range(AppraisedFigure figure, FigureRange main)
@@ -35,8 +35,8 @@ internal sealed class NoiseSentences(Voice voice)
         var (low, high) = (main.Printed.Low, main.Printed.High);
         var key = IsBeyondMargin(figure, main) || figure.Case.Threshold ? "reading.range.alone" : "reading.range";
         yield return low == high
-            ? voice.Say($"{key}.single", ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("cases", voice.SuchCases(main)))
-            : voice.Say(key, ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("high", Number(high)), ("cases", voice.SuchCases(main)));
+            ? voice.Say($"{key}.single", ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("cases", voice.SuchCases(figure, main)))
+            : voice.Say(key, ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("high", Number(high)), ("cases", voice.SuchCases(figure, main)));
         if (figure.Case.First is not SpecialCase.BelowZero && !IsBeyondMargin(figure, main))
             foreach (var cut in Cut(figure, main.Printed))
                 yield return cut;

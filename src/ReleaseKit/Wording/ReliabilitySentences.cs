@@ -16,6 +16,7 @@ internal sealed class ReliabilitySentences(Voice voice)
 
     private string Weak(AppraisedFigure figure) => figure.MarginToFigure switch
     {
+        _ when IsSaidAlready(figure) => voice.Say("reading.weak.not-alone"),
         null => voice.Say("reading.weak.not-above-zero"),
         >= 1 => voice.Say("reading.weak.as-large"),
         _ => Graded(figure, "reading.weak"),
@@ -42,9 +43,12 @@ internal sealed class ReliabilitySentences(Voice voice)
     {
         if (figure.UseInstead is { } total)
             yield return voice.Say(AdviceKey(figure.Measure), ("place", NameOf(figure.Table, total.Row)));
-        else if (figure.Case.First is not SpecialCase.MarginAsLargeAsFigure)
+        else if (!IsSaidAlready(figure))
             yield return voice.Say("reading.not-alone");
     }
+
+    /// <summary>That the margin is as large as the figure.</summary>
+    private static bool IsSaidAlready(AppraisedFigure figure) => figure.Case.First is SpecialCase.MarginAsLargeAsFigure;
 
     private static string AdviceKey(Measure measure) =>
         measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount ? "reading.use-total" : "reading.use-figure";

@@ -1,5 +1,4 @@
 using ReleaseKit.Appraisal;
-using ReleaseKit.Noise;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Wording;
@@ -28,10 +27,10 @@ internal sealed class Voice(WordingTexts texts)
     public string Kind(Measure measure) => Say($"kind.{measure.Kind.ToString().ToLowerInvariant()}");
 
     /// <summary>"95 of 100 cases", "at least 95 of 100 cases".</summary>
-    public string Cases(FigureRange range) => CasesAs("cases", range);
+    public string Cases(AppraisedFigure figure, FigureRange range) => CasesAs("cases", figure, range);
 
     /// <summary>"95 of 100 such cases", "at least 95 of 100 such cases".</summary>
-    public string SuchCases(FigureRange range) => CasesAs("such-cases", range);
+    public string SuchCases(AppraisedFigure figure, FigureRange range) => CasesAs("such-cases", figure, range);
 
     /// <summary>The least a value before noise can be, as printed.</summary>
     public string Lowest(AppraisedFigure figure) => Numerals.Plain(figure.Possible.Lowest * figure.Measure.PrintFactor);
@@ -41,9 +40,9 @@ internal sealed class Voice(WordingTexts texts)
     public string Frequency(string key, NaturalFrequency frequency) =>
         Say(key, ("cases", Numerals.Whole(frequency.Cases)), ("all", Numerals.Whole(frequency.All)));
 
-    private string CasesAs(string which, FigureRange range)
+    private string CasesAs(string which, AppraisedFigure figure, FigureRange range)
     {
-        var more = range.Attained > range.Coverage.Share + CoverageSlack;
+        var more = range.Attained > range.Coverage.Share + CoverageSlack || figure.Error is { MarginIsUpperBound: true };
         return Frequency(more ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));
     }
 }

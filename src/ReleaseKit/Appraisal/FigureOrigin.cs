@@ -1,0 +1,10 @@
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>Where the error of one figure comes from.</summary>
+/// <param name="Rule">What says so: an exact or public rule, or one that leads to a mechanism.</param>
+/// <param name="Error">The error; null for exact and public figures, and where no valid error is known.</param>
+/// <param name="Mechanism">The mechanism of its draws, if they share one.</param>
+/// <param name="Draws">How many draws it holds.</param>
+internal sealed record FigureOrigin(NoiseRule Rule, DistinctError? Error, Mechanism? Mechanism, int Draws);

@@ -1,0 +1,95 @@
+using System.Collections.Concurrent;
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Noise.Laws;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>
+/// Finds the error of each figure: one object for each distinct law and after-steps, made when first needed. Safe between threads.
+/// </summary>
+internal sealed class FigureOrigins(Release release)
+{
+    private readonly DeclaredLaws laws = new();
+    private readonly ConcurrentDictionary<ErrorKey, DistinctError> errors = new();
+    private readonly ConcurrentDictionary<DrawKey, FigureOrigin> draws = new();
+    private readonly ConcurrentDictionary<FigureRef, FigureOrigin> sums = new();
+    private readonly ConcurrentDictionary<int, SumParts> parts = new();
+
+    public FigureOrigin Of(FigureRef at)
+    {
+        var table = release.Tables[at.Table];
+        var measure = table.Measures[at.Measure];
+        return measure.RuleAt(at.Row) switch
+        {
+            NoiseRule.FromMechanism from => OfDraw(from, table, measure, at),
+            NoiseRule.SumOver => sums.GetOrAdd(at, OfSum),
+            var rule => new FigureOrigin(rule, null, null, 0),
+        };
+    }
+
+    private FigureOrigin OfDraw(NoiseRule.FromMechanism from, Table table, Measure measure, FigureRef at)
+    {
+        if (from.Mechanism.Adjusted || laws.TryLawOf(from.Mechanism, table, at.Row) is not { } law)
+            return new FigureOrigin(from, null, from.Mechanism, 1);
+        var decimals = law is ContinuousLaw ? measure.DecimalsOf[at.Row] : (byte)0;
+        return draws.GetOrAdd(new(at.Table, at.Measure, measure.RuleOf[at.Row], law, decimals), key =>
+            new FigureOrigin(from, Shared(law, Steps(from.Mechanism, measure, key.Decimals, law)), from.Mechanism, 1));
+    }
+
+    /// <summary>The steps of the mechanism, the threshold of publication, and for a continuous law the rounding to the CSV's own decimals.</summary>
+    private static List<AfterStep> Steps(Mechanism mechanism, Measure measure, byte decimals, NoiseLaw law)
+    {
+        List<AfterStep> steps = [.. mechanism.Afterwards];
+        if (law is ContinuousLaw && !steps.OfType<AfterStep.RoundTo>().Any(step => IsMultiple(step.Unit, decimals, measure.Multiplier)))
+            steps.Add(new AfterStep.RoundTo(measure.Multiplier / PublishedValue.PowerOfTen(decimals)));
+        if (measure.PublishedFrom is { } from)
+            steps.Add(new AfterStep.PublishedFrom(from));
+        return steps;
+    }
+
+    /// <summary>A value rounded to such a unit is written in so many decimals without loss.</summary>
+    private static bool IsMultiple(double unit, byte decimals, double multiplier)
+    {
+        var last = (decimal)unit / (decimal)multiplier * (decimal)PublishedValue.PowerOfTen(decimals);
+        return decimal.Floor(last) == last;
+    }
+
+    private DistinctError Shared(NoiseLaw law, IReadOnlyList<AfterStep> steps) =>
+        errors.GetOrAdd(new ErrorKey(law, string.Join(';', steps)), _ => new DistinctError(FigureError.Of(law, steps), release.Coverages));
+
+    /// <summary>
+    /// The exact law of the sum of the draws below. Parts with after-steps or continuous noise have no such law here: no valid error is known then.
+    /// </summary>
+    private FigureOrigin OfSum(FigureRef at)
+    {
+        var table = release.Tables[at.Table];
+        var (draws, withoutNoise) = parts.GetOrAdd(at.Table, index => new SumParts(release.Tables[index])).Below(table.Measures[at.Measure], at.Row);
+        if (draws.Count == 0)
+            return new FigureOrigin(SumWithoutNoise(withoutNoise) ?? table.Measures[at.Measure].RuleAt(at.Row), null, null, 0);
+        var mechanisms = draws.Select(draw => draw.Mechanism).Distinct().ToList();
+        var error = LawOfSum(table, draws) is { } law ? Shared(law, []) : null;
+        return new FigureOrigin(table.Measures[at.Measure].RuleAt(at.Row), error, mechanisms.Count == 1 ? mechanisms[0] : null, draws.Count);
+    }
+
+    /// <summary>A sum of figures without noise is exact if one of them is.</summary>
+    private static NoiseRule? SumWithoutNoise(IReadOnlyList<NoiseRule> rules) =>
+        rules.OfType<NoiseRule.Exact>().FirstOrDefault() ?? (rules.Count > 0 ? rules[0] : null);
+
+    private NoiseLaw? LawOfSum(Table table, IReadOnlyList<BaseDraw> draws)
+    {
+        var counted = new Dictionary<LatticeLaw, int>();
+        foreach (var (mechanism, row) in draws)
+        {
+            if (mechanism.Afterwards.Count > 0 || mechanism.Adjusted || laws.TryLawOf(mechanism, table, row) is not LatticeLaw law)
+                return null;
+            counted[law] = counted.GetValueOrDefault(law) + 1;
+        }
+        return null;
+    }
+
+    private readonly record struct ErrorKey(NoiseLaw Law, string Steps);
+
+    /// <summary>Figures that share an origin: one rule of one measure, one law, written with so many decimals.</summary>
+    private readonly record struct DrawKey(int Table, int Measure, byte Rule, NoiseLaw Law, byte Decimals);
+}

@@ -1,0 +1,78 @@
+using System.Collections.Concurrent;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>One draw of noise below a sum: its mechanism, and the row it was drawn for.</summary>
+internal readonly record struct BaseDraw(Mechanism Mechanism, int Row);
+
+/// <summary>
+/// The draws that a published sum of a table rests on. Over a stub column a row of "all" has as parts the values without a parent among the others;
+/// a value that others name as their parent has those. Sums of sums go down to the draws.
+/// </summary>
+internal sealed class SumParts(Table table)
+{
+    private static readonly IReadOnlyList<int> None = [];
+    private readonly RowKeys keys = new(table);
+    private readonly ConcurrentDictionary<int, IReadOnlyDictionary<UInt128, List<int>>> byWhole = new();
+
+    /// <summary>All draws below a row, and the rules of its parts without noise.</summary>
+    public (IReadOnlyList<BaseDraw> Draws, IReadOnlyList<NoiseRule> WithoutNoise) Below(Measure measure, int row)
+    {
+        var draws = new List<BaseDraw>();
+        var withoutNoise = new List<NoiseRule>();
+        Add(measure, row, draws, withoutNoise);
+        return (draws, withoutNoise);
+    }
+
+    private void Add(Measure measure, int row, List<BaseDraw> draws, List<NoiseRule> withoutNoise)
+    {
+        switch (measure.RuleAt(row))
+        {
+            case NoiseRule.FromMechanism from:
+                draws.Add(new(from.Mechanism, row));
+                break;
+            case NoiseRule.SumOver sum:
+                foreach (var part in PartsOf(row, sum.StubColumn))
+                    if (IsIn(measure, part))
+                        Add(measure, part, draws, withoutNoise);
+                break;
+            case var rule:
+                withoutNoise.Add(rule);
+                break;
+        }
+    }
+
+    /// <summary>A part without a number is in the sum only if it is hidden and the table says that its totals hold hidden parts.</summary>
+    private bool IsIn(Measure measure, int part) =>
+        measure.HasNumber(part) || (measure.StatusAt(part) == 'Q' && table.Hidden is { InTotals: true });
+
+    private IReadOnlyList<int> PartsOf(int row, int column) =>
+        byWhole.GetOrAdd(column, Group).TryGetValue(keys.Of(row), out var parts) ? parts : None;
+
+    /// <summary>Every row but those of wholes without a parent, under the key of the row it is a part of.</summary>
+    private Dictionary<UInt128, List<int>> Group(int column)
+    {
+        var parents = ParentCodes(table.Stub[column]);
+        var groups = new Dictionary<UInt128, List<int>>();
+        for (var row = 0; row < table.RowCount; row++)
+            if (parents[table.Stub[column].Codes[row]] is >= 0 and var whole)
+                Add(groups, keys.With(keys.Of(row), row, column, whole), row);
+        return groups;
+    }
+
+    private static void Add(Dictionary<UInt128, List<int>> groups, UInt128 whole, int row)
+    {
+        if (!groups.TryGetValue(whole, out var parts))
+            groups[whole] = parts = [];
+        parts.Add(row);
+    }
+
+    /// <summary>For each label the code of its parent in the same column: the one it names, else "all", else −1.</summary>
+    private static int[] ParentCodes(StubColumn column)
+    {
+        var codes = column.Labels.Select((label, code) => (label.Value, code)).ToDictionary(pair => pair.Value, pair => pair.code);
+        return [.. column.Labels.Select((label, code) =>
+            label.Parent is { } parent && codes.TryGetValue(parent, out var named) ? named : code == column.AllCode ? -1 : column.AllCode)];
+    }
+}
