@@ -14,12 +14,16 @@ public sealed class FigureError
 {
     private readonly StepChain chain;
     private readonly RoundedError? rounded;
+    private readonly ThresholdRange? threshold;
+    private readonly LikelihoodRatioRange? likelihood;
     private readonly ConcurrentDictionary<Coverage, HalfWidth> margins = new();
 
     private FigureError(NoiseLaw law, StepChain chain)
     {
         (Law, this.chain) = (law, chain);
         rounded = chain.ExactRounding is { } rounding ? new RoundedError((LatticeLaw)law, rounding) : null;
+        threshold = DependsOnPublished ? new ThresholdRange(law, chain) : null;
+        likelihood = law.IsLogConcave ? new LikelihoodRatioRange(law) : null;
     }
 
     /// <summary>The law of the noise.</summary>
@@ -38,7 +42,12 @@ public sealed class FigureError
     public bool MarginIsUpperBound => chain.Shift > 0;
 
     /// <summary>The error of a figure with this noise and these steps.</summary>
-    /// <exception cref="ArgumentException">A bound is no multiple of the rounding unit before it, or a step has a value that makes no sense.</exception>
+    /// <param name="law">The law of the noise.</param>
+    /// <param name="steps">The steps in order; none for the noise alone.</param>
+    /// <exception cref="ArgumentException">
+    /// A step has a value that makes no sense; a bound stands before a rounding and is no multiple of its unit; or a threshold stands with steps or a
+    /// law for which its range is not worked out. The message lists every fault.
+    /// </exception>
     public static FigureError Of(NoiseLaw law, params IReadOnlyList<AfterStep> steps) => new(law, StepChain.Of(law, steps));
 
     /// <summary>
@@ -53,19 +62,77 @@ public sealed class FigureError
         ? Law.Within(width - chain.Shift)
         : rounded.AttainedAt(Lattice.ToStep(Lattice.Floor(width / chain.Unit)));
 
-    /// <summary>The range of values before noise at a coverage for one published value.</summary>
+    /// <summary>
+    /// The range of values before noise at a coverage for one published value, cut to the possible values and never empty.
+    /// </summary>
+    /// <remarks>
+    /// Without thresholds: y ± margin; for a y outside what is possible the far end is the larger one of that and of the likelihood-ratio range
+    /// (Feldman &amp; Cousins 1998). With a threshold: the law given that it was passed, inverted; so among the figures that passed it the range
+    /// holds the value before noise at the coverage, whatever that value is. A 0 under <see cref="AfterStep.ZeroBelow"/> is answered by
+    /// <see cref="RangeWhenNotPublished"/>.
+    /// </remarks>
+    /// <param name="published">In the unit of the figure.</param>
+    /// <param name="coverage">The coverage.</param>
+    /// <param name="possible">What the value before noise can be.</param>
     public ErrorRange RangeAt(double published, Coverage coverage, PossibleValues possible)
     {
-        if (DependsOnPublished)
-            throw new NotSupportedException("Ranges under a threshold follow with the next change.");
-        var margin = MarginAt(coverage);
-        var (low, high) = (published - margin.Width, published + margin.Width);
-        return possible.Cut(low, high, margin.Attained);
+        if (threshold is null)
+            return PlainRange(published, coverage, possible);
+        if (published == 0 && Steps.Any(step => step is AfterStep.ZeroBelow))
+            return RangeWhenNotPublished(coverage, possible);
+        var (low, high) = threshold.At(published, coverage);
+        return possible.Cut(low, Math.Max(high, BeyondLowest(published, coverage, possible)), coverage.Share);
+    }
+
+    /// <summary>
+    /// The range of a cell that failed the threshold: every possible value up to the largest one that fails it with a chance above (1 − c)/2.
+    /// A value above the range goes unpublished in at most (1 − c)/2 of the cases; that chance is what <c>Attained</c> leaves to 1.
+    /// </summary>
+    /// <exception cref="InvalidOperationException">The steps hold no threshold.</exception>
+    public ErrorRange RangeWhenNotPublished(Coverage coverage, PossibleValues possible) => threshold is null
+        ? throw new InvalidOperationException("No step of this figure keeps small values from being published.")
+        : possible.Cut(double.NegativeInfinity, threshold.HighestBelow(coverage), 1 - coverage.Rest / 2);
+
+    /// <summary>
+    /// Whether the noise and the steps can lead to a published value from some possible value before noise: false for a value off the grid,
+    /// off the rounding unit, past a bound, under a threshold, or farther from the possible values than the noise reaches.
+    /// </summary>
+    /// <param name="published">In the unit of the figure.</param>
+    /// <param name="possible">What the value before noise can be.</param>
+    public bool CanPublish(double published, PossibleValues possible)
+    {
+        var (from, beyond) = (chain.Reaching(published) * chain.Unit, chain.Exceeding(published) * chain.Unit);
+        return chain.IsOnSpacing(published) && from < beyond
+            && Law.AtLeast(from - chain.Blur - possible.Highest) > 0 && Law.AtMost(beyond - chain.HalfStep - possible.Lowest) > 0;
     }
 
     /// <summary>The density or pmf of the noise at an offset from 0 ÷ its peak, in [0, 1]: the thickness of the error bar.</summary>
     /// <param name="offset">In the unit of the figure.</param>
     public double RelativeDensity(double offset) => Law.RelativeDensity(offset);
+
+    private ErrorRange PlainRange(double published, Coverage coverage, PossibleValues possible)
+    {
+        var margin = MarginAt(coverage);
+        var low = Math.Min(published - margin.Width, BelowHighest(published, coverage, possible));
+        var high = Math.Max(published + margin.Width, BeyondLowest(published, coverage, possible));
+        return possible.Cut(low, high, margin.Attained);
+    }
+
+    // The upper end that a value below the lowest possible one needs at least: above that bound, so that a range of one value is never shown.
+    private double BeyondLowest(double published, Coverage coverage, PossibleValues possible) => published >= possible.Lowest
+        ? double.NegativeInfinity
+        : possible.Lowest + LikelyReach(published - possible.Lowest + chain.Lift, coverage);
+
+    private double BelowHighest(double published, Coverage coverage, PossibleValues possible) => published <= possible.Highest
+        ? double.PositiveInfinity
+        : possible.Highest - LikelyReach(possible.Highest - published + chain.Fall, coverage);
+
+    // How far from a bound at 0 the likelihood-ratio range reaches for a value on its wrong side; the plain margin where that is not worked out.
+    private double LikelyReach(double value, Coverage coverage)
+    {
+        var reach = likelihood?.UpperEnd(value, 0, coverage) ?? double.NaN;
+        return double.IsNaN(reach) ? MarginAt(coverage).Width : Math.Max(reach, Law is LatticeLaw ? chain.Unit : 0);
+    }
 
     private HalfWidth WorkOutMargin(Coverage coverage)
     {

@@ -1,0 +1,72 @@
+using ReleaseKit.Noise.Laws;
+
+namespace ReleaseKit.Noise.Errors;
+
+/// <summary>
+/// Ranges where small values are published as 0 or not at all: the law of the published value given that it passed the threshold, inverted.
+/// </summary>
+/// <remarks>
+/// A value before noise x belongs to the range of y if P(Y ≥ y | passed; x) and P(Y ≤ y | passed; x) are both above β = (1 − c)/2. Each tail
+/// misses with at most β, so among the figures that passed the range holds x in at least c of the cases, for every x. For log-concave noise both
+/// chances move one way as x moves, so that the set is an interval (Lehmann &amp; Romano 2005, Testing Statistical Hypotheses, 3.4: monotone
+/// likelihood ratio, kept by conditioning on a half-line; numbering from memory).
+/// </remarks>
+internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
+{
+    // The slack goes to the side of the wider range.
+    private const double Slack = 1e-9;
+
+    private readonly LatticeLaw? lattice = law as LatticeLaw;
+    private readonly double passing = chain.Passing();
+    private readonly double stride = law is LatticeLaw ? 1 : Math.Sqrt(law.Variance);
+
+    /// <summary>The ends for a value that passed the threshold, in the figure's unit; the upper one is never below the published value.</summary>
+    public (double Low, double High) At(double published, Coverage coverage)
+    {
+        var tail = coverage.Rest / 2 * (1 - Slack);
+        var (reaching, exceeding) = (Math.Max(passing, chain.Reaching(published)), chain.Exceeding(published));
+        var low = Search.Farthest(reaching, -stride, lattice is not null, x => IsNotTooHigh(reaching, x, tail));
+        var start = lattice is null ? published : Lattice.Floor(published / chain.Unit);
+        reaching = double.IsFinite(reaching) ? reaching : start;
+        var high = IsNotTooLow(exceeding, start, tail)
+            ? Search.Farthest(start, stride, lattice is not null, x => IsNotTooLow(exceeding, x, tail))
+            : start;
+        return (low * chain.Unit, high * chain.Unit);
+    }
+
+    /// <summary>The largest value before noise, in the figure's unit, that fails the threshold with a chance above (1 − c)/2.</summary>
+    public double HighestBelow(Coverage coverage)
+    {
+        var tail = coverage.Rest / 2 * (1 - Slack);
+        var start = passing - (chain.ExactRounding?.Unit ?? 1) * stride;
+        return Search.Farthest(start, stride, lattice is not null, x => ChanceBelow(passing - x) > tail) * chain.Unit;
+    }
+
+    private bool IsNotTooHigh(double reaching, double x, double tail)
+    {
+        var passed = ChanceFrom(passing - x);
+        return passed > 0 && ChanceFrom(reaching - x) > tail * passed;
+    }
+
+    private bool IsNotTooLow(double exceeding, double x, double tail) =>
+        ChanceFrom(passing - x) is var passed && passed > 0 && passed - ChanceFrom(exceeding - x) > tail * passed;
+
+    // P(N ≥ place); under random rounding the noise carries a uniform 0..r − 1 as well.
+    private double ChanceFrom(double place) => lattice is null
+        ? law.AtLeast(place)
+        : Mean(shift => lattice.AtLeastStep(Lattice.ToStep(place - shift)));
+
+    private double ChanceBelow(double place) => lattice is null
+        ? law.AtMost(place)
+        : Mean(shift => lattice.AtMostStep(Lattice.ToStep(place - shift - 1)));
+
+    private double Mean(Func<long, double> chance)
+    {
+        if (chain.ExactRounding is not { How: RoundingHow.AtRandom } random)
+            return chance(0);
+        var sum = 0.0;
+        for (var shift = 0L; shift < random.Unit; shift++)
+            sum += chance(shift);
+        return sum / random.Unit;
+    }
+}
