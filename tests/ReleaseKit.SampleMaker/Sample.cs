@@ -3,26 +3,28 @@ using ReleaseKit.SampleMaker.Tables;
 
 namespace ReleaseKit.SampleMaker;
 
-/// <summary>The sample release, made anew: invents the households once, and noises their tables as often as asked.</summary>
+/// <summary>The sample release, made anew: the households are invented and asked once, their tables noised as often as wished.</summary>
 public sealed class Sample
 {
     /// <summary>Seeds of the published sample. An office never writes its seed anywhere; these households are invented.</summary>
     public const ulong HouseholdsSeed = 2031;
     public const ulong PublishedSeed = 20320316;
-    private readonly IReadOnlyList<Household> households = Census.Invent(HouseholdsSeed);
+    private readonly ISampleQuery[] queries;
+
+    public Sample()
+    {
+        var households = Census.Invent(HouseholdsSeed);
+        queries =
+        [
+            new ArrearsTable(households), new OwedTable(households), new TenureTable(households),
+            new QuarterTable(households), new WeeksTable(households), new HelpTable(households),
+        ];
+    }
 
     public IReadOnlyList<SampleTable> Noised(ulong seed = PublishedSeed)
     {
         var noise = new Noiser(seed);
-        return
-        [
-            ArrearsTable.Of(households, noise),
-            OwedTable.Of(households, noise),
-            TenureTable.Of(households, noise),
-            QuarterTable.Of(households, noise),
-            WeeksTable.Of(households, noise),
-            HelpTable.Of(households, noise),
-        ];
+        return [.. queries.Select(query => query.Noised(noise))];
     }
 
     /// <summary>Writes the noised tables into FOLDER/tables, and nothing else.</summary>

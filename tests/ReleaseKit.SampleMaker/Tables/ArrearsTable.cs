@@ -2,87 +2,64 @@ using ReleaseKit.SampleMaker.Population;
 
 namespace ReleaseKit.SampleMaker.Tables;
 
-/// <summary>Districts and wards. Accounts and, for Norrvale, households without heating are sums of noised parts; arrears have noise of their own at each level.</summary>
-public sealed class ArrearsTable
+/// <summary>
+/// Districts and wards. Accounts and, for Norrvale, households without heating are sums of noised parts; arrears have noise of their own at each level.
+/// </summary>
+public sealed class ArrearsTable(IReadOnlyList<Household> households) : ISampleQuery
 {
     private const int FewestListed = 30;
-    private readonly Measure accounts;
-    private readonly Measure arrears;
-    private readonly Measure cold;
+    private readonly WardCounts accounts = WardCounts.Of(households);
+    private readonly WardCounts arrears = WardCounts.Of(households.Where(household => household.Behind));
+    private readonly WardCounts cold = WardCounts.Of(households.Where(household => household.WentCold));
 
-    private ArrearsTable(IReadOnlyList<Household> households, Noiser noise)
+    public SampleTable Noised(Noiser noise) => new(
+        "arrears",
+        "arrears-by-ward.csv",
+        ["district", "ward"],
+        ["accounts_2030", "accounts", "in_arrears", "went_cold"],
+        [.. Rows(Accounts(noise), Arrears(noise), Cold(noise))]);
+
+    private NoisedWards Accounts(Noiser noise)
     {
-        accounts = new Measure(households, _ => true);
-        accounts.Wards = noise.DiscreteLaplace("ward-accounts", 4, accounts.WardsBefore);
-        accounts.Districts = accounts.SumOfWards();
-        accounts.Total = accounts.Districts.Sum();
-        arrears = new Measure(households, household => household.Behind);
-        arrears.Wards = [.. noise.DiscreteGaussian("ward-arrears", 7, arrears.WardsBefore).Select(count => Math.Max(0, Rounding.ToNearest(count, 5)))];
-        arrears.Districts = noise.DiscreteGaussian("district-arrears", 6, arrears.DistrictsBefore);
-        arrears.Total = noise.DiscreteGaussian("total-arrears", 4, [arrears.TotalBefore])[0];
-        cold = new Measure(households, household => household.WentCold);
-        cold.Wards = noise.DiscreteLaplace("ward-cold", 5, cold.WardsBefore);
-        cold.Districts = noise.DiscreteGaussian("district-cold", 8, cold.DistrictsBefore);
-        cold.Total = cold.Districts.Sum();
+        var sums = new WardCounts(noise.DiscreteLaplace("ward-accounts", 4, accounts.Wards));
+        return new NoisedWards(accounts, sums.Wards, sums.Districts, sums.Total);
     }
 
-    public static SampleTable Of(IReadOnlyList<Household> households, Noiser noise)
+    private NoisedWards Arrears(Noiser noise)
     {
-        var table = new ArrearsTable(households, noise);
-        return new SampleTable("arrears", "arrears-by-ward.csv", ["district", "ward"], ["accounts_2030", "accounts", "in_arrears", "went_cold"], [.. table.Rows()]);
+        var wards = noise.DiscreteGaussian("ward-arrears", 7, arrears.Wards).Select(count => Math.Max(0, Rounding.ToNearest(count, 5)));
+        var districts = noise.DiscreteGaussian("district-arrears", 6, arrears.Districts);
+        return new NoisedWards(arrears, [.. wards], districts, noise.DiscreteGaussian("total-arrears", 4, [arrears.Total])[0]);
     }
 
-    private IEnumerable<SampleRow> Rows()
+    private NoisedWards Cold(Noiser noise)
     {
-        yield return Row("All", "All", Norrvale.ListedIn2030, measure => measure.TotalCell);
+        var districts = noise.DiscreteGaussian("district-cold", 8, cold.Districts);
+        return new NoisedWards(cold, noise.DiscreteLaplace("ward-cold", 5, cold.Wards), districts, districts.Sum());
+    }
+
+    private static IEnumerable<SampleRow> Rows(params NoisedWards[] measures)
+    {
+        yield return Row("All", "All", Norrvale.ListedIn2030, measures.Select(measure => measure.TotalCell));
         var ward = 0;
         for (var d = 0; d < Norrvale.Districts.Count; d++)
         {
-            var (district, at) = (Norrvale.Districts[d], d);
-            yield return Row(district.Name, "All", district.ListedIn2030, measure => measure.DistrictCell(at));
+            var district = Norrvale.Districts[d];
+            yield return Row(district.Name, "All", district.ListedIn2030, measures.Select(measure => measure.DistrictCell(d)));
             foreach (var place in district.Wards)
             {
-                var index = ward++;
-                yield return Row(district.Name, place.Name, place.ListedIn2030, measure => measure.WardCell(index));
+                yield return Row(district.Name, place.Name, place.ListedIn2030, measures.Select(measure => measure.WardCell(ward)));
+                ward++;
             }
         }
     }
 
     // The list of 2030 is public, so the rule that hides small wards tells nothing about the records.
-    private SampleRow Row(string district, string ward, int listed, Func<Measure, SampleCell> cell)
+    private static SampleRow Row(string district, string ward, int listed, IEnumerable<SampleCell> cells)
     {
-        SampleCell Shown(Measure measure) => listed < FewestListed ? SampleCell.Mark("[c]") : cell(measure);
-        return new SampleRow([district, ward], [SampleCell.Public(listed), cell(accounts), Shown(arrears), Shown(cold)]);
-    }
-
-    private sealed class Measure
-    {
-        private static readonly (int District, int Ward)[] Places =
-            [.. Norrvale.Districts.SelectMany((district, d) => district.Wards.Select((_, w) => (d, w)))];
-
-        public Measure(IReadOnlyList<Household> households, Func<Household, bool> counted)
-        {
-            var counts = households.Where(counted).CountBy(household => (household.District, household.Ward)).ToDictionary();
-            WardsBefore = [.. Places.Select(place => (long)counts.GetValueOrDefault(place))];
-            DistrictsBefore = ByDistrict(WardsBefore);
-        }
-
-        public long[] WardsBefore { get; }
-        public long[] DistrictsBefore { get; }
-        public long TotalBefore => DistrictsBefore.Sum();
-        public long[] Wards { get; set; } = [];
-        public long[] Districts { get; set; } = [];
-        public long Total { get; set; }
-
-        public SampleCell TotalCell => SampleCell.Count(Total, TotalBefore);
-
-        public long[] SumOfWards() => ByDistrict(Wards);
-
-        public SampleCell DistrictCell(int district) => SampleCell.Count(Districts[district], DistrictsBefore[district]);
-
-        public SampleCell WardCell(int ward) => SampleCell.Count(Wards[ward], WardsBefore[ward]);
-
-        private static long[] ByDistrict(long[] wards) =>
-            [.. Norrvale.Districts.Select((_, d) => wards.Where((_, ward) => Places[ward].District == d).Sum())];
+        var (accounts, others) = (cells.First(), cells.Skip(1));
+        return new SampleRow(
+            [district, ward],
+            [SampleCell.Public(listed), accounts, .. others.Select(cell => listed < FewestListed ? SampleCell.Mark("[c]") : cell)]);
     }
 }

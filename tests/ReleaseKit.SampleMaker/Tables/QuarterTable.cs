@@ -3,63 +3,62 @@ using ReleaseKit.SampleMaker.Population;
 namespace ReleaseKit.SampleMaker.Tables;
 
 /// <summary>Quarter by district: households cut off (totals are sums of the districts) and the mean energy used an account of the public list.</summary>
-public static class QuarterTable
+public sealed class QuarterTable(IReadOnlyList<Household> households) : ISampleQuery
 {
     private const int Fine = 3;
+    private const int StepsPerKilowattHour = 1000;
 
     // Floods stopped the meter returns of Fennick in the first quarter: it has no mean then, and Norrvale's mean leaves it out.
-    private static readonly (int Quarter, int District) NotCollected = (0, 5);
-    private static readonly (int Quarter, int District)[] Cells =
-        [.. from quarter in Enumerable.Range(0, Answers.Quarters.Count) from district in Enumerable.Range(0, Norrvale.Districts.Count) select (quarter, district)];
+    private static readonly QuarterCell NotCollected = new(0, 5);
+    private static readonly QuarterCell[] Wholes = [.. Enumerable.Range(0, Answers.Quarters.Count).Select(quarter => new QuarterCell(quarter, null))];
 
-    public static SampleTable Of(IReadOnlyList<Household> households, Noiser noise)
+    private static readonly QuarterCell[] Parts =
+        [.. Wholes.SelectMany(whole => Enumerable.Range(0, Norrvale.Districts.Count).Select(district => whole with { District = district }))];
+
+    private readonly long[] cutOff =
+        [.. Parts.Select(cell => (long)households.Count(household => cell.Covers(household) && household.CutOff[cell.Quarter]))];
+
+    private readonly long[] use = [.. Parts.Select(cell => MeanUse(cell, households))];
+    private readonly long[] useInAll = [.. Wholes.Select(cell => MeanUse(cell, households))];
+
+    public SampleTable Noised(Noiser noise)
     {
-        var cutOff = CutOff(households, noise);
-        var use = Use(households, noise);
-        var rows = from quarter in Enumerable.Range(0, Answers.Quarters.Count)
-                   from district in Enumerable.Range(-1, Norrvale.Districts.Count + 1)
-                   let name = district < 0 ? "All" : Norrvale.Districts[district].Name
-                   let collected = (quarter, district) != NotCollected
-                   select new SampleRow(
-                       [Answers.Quarters[quarter], name],
-                       [
-                           cutOff[(quarter, district)], SampleCell.Mark("A"),
-                           collected ? use[(quarter, district)] : SampleCell.Mark(""), SampleCell.Mark(collected ? "A" : "L"),
-                           SampleCell.Public(district < 0 ? Listed(quarter) : Norrvale.Districts[district].ListedIn2030),
-                       ]);
+        var cutOffNoised = noise.DiscreteGaussian("quarter-cut-off", 8, cutOff);
+        var useNoised = noise.DiscreteGaussian("quarter-use", 6 * StepsPerKilowattHour, use);
+        var useInAllNoised = noise.DiscreteGaussian("quarter-use-norrvale", StepsPerKilowattHour, useInAll);
+        var means = Cells(Parts, useNoised, use).Concat(Cells(Wholes, useInAllNoised, useInAll)).ToDictionary();
+        means[NotCollected] = SampleCell.Mark("");
+        var rows = Wholes.SelectMany(whole => Parts.Where(part => part.Quarter == whole.Quarter).Prepend(whole)).Select(cell => new SampleRow(
+            cell.Keys,
+            [
+                SampleCell.Count(Sum(cutOffNoised, cell), Sum(cutOff, cell)), SampleCell.Mark("A"),
+                means[cell], SampleCell.Mark(cell == NotCollected ? "L" : "A"), SampleCell.Public(Listed(cell)),
+            ]));
         return new SampleTable(
             "quarters", "by-quarter.csv", ["quarter", "district"], ["cut_off", "cut_off_status", "mean_use", "mean_use_status", "accounts_2030"], [.. rows]);
     }
 
-    private static Dictionary<(int Quarter, int District), SampleCell> CutOff(IReadOnlyList<Household> households, Noiser noise)
-    {
-        long[] before = [.. Cells.Select(cell => (long)households.Count(household => household.District == cell.District && household.CutOff[cell.Quarter]))];
-        var after = noise.DiscreteGaussian("quarter-cut-off", 8, before);
-        var cells = Cells.Select((cell, i) => (cell, SampleCell.Count(after[i], before[i]))).ToDictionary();
-        foreach (var quarter in Enumerable.Range(0, Answers.Quarters.Count))
-            cells[(quarter, -1)] = SampleCell.Count(Sum(after, quarter), Sum(before, quarter));
-        return cells;
+    private static IEnumerable<(QuarterCell Cell, SampleCell Mean)> Cells(QuarterCell[] cells, long[] noised, long[] before) =>
+        cells.Select((cell, i) => (cell, SampleCell.Steps(noised[i], before[i], Fine, 1)));
 
-        long Sum(long[] of, int quarter) => of.Where((_, i) => Cells[i].Quarter == quarter).Sum();
+    private static long Sum(long[] parts, QuarterCell whole) =>
+        parts.Where((_, i) => Parts[i].Quarter == whole.Quarter && (whole.District ?? Parts[i].District) == Parts[i].District).Sum();
+
+    private static int Listed(QuarterCell cell) =>
+        Norrvale.Districts.Where((_, d) => (cell.District ?? d) == d && (cell.District == d || new QuarterCell(cell.Quarter, d) != NotCollected))
+            .Sum(district => district.ListedIn2030);
+
+    private static long MeanUse(QuarterCell cell, IEnumerable<Household> households)
+    {
+        var counted = households.Where(household => cell.Covers(household) && new QuarterCell(cell.Quarter, household.District) != NotCollected);
+        return Rounding.Ratio(counted.Sum(household => (long)household.Use[cell.Quarter]), StepsPerKilowattHour, Listed(cell));
     }
 
-    private static Dictionary<(int Quarter, int District), SampleCell> Use(IReadOnlyList<Household> households, Noiser noise)
+    /// <summary>A cell of the table; no district stands for all.</summary>
+    private readonly record struct QuarterCell(int Quarter, int? District)
     {
-        long[] before = [.. Cells.Select(cell => Mean(
-            households.Where(household => household.District == cell.District), cell.Quarter, Norrvale.Districts[cell.District].ListedIn2030))];
-        var after = noise.DiscreteGaussian("quarter-use", 6000, before);
-        long[] wholeBefore = [.. Answers.Quarters.Select((_, quarter) => Mean(
-            households.Where(household => (quarter, household.District) != NotCollected), quarter, Listed(quarter)))];
-        var whole = noise.DiscreteGaussian("quarter-use-norrvale", 1000, wholeBefore);
-        var cells = Cells.Select((cell, i) => (cell, SampleCell.Steps(after[i], before[i], Fine, 1))).ToDictionary();
-        foreach (var quarter in Enumerable.Range(0, Answers.Quarters.Count))
-            cells[(quarter, -1)] = SampleCell.Steps(whole[quarter], wholeBefore[quarter], Fine, 1);
-        return cells;
+        public string[] Keys => [Answers.Quarters[Quarter], District is { } district ? Norrvale.Districts[district].Name : "All"];
+
+        public bool Covers(Household household) => (District ?? household.District) == household.District;
     }
-
-    private static int Listed(int quarter) =>
-        Norrvale.Districts.Where((_, d) => (quarter, d) != NotCollected).Sum(district => district.ListedIn2030);
-
-    private static long Mean(IEnumerable<Household> households, int quarter, int listed) =>
-        Rounding.Ratio(households.Sum(household => (long)household.Use[quarter]), 1000, listed);
 }
