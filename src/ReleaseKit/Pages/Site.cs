@@ -1,4 +1,9 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Pages.Downloads;
+using ReleaseKit.Pages.Home;
+using ReleaseKit.Pages.Methods;
+using ReleaseKit.Pages.Prose;
+using ReleaseKit.Pages.Reading;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages;
@@ -17,9 +22,16 @@ public static class Site
         IAppraisedRelease appraised, ILanguage language, BudgetStatement budget, string siteTemplatesFolder, SiteFolder target, IProgress<long>? progress)
     {
         var context = ContextOf(appraised, language, budget, siteTemplatesFolder, target);
+        HomePage.Write(context, target, Chart);
+        ProsePages.Write(context, target, Chart);
+        ReadingPage.Write(context, target);
+        MethodsPage.Write(context, target);
+        DownloadsPage.Write(context, target);
         NotFoundPage.Write(context, target);
         progress?.Report(0);
     }
+
+    private static string Chart(string id) => "";
 
     private static SiteContext ContextOf(
         IAppraisedRelease appraised, ILanguage language, BudgetStatement budget, string siteTemplatesFolder, SiteFolder target)

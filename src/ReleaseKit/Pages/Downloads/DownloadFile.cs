@@ -1,0 +1,45 @@
+using System.Text.RegularExpressions;
+
+namespace ReleaseKit.Pages.Downloads;
+
+/// <summary>A file to download.</summary>
+/// <param name="Path">Path in the site.</param>
+/// <param name="Table">Index of the table it holds; null for a file of the whole release.</param>
+/// <param name="Kind">Last part of the key that says what it is for.</param>
+internal sealed partial record DownloadFile(string Path, int? Table, string Kind)
+{
+    public static DownloadFile Of(SiteContext context, string path)
+    {
+        var name = System.IO.Path.GetFileName(path);
+        var tables = context.Release.Tables;
+        // The table with the longest id that fits: "arrears-2" is not "arrears" at a coverage of 2.
+        var table = Enumerable.Range(0, tables.Count).Where(index => KindOf(name, tables[index].Id) is not null)
+            .OrderByDescending(index => tables[index].Id.Length).Cast<int?>().FirstOrDefault();
+        return new DownloadFile(path, table, table is { } found ? KindOf(name, tables[found].Id)! : KindOfRelease(name));
+    }
+
+    private static string? KindOf(string name, string table) => !name.StartsWith(table, StringComparison.Ordinal) ? null : name[table.Length..] switch
+    {
+        ".csv" => "wide",
+        "-long.csv" => "long",
+        ".jsonl" => "lines",
+        ".csv-metadata.json" => "columns",
+        "-long.csv-metadata.json" => "columns",
+        var rest when OtherCoverage().IsMatch(rest) => "coverage",
+        _ => null,
+    };
+
+    private static string KindOfRelease(string name) => name switch
+    {
+        "budget.json" => "budget",
+        "derived.csv" => "derived",
+        "checksums.txt" => "checksums",
+        "release.zip" => "whole",
+        _ when name.EndsWith(".svg", StringComparison.Ordinal) => "picture-drawn",
+        _ when name.EndsWith(".png", StringComparison.Ordinal) => "picture",
+        _ => "other",
+    };
+
+    [GeneratedRegex(@"^-[0-9.]+\.csv$")]
+    private static partial Regex OtherCoverage();
+}

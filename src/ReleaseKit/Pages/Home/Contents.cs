@@ -1,0 +1,47 @@
+using System.Globalization;
+using ReleaseKit.Appraisal;
+using Scriban.Runtime;
+
+namespace ReleaseKit.Pages.Home;
+
+/// <summary>The contents list: each table, its measures with their margins, its rows, and what it spent.</summary>
+internal static class Contents
+{
+    public static ScriptObject Of(SiteContext context)
+    {
+        var losses = TableLosses.Of(context.Budget);
+        var decimals = LossNumber.DecimalsFor(context.Budget.Spent);
+        string Loss(double amount) => context.Language.Number(LossNumber.Up(amount, decimals));
+        return new ScriptObject
+        {
+            ["tables"] = new ScriptArray(context.Release.Tables.Select((_, index) => Row(context, index, Loss(losses.Of(index))))),
+            ["shared"] = losses.Shared > 0 ? Loss(losses.Shared) : null,
+            ["total"] = Loss(context.Budget.Spent),
+            ["currency"] = context.Language.Text(context.Budget.Currency == LossCurrency.Rho ? "home.loss.rho" : "home.loss.epsilon"),
+        };
+    }
+
+    private static ScriptObject Row(SiteContext context, int index, string loss)
+    {
+        var table = context.Release.Tables[index];
+        var shown = Enumerable.Range(0, table.Measures.Count).Where(measure => table.Measures[measure].Shown);
+        return new ScriptObject
+        {
+            ["number"] = (index + 1).ToString(CultureInfo.InvariantCulture),
+            ["title"] = context.In(table.Title),
+            ["href"] = context.Pages.FirstPageOf(index),
+            ["rows"] = context.Language.Text("home.rows", ("by", ByStub(context, table)), ("rows", Count(context, table.RowCount))),
+            ["loss"] = loss,
+            ["measures"] = new ScriptArray(shown.Select(measure => new ScriptObject
+            {
+                ["title"] = context.In(table.Measures[measure].Title),
+                ["margins"] = MeasureMargins.Of(context.Appraised, index, measure).InWords(context.Language),
+            })),
+        };
+    }
+
+    private static string ByStub(SiteContext context, Releases.Table table) =>
+        context.Language.List([.. table.Stub.Select(column => context.In(column.Title))]);
+
+    private static string Count(SiteContext context, int rows) => context.Language.Number(new Releases.PublishedValue(rows, 0));
+}

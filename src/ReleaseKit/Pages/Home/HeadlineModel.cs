@@ -1,0 +1,38 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Charts;
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+using Scriban.Runtime;
+
+namespace ReleaseKit.Pages.Home;
+
+/// <summary>A headline as the home page's template sees it.</summary>
+internal static class HeadlineModel
+{
+    public static ScriptObject Of(SiteContext context, Headline headline, bool isLeading)
+    {
+        var language = context.Language;
+        var figure = context.Appraised.FigureAt(headline.Address);
+        return new ScriptObject
+        {
+            ["title"] = headline.Title is { } title ? context.In(title) : FigureName.Of(figure, language),
+            ["meaning"] = headline.Meaning is { } meaning ? context.In(meaning) : null,
+            ["href"] = Link.From(PageMap.Home, context.Pages.Of(figure.Ref)),
+            ["number"] = new RawHtml(figure.HasNumber ? FigureHtml.Number(figure, language) : HtmlText.Encode(FigureHtml.Status(figure, language))),
+            ["unit"] = figure.HasNumber ? PluralCategory.Form(figure.Measure.Unit, language.Tag, ValueOf(figure)) : "",
+            ["margin"] = figure.HasNumber ? FigureHtml.Margin(figure, language) : "",
+            ["lozenge"] = new RawHtml(FigureHtml.Lozenge(figure, language)),
+            ["mark"] = new RawHtml(!figure.HasNumber ? "" : isLeading ? Marks.Hero(figure, language) : Marks.Line(figure, language)),
+            ["sentences"] = Sentences(language.ReadingOf(figure), figure),
+        };
+    }
+
+    private static PublishedValue ValueOf(AppraisedFigure figure) => figure.Main?.Printed.Value ?? figure.Value;
+
+    /// <summary>The value stands in large digits beside; where there is nothing else to say, its sentence says it.</summary>
+    private static string Sentences(Reading reading, AppraisedFigure figure)
+    {
+        var rest = reading.Sentences.Where(sentence => sentence.Part != ReadingPart.Value).Select(sentence => sentence.Text).ToList();
+        return rest.Count > 0 && figure.HasNumber ? string.Join(' ', rest) : reading.Text;
+    }
+}
