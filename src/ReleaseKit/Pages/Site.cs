@@ -3,7 +3,7 @@ using ReleaseKit.Pages.Downloads;
 using ReleaseKit.Pages.Home;
 using ReleaseKit.Pages.Methods;
 using ReleaseKit.Pages.Prose;
-using ReleaseKit.Pages.Reading;
+using ReleaseKit.Pages.HowToRead;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages;

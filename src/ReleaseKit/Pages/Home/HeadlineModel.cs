@@ -30,7 +30,7 @@ internal static class HeadlineModel
     private static PublishedValue ValueOf(AppraisedFigure figure) => figure.Main?.Printed.Value ?? figure.Value;
 
     /// <summary>The value stands in large digits beside; where there is nothing else to say, its sentence says it.</summary>
-    private static string Sentences(Reading reading, AppraisedFigure figure)
+    private static string Sentences(Wording.Reading reading, AppraisedFigure figure)
     {
         var rest = reading.Sentences.Where(sentence => sentence.Part != ReadingPart.Value).Select(sentence => sentence.Text).ToList();
         return rest.Count > 0 && figure.HasNumber ? string.Join(' ', rest) : reading.Text;

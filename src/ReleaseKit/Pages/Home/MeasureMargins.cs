@@ -5,7 +5,6 @@ using ReleaseKit.Wording;
 namespace ReleaseKit.Pages.Home;
 
 /// <summary>The smallest and largest main margin of a measure, over all its rows, as printed; null where no figure has one.</summary>
-/// <param name="Without">The word for figures without a margin, where none has one.</param>
 internal sealed record MeasureMargins(PublishedValue? Smallest, PublishedValue? Largest, Reliability Without, Unit Unit)
 {
     public static MeasureMargins Of(IAppraisedRelease appraised, int table, int measure)

@@ -1,4 +1,3 @@
-using ReleaseKit.Appraisal;
 using ReleaseKit.Wording;
 using Scriban.Runtime;
 

@@ -1,6 +1,5 @@
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
-using ReleaseKit.Wording;
 using Scriban.Runtime;
 
 namespace ReleaseKit.Pages.Methods;

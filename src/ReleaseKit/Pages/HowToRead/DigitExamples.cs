@@ -4,7 +4,7 @@ using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 using Scriban.Runtime;
 
-namespace ReleaseKit.Pages.Reading;
+namespace ReleaseKit.Pages.HowToRead;
 
 /// <summary>Figures of the release that show where light digits begin: one for each place of the margin, one that is light throughout, one below zero.</summary>
 internal static class DigitExamples

@@ -1,10 +1,9 @@
-using ReleaseKit.Appraisal;
 using ReleaseKit.Charts;
 using ReleaseKit.Noise;
 using ReleaseKit.Wording;
 using Scriban.Runtime;
 
-namespace ReleaseKit.Pages.Reading;
+namespace ReleaseKit.Pages.HowToRead;
 
 /// <summary>How to read a figure, with figures of the release as examples.</summary>
 internal static class ReadingPage

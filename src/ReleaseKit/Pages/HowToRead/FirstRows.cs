@@ -1,6 +1,6 @@
 using ReleaseKit.Appraisal;
 
-namespace ReleaseKit.Pages.Reading;
+namespace ReleaseKit.Pages.HowToRead;
 
 /// <summary>The shown figures of the first rows of each table: enough to find examples, whatever the size of a release.</summary>
 internal static class FirstRows
