@@ -52,6 +52,8 @@ public abstract record LatticeLaw : NoiseLaw
     /// <inheritdoc/>
     public override HalfWidth HalfWidthAt(Coverage coverage)
     {
+        if (!coverage.IsReachedBy(WithinSteps(Lattice.Farthest)))
+            throw new ArgumentOutOfRangeException(nameof(coverage), coverage, "The law lacks so much mass that no half-width reaches the coverage.");
         var steps = SmallestStep(candidate => coverage.IsReachedBy(WithinSteps(candidate)));
         return new HalfWidth(steps * Grid, WithinSteps(steps));
     }

@@ -74,11 +74,6 @@ public sealed record TabulatedLaw : LatticeLaw
     public override double WithinSteps(long steps) => (double)Through(distances, within, steps);
 
     /// <inheritdoc/>
-    public override HalfWidth HalfWidthAt(Coverage coverage) => coverage.IsReachedBy((double)total)
-        ? base.HalfWidthAt(coverage)
-        : throw new ArgumentOutOfRangeException(nameof(coverage), coverage, $"The table holds {total} of the law: no half-width reaches the coverage.");
-
-    /// <inheritdoc/>
     public override double RelativeDensity(double offset) => Probability(Lattice.ToStep(Math.Round(offset / Grid))) / Peak;
 
     /// <summary>Same grid, same steps, same chances.</summary>
