@@ -1,0 +1,30 @@
+using System.Globalization;
+using ReleaseKit.Noise;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Downloads;
+
+/// <summary>The files of SITE/downloads, by their paths in the site.</summary>
+public static class DownloadNames
+{
+    public const string Folder = "downloads/";
+    public const string Budget = Folder + "budget.json";
+    public const string Checksums = Folder + "checksums.txt";
+
+    /// <summary>One row a row of the table: each measure with margin, range, reliability, status and reading at the main coverage.</summary>
+    public static string Wide(Table table) => $"{Folder}{table.Id}.csv";
+
+    /// <summary>The same at another coverage, without readings: "downloads/arrears-99.csv".</summary>
+    public static string WideAt(Table table, Coverage coverage) => $"{Folder}{table.Id}-{Percent(coverage)}.csv";
+
+    /// <summary>One row a figure.</summary>
+    public static string Long(Table table) => $"{Folder}{table.Id}-long.csv";
+
+    /// <summary>One JSON object a figure, with its noise law and draws.</summary>
+    public static string JsonLines(Table table) => $"{Folder}{table.Id}.jsonl";
+
+    /// <summary>The steps and chances of a tabulated law.</summary>
+    public static string Law(Mechanism mechanism) => $"{Folder}law-{Slug.Of(mechanism.Id)}.csv";
+
+    private static string Percent(Coverage coverage) => ((decimal)coverage.Share * 100).ToString("0.######", CultureInfo.InvariantCulture);
+}
