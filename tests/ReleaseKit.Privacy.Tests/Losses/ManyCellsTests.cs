@@ -1,0 +1,170 @@
+using CsCheck;
+using ReleaseKit.Noise.Laws;
+using ReleaseKit.Privacy.Losses;
+using static ReleaseKit.Privacy.Losses.NeighbourRelation;
+
+namespace ReleaseKit.Privacy.Tests.Losses;
+
+public sealed class ManyCellsTests
+{
+    /// <summary>Δ₁ and Δ₂ of the design's table, read off from Laplace noise of scale 1 (ε = Δ₁) and Gaussian noise of σ 1 (2ρ = Δ₂²).</summary>
+    [Theory]
+    [InlineData(AddOrRemove, 3, 2.0, false, null, true, 10, 6, 12)]
+    [InlineData(AddOrRemove, 3, 2.0, false, 5.0, true, 10, 5, 9)]
+    [InlineData(AddOrRemove, 3, 2.0, true, null, true, 10, 6, 12)]
+    [InlineData(Replace, 3, 2.0, false, null, true, 10, 12, 24)]
+    [InlineData(Replace, 3, 2.0, false, null, true, 4, 8, 16)]
+    [InlineData(Replace, 3, 2.0, true, null, true, 10, 12, 48)]
+    [InlineData(Replace, 3, 2.0, false, null, false, 10, 6, 12)]
+    [InlineData(AddOrRemove, 3, 2.0, false, null, true, 2, 4, 8)]
+    [InlineData(Replace, 1, 1.0, false, null, true, 50, 2, 2)]
+    public void Contribution_gives_the_sensitivities_of_the_table(
+        NeighbourRelation relation, int cellsPerUnit, double perCell, bool signed, double? perUnit, bool moves, int cells, double l1, double l2Squared)
+    {
+        var unit = new UnitContribution.PerCell(cellsPerUnit, perCell, signed, perUnit, moves);
+        var laplace = MechanismLoss.Of([new NoisedCells(LaplaceLaw.Of(1), cells)], unit, relation);
+        var gaussian = MechanismLoss.Of([new NoisedCells(GaussianLaw.Of(1), cells)], unit, relation);
+        Assert.Equal(l1, laplace.Pure.Upper.Value, 1e-12);
+        Assert.Equal(l1, laplace.Pure.Lower.Value, 1e-12);
+        Assert.Equal(l2Squared / 2, gaussian.Concentrated.Upper.Value, 1e-12);
+        Assert.Equal(l2Squared / 2, gaussian.Concentrated.Lower.Value, 1e-12);
+    }
+
+    /// <summary>A unit that stays in its two cells can still shift its whole sum from one to the other.</summary>
+    [Fact]
+    public void Bound_on_a_units_sum_counts_twice_where_its_answer_changes_within_its_cells()
+    {
+        var unit = new UnitContribution.PerCell(2, 1, PerUnit: 1, Moves: false);
+        Assert.Equal(2, MechanismLoss.Of([new NoisedCells(LaplaceLaw.Of(1), 10)], unit, Replace).Pure.Upper.Value, 1e-12);
+    }
+
+    [Fact]
+    public void Bound_on_a_sum_of_signed_contributions_lowers_no_upper_bound()
+    {
+        var unit = new UnitContribution.PerCell(2, 1, Signed: true, PerUnit: 1);
+        var loss = MechanismLoss.Of([new NoisedCells(LaplaceLaw.Of(1), 10)], unit, AddOrRemove);
+        Assert.Equal(2, loss.Pure.Upper.Value, 1e-12);
+        Assert.Equal(1, loss.Pure.Lower.Value, 1e-12);
+    }
+
+    /// <summary>rho 0.005540167 of the design's example: one cell a household, one a cell, sigma 9.5.</summary>
+    [Fact]
+    public void Discrete_Gaussian_of_the_example_costs_what_the_design_says() =>
+        ReferenceRow.Near(0.00554016620498615, Count(DiscreteGaussianLaw.Of(9.5), 18).Concentrated.Upper.Value, "rho");
+
+    [Fact]
+    public void Varying_scales_are_charged_from_the_smallest()
+    {
+        NoisedCells[] cells = [new(LaplaceLaw.Of(4), 5), new(LaplaceLaw.Of(1), 1), new(LaplaceLaw.Of(2), 1)];
+        var loss = MechanismLoss.Of(cells, new UnitContribution.PerCell(3, 1), AddOrRemove);
+        Assert.Equal(1 + 0.5 + 0.25, loss.Pure.Upper.Value, 1e-12);
+        Assert.Equal(1, loss.Pure.Lower.Value, 1e-12);
+    }
+
+    [Fact]
+    public void Sum_over_cells_of_varying_scales_is_bounded_by_the_smallest_and_proven_by_the_largest()
+    {
+        NoisedCells[] cells = [new(LaplaceLaw.Of(1.5), 1), new(LaplaceLaw.Of(2.5), 1)];
+        var loss = MechanismLoss.Of(cells, new UnitContribution.AbsoluteSum(0.14), AddOrRemove);
+        Assert.Equal(0.14 / 1.5, loss.Pure.Upper.Value, 1e-12);
+        Assert.Equal(0.14 / 2.5, loss.Pure.Lower.Value, 1e-12);
+    }
+
+    [Fact]
+    public void Norms_convert_as_the_design_says()
+    {
+        var laplace = MechanismLoss.Of([new NoisedCells(LaplaceLaw.Of(2), 9)], new UnitContribution.Euclidean(1), AddOrRemove);
+        Assert.Equal(3.0 / 2, laplace.Pure.Upper.Value, 1e-12);
+        var gaussian = MechanismLoss.Of([new NoisedCells(GaussianLaw.Of(2), 9)], new UnitContribution.AbsoluteSum(1), AddOrRemove);
+        Assert.Equal(1.0 / 8, gaussian.Concentrated.Upper.Value, 1e-12);
+        var lattice = MechanismLoss.Of([new NoisedCells(DiscreteLaplaceLaw.Of(2), 100)], new UnitContribution.Euclidean(3), AddOrRemove);
+        Assert.Equal(9 * 0.5, lattice.Pure.Upper.Value, 1e-12);
+        Assert.Equal(9 * 0.5 * Math.Tanh(0.25), lattice.Concentrated.Upper.Value, 1e-12);
+    }
+
+    [Fact]
+    public void Gaussian_curve_of_many_cells_is_that_of_their_distance()
+    {
+        var many = MechanismLoss.Of([new NoisedCells(GaussianLaw.Of(3), 8)], new UnitContribution.PerCell(4, 1), AddOrRemove);
+        var exact = new ReleaseKit.Privacy.Composition.GaussianCurve(2.0 / 3);
+        ReferenceRow.Near(exact.DeltaAt(Epsilon.Of(1)).Value, many.DeltaAt(Epsilon.Of(1)).Upper.Value, "delta");
+        ReferenceRow.Near(exact.EpsilonAt(Delta.Of(1e-6)).Value, many.EpsilonAt(Delta.Of(1e-6)).Upper.Value, "epsilon");
+    }
+
+    [Fact]
+    public void Uniform_noise_on_two_cells_shows_the_shift_if_either_does() =>
+        Assert.Equal(1 - (0.9 * 0.9), MechanismLoss.Of([new NoisedCells(UniformLaw.Of(5), 8)], new UnitContribution.PerCell(2, 1), AddOrRemove).DeltaAt(Epsilon.Of(3)).Upper.Value, 1e-12);
+
+    [Theory]
+    [InlineData(AddOrRemove, 1)]
+    [InlineData(AddOrRemove, 2)]
+    [InlineData(Replace, 1)]
+    [InlineData(Replace, 2)]
+    public void No_pair_of_neighbours_on_two_cells_loses_more_than_the_upper_bound_nor_all_less_than_the_lower(NeighbourRelation relation, int cellsPerUnit)
+    {
+        foreach (LatticeLaw law in new LatticeLaw[] { DiscreteLaplaceLaw.Of(1.5), DiscreteGaussianLaw.Of(2), TruncatedDiscreteLaplaceLaw.Of(2, 6), DiscreteUniformLaw.Of(4) })
+        {
+            var loss = MechanismLoss.Of([new NoisedCells(law, 2)], new UnitContribution.PerCell(cellsPerUnit, 2), relation);
+            var pairs = Pairs(relation, cellsPerUnit, most: 2).Select(pair => Enumerated.OfTwo(law, pair.First, pair.Second)).ToList();
+            foreach (var epsilon in new[] { 0.1, 0.5, 1.2 })
+            {
+                var bounds = loss.DeltaAt(Epsilon.Of(epsilon));
+                var exact = pairs.Max(pair => pair.Delta(epsilon));
+                Assert.InRange(exact, bounds.Lower.Value - 1e-12, bounds.Upper.Value + 1e-12);
+            }
+
+            if (law is DiscreteLaplaceLaw)
+                ReferenceRow.Near(pairs.Max(pair => pair.LargestLogRatio()), loss.Pure.Upper.Value, law.ToString());
+        }
+    }
+
+    [Fact]
+    public void Adding_cells_or_contribution_never_lowers_a_loss() =>
+        Gen.Select(Gen.Int[1, 6], Gen.Double[0.5, 5], Gen.Double[0.3, 20], Gen.Bool, Gen.Int[1, 9]).Sample((cells, most, scale, replace, all) =>
+        {
+            var relation = replace ? Replace : AddOrRemove;
+            foreach (NoiseLaw law in new NoiseLaw[] { LaplaceLaw.Of(scale), DiscreteLaplaceLaw.Of(scale), GaussianLaw.Of(scale), StaircaseLaw.Of(1, scale, 0.4) })
+            {
+                MechanismLoss At(int perUnit, double perCell, int count) =>
+                    MechanismLoss.Of([new NoisedCells(law, count)], new UnitContribution.PerCell(perUnit, perCell), relation);
+                var one = At(cells, most, all);
+                foreach (var more in new[] { At(cells + 1, most, all), At(cells, most * 1.5, all), At(cells, most, all + 1) })
+                {
+                    Assert.True(one.Concentrated.Upper.Value <= more.Concentrated.Upper.Value * (1 + 1e-12));
+                    Assert.True(one.Pure.Upper.Value <= more.Pure.Upper.Value * (1 + 1e-12));
+                }
+            }
+        }, iter: 300, seed: "0000KOJ4fUr2");
+
+    [Fact]
+    public void Lower_bounds_never_exceed_upper_ones_nor_does_replacing_cost_less_than_adding() =>
+        Gen.Select(Gen.Int[1, 5], Gen.Double[0.5, 4], Gen.Double[0.4, 12], Gen.Double[0.4, 12], Gen.Bool, Gen.Int[1, 5]).Sample((cells, most, scale, other, signed, count) =>
+        {
+            UnitContribution[] units = [new UnitContribution.PerCell(cells, most, signed, most * 1.5), new UnitContribution.AbsoluteSum(most), new UnitContribution.Euclidean(most)];
+            foreach (var unit in units)
+            {
+                var replaced = Loss(unit, Replace, scale, other, count);
+                var added = Loss(unit, AddOrRemove, scale, other, count);
+                Assert.True(added.Concentrated.Upper.Value <= replaced.Concentrated.Upper.Value * (1 + 1e-12));
+                Assert.True(replaced.Concentrated.Lower.Value <= replaced.Concentrated.Upper.Value * (1 + 1e-12));
+                Assert.True(added.Pure.Lower.Value <= added.Pure.Upper.Value * (1 + 1e-12));
+                Assert.True(added.DeltaAt(Epsilon.Of(0.5)).Lower <= added.DeltaAt(Epsilon.Of(0.5)).Upper);
+            }
+        }, iter: 200, seed: "0000KOJ4fUr2");
+
+    private static MechanismLoss Loss(UnitContribution unit, NeighbourRelation relation, double scale, double other, int count) =>
+        MechanismLoss.Of([new NoisedCells(DiscreteLaplaceLaw.Of(scale), count), new NoisedCells(DiscreteLaplaceLaw.Of(other), 2)], unit, relation);
+
+    private static MechanismLoss Count(NoiseLaw law, long cells) => MechanismLoss.Of([new NoisedCells(law, cells)], new UnitContribution.PerCell(1, 1), AddOrRemove);
+
+    // Every difference between neighbours on two cells: a unit counts 0..most in at most so many of them.
+    private static IEnumerable<(long First, long Second)> Pairs(NeighbourRelation relation, int cellsPerUnit, long most)
+    {
+        var counts = Enumerable.Range(0, (int)most + 1).Select(value => (long)value).ToList();
+        var records = counts.SelectMany(a => counts.Select(b => (First: a, Second: b)))
+            .Where(record => (record.First > 0 ? 1 : 0) + (record.Second > 0 ? 1 : 0) <= cellsPerUnit).ToList();
+        if (relation == AddOrRemove)
+            return records.SelectMany(record => new[] { record, (-record.First, -record.Second) });
+        return records.SelectMany(old => records.Select(other => (other.First - old.First, other.Second - old.Second)));
+    }
+}
