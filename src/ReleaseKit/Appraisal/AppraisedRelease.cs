@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Appraisal;
@@ -6,6 +7,7 @@ namespace ReleaseKit.Appraisal;
 public sealed class AppraisedRelease : IAppraisedRelease
 {
     private readonly AppraisedFigures figures;
+    private readonly ConcurrentDictionary<int, TableFacts> facts = new();
 
     private AppraisedRelease(Release release) => (Release, figures) = (release, new AppraisedFigures(release));
 
@@ -28,4 +30,6 @@ public sealed class AppraisedRelease : IAppraisedRelease
         var found = FigureAddress.Of(Release, address).Resolve(Release);
         return [.. found.Rows.Select(row => new FigureRef(found.Table, found.Measure, row))];
     }
+
+    public TableFacts FactsOf(int table) => facts.GetOrAdd(table, index => new TableFactsMaker(Release, figures.Origins).Of(index));
 }

@@ -39,6 +39,9 @@ internal sealed class DistinctError
         return found.Width == 0 && Error.Law is LatticeLaw law ? new(law.Grid, Math.Max(law.WithinSteps(1), found.Attained)) : found;
     }
 
+    /// <summary>Whether some half-width reaches the coverage: a tabulated law may lack the mass.</summary>
+    public bool Reaches(Coverage coverage) => Error.Law.Within(double.PositiveInfinity) >= coverage.Share;
+
     /// <summary>The ranges of one published value at the lower, main and upper coverage.</summary>
     public IReadOnlyList<FigureRange> RangesOf(PublishedValue value, Printing printing)
     {

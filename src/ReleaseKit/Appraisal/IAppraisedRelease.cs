@@ -14,4 +14,7 @@ public interface IAppraisedRelease
 
     /// <summary>All figures a selection means, in row order.</summary>
     IReadOnlyList<FigureRef> Select(string address);
+
+    /// <summary>What can be said once of all ranges of a table, by its index in the release.</summary>
+    TableFacts FactsOf(int table);
 }

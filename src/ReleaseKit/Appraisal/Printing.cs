@@ -33,6 +33,13 @@ internal sealed record Printing(bool Whole, int? Decimals, decimal Factor, Possi
         return new(unit.Print(printed), unit.Print(Math.Max(down, 0)), unit.Print(Math.Max(up, 0)), unit.Print(low), unit.Print(high), lowIsCut, highIsCut);
     }
 
+    /// <summary>The largest half-width that Print gives for a margin, whatever the value.</summary>
+    public PublishedValue LargestMargin(double margin, PrintUnit unit) =>
+        unit.Print(unit.Up(Scaled(margin) + (Whole ? 0 : unit.Value(1) / 2)));
+
+    /// <summary>A distance rounded up to the unit.</summary>
+    public PublishedValue Outward(double distance, PrintUnit unit) => unit.Print(unit.Up(Scaled(distance)));
+
     /// <summary>The end of the half-width, but where the possible ends first, or where the range reaches further than the half-width.</summary>
     private (decimal Steps, bool IsCut) LowEnd(decimal uncut, ErrorRange range, PrintUnit unit) =>
         IsBelow(unit.Value(uncut), Possible.Lowest) || range.Low < range.UncutLow

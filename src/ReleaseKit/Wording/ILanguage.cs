@@ -11,6 +11,12 @@ public interface ILanguage
 
     Reading ReadingOf(AppraisedFigure figure);
 
+    /// <summary>What is said once under a table: how many ranges may miss, why parts may not add up.</summary>
+    IReadOnlyList<string> NotesOf(TableFacts facts);
+
+    /// <summary>What is said once for a column: how far its noise reaches, and the distance that 999 of 1,000 hold; empty without margins.</summary>
+    IReadOnlyList<string> NotesOf(MeasureFacts facts);
+
     /// <summary>A number as the language writes it in tables: "1,842", "−7" (U+2212).</summary>
     string Number(PublishedValue value);
 

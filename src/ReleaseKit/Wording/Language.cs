@@ -10,12 +10,14 @@ public sealed class Language : ILanguage
     private readonly WordingTexts texts;
     private readonly Voice voice;
     private readonly ReadingWriter readings;
+    private readonly FactSentences factSentences;
 
     private Language(WordingTexts texts)
     {
         this.texts = texts;
         voice = new Voice(texts);
         readings = new ReadingWriter(voice);
+        factSentences = new FactSentences(voice);
     }
 
     public string Tag => texts.Tag;
@@ -25,6 +27,10 @@ public sealed class Language : ILanguage
     public static ILanguage Load(string siteTemplatesFolder, string tag) => new Language(WordingTexts.Load(siteTemplatesFolder, tag));
 
     public Reading ReadingOf(AppraisedFigure figure) => readings.Write(figure);
+
+    public IReadOnlyList<string> NotesOf(TableFacts facts) => factSentences.Of(facts);
+
+    public IReadOnlyList<string> NotesOf(MeasureFacts facts) => factSentences.Of(facts);
 
     public string Number(PublishedValue value) => voice.Numerals.InTable(value);
 

@@ -1,0 +1,76 @@
+using ReleaseKit.Noise;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Appraisal;
+
+/// <summary>Works out the facts of a table from the few errors its figures share, not from figure after figure.</summary>
+internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
+{
+    private static readonly Coverage Of999 = Coverage.OfShare(0.999);
+
+    public TableFacts Of(int tableIndex)
+    {
+        var table = release.Tables[tableIndex];
+        var errors = table.Measures.Select((measure, index) => ErrorsOf(tableIndex, index, measure)).ToList();
+        var shown = errors.Where(error => error.Measure.Shown).ToList();
+        return new TableFacts
+        {
+            Table = table,
+            Ranges = shown.Sum(error => error.Ranges),
+            ExpectedMisses = shown.Sum(error => error.ExpectedMisses),
+            SharesDraws = shown.Any(error => error.HasSums),
+            HasSums = shown.Any(error => error.HasSums),
+            HasTotalsOfOwnNoise = shown.Any(error => AddsUp(error.Measure) && HasTotalOfOwnNoise(table, error.Measure)),
+            Measures = [.. errors.Select(FactsOf)],
+        };
+    }
+
+    private MeasureErrors ErrorsOf(int table, int index, Measure measure)
+    {
+        var found = new MeasureErrors(measure, release.Coverages.Main);
+        for (var row = 0; row < release.Tables[table].RowCount; row++)
+            if (measure.HasNumber(row) && origins.Of(new(table, index, row)).Error is { } error)
+                found.Add(error, measure.RuleAt(row) is NoiseRule.SumOver);
+        return found;
+    }
+
+    private MeasureFacts FactsOf(MeasureErrors found)
+    {
+        var margins = found.Errors.Where(error => !error.Error.DependsOnPublished).Select(error => Margin(found.Measure, error)).ToList();
+        return new MeasureFacts
+        {
+            Measure = found.Measure,
+            Coverage = release.Coverages.Main,
+            HasThreshold = margins.Count < found.Errors.Count,
+            SmallestMargin = margins.Count == 0 ? null : margins.MinBy(margin => margin.ToDecimal()),
+            LargestMargin = margins.Count == 0 ? null : margins.MaxBy(margin => margin.ToDecimal()),
+            Distance999 = Distance(found),
+        };
+    }
+
+    /// <summary>The margin that figures with this error print at most.</summary>
+    private static PublishedValue Margin(Measure measure, DistinctError error)
+    {
+        var printing = Printing.Of(measure, error.IsOnWholeGrid);
+        return printing.LargestMargin(error.MainHalfWidth.Width, printing.UnitFor(error.MainHalfWidth.Width));
+    }
+
+    private static PublishedValue? Distance(MeasureErrors found)
+    {
+        if (found.Errors.Count == 0 || found.Errors.Any(error => error.Error.DependsOnPublished || !error.Reaches(Of999)))
+            return null;
+        var largest = found.Errors.MaxBy(error => error.HalfWidthAt(Of999).Width)!;
+        var printing = Printing.Of(found.Measure, largest.IsOnWholeGrid);
+        return printing.Outward(largest.HalfWidthAt(Of999).Width, printing.UnitFor(largest.MainHalfWidth.Width));
+    }
+
+    private static bool AddsUp(Measure measure) => measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount;
+
+    private static bool HasTotalOfOwnNoise(Table table, Measure measure)
+    {
+        for (var row = 0; row < table.RowCount; row++)
+            if (measure.RuleAt(row) is NoiseRule.FromMechanism && table.Stub.Any(column => column.IsAll(row)))
+                return true;
+        return false;
+    }
+}
