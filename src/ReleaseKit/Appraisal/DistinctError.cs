@@ -42,12 +42,14 @@ internal sealed class DistinctError
     /// <summary>Whether some half-width reaches the coverage: a tabulated law may lack the mass.</summary>
     public bool Reaches(Coverage coverage) => Error.Law.Within(double.PositiveInfinity) >= coverage.Share;
 
-    /// <summary>The ranges of one published value at the lower, main and upper coverage.</summary>
+    /// <summary>The ranges of one published value at the lower, main and upper coverage; none where an end is without bound (a zero that stands for all small values).</summary>
     public IReadOnlyList<FigureRange> RangesOf(PublishedValue value, Printing printing)
     {
         var ranges = new ErrorRange[halfWidths.Length];
         for (var at = 0; at < ranges.Length; at++)
             ranges[at] = RangeAt(value.ToDouble(), at, printing.Possible);
+        if (ranges.Any(range => !double.IsFinite(range.Low) || !double.IsFinite(range.High)))
+            return [];
         var unit = printing.UnitFor(Margins(value.ToDouble(), 1, ranges[1]).Larger);
         return [.. ranges.Select((range, at) => FigureRangeOf(value, at, range, printing, unit))];
     }
@@ -70,7 +72,7 @@ internal sealed class DistinctError
     }
 
     private MarginPair Margins(double value, int at, ErrorRange range) => Error.DependsOnPublished
-        ? new(Math.Max(0, value - range.UncutLow), Math.Max(0, range.UncutHigh - value))
+        ? new(Math.Max(0, value - (double.IsFinite(range.UncutLow) ? range.UncutLow : range.Low)), Math.Max(0, range.UncutHigh - value))
         : new(halfWidths[at].Width, halfWidths[at].Width);
 
     private ErrorRange RangeAt(double value, int at, PossibleValues possible)

@@ -11,7 +11,7 @@ namespace ReleaseKit.Appraisal;
 internal sealed class FigureOrigins(Release release)
 {
     private readonly DeclaredLaws laws = new();
-    private readonly ConcurrentDictionary<ErrorKey, DistinctError> errors = new();
+    private readonly ConcurrentDictionary<ErrorKey, DistinctError?> errors = new();
     private readonly ConcurrentDictionary<DrawKey, FigureOrigin> draws = new();
     private readonly ConcurrentDictionary<FigureRef, FigureOrigin> sums = new();
     private readonly ConcurrentDictionary<int, SumParts> parts = new();
@@ -55,8 +55,21 @@ internal sealed class FigureOrigins(Release release)
         return decimal.Floor(last) == last;
     }
 
-    private DistinctError Shared(NoiseLaw law, IReadOnlyList<AfterStep> steps) =>
-        errors.GetOrAdd(new ErrorKey(law, string.Join(';', steps)), _ => new DistinctError(FigureError.Of(law, steps), release.Coverages));
+    private DistinctError? Shared(NoiseLaw law, IReadOnlyList<AfterStep> steps) =>
+        errors.GetOrAdd(new ErrorKey(law, string.Join(';', steps)), _ => TryMake(law, steps));
+
+    /// <summary>Null where no valid error is known: the steps do not go together, or a tabulated law lacks the mass for the coverages.</summary>
+    private DistinctError? TryMake(NoiseLaw law, IReadOnlyList<AfterStep> steps)
+    {
+        try
+        {
+            return new DistinctError(FigureError.Of(law, steps), release.Coverages);
+        }
+        catch (ArgumentException)
+        {
+            return null;
+        }
+    }
 
     /// <summary>
     /// The exact law of the sum of the draws below. Parts with after-steps or continuous noise have no such law here: no valid error is known then.

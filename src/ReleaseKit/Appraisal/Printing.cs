@@ -41,15 +41,17 @@ internal sealed record Printing(bool Whole, int? Decimals, decimal Factor, Possi
     public PublishedValue Outward(double distance, PrintUnit unit) => unit.Print(unit.Up(Scaled(distance)));
 
     /// <summary>The end of the half-width, but where the possible ends first, or where the range reaches further than the half-width.</summary>
-    private (decimal Steps, bool IsCut) LowEnd(decimal uncut, ErrorRange range, PrintUnit unit) =>
-        IsBelow(unit.Value(uncut), Possible.Lowest) || range.Low < range.UncutLow
-            ? (unit.Down(Scaled(range.Low)), true)
-            : (uncut, false);
+    private (decimal Steps, bool IsCut) LowEnd(decimal uncut, ErrorRange range, PrintUnit unit)
+    {
+        var low = unit.Down(Scaled(range.Low));
+        return IsBelow(unit.Value(uncut), Possible.Lowest) || low < uncut ? (low, true) : (uncut, false);
+    }
 
-    private (decimal Steps, bool IsCut) HighEnd(decimal uncut, ErrorRange range, PrintUnit unit) =>
-        IsBelow(-unit.Value(uncut), -Possible.Highest) || range.High > range.UncutHigh
-            ? (unit.Up(Scaled(range.High)), true)
-            : (uncut, false);
+    private (decimal Steps, bool IsCut) HighEnd(decimal uncut, ErrorRange range, PrintUnit unit)
+    {
+        var high = unit.Up(Scaled(range.High));
+        return IsBelow(-unit.Value(uncut), -Possible.Highest) || high > uncut ? (high, true) : (uncut, false);
+    }
 
     private bool IsBelow(decimal end, double bound) => double.IsFinite(bound) && end < Scaled(bound);
 

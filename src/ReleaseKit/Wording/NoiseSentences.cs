@@ -37,14 +37,15 @@ internal sealed class NoiseSentences(Voice voice)
         yield return low == high
             ? voice.Say($"{key}.single", ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("cases", voice.SuchCases(figure, main)))
             : voice.Say(key, ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("high", Number(high)), ("cases", voice.SuchCases(figure, main)));
-        if (figure.Case.First is not SpecialCase.BelowZero && !IsBeyondMargin(figure, main))
+        if (figure.Case.First is not (SpecialCase.BelowZero or SpecialCase.AboveHighest) && !IsBeyondMargin(figure, main))
             foreach (var cut in Cut(figure, main.Printed))
                 yield return cut;
     }
 
     /// <summary>The half-width does not even reach what is possible: here the noise was certainly larger.</summary>
     private static bool IsBeyondMargin(AppraisedFigure figure, FigureRange main) =>
-        main.UncutHigh < figure.Possible.Lowest || main.UncutLow > figure.Possible.Highest;
+        !figure.Error!.DependsOnPublished
+        && (figure.Value.ToDouble() + main.MarginUp < figure.Possible.Lowest || figure.Value.ToDouble() - main.MarginDown > figure.Possible.Highest);
 
     private string Beyond(AppraisedFigure figure)
     {

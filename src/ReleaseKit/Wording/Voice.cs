@@ -42,7 +42,7 @@ internal sealed class Voice(WordingTexts texts)
 
     private string CasesAs(string which, AppraisedFigure figure, FigureRange range)
     {
-        var more = range.Attained > range.Coverage.Share + CoverageSlack || figure.Error is { MarginIsUpperBound: true };
+        var more = range.Attained > range.Coverage.Share + CoverageSlack || figure.Error is { MarginIsUpperBound: true } or { DependsOnPublished: true };
         return Frequency(more ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));
     }
 }
