@@ -14,6 +14,7 @@ internal sealed class FigureOrigins(Release release)
     private readonly ConcurrentDictionary<ErrorKey, DistinctError?> errors = new();
     private readonly ConcurrentDictionary<DrawKey, FigureOrigin> draws = new();
     private readonly ConcurrentDictionary<FigureRef, FigureOrigin> sums = new();
+    private readonly ConcurrentDictionary<SumKey, LatticeLaw?> sumLaws = new();
     private readonly ConcurrentDictionary<int, SumParts> parts = new();
 
     public FigureOrigin Of(FigureRef at)
@@ -89,6 +90,7 @@ internal sealed class FigureOrigins(Release release)
     private static NoiseRule? SumWithoutNoise(IReadOnlyList<NoiseRule> rules) =>
         rules.OfType<NoiseRule.Exact>().FirstOrDefault() ?? (rules.Count > 0 ? rules[0] : null);
 
+    /// <summary>Draws of one law are counted, so that a sum of many parts is worked out from few laws; the same sum is worked out once.</summary>
     private NoiseLaw? LawOfSum(Table table, IReadOnlyList<BaseDraw> draws)
     {
         var counted = new Dictionary<LatticeLaw, int>();
@@ -98,7 +100,7 @@ internal sealed class FigureOrigins(Release release)
                 return null;
             counted[law] = counted.GetValueOrDefault(law) + 1;
         }
-        return null;
+        return sumLaws.GetOrAdd(new SumKey(counted), key => key.TryMakeLaw());
     }
 
     private readonly record struct ErrorKey(NoiseLaw Law, string Steps);
