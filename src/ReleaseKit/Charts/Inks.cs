@@ -45,4 +45,7 @@ public static class Inks
     public static Ink TallyKey { get; } = new("tl-k") { Fill = Tint.Ink, Face = Face.Bold, Size = 15 };
     public static Ink TallyName { get; } = new("tl-t") { Fill = Tint.Soft, Face = Face.Plain, Size = 14 };
     public static Ink TallyValue { get; } = new("tl-v") { Fill = Tint.Ink, Face = Face.Plain, Size = 15 };
+    public static Ink TallyKeySmall { get; } = TallyKey with { Class = "tl-k tl-s", Size = 14 };
+    public static Ink TallyNameSmall { get; } = TallyName with { Class = "tl-t tl-s", Size = 14 };
+    public static Ink TallyValueSmall { get; } = TallyValue with { Class = "tl-v tl-s", Size = 14 };
 }
