@@ -13,8 +13,6 @@ public sealed record Ink(string Class)
     /// <summary>Lengths drawn and left out in turn; empty for a full line.</summary>
     public IReadOnlyList<double> Dashes { get; init; } = [];
 
-    /// <summary>True for a mark with an edge of paper, which lies under it.</summary>
-    public bool HasHalo => Stroke == Tint.Paper && Fill != Tint.None;
     public Face Face { get; init; }
 
     /// <summary>Height of letters in pixels; 0 for what is no text.</summary>

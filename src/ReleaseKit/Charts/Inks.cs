@@ -12,15 +12,7 @@ public static class Inks
     public static Ink AxisTick { get; } = new("ch-axtick") { Stroke = Tint.Firmline, Weight = 1 };
     public static Ink Zero { get; } = new("ch-zero") { Stroke = Tint.Firmline, Weight = 1.2, Dashes = [1, 2] };
 
-    // The mark of a figure.
-    public static Ink Range { get; } = new("ch-95") { Fill = Tint.AccentMid };
-    public static Ink Middle { get; } = new("ch-50") { Fill = Tint.Accent };
-    public static Ink HollowRange { get; } = new("ch-hollow") { Fill = Tint.Paper, Stroke = Tint.Accent, Weight = 1 };
-    public static Ink Impossible { get; } = new("ch-ghost") { Stroke = Tint.AccentMid, Weight = 1, Dashes = [2, 2] };
-    public static Ink Bar { get; } = new("ch-bar") { Stroke = Tint.AccentMid, Weight = 2 };
-    public static Ink Stop { get; } = new("ch-stop") { Fill = Tint.Accent };
-    public static Ink Stem { get; } = new("ch-stem") { Fill = Tint.Ink, Stroke = Tint.Paper, Weight = 0.7 };
-    public static Ink Arrow { get; } = new("ch-cut") { Stroke = Tint.Accent, Weight = 1.6 };
+    // What the tables' marks do not have.
     public static Ink Lozenge { get; } = new("ch-weak") { Stroke = Tint.Accent, Weight = 1.5 };
 
     // Text of a chart.

@@ -44,10 +44,8 @@ public sealed class PngPainter : IDisposable
         }
 
         using var path = PathOf(shape);
-        // A halo of paper lies under its mark, any other edge over it.
-        SKPaintStyle[] order = shape.Ink.HasHalo ? [SKPaintStyle.Stroke, SKPaintStyle.Fill] : [SKPaintStyle.Fill, SKPaintStyle.Stroke];
-        foreach (var style in order)
-            Draw(path, shape.Ink, style, style == SKPaintStyle.Fill ? shape.Ink.Fill : shape.Ink.Stroke);
+        Draw(path, shape.Ink, SKPaintStyle.Fill, shape.Ink.Fill);
+        Draw(path, shape.Ink, SKPaintStyle.Stroke, shape.Ink.Stroke);
     }
 
     private void Draw(SKPath path, Ink ink, SKPaintStyle style, Tint tint)

@@ -74,22 +74,23 @@ public sealed class SvgPainter
 
     private string Looks(Shape shape)
     {
-        var mark = shape.Mark is null ? "" : $" data-mark=\"{Escaped(shape.Mark)}\"";
-        return palette is null ? $" class=\"{shape.Ink.Class}\"{mark}" : Attributes(shape.Ink, palette) + mark;
+        var looks = new StringBuilder(palette is null ? $" class=\"{shape.Ink.Class}\"" : Colours(shape.Ink, palette));
+        if (shape.Mark is not null)
+            looks.Append(CultureInfo.InvariantCulture, $" data-mark=\"{Escaped(shape.Mark)}\"");
+        if (shape.Ink.Stroke != Tint.None)
+            looks.Append(CultureInfo.InvariantCulture, $" stroke-width=\"{Number(shape.Ink.Weight)}\"");
+        if (shape.Ink.Dashes.Count > 0)
+            looks.Append(CultureInfo.InvariantCulture, $" stroke-dasharray=\"{string.Join(' ', shape.Ink.Dashes.Select(Number))}\"");
+        if (shape.Ink.Size > 0)
+            looks.Append(CultureInfo.InvariantCulture, $" font-size=\"{Number(shape.Ink.Size)}\"");
+        return looks.ToString();
     }
 
-    private static string Attributes(Ink ink, Palette palette)
+    private static string Colours(Ink ink, Palette palette)
     {
-        var text = new StringBuilder($" fill=\"{palette[ink.Fill]}\"");
-        if (ink.Stroke != Tint.None)
-            text.Append(CultureInfo.InvariantCulture, $" stroke=\"{palette[ink.Stroke]}\" stroke-width=\"{Number(ink.Weight)}\"");
-        if (ink.HasHalo)
-            text.Append(" paint-order=\"stroke\"");
-        if (ink.Dashes.Count > 0)
-            text.Append(CultureInfo.InvariantCulture, $" stroke-dasharray=\"{string.Join(' ', ink.Dashes.Select(Number))}\"");
-        if (ink.Size > 0)
-            text.Append(CultureInfo.InvariantCulture, $" font-family=\"{Family(ink.Face)}\" font-size=\"{Number(ink.Size)}\" font-weight=\"{Weight(ink.Face)}\"");
-        return text.ToString();
+        var stroke = ink.Stroke == Tint.None ? "" : $" stroke=\"{palette[ink.Stroke]}\"";
+        var type = ink.Size > 0 ? $" font-family=\"{Family(ink.Face)}\" font-weight=\"{Weight(ink.Face)}\"" : "";
+        return $" fill=\"{palette[ink.Fill]}\"{stroke}{type}";
     }
 
     private static string Family(Face face) => face is Face.Text or Face.TextMedium or Face.TextBold ? "Vollkorn, Georgia, serif" : "Asap, Verdana, sans-serif";
