@@ -14,6 +14,7 @@ public sealed class Templates
     {
         this.byName = byName;
         source = new TemplateSource(folder);
+        FontsFolder = Path.Combine(Path.GetDirectoryName(folder)!, "fonts");
     }
 
     /// <summary>Parses every template in the folder "pages" of a site-templates folder.</summary>
@@ -24,6 +25,9 @@ public sealed class Templates
         var templates = Directory.EnumerateFiles(folder, "*.html").ToFrozenDictionary(file => Path.GetFileName(file), Parse);
         return new Templates(folder, templates);
     }
+
+    /// <summary>The fonts that stand beside the templates; pictures are set in them.</summary>
+    public string FontsFolder { get; }
 
     public IEnumerable<string> Names => byName.Keys.Order(StringComparer.Ordinal);
 

@@ -1,0 +1,71 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+
+namespace ReleaseKit.Pages.Budget;
+
+/// <summary>What all parts of the budget page need: the release, the account, the unit in words, and how amounts are printed.</summary>
+internal sealed class BudgetWords
+{
+    private const int DigitsOfTotal = 4;
+    private const int DigitsOfSmallest = 2;
+    private const int MostDecimals = 12;
+
+    public BudgetWords(SiteContext context)
+    {
+        Context = context;
+        Statement = context.Budget;
+        Decimals = DecimalsOf(Statement);
+    }
+
+    public SiteContext Context { get; }
+    public BudgetStatement Statement { get; }
+    public ILanguage Language => Context.Language;
+    public Release Release => Context.Release;
+
+    /// <summary>Decimals of every amount on the page, so that columns can be added by eye.</summary>
+    public int Decimals { get; }
+
+    /// <summary>"household".</summary>
+    public string One => FormsOfUnit?.One ?? Statement.Account.Who.Key;
+
+    /// <summary>"households".</summary>
+    public string Other => FormsOfUnit?.Other ?? Statement.Account.Who.Key;
+
+    /// <summary>"epsilon (ε)" or "rho (ρ)".</summary>
+    public string Currency => Say(Statement.Currency == LossCurrency.Rho ? "budget.currency.rho" : "budget.currency.epsilon");
+
+    /// <summary>An amount that was spent, rounded up.</summary>
+    public string Amount(double amount) => LossPrint.OrNoBound(amount, number => LossPrint.Up(number, Decimals), Language);
+
+    /// <summary>An amount that may be spent, rounded down.</summary>
+    public string Allowance(double amount) => LossPrint.OrNoBound(amount, number => LossPrint.Down(number, Decimals), Language);
+
+    /// <summary>What is left, as printed: the printed allowance less the printed amount, so that the eye can check it.</summary>
+    public PublishedValue? Left => Statement.Authorised is not { } authorised || !double.IsFinite(Statement.Spent) || !double.IsFinite(authorised)
+        ? null
+        : Less(LossPrint.Down(authorised, Decimals), LossPrint.Up(Statement.Spent, Decimals));
+
+    public string Say(string key, params (string Name, string Value)[] fill) => Language.Text(key, fill);
+
+    public string TableName(int table) => Say("budget.table-number", ("number", Language.Number(new PublishedValue(table + 1, 0))));
+
+    public string Level(BudgetPiece piece) => piece.Level is { } level ? Context.In(level) : Say("budget.level.none");
+
+    /// <summary>A rule in words, then the literature it stands on.</summary>
+    public string Rule(AccountRule rule) => Say($"budget.rule.{rule.Key}");
+
+    private UnitForms? FormsOfUnit => Statement.Account.Who.Forms.GetValueOrDefault(Language.Tag);
+
+    private static PublishedValue Less(PublishedValue authorised, PublishedValue spent) =>
+        authorised with { Unscaled = Math.Max(0, authorised.Unscaled - spent.Unscaled) };
+
+    private static int DecimalsOf(BudgetStatement statement)
+    {
+        double[] amounts = [.. statement.Pieces.Select(piece => piece.Amount).Where(amount => amount > 0 && double.IsFinite(amount))];
+        if (amounts.Length == 0 || !double.IsFinite(statement.Spent))
+            return DigitsOfTotal;
+        return Math.Min(MostDecimals, Math.Max(
+            LossPrint.DecimalsFor(statement.Spent, DigitsOfTotal), LossPrint.DecimalsFor(amounts.Min(), DigitsOfSmallest)));
+    }
+}

@@ -1,0 +1,35 @@
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+
+namespace ReleaseKit.Pages.Budget;
+
+/// <summary>Chances as "3.6 in 100", rounded away from comfort; never printed as certain or as impossible when they are not.</summary>
+internal static class Chances
+{
+    private const int MostDecimals = 9;
+
+    /// <summary>A largest chance, rounded up.</summary>
+    public static string AtMost(double chance, ILanguage language) =>
+        InHundred(LossPrint.Up(Math.Min(100, 100 * chance), DecimalsFor(chance)), language);
+
+    /// <summary>A smallest chance, rounded down.</summary>
+    public static string AtLeast(double chance, ILanguage language) =>
+        InHundred(LossPrint.Down(Math.Max(0, 100 * chance), DecimalsFor(chance)), language);
+
+    /// <summary>A chance that was set, not worked out.</summary>
+    public static string Given(double chance, ILanguage language) =>
+        InHundred(PublishedValue.Shortest(decimal.Round((decimal)chance * 100, 9)), language);
+
+    /// <summary>"1 in 100,000,000" for a tiny share, rounded up.</summary>
+    public static string OneIn(double share, ILanguage language) =>
+        language.Text("budget.one-in", ("all", language.Number(new PublishedValue((long)Math.Floor((1 / share) + 1e-6), 0))));
+
+    // One decimal, more where it takes more to tell the chance from 0 or from 100.
+    private static int DecimalsFor(double chance)
+    {
+        var nearest = 100 * Math.Min(chance, 1 - chance);
+        return nearest <= 0 ? 1 : Math.Clamp(LossPrint.DecimalsFor(nearest, 2), 1, MostDecimals);
+    }
+
+    private static string InHundred(PublishedValue value, ILanguage language) => language.Text("budget.in-100", ("number", language.Number(value)));
+}

@@ -1,0 +1,45 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
+using Scriban.Runtime;
+
+namespace ReleaseKit.Pages.Budget;
+
+/// <summary>Every mechanism: what it answers, law, sensitivity, what follows, declared and recomputed loss, share of the whole.</summary>
+internal static class MechanismsModel
+{
+    private const int Digits = 4;
+
+    public static ScriptArray Of(BudgetWords words) => new(words.Statement.Mechanisms.Select(account => RowOf(account, words)));
+
+    private static ScriptObject RowOf(MechanismAccount account, BudgetWords words)
+    {
+        var mechanism = account.Mechanism;
+        return new ScriptObject
+        {
+            ["id"] = mechanism.Id,
+            ["name"] = mechanism.Answers is { } answers ? words.Context.In(answers) : mechanism.Id,
+            ["level"] = mechanism.Level is { } level ? words.Context.In(level) : null,
+            ["use"] = mechanism.Use == MechanismUse.Figures ? null : words.Say($"budget.use.{mechanism.Use}"),
+            ["cells"] = words.Say(account.Cells == 1 ? "budget.cells.one" : "budget.cells.other", ("count", words.Language.Number(new PublishedValue(account.Cells, 0)))),
+            ["law"] = MechanismWords.Law(mechanism, words),
+            ["sensitivity"] = MechanismWords.Sensitivity(mechanism, words),
+            ["after"] = MechanismWords.Afterwards(mechanism, words),
+            ["clipped"] = mechanism.Clipped is { } clipped ? Clipped(clipped, words) : null,
+            ["declared"] = account.Declared is { } declared ? TotalsModel.InWords(declared, words, TotalsModel.AsWritten) : words.Say("budget.not-declared"),
+            ["recomputed"] = words.Amount(account.Amount),
+            ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.UpTo(delta, Digits)))) : null,
+            ["lower"] = TotalsModel.InWords(account.Lower, words, LossPrint.DownTo),
+            ["rule"] = words.Rule(account.Recomputed.Rule),
+            ["source"] = account.Recomputed.Rule.Source,
+            ["share"] = Share(account.ShareOfSpent, words),
+            ["only_declared"] = account.OnlyDeclared,
+        };
+    }
+
+    private static string Clipped(ClippedTo clipped, BudgetWords words) => words.Say(
+        "budget.clipped",
+        ("from", words.Language.NumberInProse(LossPrint.AsWritten(clipped.From))), ("to", words.Language.NumberInProse(LossPrint.AsWritten(clipped.To))));
+
+    private static string Share(double share, BudgetWords words) =>
+        double.IsFinite(share) ? words.Say("budget.in-100", ("number", words.Language.Number(LossPrint.Up(100 * share, 1)))) : words.Say("budget.no-bound");
+}
