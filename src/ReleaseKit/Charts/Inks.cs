@@ -25,6 +25,14 @@ public static class Inks
     public static Ink Heading { get; } = new("ch-title") { Fill = Tint.Ink, Face = Face.TextMedium, Size = 24 };
     public static Ink Note { get; } = new("ch-note") { Fill = Tint.Soft, Face = Face.Plain, Size = 14 };
 
+    // The picture of a headline.
+    public static Ink CardTitle { get; } = new("cd-title") { Fill = Tint.Ink, Face = Face.TextMedium, Size = 34 };
+    public static Ink CardMargin { get; } = new("cd-margin") { Fill = Tint.Ink, Face = Face.Plain, Size = 40 };
+    public static Ink CardUnit { get; } = new("cd-unit") { Fill = Tint.Soft, Face = Face.Plain, Size = 28 };
+    public static Ink CardEnd { get; } = new("cd-end") { Fill = Tint.Ink, Face = Face.Plain, Size = 22 };
+    public static Ink CardReading { get; } = new("cd-reading") { Fill = Tint.Ink, Face = Face.Text, Size = 28 };
+    public static Ink CardSource { get; } = new("cd-source") { Fill = Tint.Soft, Face = Face.Plain, Size = 20 };
+
     // The split tally.
     public static Ink Solid { get; } = new("tl-solid") { Fill = Tint.Accent };
     public static Ink HatchGround { get; } = new("tl-ground") { Fill = Tint.Band };

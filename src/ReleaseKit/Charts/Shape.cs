@@ -1,7 +1,10 @@
 namespace ReleaseKit.Charts;
 
 /// <summary>A place in a drawing, in CSS pixels from the upper left corner.</summary>
-public readonly record struct Spot(double X, double Y);
+public readonly record struct Spot(double X, double Y)
+{
+    public Spot Moved(double right, double down) => new(X + right, Y + down);
+}
 
 /// <summary>Which end of a line of text stands at its place.</summary>
 public enum Anchor { Start, Middle, End }
@@ -11,6 +14,18 @@ public abstract record Shape(Ink Ink)
 {
     /// <summary>What the mark stands for, written as data-mark; null for mere lines.</summary>
     public string? Mark { get; init; }
+
+    /// <summary>The same mark elsewhere.</summary>
+    public Shape Moved(double right, double down) => this switch
+    {
+        Line line => line with { From = line.From.Moved(right, down), To = line.To.Moved(right, down) },
+        Box box => box with { X = box.X + right, Y = box.Y + down },
+        Strokes strokes => strokes with { Parts = [.. strokes.Parts.Select(part => (part.From.Moved(right, down), part.To.Moved(right, down)))] },
+        Outline outline => outline with { Corners = [.. outline.Corners.Select(corner => corner.Moved(right, down))] },
+        Words words => words with { At = words.At.Moved(right, down) },
+        Group group => group with { Shapes = [.. group.Shapes.Select(shape => shape.Moved(right, down))] },
+        _ => this,
+    };
 
     public sealed record Line(Ink Ink, Spot From, Spot To) : Shape(Ink);
 

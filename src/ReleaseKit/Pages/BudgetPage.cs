@@ -1,4 +1,3 @@
-using ReleaseKit.Appraisal;
 using ReleaseKit.Charts;
 using ReleaseKit.Pages.Budget;
 using Scriban.Runtime;

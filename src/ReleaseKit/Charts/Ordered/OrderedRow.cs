@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
 
 namespace ReleaseKit.Charts.Ordered;
 
@@ -20,4 +21,17 @@ public sealed record OrderedRow
 }
 
 /// <summary>What an ordered chart shows: its rows, largest first, and the figures that have no number.</summary>
-public sealed record OrderedFigures(IReadOnlyList<OrderedRow> Rows, IReadOnlyList<AppraisedFigure> WithoutNumber, string Unit, Func<Releases.PublishedValue, string> Print);
+public sealed record OrderedFigures
+{
+    public required IReadOnlyList<OrderedRow> Rows { get; init; }
+    public required IReadOnlyList<AppraisedFigure> WithoutNumber { get; init; }
+
+    /// <summary>The unit in words, in the plural.</summary>
+    public required string Unit { get; init; }
+
+    /// <summary>A number of the axis in print.</summary>
+    public required Func<PublishedValue, string> Print { get; init; }
+
+    /// <summary>A figure's name among the others.</summary>
+    public required Func<AppraisedFigure, string> NameOf { get; init; }
+}

@@ -15,27 +15,19 @@ public static class OrderedSelection
         if (numbers.Count == 0)
             throw new ArgumentException($"The chart \"{order.Id}\" selects no figure with a number.", nameof(order));
         var names = RowNames.Of(figures, language.Tag);
-        return new OrderedFigures(
-            [.. numbers.Select(figure => RowOf(figure, names.Of(figure), language))],
-            [.. figures.Where(figure => !figure.HasNumber)],
-            UnitOf(numbers[0].Measure, language.Tag),
-            language.Number);
+        return new OrderedFigures
+        {
+            Rows = [.. numbers.Select(figure => RowOf(figure, names.Of(figure), language))],
+            WithoutNumber = [.. figures.Where(figure => !figure.HasNumber)],
+            Unit = UnitWords.Many(numbers[0].Measure.Unit, language),
+            Print = language.Number,
+            NameOf = names.Of,
+        };
     }
-
-    public static string UnitOf(Measure measure, string tag) => measure.Unit.Forms.TryGetValue(tag, out var forms) ? forms.Other : measure.Unit.Key;
 
     private static OrderedRow RowOf(AppraisedFigure figure, string name, ILanguage language)
     {
-        if (figure.Main?.Printed is not { } printed)
-            return new OrderedRow { Figure = figure, Name = name, Heavy = language.Number(figure.Value), Light = "", Margin = WithoutMargin(figure, language) };
-        var digits = LightDigits.Of(language.Number(printed.Value), printed);
-        return new OrderedRow { Figure = figure, Name = name, Heavy = digits.Heavy, Light = digits.Light, Margin = language.Margin(printed) };
+        var (heavy, light, margin) = FigureDigits.Of(figure, language);
+        return new OrderedRow { Figure = figure, Name = name, Heavy = heavy, Light = light, Margin = margin };
     }
-
-    private static string WithoutMargin(AppraisedFigure figure, ILanguage language) => language.Text(figure.Reliability switch
-    {
-        Reliability.Exact => "charts.exact",
-        Reliability.Public => "charts.public",
-        _ => "charts.no-margin",
-    });
 }

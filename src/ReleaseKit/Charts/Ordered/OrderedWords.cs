@@ -19,8 +19,7 @@ public sealed record OrderedWords(IReadOnlyList<string> Caption, string Descript
         yield return language.Text("charts.ordered.order");
         if (withMargin.Count > 0)
         {
-            var atLeast = withMargin.Exists(range => range.Attained > range.Coverage.Share + 1e-9);
-            yield return language.Text(atLeast ? "charts.ordered.bar-at-least" : "charts.ordered.bar", ("share", language.Share(withMargin[0].Coverage)));
+            yield return language.Text(IsMoreThanNominal(figures) ? "charts.ordered.bar-at-least" : "charts.ordered.bar", ("share", language.Share(withMargin[0].Coverage)));
             yield return language.Text("charts.ordered.neighbours");
             yield return language.Text("charts.ordered.overlap");
         }
@@ -35,6 +34,13 @@ public sealed record OrderedWords(IReadOnlyList<string> Caption, string Descript
             yield return language.Text(figures.WithoutNumber.Count == 1 ? "charts.ordered.without-number.one" : "charts.ordered.without-number.other",
                 ("count", Count(figures.WithoutNumber.Count, language)));
     }
+
+    /// <summary>Whether some range attains more than its nominal coverage, so that words say "at least".</summary>
+    public static bool IsMoreThanNominal(OrderedFigures figures) =>
+        figures.Rows.Any(row => row.Figure.Main is { } range && range.Attained > range.Coverage.Share + Tie);
+
+    // The tie rule of the margins.
+    private const double Tie = 1e-12;
 
     private static string Count(int count, ILanguage language) => language.Number(new Releases.PublishedValue(count, 0));
 }

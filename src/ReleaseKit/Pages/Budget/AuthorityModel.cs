@@ -1,4 +1,3 @@
-using ReleaseKit.Releases;
 using Scriban.Runtime;
 
 namespace ReleaseKit.Pages.Budget;
