@@ -10,7 +10,6 @@ internal static class Particulars
     {
         var release = context.Release;
         var rows = new ScriptArray { Row(context, "home.published", context.Language.Date(DateOnly.FromDateTime(release.Published.DateTime))) };
-        rows.Add(Row(context, "home.edition", EditionLine.Of(context)));
         if (release.ReferencePeriod is { } period)
             rows.Add(Row(context, "home.covers", PeriodText.Of(period, context.Language)));
         rows.Add(Row(context, "home.loss", Loss(context), PageMap.Budget));

@@ -16,8 +16,8 @@ internal static class LawModel
         {
             ["id"] = "law-" + KeyOf(law),
             ["name"] = context.Language.Text(key),
-            ["formula"] = context.Language.Text(key + ".formula"),
-            ["margin"] = context.Language.Text(key + ".margin"),
+            ["formula"] = new RawHtml(Formula.ToHtml(context.Language.Text(key + ".formula"))),
+            ["margin"] = new RawHtml(Formula.ToHtml(context.Language.Text(key + ".margin"))),
             ["source"] = context.Language.Text(key + ".source"),
             ["mechanisms"] = new ScriptArray(mechanisms.Select(mechanism => Row(context, mechanism))),
         };

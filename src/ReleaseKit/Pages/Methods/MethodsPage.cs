@@ -15,6 +15,7 @@ internal static class MethodsPage
         model["budget"] = Link.From(head.Path, PageMap.Budget);
         model["downloads"] = Link.From(head.Path, PageMap.Downloads);
         model["release_title"] = context.In(context.Release.Title);
+        model["definition"] = new RawHtml(Formula.ToHtml(context.Language.Text("methods.definition.means")));
         model["office"] = context.Release.Publisher.Name;
         AddGuarantee(model, context);
         AddCoverages(model, context);

@@ -1,0 +1,40 @@
+using AngleSharp.Dom;
+using AngleSharp.Html.Parser;
+using Xunit;
+
+namespace ReleaseKit.Tests.Pages;
+
+public sealed class SiteTests : IDisposable
+{
+    private readonly TemporaryFolder folder = new();
+
+    public void Dispose() => folder.Dispose();
+
+    [Fact]
+    public void Links_within_the_site_all_lead_to_a_file_and_an_element()
+    {
+        var documents = ComposedPages();
+        var dead = from page in documents
+                   from address in page.Document.QuerySelectorAll("[href]").Select(element => element.GetAttribute("href")!)
+                   where !address.Contains(':', StringComparison.Ordinal) && !Leads(page.Path, address, documents)
+                   select $"{page.Path} -> {address}";
+        Assert.Empty(dead);
+    }
+
+    private List<(string Path, IDocument Document)> ComposedPages()
+    {
+        PagesRelease.Compose(PagesRelease.Make(), folder["site"]);
+        var parser = new HtmlParser();
+        return [.. Directory.EnumerateFiles(folder["site"], "*.html", SearchOption.AllDirectories)
+            .Select(file => (Path.GetRelativePath(folder["site"], file), (IDocument)parser.ParseDocument(File.ReadAllText(file))))];
+    }
+
+    private bool Leads(string page, string address, List<(string Path, IDocument Document)> documents)
+    {
+        var parts = address.Split('#');
+        var path = parts[0].Length == 0 ? page : Path.GetRelativePath(folder["site"], Path.Combine(folder["site"], Path.GetDirectoryName(page)!, parts[0]));
+        if (parts.Length == 1)
+            return File.Exists(folder[$"site/{path}"]);
+        return documents.Any(other => other.Path == path && other.Document.GetElementById(parts[1]) is not null);
+    }
+}
