@@ -22,7 +22,7 @@ public sealed record Measure
     /// <summary>Pages print shares of one in 100.</summary>
     public int PrintFactor => InOnes ? 100 : 1;
 
-    /// <summary>Factor from the CSV's number to the figure's unit; 1 unless the CSV counts in thousands.</summary>
+    /// <summary>Factor from the CSV's number to the figure's unit; 1 unless the CSV counts in thousands. ValueAt gives the CSV's number.</summary>
     public double Multiplier { get; init; } = 1;
 
     /// <summary>Digits after the point of exact and public figures and the finest unit in print; null if not given.</summary>
@@ -78,4 +78,10 @@ public abstract record NoiseRule
 
     /// <summary>Known from elsewhere, not from the records.</summary>
     public sealed record Public(ReaderText Source) : NoiseRule;
+
+    /// <summary>No rule fits the row. Stands only beside a stop that says so, or on rows without a number.</summary>
+    public sealed record NotGiven : NoiseRule
+    {
+        public static NotGiven Instance { get; } = new();
+    }
 }

@@ -1,0 +1,95 @@
+using ReleaseKit.Reading.Keys;
+using ReleaseKit.Releases;
+using ReleaseKit.Review;
+
+namespace ReleaseKit.Reading.Prose;
+
+/// <summary>What can be wrong in prose, one factory a failure.</summary>
+internal static class ProseProblems
+{
+    public static Finding NoUtf8(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-encoding", owner, at,
+        "This is no UTF-8 text.",
+        "letters beyond a to z would be read wrong.",
+        "save the file as UTF-8.");
+
+    public static Finding NoTitle(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-title", owner, at,
+        "This page has no heading, or its first heading is empty.",
+        "the first heading is the title of the page.",
+        "begin the file with a line such as: # Summary");
+
+    public static Finding HeadingSkips(Place at, int from, int to, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-heading", owner, at,
+        $"A heading of level {to} follows one of level {from}.",
+        "who listens to a page moves by its headings, and looks for the level between.",
+        $"write {new string('#', from + 1)} before it.");
+
+    public static Finding SecondTitle(Place at, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-heading", owner, at,
+        "This page has a second heading of the first level.",
+        "the first is the title of the page; a page has one.",
+        "write ## before it.");
+
+    public static Finding StemTaken(Place at, string stem, string by, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-name", owner, at,
+        $"The page of this file would be {KeyProblems.Cut(stem)}.html, which is {by}.",
+        "one would overwrite the other.",
+        "rename the file, and its entry in \"narrative\".");
+
+    public static Finding StemForm(Place at, string stem, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-name", owner, at,
+        $"\"{KeyProblems.Cut(stem)}\" cannot be the name of a page.",
+        "it becomes part of an address: a to z, 0 to 9, - _ and the point only.",
+        Slug.Of(stem) is { Length: > 0 } slug ? $"rename the file to {slug}.md, and its entry in \"narrative\"." : "rename the file, and its entry in \"narrative\".");
+
+    public static Finding LiteralLink(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-link", owner, at,
+        "This link was not understood and would be printed as it stands.",
+        "a destination that holds a space must stand between angle brackets.",
+        "write [value](<figure:table/figure?column=A name>), or %20 for the space.");
+
+    public static Finding Citation(Place at, AddressException problem, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-citation", owner, at,
+        $"{problem.Message}.",
+        "a citation without a figure would be printed as a hole.",
+        problem.Do);
+
+    public static Finding EmptyCitation(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-citation", owner, at,
+        "This citation has no text.",
+        "it is not clear what is to be printed.",
+        "write one of value, margin, value and margin, range, reading between the brackets, or words of your own.");
+
+    public static Finding UnknownChart(Place at, string id, IReadOnlyList<string> known, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-chart", owner, at,
+        $"There is no chart \"{KeyProblems.Cut(id)}\" in release.json.",
+        "nothing can be placed here.",
+        Nearest.Of(id, known) is { } near ? $"write chart:{near}." : "add it to \"charts\" in release.json, or take the image out.");
+
+    public static Finding NoAlt(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-alt", owner, at,
+        "This image has no alternative text.",
+        "who cannot see it would not know that it is there (WCAG 2.2, 1.1.1).",
+        "say between the brackets what it shows: ![Households in arrears by district](chart:by-district)");
+
+    public static Finding ImageNotChart(Place at, string destination, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-image", owner, at,
+        $"\"{KeyProblems.Cut(destination)}\" is no chart of the release.",
+        "only charts are placed as images: a picture from elsewhere could show figures without their margins.",
+        "write ![what it shows](chart:ID) with the id of a chart in release.json.");
+
+    public static Finding LinkScheme(Place at, string destination, FindingOwner owner) => new(
+        FindingLevel.Stop, "bad-link", owner, at,
+        $"\"{KeyProblems.Cut(destination)}\" is no link that a page may have.",
+        "other kinds of link can run something on a reader's machine, or lead nowhere.",
+        "link with https:, http:, mailto: or a path within the site.");
+
+    public static Finding Html(Place at, string tag, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-html", owner, at,
+        $"\"{KeyProblems.Cut(tag)}\" looks like HTML, which is not passed through.",
+        "readers would see it as written.",
+        "write it in Markdown, or take it out.");
+
+    public static Finding HiddenCharacter(Place at, int codePoint, FindingOwner owner) => KeyProblems.HiddenCharacter(at, "The text", codePoint, owner);
+}

@@ -1,0 +1,54 @@
+using ReleaseKit.Reading.Mechanisms;
+using ReleaseKit.Releases;
+using ReleaseKit.Review;
+
+namespace ReleaseKit.Reading.Tables;
+
+/// <summary>Holds the columns that release.json and mechanisms.json name against those of the CSV.</summary>
+internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, IReadOnlyList<string> headers)
+{
+    /// <summary>Whether every column that is needed is there; what is not is reported, as is a column that nobody declared.</summary>
+    public bool Run()
+    {
+        var isWhole = true;
+        foreach (var (column, at) in Needed().Where(needed => !headers.Contains(needed.Column)))
+        {
+            draft.Context.Add(TableProblems.MissingColumn(at, column, draft.File, headers, draft.Context.Owner));
+            isWhole = false;
+        }
+        foreach (var (mechanism, column) in ScaleColumns().Where(scale => !headers.Contains(scale.Column)))
+            draft.Context.Add(TableProblems.ScaleColumnMissing(mechanism.At, column, mechanism.Id, draft.File, headers, FindingOwner.Noise));
+        CheckStatusColumns();
+        CheckUndeclared();
+        return isWhole;
+    }
+
+    private IEnumerable<(string Column, Place At)> Needed() => draft.Stub.Select(stub => (stub.Column, stub.At))
+        .Concat(draft.Figures.Select(figure => (figure.Column, figure.At)))
+        .Concat(draft.Figures.Where(figure => figure.UnadjustedColumn is not null).Select(figure => (figure.UnadjustedColumn!, figure.At)))
+        .Concat(draft.Columns.Select(column => (column.Column, column.At)));
+
+    private IEnumerable<(Mechanism Mechanism, string Column)> ScaleColumns() => draft.Figures
+        .SelectMany(figure => figure.Rules ?? []).Select(rule => rule.End).OfType<RuleEnd.Mechanism>()
+        .Select(end => mechanisms.Find(end.Id)).OfType<Mechanism>().Distinct()
+        .SelectMany(mechanism => mechanism.Parameters.Values.Select(value => value.Column).Append(mechanism.DenominatorColumn).OfType<string>()
+            .Distinct().Select(column => (mechanism, column)));
+
+    private void CheckStatusColumns()
+    {
+        if (draft.Statuses.Column is { } pattern && !draft.Figures.Any(figure => headers.Contains(draft.Statuses.ColumnOf(figure.Column))))
+            draft.Context.Add(TableProblems.MissingColumn(draft.Statuses.At, pattern, draft.File, headers, draft.Context.Owner));
+    }
+
+    private void CheckUndeclared()
+    {
+        var declared = Needed().Select(needed => needed.Column)
+            .Concat(draft.Figures.Select(figure => draft.Statuses.ColumnOf(figure.Column)).OfType<string>()).ToHashSet();
+        for (var index = 0; index < headers.Count; index++)
+            if (!declared.Contains(headers[index]))
+                draft.Context.Add(TableProblems.UndeclaredColumn(new Place(draft.File, 1, StartOf(index)), headers[index], FindingOwner.Noise));
+    }
+
+    /// <summary>The column of a header in its line, as long as no header is quoted.</summary>
+    private int StartOf(int index) => headers.Take(index).Sum(name => name.Length + 1) + 1;
+}

@@ -1,0 +1,35 @@
+using ReleaseKit.Reading.Keys;
+using ReleaseKit.Releases;
+using ReleaseKit.Review;
+
+namespace ReleaseKit.Reading.Tables;
+
+/// <summary>What can be wrong with labels.csv, one factory a failure.</summary>
+internal static class LabelProblems
+{
+    public static Finding UnknownColumn(string column, IReadOnlyList<string> known, FindingOwner owner) => new(
+        FindingLevel.Stop, "unknown-key", owner, new Place(LabelBook.FileName, 1),
+        $"\"{KeyProblems.Cut(column)}\" is no column of labels.csv.",
+        "what stands in it has no effect.",
+        Nearest.Of(column, known) is { } near ? $"write \"{near}\", or remove it." : $"remove it. Known: {string.Join(",", known)} and name_ with another language.");
+
+    public static Finding MissingColumn(string column, FindingOwner owner) => new(
+        FindingLevel.Stop, "missing-column", owner, new Place(LabelBook.FileName, 1, 1),
+        $"labels.csv has no column \"{column}\".",
+        "it is not known which row headings are meant.",
+        "begin the file with the line: column,value,id,order,parent,name_en");
+
+    public static Finding BadId(Place at, string id, FindingOwner owner) => Mechanisms.MechanismProblems.BadId(at, id, owner);
+
+    public static Finding BadOrder(Place at, string text, FindingOwner owner) => new(
+        FindingLevel.Stop, "csv-number", owner, at,
+        $"The order \"{KeyProblems.Cut(text)}\" is no number.",
+        "rows are put in this order.",
+        "write 1, 2, 3 …");
+
+    public static Finding Twice(Place at, StubValue value, Place first, FindingOwner owner) => new(
+        FindingLevel.Stop, "doubled-row", owner, at,
+        $"\"{KeyProblems.Cut(value.Value)}\" of column \"{KeyProblems.Cut(value.Column)}\" stands there twice; first at line {first.Line}.",
+        "the two could disagree.",
+        "keep one of them.");
+}

@@ -1,0 +1,12 @@
+using ReleaseKit.Releases;
+using ReleaseKit.Review;
+
+namespace ReleaseKit.Reading.Tables;
+
+/// <summary>A table with what later checks need: its draft, the line of each row, and whether its CSV could be read whole.</summary>
+internal sealed record ReadTable(Table Table, TableDraft Draft, IReadOnlyList<int> Lines, bool IsWhole)
+{
+    public Place PlaceOf(int row) => new(Table.File, Lines[row]);
+
+    public string Address(int measure, int row) => FigureAddress.Canonical(Table, Table.Measures[measure], row);
+}

@@ -1,0 +1,72 @@
+using ReleaseKit.Reading.Mechanisms;
+using ReleaseKit.Releases;
+using ReleaseKit.Review;
+
+namespace ReleaseKit.Reading.Tables;
+
+/// <summary>Every figure has a rule, and every number that a mechanism takes from a column is there, row by row.</summary>
+internal static class RuleChecks
+{
+    public static void Run(ReadTable read, MechanismsDraft mechanisms, FindingLog log)
+    {
+        for (var measure = 0; measure < read.Table.Measures.Count; measure++)
+        {
+            CheckRules(read, measure, mechanisms, log);
+            CheckScales(read, measure, log);
+            CheckDeclared(read, measure, log);
+        }
+    }
+
+    private static void CheckRules(ReadTable read, int measure, MechanismsDraft mechanisms, FindingLog log)
+    {
+        var (figure, draft) = (read.Table.Measures[measure], read.Draft.Figures[measure]);
+        if (draft.HasLaterRules || HasBrokenRule(draft, mechanisms))
+            return;
+        if (figure.Rules.Count == 1)
+            log.Add(TableProblems.NoNoise(draft.At, figure.Column, FindingOwner.Noise));
+        else
+            foreach (var row in RowsWithout(figure, read.Table))
+                log.Add(TableProblems.NoRule(read.PlaceOf(row), read.Address(measure, row), figure.Column, FindingOwner.Noise));
+    }
+
+    /// <summary>Whether a rule could not be read, so that rows without one are no further fault.</summary>
+    private static bool HasBrokenRule(FigureDraft draft, MechanismsDraft mechanisms) => mechanisms.Account is null
+        || draft.Rules?.Any(rule => rule.End is null || (rule.End is RuleEnd.Mechanism named && mechanisms.Find(named.Id) is null)) == true;
+
+    private static IEnumerable<int> RowsWithout(Measure figure, Table table) => Enumerable.Range(0, table.RowCount)
+        .Where(row => figure.RuleAt(row) is NoiseRule.NotGiven && (figure.HasNumber(row) || (figure.StatusAt(row) == 'Q' && table.Hidden?.InTotals == true)));
+
+    /// <summary>Columns that give a law's parameter hold a positive number in range in every row of the mechanism that has one.</summary>
+    private static void CheckScales(ReadTable read, int measure, FindingLog log)
+    {
+        var figure = read.Table.Measures[measure];
+        foreach (var mechanism in figure.Rules.OfType<NoiseRule.FromMechanism>().Select(rule => rule.Mechanism).Distinct())
+            foreach (var (key, value) in mechanism.Parameters.Where(parameter => parameter.Value.Column is not null))
+                if (read.Table.SideColumns.FirstOrDefault(side => side.Column == value.Column) is { } side)
+                    CheckScale(read, figure, mechanism, key, side, log);
+    }
+
+    private static void CheckScale(ReadTable read, Measure figure, Mechanism mechanism, string key, SideColumn side, FindingLog log)
+    {
+        for (var row = 0; row < read.Table.RowCount; row++)
+        {
+            if (figure.RuleAt(row) is not NoiseRule.FromMechanism { Mechanism: var used } || used != mechanism || !figure.HasNumber(row))
+                continue;
+            var number = side.Numbers[row];
+            if (!(number > 0))
+                log.Add(TableProblems.ScaleNotPositive(read.PlaceOf(row), side.Column, key, FindingOwner.Noise));
+            else if (!LawReader.IsInRange(key, number))
+                log.Add(MechanismProblems.ParameterOutOfRange(
+                    read.PlaceOf(row), key, $"{number.ToString("R", System.Globalization.CultureInfo.InvariantCulture)} (column \"{side.Column}\")", FindingOwner.Noise));
+        }
+    }
+
+    /// <summary>A figure of a mechanism that is only declared would have to be stated, which is of a later version.</summary>
+    private static void CheckDeclared(ReadTable read, int measure, FindingLog log)
+    {
+        foreach (var rule in read.Table.Measures[measure].Rules.OfType<NoiseRule.FromMechanism>().Where(rule => rule.Mechanism.Law == LawName.Declared))
+            log.Add(Keys.KeyProblems.NotYet(
+                read.Draft.Figures[measure].At, "stated", FindingOwner.Noise,
+                $"leave \"{read.Draft.Figures[measure].Column}\" out: the margin of a figure of \"{rule.Mechanism.Id}\", whose law is only declared, would have to be stated."));
+    }
+}
