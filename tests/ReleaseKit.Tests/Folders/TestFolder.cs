@@ -1,6 +1,7 @@
 using System.Text;
 using ReleaseKit.Reading;
 using ReleaseKit.Review;
+using Xunit;
 
 namespace ReleaseKit.Tests.Folders;
 

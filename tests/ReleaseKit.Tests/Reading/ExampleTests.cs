@@ -1,6 +1,7 @@
 using ReleaseKit.Reading;
 using ReleaseKit.Releases;
 using ReleaseKit.Tests.Folders;
+using Xunit;
 
 namespace ReleaseKit.Tests.Reading;
 
