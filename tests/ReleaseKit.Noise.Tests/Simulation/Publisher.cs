@@ -4,60 +4,63 @@ namespace ReleaseKit.Noise.Tests.Simulation;
 
 /// <summary>
 /// What an office does to a noised value, step by step and in decimal arithmetic: written from the meaning of the steps, sharing nothing with the code
-/// under test. Every outcome comes with its chance (1, but for random rounding); null is "not published".
+/// under test. Null is "not published".
 /// </summary>
 internal static class Publisher
 {
+    /// <summary>Every published value there can be, with its chance; several only under random rounding.</summary>
     public static IEnumerable<(double? Published, double Chance)> Outcomes(IReadOnlyList<AfterStep> steps, double noised)
     {
-        IEnumerable<(decimal? Value, double Chance)> outcomes = [((decimal)noised, 1.0)];
-        foreach (var step in steps)
-            outcomes = outcomes.SelectMany(outcome => outcome.Value is { } value
-                ? After(step, value).Select(next => (next.Value, outcome.Chance * next.Chance))
-                : [outcome]);
-        return outcomes.Where(outcome => outcome.Chance > 0).Select(outcome => ((double?)outcome.Value, outcome.Chance));
+        var place = steps.ToList().FindIndex(step => step is AfterStep.RoundTo { How: RoundingHow.AtRandom });
+        if (place < 0)
+            return [(Publish(steps, noised, false), 1)];
+        var up = ChanceOfUp((AfterStep.RoundTo)steps[place], Publish([.. steps.Take(place)], noised, false));
+        return [(Publish(steps, noised, false), 1 - up), (Publish(steps, noised, true), up)];
     }
 
+    /// <summary>One published value, random rounding drawn.</summary>
     public static double? Draw(IReadOnlyList<AfterStep> steps, double noised, Random random)
     {
-        var left = random.NextDouble();
-        foreach (var (published, chance) in Outcomes(steps, noised))
+        decimal? value = (decimal)noised;
+        for (var i = 0; i < steps.Count && value is not null; i++)
         {
-            left -= chance;
-            if (left < 0)
-                return published;
+            var up = steps[i] is AfterStep.RoundTo { How: RoundingHow.AtRandom } round && random.NextDouble() < ChanceOfUp(round, (double?)value);
+            value = After(steps[i], value.Value, up);
         }
-        return Outcomes(steps, noised).Last().Published;
+        return (double?)value;
     }
 
-    private static IEnumerable<(decimal? Value, double Chance)> After(AfterStep step, decimal value) => step switch
+    private static double? Publish(IReadOnlyList<AfterStep> steps, double noised, bool up)
     {
-        AfterStep.RoundTo round => Rounded(round, value),
-        AfterStep.NotBelow lower => [(Math.Max(value, (decimal)lower.Bound), 1)],
-        AfterStep.NotAbove upper => [(Math.Min(value, (decimal)upper.Bound), 1)],
-        AfterStep.ZeroBelow zero => [(value < (decimal)zero.Threshold ? 0 : value, 1)],
-        AfterStep.PublishedFrom from => [(value < (decimal)from.Threshold ? null : value, 1)],
+        decimal? value = (decimal)noised;
+        for (var i = 0; i < steps.Count && value is not null; i++)
+            value = After(steps[i], value.Value, up);
+        return (double?)value;
+    }
+
+    private static decimal? After(AfterStep step, decimal value, bool up) => step switch
+    {
+        AfterStep.RoundTo round => Rounded(round, value / (decimal)round.Unit, up) * (decimal)round.Unit,
+        AfterStep.NotBelow lower => Math.Max(value, (decimal)lower.Bound),
+        AfterStep.NotAbove upper => Math.Min(value, (decimal)upper.Bound),
+        AfterStep.ZeroBelow zero => value < (decimal)zero.Threshold ? 0 : value,
+        AfterStep.PublishedFrom from => value < (decimal)from.Threshold ? null : value,
         _ => throw new ArgumentException($"No step is called {step}."),
     };
 
-    private static IEnumerable<(decimal? Value, double Chance)> Rounded(AfterStep.RoundTo round, decimal value)
+    private static decimal Rounded(AfterStep.RoundTo round, decimal quotient, bool up) => (round.How, round.Ties) switch
     {
-        var unit = (decimal)round.Unit;
-        var quotient = value / unit;
-        var up = (double)(quotient - Math.Floor(quotient));
-        return round.How switch
-        {
-            RoundingHow.Down => [(Math.Floor(quotient) * unit, 1)],
-            RoundingHow.Up => [(Math.Ceiling(quotient) * unit, 1)],
-            RoundingHow.AtRandom => [(Math.Floor(quotient) * unit, 1 - up), (Math.Ceiling(quotient) * unit, up)],
-            _ => [(Nearest(quotient, round.Ties) * unit, 1)],
-        };
-    }
-
-    private static decimal Nearest(decimal quotient, RoundingTies ties) => ties switch
-    {
-        RoundingTies.Away => Math.Round(quotient, MidpointRounding.AwayFromZero),
-        RoundingTies.Even => Math.Round(quotient, MidpointRounding.ToEven),
+        (RoundingHow.Down, _) => Math.Floor(quotient),
+        (RoundingHow.Up, _) => Math.Ceiling(quotient),
+        (RoundingHow.AtRandom, _) => up ? Math.Ceiling(quotient) : Math.Floor(quotient),
+        (_, RoundingTies.Away) => Math.Round(quotient, MidpointRounding.AwayFromZero),
+        (_, RoundingTies.Even) => Math.Round(quotient, MidpointRounding.ToEven),
         _ => Math.Floor(quotient + 0.5m),
     };
+
+    private static double ChanceOfUp(AfterStep.RoundTo round, double? value)
+    {
+        var quotient = (decimal)value!.Value / (decimal)round.Unit;
+        return (double)(quotient - Math.Floor(quotient));
+    }
 }
