@@ -20,7 +20,7 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
     private readonly double passing = chain.Passing();
     private readonly double stride = law is LatticeLaw ? 1 : Math.Sqrt(law.Variance);
 
-    /// <summary>The ends for a value that passed the threshold, in the figure's unit; the upper one is never below the published value.</summary>
+    /// <summary>The ends for a value that passed the threshold, in the figure's unit; the published value is never outside.</summary>
     public (double Low, double High) At(double published, Coverage coverage)
     {
         var tail = coverage.Rest / 2 * (1 - Slack);
@@ -31,7 +31,7 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
         var high = IsNotTooLow(exceeding, start, tail)
             ? Search.Farthest(start, stride, lattice is not null, x => IsNotTooLow(exceeding, x, tail))
             : start;
-        return (low * chain.Unit, high * chain.Unit);
+        return (Math.Min(low, start) * chain.Unit, high * chain.Unit);
     }
 
     /// <summary>The largest value before noise, in the figure's unit, that fails the threshold with a chance above (1 − c)/2.</summary>
