@@ -4,11 +4,11 @@ using ReleaseKit.Releases;
 
 namespace ReleaseKit.Reading;
 
-/// <summary>What only shows when everything has been read: names that clash, addresses that lead nowhere, totals and their parts, prose.</summary>
+/// <summary>What only shows when everything has been read: names that clash, addresses that lead nowhere, totals and their parts.</summary>
 internal static class FolderChecks
 {
     public static void Run(
-        ReleaseDraft draft, IReadOnlyList<ReadTable> tables, IReadOnlyList<ProsePage> prose, MechanismsDraft mechanisms, Release release, FindingLog log)
+        ReleaseDraft draft, IReadOnlyList<ReadTable> tables, MechanismsDraft mechanisms, Release release, FindingLog log)
     {
         NameChecks.Run(draft, log);
         foreach (var table in tables.Where(table => table.IsWhole))

@@ -12,5 +12,8 @@ public sealed record ReadOutcome(Release? Release, IReadOnlyList<Finding> Findin
 {
     public NoiseAccount? Noise { get; init; }
 
+    /// <summary>Whether every table could be read whole; if not, addresses that lead nowhere are no further fault.</summary>
+    public bool TablesAreWhole { get; init; } = true;
+
     public bool HasStops => Findings.Any(finding => finding.Level == FindingLevel.Stop);
 }

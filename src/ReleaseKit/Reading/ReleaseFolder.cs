@@ -33,6 +33,7 @@ public static class ReleaseFolder
     private sealed class FolderReading(FolderFiles files)
     {
         private readonly FindingLog log = new();
+        private bool tablesAreWhole = true;
 
         public ReadOutcome Read()
         {
@@ -44,7 +45,7 @@ public static class ReleaseFolder
             if (files.Exists("wording"))
                 log.Add(ReleaseProblems.WordingNotYet(new Place("wording"), FindingOwner.Writer));
             var formed = draft is null ? LoneTables() : Form(draft, mechanisms, signOff);
-            return new ReadOutcome(formed, log.ToList()) { Noise = mechanisms.Account };
+            return new ReadOutcome(formed, log.ToList()) { Noise = mechanisms.Account, TablesAreWhole = tablesAreWhole };
         }
 
         private Release? Form(ReleaseDraft draft, MechanismsDraft mechanisms, SignOff signOff)
@@ -54,7 +55,8 @@ public static class ReleaseFolder
             var tables = CoverAssigner.Assign(read, mechanisms, draft.HasAllTables, log);
             var prose = ProseReader.Read(draft.Narrative, files, Context(FindingOwner.Writer));
             var release = Assemble(draft, tables, prose, mechanisms, signOff);
-            FolderChecks.Run(draft, tables, prose, mechanisms, release, log);
+            FolderChecks.Run(draft, tables, mechanisms, release, log);
+            tablesAreWhole = draft.HasAllTables && tables.All(table => table.IsWhole);
             return mechanisms.Account is null ? null : release;
         }
 

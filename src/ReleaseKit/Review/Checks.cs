@@ -1,3 +1,5 @@
+using ReleaseKit.Review.Prose;
+
 namespace ReleaseKit.Review;
 
 /// <summary>Every check that a review runs after reading. What reading itself finds (structure) is not repeated here.</summary>
@@ -5,5 +7,10 @@ public static class Checks
 {
     public static IReadOnlyList<IReviewCheck> All { get; } =
     [
+        new ProseLinkCheck(),
+        new ProseHeadingCheck(),
+        new ProseLiteralCheck(),
+        new ProseNameCheck(),
+        new HiddenPartCheck(),
     ];
 }

@@ -4,6 +4,7 @@ using ReleaseKit.Reading.Json;
 using ReleaseKit.Reading.Keys;
 using ReleaseKit.Reading.Tables;
 using ReleaseKit.Releases;
+using ReleaseKit.Review;
 
 namespace ReleaseKit.Reading.Prose;
 
@@ -21,7 +22,13 @@ internal static class ProseReader
         var invalid = Utf8Text.FirstInvalid(bytes);
         if (invalid < 0 && !bytes.AsSpan().Contains((byte)0))
             return new ProsePage(file, language, Encoding.UTF8.GetString(bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes.AsSpan(3) : bytes));
-        context.Add(ProseProblems.NoUtf8(new LineMap(file, bytes).At(invalid < 0 ? bytes.AsSpan().IndexOf((byte)0) : invalid), context.Owner));
+        context.Add(NoUtf8(new LineMap(file, bytes).At(invalid < 0 ? bytes.AsSpan().IndexOf((byte)0) : invalid), context.Owner));
         return null;
     }
+
+    private static Finding NoUtf8(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-encoding", owner, at,
+        "This is no UTF-8 text.",
+        "letters beyond a to z would be read wrong.",
+        "save the file as UTF-8.");
 }

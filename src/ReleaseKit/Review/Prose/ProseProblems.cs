@@ -1,18 +1,11 @@
 using ReleaseKit.Reading.Keys;
 using ReleaseKit.Releases;
-using ReleaseKit.Review;
 
-namespace ReleaseKit.Reading.Prose;
+namespace ReleaseKit.Review.Prose;
 
 /// <summary>What can be wrong in prose, one factory a failure.</summary>
 internal static class ProseProblems
 {
-    public static Finding NoUtf8(Place at, FindingOwner owner) => new(
-        FindingLevel.Stop, "prose-encoding", owner, at,
-        "This is no UTF-8 text.",
-        "letters beyond a to z would be read wrong.",
-        "save the file as UTF-8.");
-
     public static Finding NoTitle(Place at, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-title", owner, at,
         "This page has no heading, or its first heading is empty.",

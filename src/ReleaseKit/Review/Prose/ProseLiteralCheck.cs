@@ -1,0 +1,47 @@
+using System.Text.RegularExpressions;
+using Markdig.Syntax;
+using Markdig.Syntax.Inlines;
+using ReleaseKit.Pages.Prose;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Prose;
+
+/// <summary>What stands literally in the text and was meant to do something: links that were not understood, HTML, characters that cannot be seen.</summary>
+internal sealed partial class ProseLiteralCheck : IReviewCheck
+{
+    public IEnumerable<Finding> Check(ReviewSubject subject) => subject.Release?.Narrative.SelectMany(CheckPage) ?? [];
+
+    private static IEnumerable<Finding> CheckPage(ProsePage page)
+    {
+        var understood = Understood(ProseDocument.Parse(page.Markdown)).ToList();
+        bool IsLiteral(int at) => !understood.Any(span => at >= span.Start && at <= span.End);
+        var links = LiteralLink.Matches(page.Markdown).Where(match => IsLiteral(match.Index))
+            .Select(match => ProseProblems.LiteralLink(PlaceOf(match.Index, page), FindingOwner.Writer));
+        var html = Tag.Matches(page.Markdown).Where(match => IsLiteral(match.Index))
+            .Select(match => ProseProblems.Html(PlaceOf(match.Index, page), match.Value, FindingOwner.Writer));
+        return links.Concat(html).Concat(Hidden(page));
+    }
+
+    private static IEnumerable<Finding> Hidden(ProsePage page) => page.Markdown
+        .Select((letter, index) => (letter, index))
+        .Where(pair => pair.letter is not ('\n' or '\r' or '\t') && Reading.Keys.HiddenCharacters.IsOne(pair.letter))
+        .Take(1)
+        .Select(pair => ProseProblems.HiddenCharacter(PlaceOf(pair.index, page), pair.letter, FindingOwner.Writer));
+
+    /// <summary>The parts of the text that links, images and code take up.</summary>
+    private static IEnumerable<SourceSpan> Understood(MarkdownDocument document) =>
+        document.Descendants<Inline>().Where(inline => inline is LinkInline or AutolinkInline or CodeInline).Select(inline => inline.Span)
+            .Concat(document.Descendants<CodeBlock>().Select(block => block.Span));
+
+    private static Place PlaceOf(int index, ProsePage page)
+    {
+        var before = page.Markdown.AsSpan(0, index);
+        return new Place(page.File, before.Count('\n') + 1, index - before.LastIndexOf('\n'));
+    }
+
+    [GeneratedRegex(@"\]\((figure|chart):")]
+    private static partial Regex LiteralLink { get; }
+
+    [GeneratedRegex(@"</?[A-Za-z][A-Za-z0-9-]*(\s[^<>\n]{0,200})?/?>|<!--")]
+    private static partial Regex Tag { get; }
+}
