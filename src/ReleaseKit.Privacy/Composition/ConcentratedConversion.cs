@@ -51,6 +51,12 @@ public static class ConcentratedConversion
         return Rho.Of(Ascend(epsilon.Value, Math.Log(delta.Value)));
     }
 
+    /// <summary>The order α at which the conversion of ρ at ε is smallest: to follow it with a calculator.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">ρ is 0 or infinite, or ε infinite: there is no such order.</exception>
+    public static double OrderAt(Rho rho, Epsilon epsilon) => rho is { IsFinite: true, Value: > 0 } && epsilon.IsFinite
+        ? BestOrder(rho.Value, epsilon.Value)
+        : throw new ArgumentOutOfRangeException(nameof(rho), rho, "The conversion of 0 or of no bound has no order.");
+
     // ln δ is a minimum of lines in ε, so concave: Newton's steps from above stay above the root and never pass it.
     private static double Descend(double rho, double logDelta, double epsilon)
     {

@@ -11,9 +11,9 @@ public sealed class MechanismLoss
 {
     private readonly UnitMovement movement;
 
-    private MechanismLoss(UnitMovement movement)
+    private MechanismLoss(UnitMovement movement, NeighbourRelation relation)
     {
-        this.movement = movement;
+        (this.movement, Relation) = (movement, relation);
         PureTerms = movement.Worst(loss => loss.Pure(movement.LargestShift).Upper.Value, PureOf);
         ConcentratedTerms = movement.Worst(loss => loss.Concentrated(movement.LargestShift).Upper.Value, ConcentratedOf, concentrated: true);
         Pure = new(
@@ -23,6 +23,12 @@ public sealed class MechanismLoss
             Rho.Of(movement.Proven(loss => loss.Concentrated(movement.LargestShift).Upper.Value, term => term.Loss.Concentrated(term.Shift).Lower.Value)),
             BasicComposition.Sum(ConcentratedTerms.Select(term => term.Cells * term.Loss.Concentrated(term.Shift).Upper)));
     }
+
+    /// <summary>Which data are neighbours.</summary>
+    public NeighbourRelation Relation { get; }
+
+    /// <summary>The furthest that one cell can be moved, in the unit of the figure; for a bound on a norm, that bound.</summary>
+    public double LargestShift => movement.LargestShift;
 
     /// <summary>ε without δ; infinite where the law has none.</summary>
     public Bounds<Epsilon> Pure { get; }
@@ -45,7 +51,7 @@ public sealed class MechanismLoss
     {
         if (cells.Count == 0)
             throw new ArgumentException("A mechanism without a cell has no law.", nameof(cells));
-        return new MechanismLoss(UnitMovement.Of(new CellOrder(cells), unit, relation));
+        return new MechanismLoss(UnitMovement.Of(new CellOrder(cells), unit, relation), relation);
     }
 
     /// <summary>δ at an ε: the exact curve where it is known in closed form, else the smallest of the bounds that hold.</summary>
@@ -58,8 +64,8 @@ public sealed class MechanismLoss
         return new(Delta.Min(one.Loss.DeltaAt(epsilon, one.Shift).Lower, upper), upper);
     }
 
-    /// <summary>The smallest ε at a δ; infinite where δ is never that small.</summary>
-    public Bounds<Epsilon> EpsilonAt(Delta delta) => new(
+    /// <summary>The smallest ε at a δ; infinite where δ is never that small. At δ = 0 that is the pure loss.</summary>
+    public Bounds<Epsilon> EpsilonAt(Delta delta) => delta == Delta.Zero ? Pure : new(
         Smallest(epsilon => DeltaAt(epsilon).Lower <= delta),
         Epsilon.Min(Pure.Upper, Smallest(epsilon => DeltaAt(epsilon).Upper <= delta)));
 

@@ -25,7 +25,7 @@ public static class OddsBound
     /// </summary>
     /// <param name="curve">The guarantee.</param>
     /// <param name="beta">β &gt; 0: the share of outcomes that may break the bound.</param>
-    public static Epsilon EpsilonPrime(PrivacyCurve curve, Delta beta)
+    public static OddsLimit Of(PrivacyCurve curve, Delta beta)
     {
         double Bound(double epsilon)
         {
@@ -33,8 +33,15 @@ public static class OddsBound
             return share >= 1 ? double.PositiveInfinity : epsilon - SpecialFunctions.Log1p(-share);
         }
 
-        return curve.LastUseful.IsFinite
-            ? Epsilon.Of(Valley.Lowest(Bound, curve.EpsilonAt(beta).Value, curve.LastUseful.Value))
-            : Epsilon.Infinite;
+        if (!curve.LastUseful.IsFinite)
+            return new OddsLimit(Epsilon.Infinite, Epsilon.Infinite, Delta.One);
+        var (place, height) = Valley.Lowest(Bound, curve.EpsilonAt(beta).Value, curve.LastUseful.Value);
+        return new OddsLimit(Epsilon.Of(height), Epsilon.Of(place), curve.DeltaAt(Epsilon.Of(place)));
     }
 }
+
+/// <summary>By how much odds can change, and where on the curve that was found.</summary>
+/// <param name="EpsilonPrime">ε′; odds change by e^ε′ at most.</param>
+/// <param name="At">ε₀, where the minimum was found.</param>
+/// <param name="DeltaThere">δ(ε₀).</param>
+public readonly record struct OddsLimit(Epsilon EpsilonPrime, Epsilon At, Delta DeltaThere);

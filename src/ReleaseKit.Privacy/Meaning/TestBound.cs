@@ -22,6 +22,6 @@ public static class TestBound
         double Few(double epsilon) => (Math.Exp(epsilon) * falseAlarms) + curve.DeltaAt(Epsilon.Of(epsilon)).Value;
         double Many(double epsilon) => 1 - (Math.Exp(-epsilon) * (1 - falseAlarms - curve.DeltaAt(Epsilon.Of(epsilon)).Value));
         var last = curve.LastUseful.Value;
-        return Math.Clamp(Math.Min(Valley.Lowest(Few, 0, last), Valley.Lowest(Many, 0, last)), falseAlarms, 1);
+        return Math.Clamp(Math.Min(Valley.Lowest(Few, 0, last).Height, Valley.Lowest(Many, 0, last).Height), falseAlarms, 1);
     }
 }

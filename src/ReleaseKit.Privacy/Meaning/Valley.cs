@@ -6,18 +6,20 @@ internal static class Valley
     private const int Steps = 60;
     private static readonly double Golden = (Math.Sqrt(5) - 1) / 2;
 
-    /// <summary>The lowest of the values looked at by golden section between two ends, the ends included.</summary>
-    public static double Lowest(Func<double, double> height, double left, double right)
+    /// <summary>The lowest of the places looked at by golden section between two ends, the ends included, and the height there.</summary>
+    public static (double Place, double Height) Lowest(Func<double, double> height, double left, double right)
     {
-        var lowest = height(right);
+        var lowest = (Place: right, Height: height(right));
+        void Look(double place, double found) => lowest = found < lowest.Height ? (place, found) : lowest;
         if (!(left < right))
             return lowest;
-        lowest = Math.Min(lowest, height(left));
+        Look(left, height(left));
         for (var step = 0; step < Steps; step++)
         {
             var part = Golden * (right - left);
             var (onLeft, onRight) = (height(right - part), height(left + part));
-            lowest = Math.Min(lowest, Math.Min(onLeft, onRight));
+            Look(right - part, onLeft);
+            Look(left + part, onRight);
             (left, right) = onLeft <= onRight ? (left, left + part) : (right - part, right);
         }
 

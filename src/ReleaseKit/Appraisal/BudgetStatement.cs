@@ -1,3 +1,4 @@
+using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Appraisal;
@@ -62,5 +63,5 @@ public sealed record BudgetStatement
     public required IReadOnlyList<AccountStep> Steps { get; init; }
 
     /// <summary>The account of a release.</summary>
-    public static BudgetStatement Of(Release release) => throw new NotSupportedException("The account is not built yet.");
+    public static BudgetStatement Of(Release release) => new StatementBuilder(release).Build();
 }

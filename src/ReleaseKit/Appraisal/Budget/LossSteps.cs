@@ -1,0 +1,49 @@
+using ReleaseKit.Privacy.Losses;
+
+namespace ReleaseKit.Appraisal.Budget;
+
+/// <summary>How the loss of one mechanism was reached: what one unit moves, then what the law spends on that.</summary>
+internal static class LossSteps
+{
+    public static IEnumerable<AccountStep> Of(MechanismSpending spending, LossTotal upper, Accountant accountant)
+    {
+        var amount = accountant.AmountOf(upper);
+        var sign = accountant.Currency == LossCurrency.Rho ? "ρ" : "ε";
+        if (spending.Loss is not { } loss)
+            return [Named(spending, new AccountStep(double.IsInfinity(amount) ? AccountSteps.Unbounded : AccountSteps.Stated, $"{sign} = {Signs.Of(amount)}", amount, upper.Rule))];
+        var terms = accountant.Currency == LossCurrency.Rho ? loss.ConcentratedTerms : loss.PureTerms;
+        return new[] { Moved(spending, loss, terms), Lost(sign, amount, upper, terms, accountant) }.Select(step => Named(spending, step));
+    }
+
+    private static AccountStep Moved(MechanismSpending spending, MechanismLoss loss, IReadOnlyList<LossTerm> terms) => spending.Mechanism.Sensitivity switch
+    {
+        { CellsPerUnit: >= 1, PerCell: > 0 } => Cells(spending, loss, terms.Sum(term => term.Cells)),
+        { L1: { } sum } => new AccountStep(AccountSteps.AbsoluteSum, $"Δ₁ = {Signs.Of(sum)}", sum, AccountRules.Declared),
+        var other => new AccountStep(AccountSteps.Distance, $"Δ₂ = {Signs.Of(other.L2 ?? 0)}", other.L2 ?? 0, AccountRules.Declared),
+    };
+
+    private static AccountStep Cells(MechanismSpending spending, MechanismLoss loss, long moved)
+    {
+        var key = loss.Relation == NeighbourRelation.Replace ? AccountSteps.MovedByReplacing : AccountSteps.MovedByAdding;
+        var shifts = loss.LargestShift == spending.Mechanism.Sensitivity.PerCell ? $"{moved}" : $"{moved}, by {Signs.Of(loss.LargestShift)}";
+        return new AccountStep(key, shifts, moved, AccountRules.Declared);
+    }
+
+    private static AccountStep Lost(string sign, double amount, LossTotal upper, IReadOnlyList<LossTerm> terms, Accountant accountant)
+    {
+        if (double.IsInfinity(amount))
+            return new AccountStep(AccountSteps.Unbounded, $"{sign} = ∞", amount, upper.Rule);
+        if (upper.Rule == AccountRules.ExactCurve)
+            return new AccountStep(AccountSteps.Curve, $"δ({Signs.Of(amount)}) = {Signs.Of(upper.Delta ?? 0)}", amount, upper.Rule);
+        var parts = terms.Select(term => Part(term, accountant.Currency));
+        return new AccountStep(AccountSteps.Loss, $"{sign} = {Signs.Plus(parts)} = {Signs.Of(amount)}", amount, upper.Rule);
+    }
+
+    private static string Part(LossTerm term, LossCurrency currency)
+    {
+        var one = currency == LossCurrency.Rho ? term.Loss.ConcentratedArithmetic(term.Shift) : term.Loss.PureArithmetic(term.Shift);
+        return term.Cells == 1 ? one : $"{term.Cells} × {one}";
+    }
+
+    private static AccountStep Named(MechanismSpending spending, AccountStep step) => step with { Mechanism = spending.Mechanism.Id };
+}
