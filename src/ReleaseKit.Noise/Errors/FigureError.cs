@@ -12,11 +12,18 @@ namespace ReleaseKit.Noise.Errors;
 /// </remarks>
 public sealed class FigureError
 {
+    // Values more grid steps than this from 0 are worked out anew each time, so that what is kept stays small.
+    private const double MostKept = 10_000;
+
     private readonly StepChain chain;
     private readonly RoundedError? rounded;
     private readonly ThresholdRange? threshold;
     private readonly LikelihoodRatioRange? likelihood;
     private readonly ConcurrentDictionary<Coverage, HalfWidth> margins = new();
+
+    // On a lattice the same few values come again and again near a threshold or below a bound; continuous ones seldom repeat and are not kept.
+    private readonly ConcurrentDictionary<(double Value, Coverage Coverage), (double Low, double High)> passedRanges = new();
+    private readonly ConcurrentDictionary<(double Value, Coverage Coverage), (double Low, double High)> reaches = new();
 
     private FigureError(NoiseLaw law, StepChain chain)
     {
@@ -80,7 +87,7 @@ public sealed class FigureError
             return PlainRange(published, coverage, possible);
         if (published == 0 && Steps.Any(step => step is AfterStep.ZeroBelow))
             return RangeWhenNotPublished(coverage, possible);
-        var (low, high) = threshold.At(published, coverage);
+        var (low, high) = Kept(passedRanges, published, coverage, threshold.At);
         return possible.Cut(low, Math.Max(high, BeyondLowest(published, coverage, possible)), coverage.Share);
     }
 
@@ -130,9 +137,17 @@ public sealed class FigureError
     // How far from a bound at 0 the likelihood-ratio range reaches for a value on its wrong side; the plain margin where that is not worked out.
     private double LikelyReach(double value, Coverage coverage)
     {
-        var reach = likelihood?.UpperEnd(value, 0, coverage) ?? double.NaN;
+        var reach = likelihood is null ? double.NaN : Kept(reaches, value, coverage, (v, c) => (0, likelihood.UpperEnd(v, 0, c))).High;
         return double.IsNaN(reach) ? MarginAt(coverage).Width : Math.Max(reach, Law is LatticeLaw ? chain.Unit : 0);
     }
+
+    private (double Low, double High) Kept(
+        ConcurrentDictionary<(double Value, Coverage Coverage), (double Low, double High)> known,
+        double value,
+        Coverage coverage,
+        Func<double, Coverage, (double, double)> workOut) => Law is LatticeLaw && Math.Abs(value) <= MostKept * chain.Unit
+            ? known.GetOrAdd((value, coverage), key => workOut(key.Value, key.Coverage))
+            : workOut(value, coverage);
 
     private HalfWidth WorkOutMargin(Coverage coverage)
     {

@@ -7,12 +7,13 @@ namespace ReleaseKit.Noise.Laws;
 /// smaller for s below about 1. Canonne, Kamath &amp; Steinke 2020, The discrete Gaussian for differential privacy, Definition 1 (numbering from memory).
 /// </summary>
 /// <remarks>
-/// Narrow laws (s &lt; 16) are summed term by term. For wide ones the normaliser is s√(2π) to 1e-2000 (Poisson summation) and a tail sum is its
-/// integral from half a step before with six terms of the Euler–Maclaurin midpoint formula; the rest is below 1e-19 absolute.
+/// Narrow laws (s &lt; 8) are summed term by term. For wide ones the normaliser is s√(2π) to 1e-500 (Poisson summation) and a tail sum is its
+/// integral from half a step before with six terms of the Euler–Maclaurin midpoint formula; the rest is below 1e-19 absolute, and
+/// below 1e-9 relative out to ten sigmas.
 /// </remarks>
 public sealed record DiscreteGaussianLaw : LatticeLaw
 {
-    private const double Wide = 16;
+    private const double Wide = 8;
 
     // (−1)^j times the coefficients of the midpoint formula, −B₂ⱼ(½)/(2j)!: 1/24, 7/5760, 31/967680, … (Abramowitz & Stegun 1964, 23.1; from memory).
     private static readonly double[] Midpoint =
@@ -26,9 +27,9 @@ public sealed record DiscreteGaussianLaw : LatticeLaw
         : base(grid)
     {
         (Sigma, width) = (sigma, sigma / grid);
-        whole = width >= Wide ? width * Constants.Sqrt2Pi : 1 + 2 * SumFrom(1, _ => 1);
-        Variance = width >= Wide ? sigma * sigma : 2 * SumFrom(1, k => k * k) / whole * grid * grid;
-        MeanAbsoluteDeviation = 2 * (width >= Wide ? WideFirstMoment() : SumFrom(1, k => k)) / whole * grid;
+        whole = width >= Wide ? width * Constants.Sqrt2Pi : 1 + 2 * SumFrom(1, 0);
+        Variance = width >= Wide ? sigma * sigma : 2 * SumFrom(1, 2) / whole * grid * grid;
+        MeanAbsoluteDeviation = 2 * (width >= Wide ? WideFirstMoment() : SumFrom(1, 1)) / whole * grid;
     }
 
     /// <summary>The parameter σ &gt; 0, in the unit of the figure.</summary>
@@ -52,22 +53,21 @@ public sealed record DiscreteGaussianLaw : LatticeLaw
     /// <inheritdoc/>
     public override double Probability(long step) => Weight(step) / whole;
 
-    private protected override double TailFrom(long step) => width >= Wide ? WideTail((step - 0.5) / width) : SumFrom(step, _ => 1) / whole;
+    private protected override double TailFrom(long step) => width >= Wide ? WideTail((step - 0.5) / width) : SumFrom(step, 0) / whole;
 
     private double Weight(double step) => Math.Exp(-0.5 * (step / width) * (step / width));
 
-    // Σ factor(k)·e^(−k²/2s²) over k ≥ from; from 1 up the terms fall (after at most a few) until they no longer count.
-    private double SumFrom(long from, Func<double, double> factor)
+    // Σ k^power·e^(−k²/2s²) over k ≥ from, power 0 to 2; the terms fall from k = 2s on, until they no longer count.
+    private double SumFrom(long from, int power)
     {
-        var (sum, step) = (0.0, (double)from);
-        for (var term = 1.0; term > 1e-18 * sum || step <= width + 2; step++)
+        var sum = 0.0;
+        for (var k = (double)from; ; k++)
         {
-            term = factor(step) * Weight(step);
+            var term = (power == 0 ? 1 : power == 1 ? k : k * k) * Weight(k);
             sum += term;
-            if (term == 0)
-                break;
+            if (term == 0 || (term < 1e-18 * sum && k > 2 * width))
+                return sum;
         }
-        return sum;
     }
 
     // Standardised place u, half a step before the first term: Q(u) + φ(u)/s · Σ ± cⱼ He₂ⱼ₋₁(u)/s^(2j−1).
