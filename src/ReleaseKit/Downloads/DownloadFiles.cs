@@ -11,6 +11,9 @@ public static class DownloadFiles
     {
         for (var table = 0; table < context.Release.Tables.Count; table++)
             WriteTable(context, site, table);
+        foreach (var table in context.Release.Tables)
+            using (var stream = site.Create(DownloadNames.Columns(table)))
+                new ColumnsJson(stream, context).Write(table);
         foreach (var mechanism in context.Release.Noise.Mechanisms.Where(mechanism => mechanism.Law == LawName.Tabulated))
             LawCsv.Write(site.Create(DownloadNames.Law(mechanism)), mechanism);
         using (var stream = site.Create(DownloadNames.Budget))

@@ -23,6 +23,9 @@ public static class DownloadNames
     /// <summary>One JSON object a figure, with its noise law and draws.</summary>
     public static string JsonLines(Table table) => $"{Folder}{table.Id}.jsonl";
 
+    /// <summary>What each column of the CSV files of a table means (CSVW).</summary>
+    public static string Columns(Table table) => Wide(table) + "-metadata.json";
+
     /// <summary>The steps and chances of a tabulated law.</summary>
     public static string Law(Mechanism mechanism) => $"{Folder}law-{Slug.Of(mechanism.Id)}.csv";
 

@@ -13,13 +13,8 @@ internal sealed class LongCsv : IRowFile
     {
         csv = new CsvFile(stream);
         this.table = table;
-        string[] columns =
-        [
-            "address", .. table.Stub.Select(column => column.Column), "figure", "value", "margin", "noise_margin", "low", "high",
-            "uncut_low", "uncut_high", "coverage", "reliability", "status", "changed",
-        ];
-        foreach (var column in columns)
-            csv.Text(column);
+        foreach (var column in LongColumn.Of(table))
+            csv.Text(column.Name);
         csv.EndRow();
     }
 

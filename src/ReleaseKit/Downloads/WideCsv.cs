@@ -8,7 +8,6 @@ namespace ReleaseKit.Downloads;
 /// <summary>A row of the table a row; each measure is followed by its margin, range, reliability, status and, where asked for, its reading.</summary>
 internal sealed class WideCsv : IRowFile
 {
-    private static readonly string[] Companions = ["_margin", "_low", "_high", "_reliability", "_status"];
     private readonly CsvFile csv;
     private readonly Table table;
     private readonly Coverage coverage;
@@ -22,7 +21,9 @@ internal sealed class WideCsv : IRowFile
     {
         csv = new CsvFile(stream);
         (this.table, this.coverage, this.readings) = (table, coverage, readings);
-        WriteHeader();
+        foreach (var column in WideColumns.Of(table, readings is not null))
+            csv.Text(column.Name);
+        csv.EndRow();
     }
 
     public void Add(int row, IReadOnlyList<AppraisedFigure> figures)
@@ -36,34 +37,13 @@ internal sealed class WideCsv : IRowFile
 
     public void Dispose() => csv.Dispose();
 
-    private void WriteHeader()
-    {
-        var taken = new HashSet<string>(StringComparer.Ordinal);
-        foreach (var name in table.Stub.Select(column => column.Column).Concat(table.Measures.SelectMany(NamesOf)))
-            csv.Text(Untaken(name, taken));
-        csv.EndRow();
-    }
-
-    private IEnumerable<string> NamesOf(Measure measure) =>
-        Companions.Prepend("").Concat(HasReadings(measure) ? ["_reading"] : []).Select(ending => measure.Column + ending);
-
-    // A table may itself have a measure called in_arrears_margin: two columns of one name would mislead.
-    private static string Untaken(string name, HashSet<string> taken)
-    {
-        while (!taken.Add(name))
-            name += "_";
-        return name;
-    }
-
-    private bool HasReadings(Measure measure) => readings is not null && measure.Shown;
-
     private void WriteFigure(AppraisedFigure figure)
     {
         var range = figure.Ranges.FirstOrDefault(range => range.Coverage == coverage);
         csv.Number(figure.HasNumber ? figure.Value : null)
             .Number(range?.Margin).Number(range?.Low).Number(range?.High)
             .Text(ReliabilityWord.Of(figure.Reliability)).Text(figure.Status.ToString());
-        if (HasReadings(figure.Measure))
+        if (WideColumns.HasReadings(figure.Measure, readings is not null))
             csv.Text(readings!.ReadingOf(figure).Text);
     }
 }

@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Downloads;
 using ReleaseKit.Pages.Downloads;
 using ReleaseKit.Pages.Home;
 using ReleaseKit.Pages.Methods;
@@ -26,6 +27,7 @@ public static class Site
         ProsePages.Write(context, target, Chart);
         ReadingPage.Write(context, target);
         MethodsPage.Write(context, target);
+        DownloadFiles.WriteAll(context, target);
         DownloadsPage.Write(context, target);
         NotFoundPage.Write(context, target);
         progress?.Report(0);
