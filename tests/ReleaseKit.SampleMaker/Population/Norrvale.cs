@@ -33,7 +33,7 @@ public static class Norrvale
             new("Customs Steps", 2099, 1203, 192),
             new("Netherport", 1352, 1023, 322),
             new("Chandlers Row", 1172, 1148, 287),
-            new("Tern Island", 34, 870, 260),
+            new("Tern Island", 26, 870, 260),
             new("Gull Rock", 22, 1073, 318),
         ]),
         new("Cindry",
@@ -45,7 +45,7 @@ public static class Norrvale
             new("Furnace End", 1099, 1430, 362),
             new("Glassworks", 1028, 1438, 195),
             new("Tilers Yard", 2167, 1255, 307),
-            new("Signal Cottages", 17, 1498, 316),
+            new("Signal Cottages", 44, 1498, 316),
         ]),
         new("Dunmarsh",
         [
