@@ -37,6 +37,9 @@ public sealed record MeasureFacts
 
     /// <summary>Whether some figures have ranges whose reach depends on the figure.</summary>
     public required bool HasThreshold { get; init; }
+
+    /// <summary>Whether some figures were rounded on purpose after the noise.</summary>
+    public required bool IsRounded { get; init; }
     public required Noise.Coverage Coverage { get; init; }
 
     /// <summary>The distance that the noise stays within in 999 of 1,000 cases, for the figure where it is largest, as printed.</summary>

@@ -1,4 +1,5 @@
 using ReleaseKit.Noise;
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Appraisal;
@@ -41,6 +42,7 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
         {
             Measure = found.Measure,
             Coverage = release.Coverages.Main,
+            IsRounded = found.Measure.Rules.OfType<NoiseRule.FromMechanism>().Any(rule => rule.Mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any()),
             HasThreshold = margins.Count < found.Errors.Count,
             SmallestMargin = margins.Count == 0 ? null : margins.MinBy(margin => margin.ToDecimal()),
             LargestMargin = margins.Count == 0 ? null : margins.MaxBy(margin => margin.ToDecimal()),

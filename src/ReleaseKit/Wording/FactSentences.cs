@@ -37,18 +37,20 @@ internal sealed class FactSentences(Voice voice)
         var kind = ("kind", voice.Kind(facts.Measure));
         var cases = ("cases", voice.Frequency("coverage.cases.at-least", NaturalFrequency.Of(facts.Coverage)));
         if (facts.HasThreshold)
-            yield return voice.Say("facts.column.ranges", kind, cases);
-        else if (facts.SmallestMargin is { } smallest && facts.LargestMargin is { } largest)
-            yield return smallest == largest
-                ? voice.Say("facts.column", kind, cases, ("margin", voice.WithUnit(largest, facts.Measure.Unit)))
-                : voice.Say("facts.column.several", kind, cases, ("smallest", voice.Numerals.InProse(smallest)), ("largest", voice.WithUnit(largest, facts.Measure.Unit)));
+            return [voice.Say("facts.column.ranges", kind, cases)];
+        if (facts is not { SmallestMargin: { } smallest, LargestMargin: { } largest })
+            return [];
+        var margin = voice.WithUnit(largest, facts.Measure.Unit);
+        return smallest == largest
+            ? [voice.Say("facts.column", kind, cases, ("margin", margin))]
+            : [voice.Say("facts.column.several", kind, cases), voice.Say("facts.column.margins", ("smallest", voice.Numerals.InProse(smallest)), ("largest", margin))];
     }
 
     private IEnumerable<string> Distance(MeasureFacts facts)
     {
         if (facts.Distance999 is { } distance)
             yield return voice.Say(
-                "facts.distance",
+                facts.IsRounded ? "facts.distance.rounded" : "facts.distance",
                 ("cases", voice.Frequency("coverage.cases.at-least", new NaturalFrequency(999, 1000))),
                 ("distance", voice.WithUnit(distance, facts.Measure.Unit)));
     }

@@ -15,7 +15,7 @@ public sealed class Language : ILanguage
     private Language(WordingTexts texts)
     {
         this.texts = texts;
-        voice = new Voice(texts);
+        voice = new Voice(texts, this);
         readings = new ReadingWriter(voice);
         factSentences = new FactSentences(voice);
     }

@@ -17,15 +17,16 @@ public readonly record struct NaturalFrequency(long Cases, long All)
     }
 
     /// <summary>
-    /// A chance worked out, rounded down, of the smallest of 100, 1,000, … 1,000,000 that does not make it look certain or impossible.
+    /// A chance worked out, rounded down, of the smallest of 100, 1,000, … 1,000,000 at which it looks neither certain nor impossible:
+    /// 0.9999 is 9,999 of 10,000, not 99 or 100 of 100.
     /// </summary>
     public static NaturalFrequency About(double chance)
     {
         for (var all = 100L; ; all *= 10)
         {
-            var cases = (long)Math.Floor(Math.Round(chance * all, 9));
-            if (all == LargestAll || (cases > 0 && cases < all))
-                return new(Math.Min(cases, all - 1), all);
+            var cases = Math.Round(chance * all, 9);
+            if (all == LargestAll || (cases >= 1 && Math.Round(cases) < all))
+                return new(Math.Min((long)cases, all - 1), all);
         }
     }
 }

@@ -42,7 +42,7 @@ internal sealed class ReliabilitySentences(Voice voice)
     private IEnumerable<string> Advice(AppraisedFigure figure)
     {
         if (figure.UseInstead is { } total)
-            yield return voice.Say(AdviceKey(figure.Measure), ("place", NameOf(figure.Table, total.Row)));
+            yield return Instead(figure, total.Row);
         else if (!IsSaidAlready(figure))
             yield return voice.Say("reading.not-alone");
     }
@@ -50,13 +50,12 @@ internal sealed class ReliabilitySentences(Voice voice)
     /// <summary>That the margin is as large as the figure.</summary>
     private static bool IsSaidAlready(AppraisedFigure figure) => figure.Case.First is SpecialCase.MarginAsLargeAsFigure;
 
-    private static string AdviceKey(Measure measure) =>
-        measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount ? "reading.use-total" : "reading.use-figure";
-
-    /// <summary>The names of a row that are not "all", or the name of "all" where nothing else is left.</summary>
-    private string NameOf(Table table, int row)
+    private string Instead(AppraisedFigure figure, int row)
     {
-        var named = table.Stub.Where(column => !column.IsAll(row)).Select(column => column.LabelOf(row).In(voice.Tag)).ToList();
-        return string.Join(voice.Say("list.names"), named.Count > 0 ? named : [table.Stub[0].LabelOf(row).In(voice.Tag)]);
+        var key = figure.Measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount ? "reading.use-total" : "reading.use-figure";
+        var named = figure.Table.Stub.Where(column => !column.IsAll(row)).Select(column => voice.Label(column, row)).ToList();
+        return named.Count > 0
+            ? voice.Say(key, ("place", string.Join(voice.Say("list.names"), named)))
+            : voice.Say($"{key}.all", ("place", voice.Label(figure.Table.Stub[0], row)));
     }
 }

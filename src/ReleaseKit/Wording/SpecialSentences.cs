@@ -50,8 +50,10 @@ internal sealed class SpecialSentences(Voice voice)
 
     private string ReadAs(AppraisedFigure figure)
     {
-        var key = figure.Case.First is SpecialCase.BelowZero && figure.Possible.Lowest == 0 ? "reading.read-as.small" : "reading.read-as";
         var printed = figure.Main!.Printed;
+        if (printed.Low == printed.High)
+            return voice.Say("reading.read-as.single", ("low", voice.Numerals.InProse(printed.Low)));
+        var key = figure.Case.First is SpecialCase.BelowZero && figure.Possible.Lowest == 0 ? "reading.read-as.small" : "reading.read-as";
         return voice.Say(key, ("low", voice.Numerals.InProse(printed.Low)), ("high", voice.Numerals.InProse(printed.High)));
     }
 

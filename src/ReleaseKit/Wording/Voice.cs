@@ -4,7 +4,7 @@ using ReleaseKit.Releases;
 namespace ReleaseKit.Wording;
 
 /// <summary>The pieces that sentences of one language are put together from.</summary>
-internal sealed class Voice(WordingTexts texts)
+internal sealed class Voice(WordingTexts texts, ILanguage language)
 {
     /// <summary>Above its nominal value by more than this, a coverage is said to be "at least" so large.</summary>
     private const double CoverageSlack = 1e-9;
@@ -21,6 +21,13 @@ internal sealed class Voice(WordingTexts texts)
     {
         var form = PluralCategory.Form(unit, Tag, value);
         return form.Length == 0 ? Numerals.InProse(value) : $"{Numerals.InProse(value)}{Numerals.NoBreak}{form}";
+    }
+
+    /// <summary>What a row is called in a stub column: its name for readers, else its period in words, else its value.</summary>
+    public string Label(StubColumn column, int row)
+    {
+        var label = column.LabelOf(row);
+        return column.Period && !(label.Name?.Has(Tag) ?? false) ? PeriodText.Of(label.Value, language) : label.In(Tag);
     }
 
     /// <summary>"count", "amount", "share" … of "the count before noise".</summary>

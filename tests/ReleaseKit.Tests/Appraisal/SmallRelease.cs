@@ -7,7 +7,10 @@ using ReleaseKit.Review;
 
 namespace ReleaseKit.Tests.Appraisal;
 
-/// <summary>Builds a release in code: one table, as many measures as a test needs. Values stand as in a CSV; a letter in place of a number is a status.</summary>
+/// <summary>
+/// Builds a release in code: one table, as many measures as a test needs. Values stand as in a CSV; a letter in place of a number, or after it
+/// and a space, is a status.
+/// </summary>
 internal sealed class SmallRelease
 {
     private readonly List<StubColumn> stub = [];
@@ -73,20 +76,21 @@ internal sealed class SmallRelease
     }
 
     /// <summary>A measure whose rows all have one rule.</summary>
-    public SmallRelease Figures(MeasureKind kind, Mechanism mechanism, params string[] values) =>
-        Figures(Measure(kind), [new NoiseRule.FromMechanism(mechanism)], new byte[values.Length], values);
+    public SmallRelease Figures(MeasureKind kind, Mechanism mechanism, params string[] values) => Figures(Measure(kind), mechanism, values);
+
+    public SmallRelease Figures(Measure measure, Mechanism mechanism, params string[] values) =>
+        Figures(measure, [new NoiseRule.FromMechanism(mechanism)], new byte[values.Length], values);
 
     public SmallRelease Figures(Measure measure, IReadOnlyList<NoiseRule> rules, byte[] ruleOf, params string[] values)
     {
-        var isNumber = values.Select(value => char.IsAsciiDigit(value[^1])).ToArray();
-        var numbers = values.Select((value, row) => isNumber[row] ? decimal.Parse(value, CultureInfo.InvariantCulture) : 0).Select(PublishedValue.Of).ToList();
+        var cells = values.Select(Cell).ToList();
         measures.Add(measure with
         {
             Rules = rules,
             RuleOf = ruleOf,
-            Unscaled = [.. numbers.Select(number => number.Unscaled)],
-            DecimalsOf = [.. numbers.Select(number => number.Decimals)],
-            Status = [.. values.Select((value, row) => isNumber[row] ? (byte)'A' : (byte)value[0])],
+            Unscaled = [.. cells.Select(cell => cell.Number.Unscaled)],
+            DecimalsOf = [.. cells.Select(cell => cell.Number.Decimals)],
+            Status = [.. cells.Select(cell => (byte)cell.Status)],
         });
         return this;
     }
@@ -135,6 +139,14 @@ internal sealed class SmallRelease
 
     /// <summary>The appraised figure of one row of the first measure.</summary>
     public AppraisedFigure Figure(int row = 0) => Appraise().Figure(new FigureRef(0, 0, row));
+
+    private static (PublishedValue Number, char Status) Cell(string value)
+    {
+        if (char.IsAsciiLetter(value[0]))
+            return (default, value[0]);
+        var parts = value.Split(' ');
+        return (PublishedValue.Of(decimal.Parse(parts[0], CultureInfo.InvariantCulture)), parts.Length == 1 ? 'A' : parts[1][0]);
+    }
 
     private Table Table() => new()
     {

@@ -1,0 +1,189 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
+using Xunit;
+
+namespace ReleaseKit.Tests.Appraisal;
+
+public sealed class FigureRangeTests
+{
+    private static AppraisedFigure Figure(MeasureKind kind, Mechanism mechanism, string value) => new SmallRelease().Figures(kind, mechanism, value).Figure();
+
+    // Ranges below what is possible, discrete Gaussian 9.5, likelihood-ratio range of Feldman & Cousins 1998, Phys. Rev. D 57, 3873;
+    // worked out once by hand when the rule was set.
+    [Theory]
+    [InlineData("-40", 3)]
+    [InlineData("-25", 4)]
+    [InlineData("-19", 5)]
+    [InlineData("-15", 7)]
+    [InlineData("-10", 10)]
+    public void Count_below_zero_reads_from_zero_to_a_small_number(string value, double high)
+    {
+        var main = Figure(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), value).Main!;
+        Assert.Equal((0, high), (main.Low, main.High));
+        Assert.Equal((0, (long)high), (main.Printed.Low.Unscaled, main.Printed.High.Unscaled));
+    }
+
+    [Fact]
+    public void Figure_at_a_threshold_is_answered_by_the_law_given_that_it_passed()
+    {
+        var main = Figure(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "30").Main!;
+        Assert.Equal((0, 40), (main.Low, main.High));
+        Assert.True(main.Printed.IsUneven);
+    }
+
+    [Fact]
+    public void Margin_of_zero_is_raised_to_one_grid_step()
+    {
+        // Discrete Gaussian with sigma 0.2: P(N = 0) = 1 / (1 + 2 e^(−1/0.08) + …) = 0.9999925.
+        var figure = Figure(MeasureKind.Count, SmallRelease.DiscreteGaussian(0.2), "1240");
+        Assert.All(figure.Ranges, range => Assert.Equal((1, 1239, 1241), (range.Margin, range.Low, range.High)));
+        Assert.Equal(1 / (1 + 2 * Math.Exp(-12.5)), figure.LeftAsItWas!.Value, 1e-9);
+        Assert.True(figure.Main!.Attained > figure.LeftAsItWas);
+        Assert.Equal(SpecialCase.MostlyUnchanged, figure.Case.First);
+    }
+
+    [Fact]
+    public void Margin_of_zero_on_a_grid_is_raised_to_that_grid()
+    {
+        var mechanism = SmallRelease.DiscreteGaussian(0.02) with { Grid = 0.1 };
+        var figure = Figure(MeasureKind.Amount, mechanism, "12.3");
+        Assert.Equal(0.1, figure.Main!.Margin, 1e-12);
+    }
+
+    [Fact]
+    public void Decimals_of_the_file_are_a_rounding_of_continuous_noise()
+    {
+        // Laplace: b ln 20 (Kotz, Kozubowski & Podgórski 2001, 2.1; from memory), and half of 0.01.
+        var figure = Figure(MeasureKind.Mean, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 0.4)), "412.34");
+        Assert.Equal(0.4 * Math.Log(20) + 0.005, figure.Main!.Margin, 1e-9);
+        Assert.False(figure.Case.Rounded);
+    }
+
+    [Fact]
+    public void Decimals_of_the_file_add_nothing_to_rounding_by_the_mechanism()
+    {
+        var mechanism = SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 4)) with { Afterwards = [new AfterStep.RoundTo(5)] };
+        var figure = Figure(MeasureKind.Mean, mechanism, "415");
+        Assert.Equal(4 * Math.Log(20) + 2.5, figure.Main!.Margin, 1e-9);
+        Assert.True(figure.Case.Rounded);
+    }
+
+    [Fact]
+    public void Whole_numbers_of_a_lattice_law_get_no_rounding()
+    {
+        var figure = Figure(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "1240");
+        Assert.Equal((19, 1221, 1259), (figure.Main!.Margin, figure.Main.Low, figure.Main.High));
+    }
+
+    [Fact]
+    public void Share_is_cut_at_a_hundred()
+    {
+        var figure = Figure(MeasureKind.Share, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 1.4)), "99.2");
+        Assert.Equal(100, figure.Main!.High);
+        Assert.True(figure.Main.Printed.HighIsCut);
+        Assert.Equal(99.2 + figure.Main.Margin, figure.Main.UncutHigh, 1e-9);
+    }
+
+    [Fact]
+    public void Declared_bounds_cut_the_range()
+    {
+        var measure = SmallRelease.Measure(MeasureKind.Mean) with { Lowest = 10, Highest = 14 };
+        var figure = new SmallRelease().Figures(measure, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 2)), "12.00").Figure();
+        Assert.Equal((10, 14), (figure.Main!.Low, figure.Main.High));
+    }
+
+    [Fact]
+    public void Law_known_by_its_spending_only_has_no_margin()
+    {
+        var figure = Figure(MeasureKind.Count, SmallRelease.Mechanism("m", LawName.Declared), "12");
+        Assert.Equal((SpecialCase.NoMargin, Reliability.NotStated, 0), (figure.Case.First, figure.Reliability, figure.Ranges.Count));
+    }
+
+    [Fact]
+    public void Figure_made_consistent_has_no_margin()
+    {
+        var figure = Figure(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5) with { Adjusted = true }, "12");
+        Assert.Equal(SpecialCase.NoMargin, figure.Case.First);
+    }
+
+    [Fact]
+    public void Steps_that_do_not_go_together_give_no_margin()
+    {
+        // A threshold after staircase noise (not log-concave) is not worked out.
+        var mechanism = SmallRelease.Mechanism("m", LawName.Staircase, ("epsilon", 1), ("sensitivity", 1), ("gamma", 0.4)) with { Afterwards = [new AfterStep.ZeroBelow(30)] };
+        Assert.Equal(SpecialCase.NoMargin, Figure(MeasureKind.Mean, mechanism, "45.0").Case.First);
+    }
+
+    [Fact]
+    public void Table_of_noise_that_lacks_mass_has_no_margin()
+    {
+        var mechanism = SmallRelease.Mechanism("m", LawName.Tabulated) with { Tabulated = [(-1, 0.2m), (0, 0.5m), (1, 0.2m)] };
+        Assert.Equal(SpecialCase.NoMargin, Figure(MeasureKind.Count, mechanism, "45").Case.First);
+    }
+
+    [Fact]
+    public void Zero_that_stands_for_every_small_amount_has_no_margin()
+    {
+        // Without a least value the range would be without end.
+        Assert.Equal(SpecialCase.NoMargin, Figure(MeasureKind.Amount, SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "0").Case.First);
+    }
+
+    [Fact]
+    public void Figures_alike_share_one_error()
+    {
+        var release = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "1240").Appraise();
+        Assert.Same(release.Figure(new FigureRef(0, 0, 0)).Error, release.Figure(new FigureRef(0, 0, 1)).Error);
+    }
+
+    [Fact]
+    public void Mechanisms_of_the_same_law_and_steps_share_one_error()
+    {
+        var release = new SmallRelease()
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12")
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "other"), SmallRelease.DiscreteGaussian(9.5) with { Id = "other" }, "13")
+            .Appraise();
+        Assert.Same(release.Figure(new FigureRef(0, 0, 0)).Error, release.Figure(new FigureRef(0, 1, 0)).Error);
+    }
+
+    [Fact]
+    public void Exact_figure_prints_the_decimals_of_its_measure()
+    {
+        var measure = SmallRelease.Measure(MeasureKind.Amount) with { Decimals = 2 };
+        var figure = new SmallRelease().Figures(measure, [new NoiseRule.Exact(SmallRelease.Words("law"))], [0], "1234.5").Figure();
+        Assert.Equal((SpecialCase.Exact, Reliability.Exact, "1234.50"), (figure.Case.First, figure.Reliability, figure.Printed.ToString()));
+    }
+
+    [Fact]
+    public void Public_figure_has_no_range()
+    {
+        var figure = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count), [new NoiseRule.Public(SmallRelease.Words("list"))], [0], "12").Figure();
+        Assert.Equal((SpecialCase.Public, Reliability.Public, 0), (figure.Case.First, figure.Reliability, figure.Ranges.Count));
+    }
+
+    [Theory]
+    [InlineData("Q")]
+    [InlineData("L")]
+    [InlineData("M")]
+    [InlineData("O")]
+    public void Cell_without_a_number_has_no_range(string status)
+    {
+        var figure = Figure(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), status);
+        Assert.Equal((SpecialCase.NoNumber, false, 0, Reliability.NotStated), (figure.Case.First, figure.HasNumber, figure.Ranges.Count, figure.Reliability));
+    }
+
+    [Fact]
+    public void Address_and_id_name_every_stub_value()
+    {
+        var release = new SmallRelease()
+            .Stub("district", "All", "Cindry", "Cindry")
+            .Stub("ward", "All", "All", "Skerry End")
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "271", "15")
+            .Appraise();
+        var figure = release.Figure(new FigureRef(0, 0, 1));
+        Assert.Equal("table/figure?district=Cindry&ward=Skerry%20End", figure.Address);
+        Assert.Equal("figure.cindry.skerry-end", figure.Id);
+        Assert.Equal(figure.Ref, release.FigureAt(figure.Address).Ref);
+        Assert.Equal([new FigureRef(0, 0, 1)], release.Select("table/figure?district=Cindry"));
+    }
+}

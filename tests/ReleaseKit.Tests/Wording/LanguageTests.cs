@@ -1,0 +1,166 @@
+using System.Globalization;
+using ReleaseKit.Appraisal;
+using ReleaseKit.Noise;
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
+using ReleaseKit.Tests.Appraisal;
+using ReleaseKit.Wording;
+using Xunit;
+
+namespace ReleaseKit.Tests.Wording;
+
+public sealed class LanguageTests
+{
+    private static readonly ILanguage En = English.Language;
+
+    // Unicode CLDR 44, common/main/en.xml: group ",", decimal ".", from memory; the minus in tables is U+2212 by choice of the design.
+    [Theory]
+    [InlineData(0, 0, "0")]
+    [InlineData(999, 0, "999")]
+    [InlineData(1000, 0, "1,000")]
+    [InlineData(1234567, 0, "1,234,567")]
+    [InlineData(123456, 2, "1,234.56")]
+    [InlineData(5, 1, "0.5")]
+    [InlineData(-5, 2, "\u22120.05")]
+    [InlineData(-1842, 0, "\u22121,842")]
+    [InlineData(100, 2, "1.00")]
+    [InlineData(long.MinValue, 0, "\u22129,223,372,036,854,775,808")]
+    public void Number_stands_as_english_writes_it(long unscaled, byte decimals, string expected) => Assert.Equal(expected, En.Number(new(unscaled, decimals)));
+
+    [Theory]
+    [InlineData(-3, 0, "minus\u00a03")]
+    [InlineData(-1234, 1, "minus\u00a0123.4")]
+    [InlineData(1234, 0, "1,234")]
+    public void Number_in_prose_says_minus(long unscaled, byte decimals, string expected) => Assert.Equal(expected, En.NumberInProse(new(unscaled, decimals)));
+
+    // CLDR plural rules for English: one for i = 1 and v = 0, else other.
+    [Theory]
+    [InlineData(1, 0, "1\u00a0household")]
+    [InlineData(-1, 0, "minus\u00a01\u00a0household")]
+    [InlineData(0, 0, "0\u00a0households")]
+    [InlineData(2, 0, "2\u00a0households")]
+    [InlineData(10, 1, "1.0\u00a0households")]
+    [InlineData(1001, 0, "1,001\u00a0households")]
+    public void Unit_agrees_in_number(long unscaled, byte decimals, string expected) => Assert.Equal(expected, En.WithUnit(new(unscaled, decimals), SmallRelease.Households));
+
+    [Fact]
+    public void Unit_that_is_not_declared_is_used_as_written() =>
+        Assert.Equal("5\u00a0kWh", En.WithUnit(new(5, 0), new Unit("kWh", new Dictionary<string, UnitForms>())));
+
+    [Fact]
+    public void Even_margin_has_one_number() =>
+        Assert.Equal("\u00b1\u00a019", En.Margin(new PrintedRange(new(1240, 0), new(19, 0), new(19, 0), new(1221, 0), new(1259, 0), false, false)));
+
+    [Fact]
+    public void Uneven_margin_has_both_sides() =>
+        Assert.Equal("\u221212\u00a0+17", En.Margin(new PrintedRange(new(1240, 0), new(12, 0), new(17, 0), new(1228, 0), new(1257, 0), false, false)));
+
+    [Theory]
+    [InlineData(0.95, "95 in 100")]
+    [InlineData(0.5, "50 in 100")]
+    [InlineData(0.999, "999 in 1,000")]
+    [InlineData(0.975, "975 in 1,000")]
+    public void Coverage_is_a_natural_frequency(double share, string expected) => Assert.Equal(expected, En.Share(Coverage.OfShare(share)));
+
+    [Fact]
+    public void Date_is_day_month_year() => Assert.Equal("16 March 2032", En.Date(new DateOnly(2032, 3, 16)));
+
+    [Fact]
+    public void Every_month_has_its_name()
+    {
+        // The invariant culture's month names are the English ones.
+        for (var month = 1; month <= 12; month++)
+            Assert.Equal(new DateOnly(2032, month, 1).ToString("d MMMM yyyy", CultureInfo.InvariantCulture), En.Date(new DateOnly(2032, month, 1)));
+    }
+
+    [Theory]
+    [InlineData("", new string[0])]
+    [InlineData("wards", new[] { "wards" })]
+    [InlineData("wards and districts", new[] { "wards", "districts" })]
+    [InlineData("wards, districts and Norrvale", new[] { "wards", "districts", "Norrvale" })]
+    [InlineData("a, b, c and d", new[] { "a", "b", "c", "d" })]
+    public void List_joins_with_and(string expected, string[] items) => Assert.Equal(expected, En.List(items));
+
+    [Theory]
+    [InlineData(0.98765, 98, 100)]
+    [InlineData(0.95, 95, 100)]
+    [InlineData(0.9999, 9999, 10000)]
+    [InlineData(0.99999999, 999999, 1000000)]
+    [InlineData(0.004, 4, 1000)]
+    public void Chance_worked_out_is_rounded_down_and_never_looks_certain(double chance, long cases, long all) =>
+        Assert.Equal(new NaturalFrequency(cases, all), NaturalFrequency.About(chance));
+
+    [Fact]
+    public void Table_says_how_many_ranges_may_miss()
+    {
+        // 200 ranges of uniform noise on −20 … 20, each missing in 2 of 41 cases: 9.76.
+        var values = Enumerable.Repeat("1000", 200).ToArray();
+        var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.Mechanism("m", LawName.DiscreteUniform, ("halfWidth", 20)), values).Appraise().FactsOf(0);
+        Assert.Equal(
+            ["Of the 200 ranges in this table, at most about 10 are expected to miss.", "From outside they cannot be told apart with certainty."],
+            En.NotesOf(facts));
+    }
+
+    [Fact]
+    public void Table_in_which_one_range_may_miss_says_one()
+    {
+        var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
+        Assert.Equal("Of the 3 ranges in this table, at most about 1 is expected to miss.", En.NotesOf(facts)[0]);
+    }
+
+    [Fact]
+    public void Table_of_totals_with_noise_says_why_parts_may_not_add_up()
+    {
+        var facts = new SmallRelease().Stub("ward", "All", "All", "w1", "w2").Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "30", "10", "21").Appraise().FactsOf(0);
+        Assert.Contains("Each figure got noise of its own, so parts may not add up to their total.", En.NotesOf(facts));
+    }
+
+    [Fact]
+    public void Table_of_sums_says_that_totals_are_sums_and_misses_can_come_together()
+    {
+        var rules = new NoiseRule[] { new NoiseRule.SumOver(0), new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5)) };
+        var facts = new SmallRelease().Stub("ward", "All", "All", "w1", "w2").Figures(SmallRelease.Measure(MeasureKind.Count), rules, [0, 1, 1], "31", "10", "21").Appraise().FactsOf(0);
+        Assert.Contains("The totals are sums of the published parts.", En.NotesOf(facts));
+        Assert.Contains("Some figures rest on the same noise, so misses can come together.", En.NotesOf(facts));
+    }
+
+    [Fact]
+    public void Column_has_one_sentence_and_the_distance_of_999()
+    {
+        var column = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "1300").Appraise().FactsOf(0).Measures[0];
+        Assert.Equal(
+            ["In at least 95 of 100 cases the count before noise lies within 19\u00a0households of the figure.", "In at least 999 of 1,000 cases the noise reaches no further than 31\u00a0households."],
+            En.NotesOf(column));
+    }
+
+    [Fact]
+    public void Column_that_was_rounded_says_so()
+    {
+        var column = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(5)), "10", "1300").Appraise().FactsOf(0).Measures[0];
+        Assert.StartsWith("In at least 999 of 1,000 cases noise and rounding reach no further than ", En.NotesOf(column)[1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Column_with_a_threshold_speaks_of_the_range()
+    {
+        var column = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "45").Appraise().FactsOf(0).Measures[0];
+        Assert.Equal(["In at least 95 of 100 cases the count before noise lies in the range of the figure."], En.NotesOf(column));
+    }
+
+    [Fact]
+    public void Column_of_several_margins_says_from_where_to_where()
+    {
+        var rules = new NoiseRule[] { new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5)), new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(4)) };
+        var column = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count), rules, [0, 1], "100", "200").Appraise().FactsOf(0).Measures[0];
+        Assert.Equal(
+            ["In at least 95 of 100 cases the count before noise lies within the margin of its figure.", "The margins of this column run from 8 to 19\u00a0households."],
+            En.NotesOf(column).Take(2));
+    }
+
+    [Fact]
+    public void Column_without_margins_is_silent()
+    {
+        var release = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count), [new NoiseRule.Public(SmallRelease.Words("list"))], [0], "12").Appraise();
+        Assert.Empty(En.NotesOf(release.FactsOf(0).Measures[0]));
+    }
+}
