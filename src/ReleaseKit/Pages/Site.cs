@@ -1,10 +1,11 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Charts;
 using ReleaseKit.Downloads;
 using ReleaseKit.Pages.Downloads;
 using ReleaseKit.Pages.Home;
+using ReleaseKit.Pages.HowToRead;
 using ReleaseKit.Pages.Methods;
 using ReleaseKit.Pages.Prose;
-using ReleaseKit.Pages.HowToRead;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages;
@@ -23,17 +24,17 @@ public static class Site
         IAppraisedRelease appraised, ILanguage language, BudgetStatement budget, string siteTemplatesFolder, SiteFolder target, IProgress<long>? progress)
     {
         var context = ContextOf(appraised, language, budget, siteTemplatesFolder, target);
-        HomePage.Write(context, target, Chart);
-        ProsePages.Write(context, target, Chart);
+        HomePage.Write(context, target);
+        ProsePages.Write(context, target);
+        BudgetPage.Write(context, target);
         ReadingPage.Write(context, target);
         MethodsPage.Write(context, target);
         DownloadFiles.WriteAll(context, target);
+        ChartImages.WriteAll(context, target);
         DownloadsPage.Write(context, target);
         NotFoundPage.Write(context, target);
         progress?.Report(0);
     }
-
-    private static string Chart(string id) => "";
 
     private static SiteContext ContextOf(
         IAppraisedRelease appraised, ILanguage language, BudgetStatement budget, string siteTemplatesFolder, SiteFolder target)

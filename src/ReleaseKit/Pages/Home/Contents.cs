@@ -1,5 +1,5 @@
 using System.Globalization;
-using ReleaseKit.Appraisal;
+using ReleaseKit.Pages.Budget;
 using Scriban.Runtime;
 
 namespace ReleaseKit.Pages.Home;
@@ -10,14 +10,13 @@ internal static class Contents
     public static ScriptObject Of(SiteContext context)
     {
         var losses = TableLosses.Of(context.Budget);
-        var decimals = LossNumber.DecimalsFor(context.Budget.Spent);
-        string Loss(double amount) => context.Language.Number(LossNumber.Up(amount, decimals));
+        var words = new BudgetWords(context);
         return new ScriptObject
         {
-            ["tables"] = new ScriptArray(context.Release.Tables.Select((_, index) => Row(context, index, Loss(losses.Of(index))))),
-            ["shared"] = losses.Shared > 0 ? Loss(losses.Shared) : null,
-            ["total"] = Loss(context.Budget.Spent),
-            ["currency"] = context.Language.Text(context.Budget.Currency == LossCurrency.Rho ? "home.loss.rho" : "home.loss.epsilon"),
+            ["tables"] = new ScriptArray(context.Release.Tables.Select((_, index) => Row(context, index, words.Amount(losses.Of(index))))),
+            ["shared"] = losses.Shared > 0 ? words.Amount(losses.Shared) : null,
+            ["total"] = words.Amount(context.Budget.Spent),
+            ["currency"] = context.Language.Text("home.loss.in", ("currency", words.Currency)),
         };
     }
 

@@ -7,7 +7,7 @@ namespace ReleaseKit.Pages.Home;
 /// <summary>The release's first page: what it is, its headlines, its first prose, how to read the marks, what it holds.</summary>
 internal static class HomePage
 {
-    public static void Write(SiteContext context, SiteFolder site, Func<string, string> charts)
+    public static void Write(SiteContext context, SiteFolder site)
     {
         var head = new PageHead(PageMap.Home, null, SiteSection.Release);
         var model = context.Model();
@@ -15,7 +15,7 @@ internal static class HomePage
         model["lead"] = context.Release.Lead is { } lead ? context.In(lead) : null;
         model["particulars"] = Particulars.Of(context);
         AddHeadlines(model, context);
-        AddProse(model, context, charts);
+        AddProse(model, context);
         model["key"] = new RawHtml(Marks.Key(context.Release, context.Language));
         model["contents"] = Contents.Of(context);
         model["budget"] = PageMap.Budget;
@@ -30,10 +30,10 @@ internal static class HomePage
         model["headlines"] = new ScriptArray(headlines.Skip(1));
     }
 
-    private static void AddProse(ScriptObject model, SiteContext context, Func<string, string> charts)
+    private static void AddProse(ScriptObject model, SiteContext context)
     {
         var pages = context.Release.Narrative.Where(page => page.Language == context.Language.Tag).ToList();
-        var composed = pages.Count == 0 ? null : new ProseComposer(context, PageMap.Home, deeper: 1, charts).Compose(pages[0]);
+        var composed = pages.Count == 0 ? null : new ProseComposer(context, PageMap.Home, deeper: 1).Compose(pages[0]);
         model["prose_title"] = composed?.Title ?? context.Language.Text("home.prose");
         model["prose"] = composed is null ? null : new RawHtml(composed.Html);
         model["more_prose"] = new ScriptArray(pages.Skip(1).Select(page => new ScriptObject

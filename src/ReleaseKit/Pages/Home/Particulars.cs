@@ -1,3 +1,4 @@
+using ReleaseKit.Pages.Budget;
 using ReleaseKit.Wording;
 using Scriban.Runtime;
 
@@ -25,18 +26,12 @@ internal static class Particulars
         ["href"] = href,
     };
 
-    /// <summary>Spent of authorised, in the terms of what was authorised; only the spent where the two cannot be put side by side.</summary>
+    /// <summary>Spent of authorised, as the budget page prints them; only a link where the two cannot be put side by side.</summary>
     private static string Loss(SiteContext context)
     {
-        var budget = context.Budget;
-        var (spent, authorised) = budget.Promise.Epsilon is not null
-            ? (budget.Recomputed.Epsilon, budget.Promise.Epsilon)
-            : (budget.Recomputed.Rho, budget.Promise.Rho);
-        string Number(double amount) => context.Language.Number(LossNumber.Up(amount, LossNumber.DecimalsFor(Math.Max(amount, 1)) - 1));
-        return spent is { } loss && authorised is { } limit
-            ? context.Language.Text("home.loss.of", ("spent", Number(loss)), ("authorised", Plain(limit, context.Language)))
+        var words = new BudgetWords(context);
+        return context.Budget.Authorised is { } authorised
+            ? context.Language.Text("home.loss.of", ("spent", words.Amount(context.Budget.Spent)), ("authorised", words.Allowance(authorised)))
             : context.Language.Text("home.loss.see");
     }
-
-    private static string Plain(double limit, ILanguage language) => language.Number(Releases.PublishedValue.Shortest((decimal)limit));
 }

@@ -2,6 +2,7 @@ using Markdig.Renderers;
 using Markdig.Renderers.Html;
 using Markdig.Syntax;
 using Markdig.Syntax.Inlines;
+using ReleaseKit.Charts;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Pages.Prose;
@@ -13,8 +14,7 @@ namespace ReleaseKit.Pages.Prose;
 /// <param name="context">The release and its language.</param>
 /// <param name="page">Path of the page that the prose stands on.</param>
 /// <param name="deeper">By how many levels headings go down: 0 on a page of its own, 1 where the prose is woven into another.</param>
-/// <param name="charts">Gives a chart's markup by its id.</param>
-public sealed class ProseComposer(SiteContext context, string page, int deeper, Func<string, string> charts)
+public sealed class ProseComposer(SiteContext context, string page, int deeper)
 {
     private readonly CitationText citations = new(context.Language);
     private readonly HashSet<string> mentioned = new(StringComparer.Ordinal);
@@ -54,12 +54,14 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper, 
         var place = paragraph.Parent!.IndexOf(paragraph);
         foreach (var image in images)
         {
-            paragraph.Parent.Insert(++place, Markup(charts(ProseLink.ChartIn(image.Url)!)));
+            paragraph.Parent.Insert(++place, Markup(Chart(ProseLink.ChartIn(image.Url)!)));
             image.Remove();
         }
         if (images.Count > 0 && paragraph.Inline!.All(inline => inline is LineBreakInline))
             paragraph.Parent.Remove(paragraph);
     }
+
+    private string Chart(string id) => ChartFigure.Html(context.Release.Charts.First(chart => chart.Id == id), context, page);
 
     private void Resolve(Inline inline)
     {
