@@ -9,6 +9,9 @@ public sealed record AccentColours(Colour Light, Colour LightMid, Colour Dark, C
     /// <summary>Least contrast of a mark (WCAG 2.2, success criterion 1.4.11), with some to spare on the band of total rows.</summary>
     private const double MarkContrast = 3.5;
 
+    /// <summary>The accent that tokens.css has; its tones were chosen by hand.</summary>
+    public static Colour OfTokens { get; } = Colour.Parse("#7A1D4E");
+
     // The grounds of tokens.css: of rows with a band, where contrast is least.
     private static readonly Colour LightBand = Colour.Parse("#E8ECE7");
     private static readonly Colour DarkBand = Colour.Parse("#1C2327");

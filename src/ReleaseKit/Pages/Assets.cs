@@ -19,8 +19,8 @@ public sealed partial record Assets(string Style)
     {
         var styles = Path.Combine(siteTemplatesFolder, "styles");
         var sheet = new StringBuilder(File.ReadAllText(Path.Combine(styles, "tokens.css")));
-        if (look.Accent is not null)
-            sheet.Append(AccentColours.Of(look.Accent).ToCss());
+        if (look.Accent is { } accent && Colour.Parse(accent) != AccentColours.OfTokens)
+            sheet.Append(AccentColours.Of(accent).ToCss());
         foreach (var name in Sheets)
             sheet.Append(File.ReadAllText(Path.Combine(styles, name)));
         sheet.Append(RunningFoot.ToCss(runningFoot));

@@ -63,7 +63,7 @@ internal static class PagesRelease
 
     public static BudgetStatement BudgetOf(Release release)
     {
-        var rule = new AccountRule("sum-concentrated", "A source");
+        var rule = new AccountRule("concentrated-sum", "A source");
         var total = new LossTotal(1.25, 1e-9, 0.0152, rule);
         return new BudgetStatement
         {

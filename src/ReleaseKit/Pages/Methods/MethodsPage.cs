@@ -7,6 +7,8 @@ namespace ReleaseKit.Pages.Methods;
 /// <summary>The technical page: terms, every noise law used with its formula and source, after-steps, rules of the account, and what cannot be checked from outside.</summary>
 internal static class MethodsPage
 {
+    private const string LawRule = "law";
+
     public static void Write(SiteContext context, SiteFolder site)
     {
         var head = new PageHead(PageMap.Methods, context.Language.Text("methods.title"), SiteSection.Methods);
@@ -70,10 +72,12 @@ internal static class MethodsPage
         _ => "methods.step.published-from",
     };
 
+    /// <summary>The rules of the account that stand on literature; a law's own are told with the law.</summary>
     private static ScriptArray Rules(SiteContext context)
     {
         var totals = new[] { context.Budget.Recomputed, context.Budget.SmallestBound }.Concat(context.Budget.Conversions).Select(total => total.Rule);
-        var rules = context.Budget.Steps.Select(step => step.Rule).Concat(totals).DistinctBy(rule => rule.Key);
+        var rules = context.Budget.Steps.Select(step => step.Rule).Concat(totals)
+            .Where(rule => rule.Source.Length > 0 && rule.Key != LawRule).DistinctBy(rule => rule.Key);
         return new ScriptArray(rules.Select(rule => new ScriptObject
         {
             ["name"] = context.Language.Text("budget.rule." + rule.Key),
