@@ -66,10 +66,11 @@ internal static class ReleaseFile
             return null;
         if (!Slug.IsOne(id))
             context.Add(Mechanisms.MechanismProblems.BadId(keys.PlaceOf("id"), id, context.Owner));
-        return ReadForm(keys) is { } form ? new Named<ChartOrder>(new ChartOrder(id, title, figures, form), keys.PlaceOf("figures")) : null;
+        return new Named<ChartOrder>(new ChartOrder(id, title, figures, ReadForm(keys)), keys.PlaceOf("figures"));
     }
 
-    private static string? ReadForm(ObjectReader keys)
+    /// <summary>The form; beside a stop the one that is worked out, so that the chart's id stays known.</summary>
+    private static string ReadForm(ObjectReader keys)
     {
         var form = keys.Text("form") ?? "ordered";
         switch (form)
@@ -78,10 +79,10 @@ internal static class ReleaseFile
                 return form;
             case "series" or "grouped" or "difference":
                 keys.Context.Add(KeyProblems.NotYet(keys.PlaceOf("form"), $"form\": \"{form}", keys.Context.Owner, "write \"form\": \"ordered\", or leave the chart out for now."));
-                return null;
+                return "ordered";
             default:
                 keys.Context.Add(KeyProblems.UnknownValue((JsonText)keys.Find("form")!, "form", ["ordered", "series", "grouped", "difference"], keys.Context.Owner));
-                return null;
+                return "ordered";
         }
     }
 }

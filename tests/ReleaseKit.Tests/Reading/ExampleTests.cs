@@ -21,6 +21,10 @@ public sealed class ExampleTests
     }
 
     [Fact]
+    public void Sample_reads_without_a_stop() =>
+        Assert.Empty(ReleaseFolder.Read(ReferenceFiles.Sample).Findings.Where(finding => finding.Level == ReleaseKit.Review.FindingLevel.Stop).Select(finding => $"{finding.Slug} {finding.At} {finding.Found}"));
+
+    [Fact]
     public void Example_table_holds_the_digits_of_its_file()
     {
         var table = Example.Value.Release!.Tables[1];

@@ -20,7 +20,7 @@ public static class JsonTreeReader
     {
         var text = WithoutMark(bytes);
         var lines = new LineMap(file, text);
-        if (EncodingProblem(text, bytes, lines, owner) is { } problem)
+        if (EncodingProblem(file, text, bytes, lines, owner) is { } problem)
         {
             log.Add(problem);
             return null;
@@ -38,10 +38,10 @@ public static class JsonTreeReader
 
     private static byte[] WithoutMark(byte[] bytes) => bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes[3..] : bytes;
 
-    private static Finding? EncodingProblem(byte[] text, byte[] bytes, LineMap lines, FindingOwner owner)
+    private static Finding? EncodingProblem(string file, byte[] text, byte[] bytes, LineMap lines, FindingOwner owner)
     {
         if (bytes is [0xFF, 0xFE, ..] or [0xFE, 0xFF, ..])
-            return JsonProblems.Encoding(lines.At(0), owner, "UTF-16");
+            return JsonProblems.Encoding(new Place(file), owner, "UTF-16");
         var invalid = Utf8Text.FirstInvalid(text);
         if (invalid >= 0)
             return JsonProblems.Encoding(lines.At(invalid), owner, "Windows-1252 or Latin-1");

@@ -15,6 +15,7 @@ internal sealed class CsvFile : IDisposable
     private readonly CsvReader reader;
     private readonly string path;
     private readonly ReadContext context;
+    private int lastReported;
 
     private CsvFile(FileInfo file, string path, ReadContext context)
     {
@@ -95,6 +96,9 @@ internal sealed class CsvFile : IDisposable
     {
         IsSound = false;
         var at = new Place(path, (int)record.LineNumber);
+        if (at.Line == lastReported)
+            return;
+        lastReported = at.Line;
         context.Add(record.Reason == CsvMalformedReason.FieldCountMismatch
             ? CsvProblems.Ragged(at, Headers.Count, record.RawRecord, context.Owner)
             : CsvProblems.Quotes(at, record.Reason, context.Owner));

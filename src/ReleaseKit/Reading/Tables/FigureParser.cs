@@ -10,6 +10,7 @@ internal static class FigureParser
 {
     public const int MostDecimals = 15;
 
+    private static readonly SearchValues<char> PlainForm = SearchValues.Create("0123456789.");
     private static readonly SearchValues<char> ExponentForm = SearchValues.Create("0123456789.eE+-");
     private static readonly SearchValues<char> GroupedForm = SearchValues.Create("0123456789.,'\u2019 \u00A0\u202F\u2009");
 
@@ -66,8 +67,15 @@ internal static class FigureParser
             return NumberFault.Exponent;
         if (text.ContainsAnyExcept(GroupedForm))
             return NumberFault.Text;
-        var comma = text.IndexOf(',');
-        var isDecimalComma = comma >= 0 && comma == text.LastIndexOf(',') && (text.Length - comma - 1 != 3 || comma > 3 || text.IndexOf('.') >= 0 && text.IndexOf('.') < comma);
-        return isDecimalComma ? NumberFault.DecimalComma : NumberFault.ThousandsMarks;
+        if (!text.ContainsAnyExcept(PlainForm) && text.Count('.') == 1)
+            return NumberFault.Text;
+        return IsDecimalComma(text) ? NumberFault.DecimalComma : NumberFault.ThousandsMarks;
+    }
+
+    /// <summary>One comma, and what stands around it cannot be thousands: 12,5 and 0,125 and 1.240,500, but not 1,240.</summary>
+    private static bool IsDecimalComma(ReadOnlySpan<char> text)
+    {
+        var (comma, point) = (text.IndexOf(','), text.IndexOf('.'));
+        return text.Count(',') == 1 && (text.Length - comma - 1 != 3 || comma is 0 or > 3 || text[0] == '0' || (point >= 0 && point < comma));
     }
 }

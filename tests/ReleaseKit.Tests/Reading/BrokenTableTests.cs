@@ -1,0 +1,211 @@
+using System.Text;
+using ReleaseKit.Tests.Folders;
+using Xunit;
+
+namespace ReleaseKit.Tests.Reading;
+
+/// <summary>Folders whose tables are exported wrong, do not fit what is said of them, or are hostile.</summary>
+public sealed class BrokenTableTests
+{
+    private const string Csv = "tables/lamps.csv";
+    private const string Release = "release.json";
+
+    [Fact]
+    public void Semicolons_are_recognised() => Broken.Stops("csv-separator", Csv, "street", "comma delimited",
+        folder => folder.With(Csv, TestFolder.Table.Replace(',', ';')));
+
+    [Fact]
+    public void Tabs_are_recognised() => Broken.Stops("csv-separator", Csv, "street", "comma delimited",
+        folder => folder.With(Csv, TestFolder.Table.Replace(',', '\t')));
+
+    [Fact]
+    public void Decimal_commas_are_recognised() => Broken.Stops("csv-decimal-comma", Csv, "\"31,5\"", "a point as decimal sign",
+        folder => folder.Edit(Csv, "Kiln Row,31,", "Kiln Row,\"31,5\",").Edit(Csv, "All,60,", "All,29,"));
+
+    [Theory]
+    [InlineData("\"1,031\"")]
+    [InlineData("1 031")]
+    [InlineData("1'031")]
+    [InlineData("1\u202F031")]
+    public void Thousands_marks_are_recognised(string digits) => Broken.Stops("csv-thousands", Csv, digits, "export bare digits",
+        folder => folder.Edit(Csv, "Kiln Row,31,", $"Kiln Row,{digits},").Edit(Csv, "All,60,", "All,29,"));
+
+    [Theory]
+    [InlineData("3.1e1", "all digits")]
+    [InlineData("+31", "without it")]
+    [InlineData("\u221231", "hyphen")]
+    [InlineData("31%", "share")]
+    [InlineData("NaN", "marks")]
+    [InlineData("many", "declare the mark")]
+    public void Other_ways_to_write_a_number_are_named(string text, string remedy) => Broken.Stops("csv-number", Csv, text, remedy,
+        folder => folder.Edit(Csv, "Kiln Row,31,", $"Kiln Row,{text},").Edit(Csv, "All,60,", "All,29,"));
+
+    [Fact]
+    public void Too_many_digits_are_a_stop() => Broken.Stops("csv-overflow", Csv, "1234567890123456789", "larger unit",
+        folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,1234567890123456789"));
+
+    [Fact]
+    public void Utf16_is_recognised() => Broken.StopsAtLine("csv-encoding", Csv, 1, "iconv -f UTF-16",
+        folder => folder.With(Csv, [.. Encoding.Unicode.GetPreamble(), .. Encoding.Unicode.GetBytes(TestFolder.Table)]));
+
+    [Fact]
+    public void Utf16_without_a_mark_is_recognised() => Broken.StopsAtLine("csv-encoding", Csv, 1, "iconv -f UTF-16",
+        folder => folder.With(Csv, Encoding.Unicode.GetBytes(TestFolder.Table)));
+
+    [Fact]
+    public void Windows_1252_is_recognised_at_its_line() => Broken.StopsAtLine("csv-encoding", Csv, 3, "WINDOWS-1252",
+        folder => folder.With(Csv, Encoding.Latin1.GetBytes(TestFolder.Table.Replace("Kiln", "K\u00EDln", StringComparison.Ordinal))));
+
+    [Fact]
+    public void Zero_byte_is_found_at_its_line() => Broken.StopsAtLine("csv-nul", Csv, 4, "export it again",
+        folder => folder.Edit(Csv, "Quay", "Qu\0y"));
+
+    [Fact]
+    public void Byte_order_mark_is_allowed()
+    {
+        using var folder = new TestFolder().With(Csv, [0xEF, 0xBB, 0xBF, .. Encoding.UTF8.GetBytes(TestFolder.Table)]);
+        Assert.Empty(folder.Read().Findings);
+    }
+
+    [Fact]
+    public void Windows_line_ends_are_allowed()
+    {
+        using var folder = new TestFolder().With(Csv, Encoding.UTF8.GetBytes(TestFolder.Table.ReplaceLineEndings("\r\n")));
+        Assert.Empty(folder.Read().Findings);
+    }
+
+    [Fact]
+    public void Ragged_row_is_found_at_its_line() => Broken.StopsAtLine("csv-ragged", Csv, 3, "between double quotes",
+        folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row, Upper,31,4"));
+
+    [Fact]
+    public void Quote_that_never_closes_is_found() => Broken.StopsAtLine("csv-quotes", Csv, 5, "twice",
+        folder => folder.Edit(Csv, "Weir Lane,9,-1", "\"Weir Lane,9,-1"));
+
+    [Fact]
+    public void Empty_file_is_a_stop() => Broken.Stops("csv-empty", Csv, null, "a header row", folder => folder.With(Csv, ""));
+
+    [Fact]
+    public void Header_alone_is_a_stop() => Broken.StopsAtLine("csv-empty", Csv, 1, "one row a line", folder => folder.With(Csv, "street,lit,broken\n"));
+
+    [Fact]
+    public void Missing_file_is_a_stop() => Broken.Stops("missing-file", Release, "\"tables/lamps.csv\"", "put it there", folder => folder.Without(Csv));
+
+    [Fact]
+    public void Other_capitals_are_told() => Broken.Stops("missing-file", Release, "\"Tables/lamps.csv\"", "\"tables\"",
+        folder => folder.Edit(Release, "tables/lamps.csv", "Tables/lamps.csv"));
+
+    [Fact]
+    public void Missing_column_is_told_the_nearest() => Broken.Stops("missing-column", Release, "\"broken\"", "write \"brokn\"",
+        folder => folder.Edit(Csv, "street,lit,broken", "street,lit,brokn").Edit(Release, "\"figures\": [\n", "\"columns\": { \"brokn\": { \"from\": \"public\" } }, \"figures\": [\n"));
+
+    [Fact]
+    public void Undeclared_column_is_a_stop() => Broken.Stops("undeclared-column", Csv, "raw", "remove it from the CSV",
+        folder => folder.With(Csv, "street,lit,broken,raw\nAll,60,9,61\nKiln Row,31,4,30\nQuay,20,5,21\nWeir Lane,9,-1,10\n"));
+
+    [Fact]
+    public void Twin_columns_are_a_stop() => Broken.Stops("csv-header", Csv, "street", "rename or remove",
+        folder => folder.Edit(Csv, "street,lit,broken", "street,lit,lit"));
+
+    [Fact]
+    public void Doubled_row_is_found_at_the_second() => Broken.StopsAtLine("doubled-row", Csv, 6, "remove one of them",
+        folder => folder.With(Csv, TestFolder.Table + "Kiln Row,0,4\n"));
+
+    [Fact]
+    public void Broken_count_is_a_stop() => Broken.Stops("count-not-whole", Csv, "4.5", "estimate", folder => folder.Edit(Csv, "31,4", "31,4.5"));
+
+    [Fact]
+    public void Hidden_value_that_is_there_is_a_stop() => Broken.Stops("hidden-has-value", Csv, "4,Q", "empty the cell",
+        folder => folder.With(Csv, "street,lit,broken,broken_status\nAll,60,9,\nKiln Row,31,4,Q\nQuay,20,5,\nWeir Lane,9,-1,\n")
+            .Edit(Release, "\"figures\": [\n", "\"statuses\": { \"column\": \"*_status\" }, \"figures\": [\n"));
+
+    [Fact]
+    public void Unknown_status_is_a_stop() => Broken.Stops("unknown-status", Csv, "??", "\"marks\"",
+        folder => folder.With(Csv, "street,lit,broken,broken_status\nAll,60,9,\nKiln Row,31,4,??\nQuay,20,5,\nWeir Lane,9,-1,\n")
+            .Edit(Release, "\"figures\": [\n", "\"statuses\": { \"column\": \"*_status\" }, \"figures\": [\n"));
+
+    [Fact]
+    public void Total_that_is_not_the_sum_names_the_gap()
+    {
+        using var broken = new Broken(folder => folder.Edit(Csv, "All,60,", "All,63,"));
+        var finding = Assert.Single(broken.Review(), finding => finding.Slug == "sum-differs");
+        Assert.Equal(("tables/lamps.csv:2", "lamps/lit?street=All is 63, but its parts over \"street\" add up to 60: a gap of 3."), (finding.At.ToString(), finding.Found));
+    }
+
+    [Fact]
+    public void Total_heading_that_is_not_there_is_a_stop() => Broken.Stops("total-missing", Release, "\"street\", \"title\": \"Street\"", "\"all\": \"All\"",
+        folder => folder.Edit(Release, "\"all\": \"All\"", "\"all\": \"all\"").Edit(Release, "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }, ", ""));
+
+    [Fact]
+    public void Figure_without_a_rule_is_a_stop() => Broken.StopsAtLine("no-rule", Csv, 2, "\"mechanism\"",
+        folder => folder.Edit(Release, "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "\"noise\": [ { \"where\": { \"street\": \"Quay\" }, \"mechanism\": \"lamps-broken\" }, { \"where\": { \"street\": \"Kiln Row\" }, \"mechanism\": \"lamps-broken\" }, { \"where\": { \"street\": \"Weir Lane\" }, \"mechanism\": \"lamps-broken\" } ]"));
+
+    [Fact]
+    public void Measure_without_noise_is_a_stop() => Broken.Stops("no-rule", Release, "\"broken\"", "under \"covers\"",
+        folder => folder.Edit(Release, ", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", ""));
+
+    [Fact]
+    public void Condition_that_nothing_meets_is_a_stop() => Broken.Stops("unknown-label", Release, "{ \"street\": \"Quai\" }", "write \"Quay\"",
+        folder => folder.Edit(Release, "[ { \"mechanism\": \"lamps-broken\" } ]", "[ { \"where\": { \"street\": \"Quai\" }, \"mechanism\": \"lamps-broken\" }, { \"mechanism\": \"lamps-broken\" } ]"));
+
+    [Fact]
+    public void Rule_with_two_ends_is_a_stop() => Broken.Stops("rule-unclear", Release, "{ \"mechanism\": \"lamps-broken\", \"public\"", "exactly one of",
+        folder => folder.Edit(Release, "{ \"mechanism\": \"lamps-broken\" }", "{ \"mechanism\": \"lamps-broken\", \"public\": \"list\" }"));
+
+    [Fact]
+    public void Unknown_mechanism_is_told_the_nearest() => Broken.Stops("unknown-mechanism", Release, "\"lamp-broken\"", "write \"lamps-broken\"",
+        folder => folder.Edit(Release, "{ \"mechanism\": \"lamps-broken\" }", "{ \"mechanism\": \"lamp-broken\" }"));
+
+    [Fact]
+    public void Scale_that_is_not_positive_is_found_at_its_line() => Broken.StopsAtLine("scale-not-positive", Csv, 4, "drawn with",
+        folder => folder.With(Csv, "street,lit,broken,scale\nAll,60,9,3\nKiln Row,31,4,3\nQuay,20,5,0\nWeir Lane,9,-1,3\n")
+            .Edit(Release, "\"figures\": [\n", "\"columns\": { \"scale\": { \"from\": \"public\" } }, \"figures\": [\n")
+            .Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"scale\" }"));
+
+    [Fact]
+    public void Scale_column_that_is_not_there_is_a_stop() => Broken.Stops("missing-column", "mechanisms.json", "{ \"id\": \"lamps-broken\"", "add the column",
+        folder => folder.Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }"));
+
+    [Fact]
+    public void Rules_beside_covers_are_a_stop() => Broken.Stops("rules-and-covers", "mechanisms.json", "\"lamps/broken\"", "keep one of them",
+        folder => folder.Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": 3.0, \"covers\": [\"lamps/broken\"]"));
+
+    [Fact]
+    public void Long_label_is_a_stop() => Broken.Stops("text-too-long", Csv, "xxxxxxxxxx", "shorten it",
+        folder => folder.Edit(Csv, "Kiln Row", new string('x', 10_000)));
+
+    [Fact]
+    public void Direction_override_in_a_label_is_found() => Broken.Stops("hidden-character", Csv, "Kiln \u202EwoR", "take the character out",
+        folder => folder.Edit(Csv, "Kiln Row", "Kiln \u202EwoR"));
+
+    [Theory]
+    [InlineData("=HYPERLINK(0)")]
+    [InlineData("@SUM(A1)")]
+    [InlineData("-2+3 Row")]
+    public void Formula_cell_is_a_caution(string label) => Broken.Cautions("formula-cell", Csv, label, "begin with a letter or digit",
+        folder => folder.Edit(Csv, "Kiln Row", label));
+
+    [Fact]
+    public void Script_in_a_label_is_text_and_no_more()
+    {
+        using var folder = new TestFolder().Edit(Csv, "Kiln Row", "<script>alert(1)</script>");
+        var read = folder.Read();
+        Assert.Equal(("<script>alert(1)</script>", "script-alert-1-script"), (read.Release!.Tables[0].Stub[0].Labels[1].Value, read.Release.Tables[0].Stub[0].Labels[1].Slug));
+        Assert.Empty(read.Findings);
+    }
+
+    [Fact]
+    public void Twin_names_ask_for_an_id() => Broken.Stops("slug-twins", Csv, "Kiln-Row", "street,Kiln-Row,kiln-row-2",
+        folder => folder.Edit(Csv, "Quay", "Kiln-Row"));
+
+    [Fact]
+    public void Twin_names_with_an_id_are_told_apart()
+    {
+        using var folder = new TestFolder().Edit(Csv, "Quay", "Kiln-Row").With("labels.csv", "column,value,id\nstreet,Kiln-Row,kiln-row-2\n");
+        Assert.Equal(["all", "kiln-row", "kiln-row-2", "weir-lane"], folder.Read().Release!.Tables[0].Stub[0].Labels.Select(label => label.Slug));
+    }
+
+    [Fact]
+    public void Name_without_latin_letters_asks_for_an_id() => Broken.Stops("slug-empty", Csv, "\u8857\u9053", "labels.csv",
+        folder => folder.Edit(Csv, "Quay", "\u8857\u9053"));
+}
