@@ -21,7 +21,7 @@ public sealed class SampleDownloads : IDisposable
         var outcome = ReleaseFolder.Read(SampleRelease.Folder);
         Release = outcome.Release ?? throw new InvalidOperationException(string.Join('\n', outcome.Findings));
         Appraised = AppraisedRelease.Of(Release);
-        Language = Wording.Language.Load(templates, "en");
+        Language = ReleaseKit.Wording.Language.Load(templates, "en");
         Budget = BudgetStatement.Of(Release);
         using var site = SiteFolder.Open(folder["site"]);
         var assets = Assets.Write(site, templates, Release.Look, "");
