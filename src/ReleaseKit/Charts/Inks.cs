@@ -15,22 +15,22 @@ public static class Inks
     // What the tables' marks do not have.
     public static Ink Lozenge { get; } = new("ch-weak") { Stroke = Tint.Accent, Weight = 1.5 };
 
-    // Text of a chart.
+    // Text of a chart. Skia sets no lining figures, and Vollkorn's own are old-style, so drawn text with numbers in it is set in Asap.
     public static Ink AxisText { get; } = new("ch-axis") { Fill = Tint.Soft, Face = Face.Plain, Size = 13 };
     public static Ink Name { get; } = new("ch-name") { Fill = Tint.Ink, Face = Face.Plain, Size = 14 };
     public static Ink Figure { get; } = new("ch-num") { Fill = Tint.Ink, Face = Face.Bold, Size = 14 };
     public static Ink FigureLight { get; } = new("ch-soft") { Fill = Tint.Soft, Face = Face.Light, Size = 14 };
     public static Ink Margin { get; } = new("ch-margin") { Fill = Tint.Ink, Face = Face.Plain, Size = 14 };
     public static Ink OffScale { get; } = new("ch-off") { Fill = Tint.Ink, Face = Face.Plain, Size = 12 };
-    public static Ink Heading { get; } = new("ch-title") { Fill = Tint.Ink, Face = Face.TextMedium, Size = 24 };
+    public static Ink Heading { get; } = new("ch-title") { Fill = Tint.Ink, Face = Face.Bold, Size = 22 };
     public static Ink Note { get; } = new("ch-note") { Fill = Tint.Soft, Face = Face.Plain, Size = 14 };
 
     // The picture of a headline.
-    public static Ink CardTitle { get; } = new("cd-title") { Fill = Tint.Ink, Face = Face.TextMedium, Size = 34 };
+    public static Ink CardTitle { get; } = new("cd-title") { Fill = Tint.Ink, Face = Face.Plain, Size = 32 };
     public static Ink CardMargin { get; } = new("cd-margin") { Fill = Tint.Ink, Face = Face.Plain, Size = 40 };
     public static Ink CardUnit { get; } = new("cd-unit") { Fill = Tint.Soft, Face = Face.Plain, Size = 28 };
     public static Ink CardEnd { get; } = new("cd-end") { Fill = Tint.Ink, Face = Face.Plain, Size = 22 };
-    public static Ink CardReading { get; } = new("cd-reading") { Fill = Tint.Ink, Face = Face.Text, Size = 28 };
+    public static Ink CardReading { get; } = new("cd-reading") { Fill = Tint.Ink, Face = Face.Plain, Size = 28 };
     public static Ink CardSource { get; } = new("cd-source") { Fill = Tint.Soft, Face = Face.Plain, Size = 20 };
 
     // The split tally.

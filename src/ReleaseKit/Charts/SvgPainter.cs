@@ -89,18 +89,16 @@ public sealed class SvgPainter
     private static string Colours(Ink ink, Palette palette)
     {
         var stroke = ink.Stroke == Tint.None ? "" : $" stroke=\"{palette[ink.Stroke]}\"";
-        var type = ink.Size > 0 ? $" font-family=\"{Family(ink.Face)}\" font-weight=\"{Weight(ink.Face)}\"" : "";
+        var type = ink.Size > 0 ? $" font-family=\"{Family}\" font-weight=\"{Weight(ink.Face)}\"" : "";
         return $" fill=\"{palette[ink.Fill]}\"{stroke}{type}";
     }
 
-    private static string Family(Face face) => face is Face.Text or Face.TextMedium or Face.TextBold ? "Vollkorn, Georgia, serif" : "Asap, Verdana, sans-serif";
+    private const string Family = "Asap, Verdana, sans-serif";
 
     private static int Weight(Face face) => face switch
     {
         Face.Light => 320,
         Face.Bold => 700,
-        Face.TextMedium => 500,
-        Face.TextBold => 600,
         _ => 400,
     };
 

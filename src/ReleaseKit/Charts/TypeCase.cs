@@ -2,8 +2,8 @@ using SkiaSharp;
 
 namespace ReleaseKit.Charts;
 
-/// <summary>The cuts of type that pictures are set in: Asap for figures and labels, Vollkorn for sentences.</summary>
-public enum Face { Light, Plain, Bold, Text, TextMedium, TextBold }
+/// <summary>The cuts of type that pictures are set in, all of Asap.</summary>
+public enum Face { Light, Plain, Bold }
 
 /// <summary>The typefaces, loaded from the site's own fonts; measures and wraps text. Nothing is ever taken from the machine.</summary>
 public sealed class TypeCase : IDisposable
@@ -13,9 +13,6 @@ public sealed class TypeCase : IDisposable
         [Face.Light] = "asap-320.ttf",
         [Face.Plain] = "asap-400.ttf",
         [Face.Bold] = "asap-700.ttf",
-        [Face.Text] = "vollkorn-400.ttf",
-        [Face.TextMedium] = "vollkorn-500.ttf",
-        [Face.TextBold] = "vollkorn-600.ttf",
     };
 
     private readonly Dictionary<Face, SKTypeface> typefaces;

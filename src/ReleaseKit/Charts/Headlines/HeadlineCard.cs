@@ -19,9 +19,9 @@ public static class HeadlineCard
     public static Drawing Of(HeadlineWords words, MarkSubject subject, TypeCase type)
     {
         var titles = type.Wrap(words.Title, Inks.CardTitle, Room);
-        var value = TitleTop + ((titles.Count - 1) * TitleLine) + 122;
+        var value = TitleTop + ((titles.Count - 1) * TitleLine) + 132;
         var mark = value + 26;
-        var reading = mark + (2 * Mark.Middle) + 66;
+        var reading = mark + (2 * Mark.Middle) + 58;
         return new Drawing(Width, Height,
         [
             new Shape.Box(Inks.Ground, 0, 0, Width, Height),

@@ -10,25 +10,29 @@ internal sealed class OrderedAxis(Scale scale, OrderedFigures figures, OrderedFo
 
     private readonly IReadOnlyList<PublishedValue> ticks = Ticks.Between(scale.From, scale.To, form.Ticks);
 
-    public IEnumerable<Shape> Shapes(double foot)
-    {
-        var head = OrderedForm.HeadHeight - 6;
-        return
-        [
-            new Shape.Words(Inks.AxisText, new Spot(scale.Start, 13), figures.Unit),
-            .. ticks.Select(tick => new Shape.Line(Inks.Grid, new Spot(scale.At(tick.ToDouble()), head), new Spot(scale.At(tick.ToDouble()), foot))),
-            .. ticks.Select(tick => new Shape.Line(Inks.AxisTick, new Spot(scale.At(tick.ToDouble()), head - TickLength), new Spot(scale.At(tick.ToDouble()), head))),
-            new Shape.Line(Inks.AxisTick, new Spot(scale.Start, head), new Spot(scale.End, head)),
-            .. Zero(head, foot),
-            .. Numbers(head - TickLength - 3),
-            new Shape.Line(Inks.AxisTick, new Spot(scale.Start, foot), new Spot(scale.End, foot)),
-            .. Numbers(foot + 17),
-        ];
-    }
+    /// <summary>Where the line at the head runs.</summary>
+    public const double Head = OrderedForm.HeadHeight - 6;
 
-    private IEnumerable<Shape> Zero(double head, double foot) => scale.From < 0 && scale.To > 0
-        ? [new Shape.Line(Inks.Zero, new Spot(scale.At(0), head), new Spot(scale.At(0), foot)) { Mark = "zero" }]
+    /// <param name="foot">Where the line at the foot runs.</param>
+    /// <param name="strips">Where lines may run down through the chart.</param>
+    public IEnumerable<Shape> Shapes(double foot, IReadOnlyList<(double Top, double Bottom)> strips) =>
+    [
+        new Shape.Words(Inks.AxisText, new Spot(scale.Start, 13), figures.Unit),
+        .. ticks.SelectMany(tick => Down(Inks.Grid, scale.At(tick.ToDouble()), strips)),
+        .. ticks.SelectMany(tick => Down(Inks.AxisTick, scale.At(tick.ToDouble()), [(Head - TickLength, Head)])),
+        new Shape.Line(Inks.AxisTick, new Spot(scale.Start, Head), new Spot(scale.End, Head)),
+        .. Zero(strips),
+        .. Numbers(Head - TickLength - 3),
+        new Shape.Line(Inks.AxisTick, new Spot(scale.Start, foot), new Spot(scale.End, foot)),
+        .. Numbers(foot + 17),
+    ];
+
+    private IEnumerable<Shape> Zero(IReadOnlyList<(double Top, double Bottom)> strips) => scale.From < 0 && scale.To > 0
+        ? Down(Inks.Zero, scale.At(0), strips).Select(line => line with { Mark = "zero" })
         : [];
+
+    private static IEnumerable<Shape> Down(Ink ink, double x, IReadOnlyList<(double Top, double Bottom)> strips) =>
+        strips.Select(strip => new Shape.Line(ink, new Spot(x, strip.Top), new Spot(x, strip.Bottom)));
 
     // A number that would run into the one before it, or out of the drawing, is left out; its mark stays.
     private IEnumerable<Shape> Numbers(double y)

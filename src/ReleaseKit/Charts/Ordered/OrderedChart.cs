@@ -19,7 +19,11 @@ public sealed record OrderedChart(Drawing Drawing, Scale Scale)
             rows.Add(PlacedRow.Of(row, rows.Count == 0 ? OrderedForm.HeadHeight : rows[^1].Bottom, columns, form, type));
         var axis = new OrderedAxis(scale, figures, form, type);
         var foot = rows[^1].Bottom;
-        Shape[] shapes = [.. axis.Shapes(foot), .. rows.Select(row => row.Draw(scale, columns, form, figures.Print, type))];
+        // Where names stand over the marks, lines of the axis run beside the marks only, so that none runs through a name.
+        IReadOnlyList<(double Top, double Bottom)> strips = form.MarkBeside
+            ? [(OrderedAxis.Head, foot)]
+            : [.. rows.Select(row => (row.MarkTop, row.MarkTop + OrderedForm.MarkHeight))];
+        Shape[] shapes = [.. axis.Shapes(foot, strips), .. rows.Select(row => row.Draw(scale, columns, form, figures.Print, type))];
         return new OrderedChart(new Drawing(form.Width, foot + OrderedAxis.FootHeight, shapes), scale);
     }
 }

@@ -14,7 +14,7 @@ internal sealed record PlacedRow(OrderedRow Row, IReadOnlyList<string> Lines, do
         var text = lines.Count * OrderedForm.Line;
         return form.MarkBeside
             ? Beside(row, lines, top, Math.Max(text, OrderedForm.MarkHeight) + (2 * Padding))
-            : new PlacedRow(row, lines, top, top + text + OrderedForm.MarkHeight + (2 * Padding), top + Padding + text - 1);
+            : new PlacedRow(row, lines, top, top + text + OrderedForm.MarkHeight + (3 * Padding), top + (2 * Padding) + text - 1);
     }
 
     private static PlacedRow Beside(OrderedRow row, IReadOnlyList<string> lines, double top, double height) =>

@@ -5,7 +5,13 @@ internal static class Hatching
 {
     private const double Step = 8.5;
 
-    public static Shape Of(double left, double top, double width, double height)
+    // Half a stroke seen aslant: so far in do strokes end, that no corner of theirs sticks out of the box.
+    private const double Inset = 0.85;
+
+    public static Shape Of(double left, double top, double width, double height) =>
+        Inside(left + Inset, top + Inset, Math.Max(0, width - (2 * Inset)), Math.Max(0, height - (2 * Inset)));
+
+    private static Shape.Strokes Inside(double left, double top, double width, double height)
     {
         var strokes = new List<(Spot From, Spot To)>();
         // A stroke is the part of the line x + y = c inside the box.

@@ -46,7 +46,9 @@ internal sealed record WideLabels(IReadOnlyList<PlacedLine> Lines, IReadOnlyList
 
         public void PlaceWithLeader(Slice slice)
         {
-            if (!Enumerable.Range(0, taken.Count).Any(slot => TrySlot(slice, slot, toTheRight: true) || TrySlot(slice, slot, toTheRight: false)))
+            // To the left only where the right has no room: there it would stand in the way of the leaders still to come.
+            var slots = Enumerable.Range(0, taken.Count).ToList();
+            if (!slots.Exists(slot => TrySlot(slice, slot, toTheRight: true)) && !slots.Exists(slot => TrySlot(slice, slot, toTheRight: false)))
                 Unlabelled.Add(slice.Piece);
         }
 

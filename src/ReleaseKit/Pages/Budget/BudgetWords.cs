@@ -48,7 +48,9 @@ internal sealed class BudgetWords
 
     public string Say(string key, params (string Name, string Value)[] fill) => Language.Text(key, fill);
 
-    public string TableName(int table) => Say("budget.table-number", ("number", Language.Number(new PublishedValue(table + 1, 0))));
+    public string TableName(int table) => Say("budget.table-number", ("number", TableNumber(table)));
+
+    public string TableNumber(int table) => Language.Number(new PublishedValue(table + 1, 0));
 
     public string Level(BudgetPiece piece) => piece.Level is { } level ? Context.In(level) : Say("budget.level.none");
 

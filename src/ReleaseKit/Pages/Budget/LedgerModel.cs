@@ -26,7 +26,10 @@ internal static class LedgerModel
     {
         var row = Row(table, levels, words);
         row["key"] = table.Key;
-        row["measures"] = new ScriptArray(table.ByMeasures(words).Select(measure => Row(measure, levels, words)));
+        // A table with one row of measures says it in its own row.
+        var measures = table.ByMeasures(words);
+        row["only"] = measures.Count == 1 ? measures[0].Name : null;
+        row["measures"] = measures.Count == 1 ? [] : new ScriptArray(measures.Select(measure => Row(measure, levels, words)));
         return row;
     }
 

@@ -24,6 +24,9 @@ internal static class LossPrint
     /// <summary>So many significant digits, rounded down.</summary>
     public static PublishedValue DownTo(double number, int digits) => Down(RoundedAbove(number, digits, decimal.Floor), DecimalsFor(number, digits));
 
+    /// <summary>A delta: two significant digits rounded up, without idle zeros at the end.</summary>
+    public static PublishedValue Delta(double delta) => PublishedValue.Shortest(UpTo(delta, 2).ToDecimal());
+
     /// <summary>The decimals that show so many significant digits of a number.</summary>
     public static int DecimalsFor(double number, int digits) =>
         number == 0 ? 0 : Math.Clamp(digits - 1 - (int)Math.Floor(Math.Log10(Math.Abs(number)) + 1e-12), 0, MostDecimals);

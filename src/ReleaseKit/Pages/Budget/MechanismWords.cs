@@ -24,7 +24,7 @@ internal static class MechanismWords
     }
 
     private static string Parameter(string key, NumberOrColumn value, BudgetWords words) => value.Column is { } column
-        ? words.Say("budget.parameter.by-row", ("parameter", words.Say($"budget.parameter.{key}", ("number", ""))), ("column", column)).Replace("  ", " ", StringComparison.Ordinal)
+        ? words.Say("budget.parameter.by-row", ("parameter", words.Say($"budget.parameter.{key}", ("number", "")).Trim()), ("column", column))
         : words.Say($"budget.parameter.{key}", ("number", Number(value.Number ?? 0, words)));
 
     private static IEnumerable<string> SensitivityParts(Sensitivity sensitivity, BudgetWords words)

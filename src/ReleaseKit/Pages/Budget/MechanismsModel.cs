@@ -7,8 +7,6 @@ namespace ReleaseKit.Pages.Budget;
 /// <summary>Every mechanism: what it answers, law, sensitivity, what follows, declared and recomputed loss, share of the whole.</summary>
 internal static class MechanismsModel
 {
-    private const int Digits = 4;
-
     public static ScriptArray Of(BudgetWords words) => new(words.Statement.Mechanisms.Select(account => RowOf(account, words)));
 
     private static ScriptObject RowOf(MechanismAccount account, BudgetWords words)
@@ -27,7 +25,7 @@ internal static class MechanismsModel
             ["clipped"] = mechanism.Clipped is { } clipped ? Clipped(clipped, words) : null,
             ["declared"] = account.Declared is { } declared ? TotalsModel.InWords(declared, words, TotalsModel.AsWritten) : words.Say("budget.not-declared"),
             ["recomputed"] = words.Amount(account.Amount),
-            ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.UpTo(delta, Digits)))) : null,
+            ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.Delta(delta)))) : null,
             ["lower"] = TotalsModel.InWords(account.Lower, words, LossPrint.DownTo),
             ["rule"] = words.Rule(account.Recomputed.Rule),
             ["source"] = account.Recomputed.Rule.Source,

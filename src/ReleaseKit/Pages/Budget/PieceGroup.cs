@@ -34,18 +34,21 @@ internal sealed record PieceGroup(string Key, string Name, IReadOnlyList<BudgetP
 
     private static int FirstTable(BudgetPiece piece) => piece.Tables.Count == 0 ? int.MaxValue : piece.Tables[0];
 
-    private static string TablesKey(BudgetPiece piece, BudgetWords words) => piece.Tables.Count == 0
-        ? words.Say("budget.table.none")
-        : words.Language.List([.. piece.Tables.Select(words.TableName)]);
+    private static string TablesKey(BudgetPiece piece, BudgetWords words) => piece.Tables.Count switch
+    {
+        0 => words.Say("budget.table.none"),
+        1 => words.TableName(piece.Tables[0]),
+        _ => words.Say("budget.table-numbers", ("numbers", words.Language.List([.. piece.Tables.Select(words.TableNumber)]))),
+    };
 
     private static string TablesName(BudgetPiece piece, BudgetWords words) =>
-        words.Language.List([.. piece.Tables.Select(table => words.Context.In(words.Release.Tables[table].Title))]);
+        string.Join("; ", piece.Tables.Select(table => words.Context.In(words.Release.Tables[table].Title)));
 
     private static string MeasuresName(BudgetPiece piece, BudgetWords words)
     {
         if (piece.Measures.Count == 0)
             return MechanismName(piece.Mechanism, words);
-        return words.Language.List([.. piece.Measures.Select(at => words.Context.In(words.Release.Tables[at.Table].Measures[at.Measure].Title)).Distinct()]);
+        return string.Join("; ", piece.Measures.Select(at => words.Context.In(words.Release.Tables[at.Table].Measures[at.Measure].Title)).Distinct());
     }
 
     private static string MechanismName(string id, BudgetWords words)

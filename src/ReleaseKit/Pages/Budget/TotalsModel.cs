@@ -65,6 +65,5 @@ internal static class TotalsModel
     private static string Number(double number, BudgetWords words, Func<double, int, PublishedValue> print) =>
         LossPrint.OrNoBound(number, finite => print(finite, Digits), words.Language);
 
-    private static string Delta(double delta, BudgetWords words) =>
-        delta == 0 ? words.Language.Number(new PublishedValue(0, 0)) : words.Language.Number(LossPrint.UpTo(delta, 2));
+    private static string Delta(double delta, BudgetWords words) => words.Language.Number(LossPrint.Delta(delta));
 }

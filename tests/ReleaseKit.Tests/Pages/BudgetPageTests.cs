@@ -1,0 +1,230 @@
+using System.Globalization;
+using AngleSharp.Dom;
+using AngleSharp.Html.Parser;
+using ReleaseKit.Appraisal;
+using ReleaseKit.Appraisal.Budget;
+using ReleaseKit.Pages.Budget;
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+using Xunit;
+
+namespace ReleaseKit.Tests.Pages;
+
+/// <summary>The budget page read back: every number of the statement stands on it, nothing is said that was not shown.</summary>
+public sealed class BudgetPageTests
+{
+    private static readonly string[] Forbidden = ["safe", "anonymous", "true value", "confident", "confidence", "significant", "no difference"];
+
+    [Fact]
+    public void Meaning_comes_first_and_opens_with_the_sentences_about_exact_figures()
+    {
+        var page = Read(new BudgetSample());
+
+        var first = page.QuerySelectorAll("main section h2").First();
+        Assert.Equal("What it means for one household", first.TextContent);
+        Assert.Equal(
+            "These figures were published exactly. For them there is no limit on what can be learned. All that follows compares two data sets that agree on them.",
+            first.NextElementSibling!.TextContent.Trim());
+    }
+
+    [Fact]
+    public void Without_exact_figures_their_sentences_are_not_said()
+    {
+        var page = Read(new BudgetSample { WithExactFigures = false });
+
+        Assert.DoesNotContain("published exactly", Text(page), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void People_in_general_are_always_spoken_of()
+    {
+        Assert.Contains("What the figures show about people in general is not limited by this.", Text(Read(new BudgetSample())), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Odds_beliefs_and_tests_are_never_printed_smaller_than_they_are()
+    {
+        var sample = new BudgetSample();
+        var page = Read(sample);
+        var meaning = sample.Statement.Meaning;
+
+        var tables = page.QuerySelectorAll(".odds");
+        // e^4.5 = 90.017…, rounded up to three digits.
+        Assert.Contains("to at most 90.1 times", Text(page), StringComparison.Ordinal);
+        Assert.Contains("at most 1 in 100,000,000 of all outcomes", Text(page), StringComparison.Ordinal);
+        foreach (var (belief, row) in meaning.Beliefs.Zip(tables[0].QuerySelectorAll("tbody tr")))
+        {
+            Assert.InRange(Chance(row.Children[1]), belief.Highest, belief.Highest + 0.001);
+            Assert.InRange(Chance(row.Children[2]), belief.Lowest - 0.001, belief.Lowest);
+        }
+
+        foreach (var (test, row) in meaning.Tests.Zip(tables[1].QuerySelectorAll("tbody tr")))
+        {
+            Assert.Equal(test.FalseAlarms, Chance(row.Children[0]), 1e-12);
+            Assert.InRange(Chance(row.Children[2]), test.LargestSuccess, test.LargestSuccess + 0.001);
+        }
+    }
+
+    [Fact]
+    public void Spent_is_rounded_up_authorised_down_and_the_rest_is_their_difference()
+    {
+        var page = Read(new BudgetSample());
+
+        var large = page.QuerySelectorAll(".spent-num .firm").Select(number => decimal.Parse(number.TextContent, CultureInfo.InvariantCulture)).ToList();
+        // The sum of the sample's amounts is 0.2241725.
+        Assert.Equal([0.2242m, 0.3500m], large);
+        Assert.Contains("What is left is 0.1258.", Text(page), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Ledger_names_every_amount_and_its_sums_hold_within_the_last_digit()
+    {
+        var sample = new BudgetSample();
+        var ledger = Read(sample).QuerySelector(".ledger")!;
+
+        var groups = ledger.QuerySelectorAll("tr.group").Select(Cells).ToList();
+        var foot = Cells(ledger.QuerySelector("tfoot tr")!);
+        var unit = 0.0001m;
+        Assert.All(groups, cells => Assert.InRange(cells[..^1].Sum() - cells[^1], 0, unit * cells.Length));
+        for (var column = 0; column < foot.Length; column++)
+            Assert.InRange(groups.Sum(cells => cells[column]) - foot[column], 0, unit * groups.Count);
+        Assert.Equal(0.2242m, foot[^1]);
+        // Table 1: wards 0.0310912 + 0.0102041, districts 0.0138889 + 0.0078125, Norrvale 0.03125, each rounded up.
+        Assert.Equal([0.0413m, 0.0218m, 0.0313m, 0, 0.0943m], groups[0]);
+    }
+
+    [Fact]
+    public void Ledger_says_why_printed_parts_do_not_come_to_their_total_only_where_they_do_not()
+    {
+        BudgetSample even = new() { Amounts = [([0], "ward", 0.125), ([1], "ward", 0.25), ([1], "district", 0.0625)] };
+
+        Assert.Contains("Each amount is rounded up on its own", Text(Read(new BudgetSample())), StringComparison.Ordinal);
+        Assert.DoesNotContain("Each amount is rounded up on its own", Text(Read(even)), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Totals_stand_side_by_side_with_rule_and_source()
+    {
+        var rows = Read(new BudgetSample()).QuerySelectorAll(".totals tbody tr").Select(row => row.Children.Select(cell => cell.TextContent.Trim()).ToList()).ToList();
+
+        Assert.Equal(["Authorised", "Declared by the Office", "Worked out again here", "Smallest upper bound that this program can prove", "Lower bound beside it, rounded down"], rows.Select(row => row[0]));
+        Assert.Equal(["6", "0.000000001", "none"], rows[0][1..4]);
+        Assert.Equal(["none", "none", "0.2301"], rows[1][1..4]);
+        Assert.Equal(["4.235", "0.000000001", "0.2242"], rows[2][1..4]);
+        Assert.Equal(["4.199", "0.000000001", "none"], rows[3][1..4]);
+        Assert.Equal("0.2109", rows[4][3]);
+        Assert.Contains("Canonne, Kamath & Steinke 2020, Corollary 13", rows[3][4], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Every_step_stands_with_its_numbers_rule_and_source()
+    {
+        var sample = new BudgetSample();
+        var rows = Read(sample).QuerySelectorAll(".steps tbody tr:not(.group)").ToList();
+
+        Assert.Equal(sample.Statement.Steps.Count, rows.Count);
+        foreach (var step in sample.Statement.Steps)
+            Assert.Contains(rows, row => row.Children[1].TextContent == step.Arithmetic && row.Children[2].TextContent.EndsWith(step.Rule.Source, StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Every_mechanism_stands_with_law_reach_loss_and_share()
+    {
+        var sample = new BudgetSample();
+        var items = Read(sample).QuerySelectorAll(".mechanisms li").ToList();
+
+        Assert.Equal(sample.Statement.Mechanisms.Count, items.Count);
+        var first = items[0].TextContent;
+        foreach (var words in new[] { "Households counted in question 1", "Discrete Gaussian noise, sigma 9.5.", "One household counts in at most 1 cell, by at most 1.", "0.0311", "13.9 in 100" })
+            Assert.Contains(words, first, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void What_is_only_declared_says_so_and_nothing_else_does()
+    {
+        var items = Read(new BudgetSample()).QuerySelectorAll(".mechanisms li").ToList();
+
+        Assert.Equal([2], items.Select((item, index) => (Text: item.TextContent, index))
+            .Where(item => item.Text.Contains("The office states this; it could not be worked out again here.", StringComparison.Ordinal)).Select(item => item.index));
+    }
+
+    [Fact]
+    public void Exact_and_public_figures_stand_with_their_reasons()
+    {
+        var tables = Read(new BudgetSample()).QuerySelectorAll("table.exact");
+
+        Assert.Contains("The Relief Act orders the exact sum to be published", tables[0].TextContent, StringComparison.Ordinal);
+        Assert.Contains("Public list of accounts, 31 December 2030", tables[1].TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Who_authorised_when_and_on_what_paper_is_said()
+    {
+        var text = Read(new BudgetSample()).QuerySelector("#authority")!.ParentElement!.TextContent;
+
+        foreach (var words in new[] { "The Registrar", "4 September 2031", "NOPF/2031/7", "lapses", "one household, over the year 2031" })
+            Assert.Contains(words, text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Twenty_disclosures_are_stated_or_not_stated()
+    {
+        var items = Read(new BudgetSample()).QuerySelectorAll(".disclosures li .standing").Select(item => item.TextContent).ToList();
+
+        Assert.Equal(20, items.Count);
+        // 10: one law of the sample is outside the program's list.
+        Assert.Equal([10, 13, 17, 18], items.Select((text, index) => (text, index)).Where(item => item.text == "not stated").Select(item => item.index + 1));
+    }
+
+    [Theory]
+    [InlineData(Neighbouring.AddOrRemove)]
+    [InlineData(Neighbouring.Replace)]
+    public void Page_never_promises_more_than_a_bound(Neighbouring neighbouring)
+    {
+        var text = Text(Read(new BudgetSample { Neighbouring = neighbouring })).ToLowerInvariant();
+
+        Assert.All(Forbidden, word => Assert.DoesNotContain(word, text, StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Authorised_amount_that_cannot_be_put_in_the_currency_leaves_the_spent_alone()
+    {
+        var page = Read(new BudgetSample { Authorised = null });
+
+        Assert.Single(page.QuerySelectorAll(".spent-num .firm"));
+        Assert.DoesNotContain("Not spent", page.QuerySelector(".ledger")!.TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Every_rule_step_law_and_choice_has_its_words()
+    {
+        var language = Language.Load(BudgetSample.Templates, "en");
+        string[] keys =
+        [
+            .. AccountRules.All.Select(rule => $"budget.rule.{rule.Key}"), .. AccountSteps.All.Select(step => $"budget.step.{step}"),
+            .. Enum.GetNames<LawName>().Select(law => $"budget.law.{law}"), .. Enum.GetNames<WithoutNoiseKind>().Select(kind => $"budget.without.{kind}"),
+            .. Enum.GetNames<Accounting>().Select(accounting => $"budget.accounting.{accounting}"),
+            .. Enum.GetNames<MechanismUse>().Where(use => use != nameof(MechanismUse.Figures)).Select(use => $"budget.use.{use}"),
+        ];
+
+        Assert.All(keys, key => Assert.NotEmpty(language.Text(key)));
+    }
+
+    [Fact]
+    public void Page_holds_no_inline_style_and_no_doubled_id()
+    {
+        var page = Read(new BudgetSample());
+
+        Assert.Empty(page.QuerySelectorAll("[style], style, script"));
+        Assert.Empty(page.QuerySelectorAll("[id]").GroupBy(element => element.Id).Where(group => group.Count() > 1).Select(group => group.Key));
+    }
+
+    private static IDocument Read(BudgetSample sample) => new HtmlParser().ParseDocument(sample.Page());
+
+    private static string Text(IDocument page) => string.Join(' ', page.QuerySelector("main")!.TextContent.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries));
+
+    private static double Chance(IElement cell) => double.Parse(cell.TextContent.Split(' ')[0], CultureInfo.InvariantCulture) / 100;
+
+    private static decimal[] Cells(IElement row) =>
+        [.. row.QuerySelectorAll("td").Select(cell => cell.TextContent.Trim() == "none" ? 0 : decimal.Parse(cell.TextContent, CultureInfo.InvariantCulture))];
+}
