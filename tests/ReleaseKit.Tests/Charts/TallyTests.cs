@@ -61,12 +61,29 @@ public sealed class TallyTests
     [InlineData(2)]
     [InlineData(5)]
     [InlineData(12)]
-    [InlineData(40)]
-    public void Even_forty_pieces_are_all_labelled_on_a_wide_page(int pieces)
+    public void Up_to_twelve_pieces_are_all_labelled_on_a_wide_page(int pieces)
     {
         using var type = TextBoxes.Type();
 
         Assert.Empty(WideTally.Of(Account(pieces), type).Unlabelled);
+    }
+
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void Of_forty_pieces_only_the_thinnest_go_without_a_label(bool lying)
+    {
+        using var type = TextBoxes.Type();
+        var account = Account(40);
+
+        var tally = Draw(account, lying, type);
+
+        Assert.NotEmpty(tally.Unlabelled);
+        foreach (var half in new[] { account.ByTable, account.ByLevel })
+        {
+            var labelled = half.Except(tally.Unlabelled).Min(piece => piece.Length);
+            Assert.All(half.Intersect(tally.Unlabelled), piece => Assert.True(piece.Length <= labelled + 1e-12));
+        }
     }
 
     [Theory]

@@ -10,18 +10,25 @@ internal sealed record WideLabels(IReadOnlyList<PlacedLine> Lines, IReadOnlyList
     /// <summary>How many slots are in use.</summary>
     public int Depth => Lines.Select(line => line.Slot + 1).DefaultIfEmpty().Max();
 
-    /// <summary>A label stands at the left of its length if it fits there; else on a line of its own with a leader, the rightmost nearest to the stick.</summary>
+    /// <summary>
+    /// A label stands at the left of its length if it fits there; else on a line of its own with a leader, the rightmost nearest to the stick.
+    /// Where not all find a place, the thinnest give way.
+    /// </summary>
     /// <param name="slices">The slices of this half.</param>
     /// <param name="right">Where the drawing ends.</param>
     /// <param name="outwardIsUp">Whether reading order runs toward the stick (text above it) or away from it.</param>
     /// <param name="type">For measuring.</param>
     public static WideLabels Of(IReadOnlyList<Slice> slices, double right, bool outwardIsUp, TypeCase type)
     {
-        var page = new Builder(right, outwardIsUp, type);
-        var left = slices.Where(slice => !page.TryBlock(slice)).ToList();
-        foreach (var slice in left.AsEnumerable().Reverse())
-            page.PlaceWithLeader(slice);
-        return new WideLabels(page.Lines, page.Leaders, page.Unlabelled);
+        var unlabelled = new List<TallyPiece>();
+        while (true)
+        {
+            var page = new Builder(right, outwardIsUp, type);
+            var thin = slices.Where(slice => !unlabelled.Contains(slice.Piece) && !page.TryBlock(slice)).ToList();
+            if (thin.AsEnumerable().Reverse().All(page.TryLeader))
+                return new WideLabels(page.Lines, page.Leaders, unlabelled);
+            unlabelled.Add(thin.MinBy(slice => slice.Length).Piece);
+        }
     }
 
     private sealed class Builder(double right, bool outwardIsUp, TypeCase type)
@@ -30,7 +37,6 @@ internal sealed record WideLabels(IReadOnlyList<PlacedLine> Lines, IReadOnlyList
 
         public List<PlacedLine> Lines { get; } = [];
         public List<(double X, int Slot)> Leaders { get; } = [];
-        public List<TallyPiece> Unlabelled { get; } = [];
 
         public bool TryBlock(Slice slice)
         {
@@ -44,12 +50,11 @@ internal sealed record WideLabels(IReadOnlyList<PlacedLine> Lines, IReadOnlyList
             return true;
         }
 
-        public void PlaceWithLeader(Slice slice)
+        // To the left only where the right has no room: there it would stand in the way of the leaders still to come.
+        public bool TryLeader(Slice slice)
         {
-            // To the left only where the right has no room: there it would stand in the way of the leaders still to come.
             var slots = Enumerable.Range(0, taken.Count).ToList();
-            if (!slots.Exists(slot => TrySlot(slice, slot, toTheRight: true)) && !slots.Exists(slot => TrySlot(slice, slot, toTheRight: false)))
-                Unlabelled.Add(slice.Piece);
+            return slots.Exists(slot => TrySlot(slice, slot, toTheRight: true)) || slots.Exists(slot => TrySlot(slice, slot, toTheRight: false));
         }
 
         private bool TrySlot(Slice slice, int slot, bool toTheRight)
