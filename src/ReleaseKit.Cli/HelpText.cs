@@ -1,0 +1,79 @@
+using System.CommandLine;
+
+namespace ReleaseKit.Cli;
+
+/// <summary>The help pages: the whole program and one page a command, each with an example and the next step.</summary>
+public static class HelpText
+{
+    private const string Program = """
+        releasekit: publishes noised tables so that nobody misreads a noisy number.
+
+        In the order of the work:
+          releasekit review FOLDER              what stands in the way, and for whom
+          releasekit compose FOLDER --to SITE   the publication: pages, charts, downloads
+
+        Everywhere:
+          --quiet      no progress, only results and stops
+          --help       this page, or a command's own
+          --version    the version
+
+        Results go to standard output, progress and messages to standard error.
+        Exit codes: 0 done; 1 stops, nothing written; 2 call or folder unusable;
+        70 a defect of ReleaseKit.
+
+        Example:
+          releasekit compose sample-release --to site
+
+        Next: releasekit review FOLDER, with the folder that holds your
+        release.json, mechanisms.json and tables.
+        """;
+
+    private const string Review = """
+        releasekit review FOLDER: what stands in the way of publishing this folder.
+
+        FOLDER holds release.json, mechanisms.json, tables and prose. Each half can
+        be reviewed alone: mechanisms.json with the tables, or release.json with them.
+
+        Prints every finding of the folder in one run, first the writer's, then
+        noise, then sign-off. A stop holds publication back; a caution asks for a
+        look; a note tells. The last line counts the stops by owner.
+
+        Exit codes: 0 no stop; 1 stops; 2 call or folder unusable.
+
+        Example:
+          releasekit review sample-release
+
+        Next: mend the stops, then releasekit compose FOLDER --to SITE.
+        """;
+
+    private const string Compose = """
+        releasekit compose FOLDER --to SITE: the publication.
+
+        FOLDER is reviewed first. With any stop nothing is written.
+        SITE must be missing, empty, or a folder that compose wrote before. The new
+        pages are made beside it and swapped in at the end, so a crash or a full
+        disk leaves what stood.
+
+        Options:
+          --to SITE    where the publication goes
+
+        Exit codes: 0 done; 1 stops, nothing written; 2 call or folder unusable.
+
+        Example:
+          releasekit compose sample-release --to site
+
+        Next: open SITE/index.html in a browser; read downloads.html for the files.
+        """;
+
+    /// <summary>Writes the page of a command, or the program's.</summary>
+    public static int Write(Command command, TextWriter output)
+    {
+        output.WriteLine(command.Name switch
+        {
+            "review" => Review,
+            "compose" => Compose,
+            _ => Program,
+        });
+        return ExitCode.Done;
+    }
+}

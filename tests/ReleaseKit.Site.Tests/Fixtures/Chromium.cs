@@ -1,0 +1,86 @@
+using Microsoft.Playwright;
+using ReleaseKit.Site.Tests.Fixtures;
+
+[assembly: AssemblyFixture(typeof(Chromium))]
+
+namespace ReleaseKit.Site.Tests.Fixtures;
+
+/// <summary>The distribution's Chromium, started once. Pages are served from the composed folder under a host that exists nowhere else.</summary>
+public sealed class Chromium(ComposedSample sample) : IAsyncLifetime
+{
+    public const string Origin = "http://release.test";
+    private const string ContentSecurityPolicy = "default-src 'none'; script-src 'self'; style-src 'self'; img-src 'self'; font-src 'self'; base-uri 'none'; form-action 'none'; frame-ancestors 'none'";
+    private IPlaywright? playwright;
+    private IBrowser? browser;
+
+    public async ValueTask InitializeAsync()
+    {
+        playwright = await Playwright.CreateAsync();
+        browser = await playwright.Chromium.LaunchAsync(new()
+        {
+            ExecutablePath = "/usr/bin/chromium",
+            Headless = true,
+            Args = ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync"],
+        });
+    }
+
+    /// <summary>A fresh page at a size and theme; everything it asks for is answered from the site or recorded as foreign.</summary>
+    public async Task<OpenPage> OpenAsync(string path, int width = 1280, int height = 900, ColorScheme theme = ColorScheme.Light, bool script = true, bool bypassPolicy = false)
+    {
+        var context = await browser!.NewContextAsync(new()
+        {
+            ViewportSize = new() { Width = width, Height = height },
+            ColorScheme = theme,
+            JavaScriptEnabled = script,
+            ReducedMotion = ReducedMotion.Reduce,
+            BypassCSP = bypassPolicy,
+        });
+        var opened = new OpenPage(context, await context.NewPageAsync());
+        await context.RouteAsync("**/*", route => AnswerAsync(route, opened));
+        await opened.Page.GotoAsync($"{Origin}/{path}");
+        return opened;
+    }
+
+    public async ValueTask DisposeAsync()
+    {
+        if (browser is not null)
+            await browser.DisposeAsync();
+        playwright?.Dispose();
+    }
+
+    private Task AnswerAsync(IRoute route, OpenPage opened)
+    {
+        var address = new Uri(route.Request.Url);
+        if (address.GetLeftPart(UriPartial.Authority) != Origin)
+        {
+            opened.Foreign.Add(route.Request.Url);
+            return route.AbortAsync();
+        }
+
+        var file = sample.File(Uri.UnescapeDataString(address.AbsolutePath).TrimStart('/'));
+        if (!File.Exists(file))
+        {
+            opened.Missing.Add(address.AbsolutePath);
+            return route.FulfillAsync(new() { Status = 404 });
+        }
+
+        return route.FulfillAsync(new()
+        {
+            BodyBytes = File.ReadAllBytes(file),
+            ContentType = TypeOf(file),
+            Headers = new Dictionary<string, string> { ["Content-Security-Policy"] = ContentSecurityPolicy },
+        });
+    }
+
+    private static string TypeOf(string file) => Path.GetExtension(file) switch
+    {
+        ".html" => "text/html; charset=utf-8",
+        ".css" => "text/css; charset=utf-8",
+        ".js" => "text/javascript; charset=utf-8",
+        ".svg" => "image/svg+xml",
+        ".png" => "image/png",
+        ".woff2" => "font/woff2",
+        ".json" => "application/json",
+        _ => "application/octet-stream",
+    };
+}

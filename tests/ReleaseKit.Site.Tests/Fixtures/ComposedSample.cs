@@ -1,0 +1,28 @@
+using ReleaseKit.Site.Tests.Fixtures;
+
+[assembly: AssemblyFixture(typeof(ComposedSample))]
+
+namespace ReleaseKit.Site.Tests.Fixtures;
+
+/// <summary>The sample, composed once for all tests by the program itself.</summary>
+public sealed class ComposedSample : IDisposable
+{
+    private readonly TemporaryFolder folder = new();
+
+    public ComposedSample()
+    {
+        var answer = ReleaseKitProgram.Run(["compose", Repository.Sample, "--to", Site, "--quiet"]);
+        if (answer.ExitCode != 0)
+            throw new InvalidOperationException($"compose answered {answer.ExitCode}:\n{answer.Error}");
+    }
+
+    public string Site => folder.In("site");
+
+    /// <summary>Every page, relative to the site, with forward slashes.</summary>
+    public IReadOnlyList<string> Pages => Directory.EnumerateFiles(Site, "*.html", SearchOption.AllDirectories)
+        .Select(file => Path.GetRelativePath(Site, file).Replace('\\', '/')).Order(StringComparer.Ordinal).ToList();
+
+    public string File(string relative) => Path.Combine(Site, relative);
+
+    public void Dispose() => folder.Dispose();
+}

@@ -1,0 +1,27 @@
+using ReleaseKit.Site.Tests.Fixtures;
+
+namespace ReleaseKit.Site.Tests;
+
+/// <summary>No page scrolls sideways from 320 px up (WCAG 2.2, 1.4.10 Reflow); only a table's own region may.</summary>
+public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
+{
+    [Theory]
+    [InlineData(320)]
+    [InlineData(360)]
+    [InlineData(390)]
+    [InlineData(768)]
+    [InlineData(1280)]
+    public async Task No_page_scrolls_sideways(int width)
+    {
+        var wide = new List<string>();
+        foreach (var path in sample.Pages)
+        {
+            await using var opened = await chromium.OpenAsync(path, width);
+            var over = await opened.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
+            if (over > 0)
+                wide.Add($"{path} is {over} px too wide at {width}");
+        }
+
+        Assert.Empty(wide);
+    }
+}
