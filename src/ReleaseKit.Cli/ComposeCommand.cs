@@ -21,10 +21,11 @@ internal static class ComposeCommand
     private static int Run(string folder, string site, Talk talk)
     {
         var reviewed = ReviewedFolder.Of(folder, talk);
-        talk.Findings(reviewed.Findings, talk.Error);
+        foreach (var finding in talk.Shown(reviewed.Findings))
+            talk.Error.WriteLine(FindingText.Of(finding));
         if (reviewed.HasStops || reviewed.Appraised is null)
         {
-            talk.Error.WriteLine(FindingText.Summary(reviewed.Findings, folder));
+            talk.Error.WriteLine(FindingText.LastLine(reviewed.Findings, folder));
             return ExitCode.Stopped;
         }
 
@@ -39,6 +40,7 @@ internal static class ComposeCommand
         using var target = SiteFolder.Open(site);
         var budget = BudgetStatement.Of(appraised.Release);
         ProgressReport.Around(talk, FigureCount(appraised), progress => Site.Compose(appraised, language, budget, templates, target, progress));
+        target.Finish();
         talk.Result($"Composed {Path.Combine(site, "index.html")}");
     }
 

@@ -17,8 +17,7 @@ internal static class ReviewCommand
     private static int Run(string folder, Talk talk)
     {
         var reviewed = ReviewedFolder.Of(folder, talk);
-        talk.Findings(reviewed.Findings, talk.Output);
-        talk.Result(FindingText.Summary(reviewed.Findings, folder));
+        talk.Output.Write(FindingText.Of(talk.Shown(reviewed.Findings), folder));
         return reviewed.HasStops ? ExitCode.Stopped : ExitCode.Done;
     }
 }

@@ -20,16 +20,9 @@ public sealed class Talk(TextWriter output, TextWriter error, bool quiet)
             error.WriteLine(text);
     }
 
-    /// <summary>Prints findings as messages; quiet leaves all but the stops out.</summary>
-    public void Findings(IReadOnlyList<Finding> findings, TextWriter to)
-    {
-        var shown = quiet ? findings.Where(finding => finding.Level == FindingLevel.Stop).ToList() : findings;
-        foreach (var finding in shown)
-        {
-            to.WriteLine(FindingText.Of(finding));
-            to.WriteLine();
-        }
-    }
+    /// <summary>The findings that are shown: all, or the stops alone if quiet.</summary>
+    public IReadOnlyList<Finding> Shown(IReadOnlyList<Finding> findings) =>
+        quiet ? [.. findings.Where(finding => finding.Level == FindingLevel.Stop)] : findings;
 
     public TextWriter Output => output;
 }
