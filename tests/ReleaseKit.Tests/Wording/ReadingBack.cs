@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Text.RegularExpressions;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Tests.Wording;
@@ -94,7 +95,7 @@ internal static class ReadingBack
     private static decimal Number(Group group) =>
         decimal.Parse(group.Value.Replace("minus ", "-", StringComparison.Ordinal), NumberStyles.Number, CultureInfo.InvariantCulture);
 
-    private static bool Is(Group group, Releases.PublishedValue value) =>
+    private static bool Is(Group group, PublishedValue value) =>
         Number(group) == value.ToDecimal() && group.Value.Contains('.', StringComparison.Ordinal) == (value.Decimals > 0);
 
     private static bool Is(AppraisedFigure figure, Reliability reliability) => figure.Reliability == reliability;
