@@ -3,7 +3,7 @@ using ReleaseKit.Releases;
 using ReleaseKit.Tests.Folders;
 using Xunit;
 
-namespace ReleaseKit.Tests.Releases;
+namespace ReleaseKit.Tests.Reading;
 
 /// <summary>Figure addresses: RFC 3986 relative references, section 2.1 for percent-encoding.</summary>
 public sealed class FigureAddressTests

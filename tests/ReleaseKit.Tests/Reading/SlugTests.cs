@@ -2,7 +2,7 @@ using CsCheck;
 using ReleaseKit.Releases;
 using Xunit;
 
-namespace ReleaseKit.Tests.Releases;
+namespace ReleaseKit.Tests.Reading;
 
 /// <summary>Slugs: a-z, 0-9, - and _ only, the same under every culture.</summary>
 public sealed class SlugTests
