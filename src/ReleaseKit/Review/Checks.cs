@@ -1,3 +1,4 @@
+using ReleaseKit.Review.Budget;
 using ReleaseKit.Review.Prose;
 
 namespace ReleaseKit.Review;
@@ -12,5 +13,15 @@ public static class Checks
         new ProseLiteralCheck(),
         new ProseNameCheck(),
         new HiddenPartCheck(),
+        new SpentCheck(),
+        new AuthorisedCheck(),
+        new AccountingCheck(),
+        new UnusedMechanismCheck(),
+        new LevelsCheck(),
+        new ExactCountCheck(),
+        new UniformNoiseCheck(),
+        new OffGridCheck(),
+        new ConfidentialColumnCheck(),
+        new DeltaCheck(),
     ];
 }

@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Reading;
 using ReleaseKit.Releases;
 
@@ -10,4 +11,7 @@ public sealed record ReviewSubject(ReadOutcome Read, IAppraisedRelease? Appraise
     public Release? Release => Read.Release;
 
     public NoiseAccount? Noise => Read.Noise;
+
+    /// <summary>What each mechanism spends, worked out once for all checks; empty without mechanisms.json.</summary>
+    public IReadOnlyList<MechanismSpending> Spendings => field ??= Noise is { } account ? MechanismSpending.Of(account, Release) : [];
 }

@@ -52,11 +52,23 @@ public sealed record MechanismCells(IReadOnlyList<MeasureRef> Measures, IReadOnl
             if (!measures.Contains(at))
                 measures.Add(at);
             var ruleOf = table.Measures[at.Measure].RuleOf;
+            if (mechanism.Parameters.Values.All(parameter => parameter.Number is not null))
+            {
+                Count(declared.TryLawOf(mechanism, table, 0), ruleOf.LongCount(one => one == rule));
+                return;
+            }
+
             for (var row = 0; row < ruleOf.Length; row++)
             {
-                if (ruleOf[row] == rule && declared.TryLawOf(mechanism, table, row) is { } law)
-                    counts[law] = counts.GetValueOrDefault(law) + 1;
+                if (ruleOf[row] == rule)
+                    Count(declared.TryLawOf(mechanism, table, row), 1);
             }
+        }
+
+        private void Count(NoiseLaw? law, long cells)
+        {
+            if (law is not null && cells > 0)
+                counts[law] = counts.GetValueOrDefault(law) + cells;
         }
 
         public MechanismCells Cells() => new(measures, [.. counts.Select(pair => new NoisedCells(pair.Key, pair.Value))]);

@@ -22,7 +22,7 @@ public sealed record MechanismSpending(Mechanism Mechanism, MechanismCells Cells
     /// <summary>What one unit can contribute, as declared; null if that is not said in full.</summary>
     public static UnitContribution? ContributionOf(Sensitivity sensitivity) => sensitivity switch
     {
-        { CellsPerUnit: >= 1 and var cells, PerCell: > 0 and var most } =>
+        { CellsPerUnit: >= 1 and var cells, PerCell: > 0 and var most, PerUnit: null or > 0 } =>
             new UnitContribution.PerCell(cells, most, sensitivity.Signed, sensitivity.PerUnit, sensitivity.Moves),
         { L1: > 0 and var sum } => new UnitContribution.AbsoluteSum(sum),
         { L2: > 0 and var distance } => new UnitContribution.Euclidean(distance),
@@ -32,21 +32,20 @@ public sealed record MechanismSpending(Mechanism Mechanism, MechanismCells Cells
     public static NeighbourRelation RelationOf(Neighbouring neighbouring) =>
         neighbouring == Neighbouring.Replace ? NeighbourRelation.Replace : NeighbourRelation.AddOrRemove;
 
-    /// <summary>The loss under another relation: to recognise which one a declared number was worked out for.</summary>
-    public MechanismLoss? LossUnder(NeighbourRelation relation) => LossOf(Mechanism, Cells, relation);
+    /// <summary>The loss with parameters, sensitivity or relation altered: to recognise for which reading a declared number was worked out.</summary>
+    public MechanismLoss? LossOf(Mechanism altered, NeighbourRelation relation) =>
+        LossOf(altered, altered.Parameters == Mechanism.Parameters ? Cells : Cells with { ByLaw = OneLaw(altered, Math.Max(1, Cells.Count)) }, relation);
 
     private static MechanismSpending Of(NoiseAccount account, Mechanism mechanism, MechanismCells cells) =>
         new(mechanism, cells, LossOf(mechanism, cells, RelationOf(account.Neighbouring)));
 
+    // Where nothing published carries it, its law must stand in the mechanism itself, and its cells are without number.
     private static MechanismLoss? LossOf(Mechanism mechanism, MechanismCells cells, NeighbourRelation relation)
     {
-        var laws = cells.ByLaw.Count > 0 ? cells.ByLaw : Unpublished(mechanism);
-        if (laws.Count == 0 || ContributionOf(mechanism.Sensitivity) is not { } unit || unit is UnitContribution.PerCell { PerUnit: <= 0 })
-            return null;
-        return MechanismLoss.Of(laws, unit, relation);
+        var laws = cells.ByLaw.Count > 0 ? cells.ByLaw : OneLaw(mechanism, Unlimited);
+        return laws.Count > 0 && ContributionOf(mechanism.Sensitivity) is { } unit ? MechanismLoss.Of(laws, unit, relation) : null;
     }
 
-    // Nothing published carries it: its law must stand in the mechanism itself, and its cells are without number.
-    private static IReadOnlyList<NoisedCells> Unpublished(Mechanism mechanism) =>
-        new DeclaredLaws().TryLawOf(mechanism, null, 0) is { } law ? [new NoisedCells(law, Unlimited)] : [];
+    private static IReadOnlyList<NoisedCells> OneLaw(Mechanism mechanism, long cells) =>
+        new DeclaredLaws().TryLawOf(mechanism, null, 0) is { } law ? [new NoisedCells(law, cells)] : [];
 }

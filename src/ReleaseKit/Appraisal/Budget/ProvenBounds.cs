@@ -10,6 +10,7 @@ public sealed class ProvenBounds
 {
     // Totals are compared as the design's losses are.
     private const double Tolerance = 1e-9;
+    private const double AsGood = 1e-6;
 
     private readonly IReadOnlyList<(PrivacyCurve Curve, AccountRule Rule)> curves;
     private readonly double rho;
@@ -34,19 +35,27 @@ public sealed class ProvenBounds
 
     public static LossTotal Total(Accountant accountant, IReadOnlyList<MechanismSpending> spendings) => accountant.Sum([.. spendings.Select(accountant.Upper)]);
 
-    /// <summary>The smallest ε at a δ, with its rule; infinite if nothing bounds it.</summary>
+    /// <summary>
+    /// The smallest ε at a δ, with its rule; infinite if nothing bounds it. A guarantee that holds at a smaller δ is given with that one,
+    /// and preferred where it is as good to six digits.
+    /// </summary>
     public LossTotal SmallestAt(Delta delta)
     {
-        var smallest = curves.Select(pair => (Epsilon: pair.Curve.EpsilonAt(delta), pair.Rule)).DefaultIfEmpty((Epsilon.Infinite, AccountRules.Declared))
-            .MinBy(pair => pair.Item1);
-        return new LossTotal(smallest.Item1.Value, delta.Value, null, smallest.Item2);
+        var at = curves.Select(pair => LossAt(pair.Curve, pair.Rule, delta)).OrderBy(loss => loss.Delta).ToList();
+        return at.FirstOrDefault(loss => loss.Epsilon <= at.Min(other => other.Epsilon) * (1 + AsGood))
+            ?? new LossTotal(double.PositiveInfinity, delta.Value, null, AccountRules.Declared);
     }
 
     /// <summary>Whether some bound meets what was authorised.</summary>
     public bool Meets(Authorised authorised) => authorised switch
     {
         { Rho: { } allowed } => rho <= allowed * (1 + Tolerance),
-        { Epsilon: { } epsilon } => SmallestAt(Delta.AtMost(authorised.Delta ?? 0)).Epsilon <= epsilon * (1 + Tolerance),
+        { Epsilon: { } epsilon } => Curves.Any(curve => curve.EpsilonAt(Delta.AtMost(authorised.Delta ?? 0)).Value <= epsilon * (1 + Tolerance)),
         _ => false,
     };
+
+    private static LossTotal LossAt(PrivacyCurve curve, AccountRule rule, Delta delta) =>
+        curve is ApproximateCurve { Loss: var loss } && loss.Delta <= delta
+            ? new LossTotal(loss.Epsilon.Value, loss.Delta.Value, null, rule)
+            : new LossTotal(curve.EpsilonAt(delta).Value, delta.Value, null, rule);
 }

@@ -1,0 +1,74 @@
+using ReleaseKit.Appraisal.Budget;
+using ReleaseKit.Privacy;
+using ReleaseKit.Privacy.Losses;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Budget;
+
+/// <summary>A mechanism whose law has no loss in the declared accounting: the accountings in which it has one are named.</summary>
+internal sealed class AccountingCheck : IReviewCheck
+{
+    private static readonly Epsilon Farthest = Epsilon.Of(1e5);
+
+    public IEnumerable<Finding> Check(ReviewSubject subject)
+    {
+        if (subject.Noise is not { } account)
+            return [];
+        var accountant = Accountant.Of(account.Accounting);
+        return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))))
+            .Select(spending => Found(spending, account)).OfType<Finding>();
+    }
+
+    private static Finding? Found(MechanismSpending spending, NoiseAccount account) => spending switch
+    {
+        { Mechanism: { Law: LawName.Declared, Spent: not null } mechanism } => Stated(mechanism, account),
+        { Loss: null } => null,
+        _ when account.Accounting == Accounting.Approximate => SpentNeeded(spending, account),
+        _ => NoLoss(spending, account),
+    };
+
+    private static Finding NoLoss(MechanismSpending spending, NoiseAccount account)
+    {
+        var finite = FiniteIn(spending.Loss!).ToList();
+        return new Finding(
+            FindingLevel.Stop, "no-loss-in-accounting", FindingOwner.Noise, BudgetText.PlaceOf(spending.Mechanism, "law"),
+            $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\", whose loss has no limit in {BudgetText.Written(account.Accounting)} accounting.\nIt has one in: {string.Join(", ", finite.Select(BudgetText.Written))}.",
+            "the total of the release would have no limit either, and nothing could be promised.",
+            $"write \"accounting\": \"{BudgetText.Written(finite[^1])}\"{(finite[^1] == Accounting.Approximate ? $" and {SpentOf(spending, account)} for it" : "")}, or noise its figures with another law.");
+    }
+
+    private static Finding SpentNeeded(MechanismSpending spending, NoiseAccount account) => new(
+        FindingLevel.Stop, "spent-needed", FindingOwner.Noise, spending.Mechanism.At,
+        $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\" and {(spending.Mechanism.Spent is null ? "does not say what it spent" : "declares an epsilon and delta that it never meets")}.",
+        "this law has no epsilon without a delta; the office chooses the pair, and it is checked against the law.",
+        $"add {SpentOf(spending, account)}, or another pair of its curve.");
+
+    private static Finding Stated(Mechanism mechanism, NoiseAccount account) => new(
+        FindingLevel.Stop, "no-loss-in-accounting", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "spent"),
+        $"\"{mechanism.Id}\" states a loss that {BudgetText.Written(account.Accounting)} accounting cannot add.",
+        "a converted number must not be added as if it were not.",
+        account.Accounting switch
+        {
+            Accounting.Pure => "state \"epsilon\" without \"delta\", or choose another \"accounting\".",
+            Accounting.Concentrated => "state \"rho\", or \"epsilon\" without \"delta\", or choose \"accounting\": \"approximate\".",
+            _ => "state \"epsilon\" and \"delta\".",
+        });
+
+    private static IEnumerable<Accounting> FiniteIn(MechanismLoss loss)
+    {
+        if (loss.Pure.Upper.IsFinite)
+            yield return Accounting.Pure;
+        yield return Accounting.Approximate;
+        if (loss.Concentrated.Upper.IsFinite)
+            yield return Accounting.Concentrated;
+    }
+
+    // Where δ never falls to 0, its floor; else the authorised δ.
+    private static string SpentOf(MechanismSpending spending, NoiseAccount account)
+    {
+        var floor = spending.Loss!.DeltaAt(Farthest).Upper.Value;
+        var delta = floor > 0 ? floor * (1 + 1e-6) : account.Authorised.Delta is > 0 and var authorised ? authorised : 1e-9;
+        var epsilon = spending.Loss.EpsilonAt(Delta.AtMost(delta)).Upper.Value;
+        return $"\"spent\": {{ \"epsilon\": {BudgetText.Paste(epsilon)}, \"delta\": {BudgetText.Paste(delta)} }}";
+    }
+}

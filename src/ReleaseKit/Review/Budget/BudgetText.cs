@@ -1,0 +1,80 @@
+using System.Globalization;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Budget;
+
+/// <summary>Numbers, laws and contributions as the messages of the budget checks say them.</summary>
+internal static class BudgetText
+{
+    private const int PasteDigits = 7;
+
+    /// <summary>A loss as it can be pasted: rounded up to seven significant digits, so that it is never too little.</summary>
+    public static string Paste(double loss)
+    {
+        if (loss is not (> 1e-12 and < 1e12))
+            return Plain(loss);
+        var decimals = Math.Clamp(PasteDigits - 1 - (int)Math.Floor(Math.Log10(loss)), 0, 20);
+        var unit = Unit(decimals);
+        return (Math.Ceiling((decimal)loss / unit) * unit / 1.000000000000000000000000000m).ToString("0.####################", CultureInfo.InvariantCulture);
+    }
+
+    public static string Plain(double number) => number.ToString("G12", CultureInfo.InvariantCulture);
+
+    /// <summary>"Sigma 9.5", "Scale from column \"owed_scale\"".</summary>
+    public static string Law(Mechanism mechanism) => mechanism.Law switch
+    {
+        LawName.Laplace or LawName.DiscreteLaplace => Parameter(mechanism, "scale", "Scale"),
+        LawName.Gaussian or LawName.DiscreteGaussian => Parameter(mechanism, "sigma", "Sigma"),
+        LawName.Uniform or LawName.DiscreteUniform => Parameter(mechanism, "halfWidth", "Half-width"),
+        LawName.TruncatedDiscreteLaplace => $"{Parameter(mechanism, "scale", "Scale")}, {Parameter(mechanism, "cutoff", "cutoff")}",
+        LawName.Staircase => $"{Parameter(mechanism, "epsilon", "Epsilon")} with steps of {mechanism.Parameters["sensitivity"].Number:R}",
+        _ => "Its law",
+    };
+
+    /// <summary>"1 cell a household, 1 a cell".</summary>
+    public static string Contribution(Sensitivity sensitivity, NoiseAccount account) => sensitivity switch
+    {
+        { CellsPerUnit: { } cells, PerCell: { } most } =>
+            $"{cells} {(cells == 1 ? "cell" : "cells")} a {One(account)}, {(sensitivity.Signed ? "±" : "")}{Plain(most)} a cell{PerUnit(sensitivity, account)}",
+        { L1: { } sum } => $"an l1 of {Plain(sum)}",
+        _ => $"an l2 of {Plain(sensitivity.L2 ?? 0)}",
+    };
+
+    public static string Relation(Neighbouring neighbouring, NoiseAccount account) => neighbouring == Neighbouring.Replace
+        ? $"one {One(account)} in place of another"
+        : $"one {One(account)} more or less";
+
+    /// <summary>"household".</summary>
+    public static string One(NoiseAccount account) => Forms(account)?.One ?? account.Who.Key;
+
+    /// <summary>"households".</summary>
+    public static string Other(NoiseAccount account) => Forms(account)?.Other ?? account.Who.Key;
+
+    public static Place PlaceOf(Mechanism mechanism, string key) => mechanism.KeyPlaces.TryGetValue(key, out var place) ? place : mechanism.At;
+
+    /// <summary>A law as the folder writes it: "discrete-laplace".</summary>
+    public static string Written(LawName law) =>
+        string.Concat(law.ToString().Select((letter, index) => char.IsUpper(letter) && index > 0 ? $"-{char.ToLowerInvariant(letter)}" : $"{char.ToLowerInvariant(letter)}"));
+
+    public static string Written(Accounting accounting) => accounting.ToString().ToLowerInvariant();
+
+    private static string PerUnit(Sensitivity sensitivity, NoiseAccount account) =>
+        sensitivity.PerUnit is { } bound ? $", {Plain(bound)} a {One(account)} in all" : "";
+
+    private static UnitForms? Forms(NoiseAccount account) => account.Who.Forms.Values.FirstOrDefault();
+
+    private static string Parameter(Mechanism mechanism, string key, string word) => mechanism.Parameters.GetValueOrDefault(key) switch
+    {
+        { Number: { } number } => $"{word} {Plain(number)}",
+        { Column: { } column } => $"{word} from column \"{column}\"",
+        _ => word,
+    };
+
+    private static decimal Unit(int decimals)
+    {
+        var unit = 1m;
+        for (var i = 0; i < decimals; i++)
+            unit /= 10;
+        return unit;
+    }
+}

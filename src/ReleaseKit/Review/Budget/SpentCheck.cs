@@ -1,0 +1,25 @@
+using ReleaseKit.Appraisal.Budget;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Budget;
+
+/// <summary>Each declared loss against the bounds that can be shown: too low, too low by rounding alone, or lower than can be shown here.</summary>
+internal sealed class SpentCheck : IReviewCheck
+{
+    public IEnumerable<Finding> Check(ReviewSubject subject) => subject.Noise is { } account
+        ? subject.Spendings.SelectMany(spending => CheckMechanism(spending, account))
+        : [];
+
+    private static IEnumerable<Finding> CheckMechanism(MechanismSpending spending, NoiseAccount account) => spending is { Loss: { } loss, Mechanism.Spent: { } spent }
+        ? DeclaredNumber.Of(spent, loss).Where(number => !number.IsEnough).Select(number => Found(spending, number, account))
+        : [];
+
+    private static Finding Found(MechanismSpending spending, DeclaredNumber number, NoiseAccount account)
+    {
+        if (number.IsRounded)
+            return SpentProblems.Rounded(spending.Mechanism, number);
+        return number.IsBelowLower
+            ? SpentProblems.TooLow(spending.Mechanism, number, account, LikelyMistake.Of(spending, number, account))
+            : SpentProblems.BelowProof(spending.Mechanism, number, account);
+    }
+}

@@ -1,0 +1,42 @@
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Budget;
+
+/// <summary>What can be wrong with a declared loss, one factory a failure.</summary>
+internal static class SpentProblems
+{
+    public static Finding TooLow(Mechanism mechanism, DeclaredNumber number, NoiseAccount account, string? mistake) => new(
+        FindingLevel.Stop, "spent-too-low", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "spent"),
+        string.Join('\n', new[] { Declares(mechanism, number), Costs(mechanism, number, account), mistake }.OfType<string>()),
+        "the budget page would promise more protection than there is.",
+        double.IsFinite(number.Upper)
+            ? $"write {BudgetText.Paste(number.Upper)}, or leave \"spent\" out and the computed value is used."
+            : "leave \"spent\" out, or declare the loss in an accounting in which this law has one.");
+
+    public static Finding BelowProof(Mechanism mechanism, DeclaredNumber number, NoiseAccount account) => new(
+        FindingLevel.Caution, "spent-below-proof", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "spent"),
+        $"{Declares(mechanism, number)}\nThat is smaller than can be proved here. {Costs(mechanism, number, account)}",
+        "the totals use the larger value, so the page shows more than was declared.",
+        double.IsFinite(number.Upper)
+            ? $"write {BudgetText.Paste(number.Upper)}, or describe the proof of the smaller value where \"describedAt\" points to."
+            : "describe the proof where \"describedAt\" points to, and give the mechanism the law \"declared\".");
+
+    public static Finding Rounded(Mechanism mechanism, DeclaredNumber number) => new(
+        FindingLevel.Caution, "spent-rounded", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "spent"),
+        $"{Declares(mechanism, number)}, which is {BudgetText.Plain(number.Upper)} rounded down.",
+        "a rounded loss must not be smaller than the loss; the totals use the computed value.",
+        $"write {BudgetText.Paste(number.Upper)}.");
+
+    private static string Declares(Mechanism mechanism, DeclaredNumber number)
+    {
+        var name = number.Name.Split(' ', 2);
+        return $"\"{mechanism.Id}\" declares {name[0]} {BudgetText.Plain(number.Declared)}{(name.Length > 1 ? $" {name[1]}" : "")}";
+    }
+
+    private static string Costs(Mechanism mechanism, DeclaredNumber number, NoiseAccount account)
+    {
+        var relation = account.Neighbouring == Neighbouring.Replace ? $" {BudgetText.Relation(account.Neighbouring, account)}," : "";
+        var cost = double.IsFinite(number.Upper) ? $"costs {BudgetText.Paste(number.Upper)}" : $"has no {number.Name} that bounds it";
+        return $"{BudgetText.Law(mechanism)} with {BudgetText.Contribution(mechanism.Sensitivity, account)},{relation} {cost}.";
+    }
+}

@@ -1,0 +1,186 @@
+using ReleaseKit.Review;
+using ReleaseKit.Tests.Folders;
+using Xunit;
+
+namespace ReleaseKit.Tests.Review.Budget;
+
+public sealed class BudgetCheckTests
+{
+    [Fact]
+    public void Small_folder_and_example_have_no_finding_of_the_budget()
+    {
+        using var folder = new TestFolder();
+        Assert.Empty(folder.Review().Select(finding => $"{finding.Slug} {finding.Found}"));
+        Assert.Empty(ReleaseReview.Of(ReleaseKit.Reading.ReleaseFolder.Read(ReferenceFiles.Example), null).Select(finding => $"{finding.Slug} {finding.Found}"));
+    }
+
+    [Fact]
+    public void Sample_has_no_stop() =>
+        Assert.Empty(ReleaseReview.Of(ReleaseKit.Reading.ReleaseFolder.Read(ReferenceFiles.Sample), null)
+            .Where(finding => finding.Level == FindingLevel.Stop).Select(finding => $"{finding.Slug} {finding.Found}"));
+
+    [Fact]
+    public void Total_above_what_is_authorised_is_a_stop()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"epsilon\": 6.0, \"delta\": 1e-9", "\"rho\": 0.05");
+        var text = folder.Text("authorised-exceeded");
+        Assert.Contains("mechanisms.json:5:", text, StringComparison.Ordinal);
+        Assert.Contains("Authorised is rho 0.05.\nThe mechanisms spend rho 0.14134", text, StringComparison.Ordinal);
+        Assert.Contains("add noise until the mechanisms spend at most 0.05 together", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Total_is_held_against_every_bound_that_can_be_shown()
+    {
+        using var folder = new TestFolder();
+        // Two discrete Laplace mechanisms together are 0.1 + 0.2 pure; converted from rho they would not meet 0.31 at 1e-9.
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-laplace", "scale": 10, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 } }""")
+            .Edit("mechanisms.json", "\"scale\": 3.0, \"sensitivity\": { \"cellsPerUnit\": 2", "\"scale\": 10.0, \"sensitivity\": { \"cellsPerUnit\": 2")
+            .Edit("mechanisms.json", "\"epsilon\": 6.0", "\"epsilon\": 0.3");
+        folder.HasNo("authorised-exceeded");
+        folder.Edit("mechanisms.json", "\"epsilon\": 0.3", "\"epsilon\": 0.29");
+        Assert.Contains("below epsilon 0.3 ", folder.Text("authorised-exceeded"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Law_without_a_loss_in_the_accounting_names_those_in_which_it_has_one()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"pure\"");
+        var text = folder.Text("no-loss-in-accounting");
+        Assert.Contains("\"lamps-lit\" has the law \"discrete-gaussian\", whose loss has no limit in", text, StringComparison.Ordinal);
+        Assert.Contains("It has one in: approximate, concentrated.", text, StringComparison.Ordinal);
+        Assert.Contains("write \"accounting\": \"concentrated\"", text, StringComparison.Ordinal);
+        folder.HasNo("authorised-exceeded");
+    }
+
+    [Fact]
+    public void Law_without_pure_epsilon_needs_a_declared_pair_under_approximate_accounting()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"");
+        var text = folder.Text("spent-needed");
+        Assert.Contains("\"lamps-lit\" has the law \"discrete-gaussian\" and does not say what it", text, StringComparison.Ordinal);
+        Assert.Contains("\"delta\": 0.000000001 }", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Uniform_noise_is_told_in_plain_words()
+    {
+        using var folder = new TestFolder();
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-uniform", "halfWidth": 12, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 } }""");
+        var text = folder.Text("uniform-noise");
+        Assert.Contains("With chance 0.04 its figures show with certainty whether one keeper was counted.", text, StringComparison.Ordinal);
+        Assert.Contains("It has one in: approximate.", folder.Text("no-loss-in-accounting"), StringComparison.Ordinal);
+        Assert.Contains("\"spent\": { \"epsilon\": 0, \"delta\": 0.04000004 }", folder.Text("no-loss-in-accounting"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Mechanism_that_nothing_uses_is_a_stop_unless_its_use_says_why()
+    {
+        using var folder = new TestFolder();
+        const string Spare = "{ \"id\": \"spare\", \"law\": \"laplace\", \"scale\": 1, \"sensitivity\": { \"l1\": 1 }USE },\n    { \"id\": \"lamps-lit\"";
+        folder.Edit("mechanisms.json", "{ \"id\": \"lamps-lit\"", Spare.Replace("USE", "", StringComparison.Ordinal));
+        Assert.Contains("No figure carries the noise of \"spare\".", folder.Text("mechanism-unused"), StringComparison.Ordinal);
+        folder.Edit("mechanisms.json", "\"l1\": 1 }", "\"l1\": 1 }, \"use\": \"not-published\"");
+        folder.HasNo("mechanism-unused");
+    }
+
+    [Fact]
+    public void Totals_beside_their_parts_move_a_unit_twice()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"cellsPerUnit\": 2", "\"cellsPerUnit\": 1");
+        var text = folder.Text("sensitivity-too-small");
+        Assert.Contains("\"lamps-broken\" counts a keeper in 1 cell, but table \"lamps\" has it in 2: totals beside their parts, or several periods.", text, StringComparison.Ordinal);
+        Assert.Contains("write \"cellsPerUnit\": 2,", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Periods_move_a_unit_once_each()
+    {
+        using var folder = new TestFolder();
+        folder.With("tables/lamps.csv", "street,lit,broken\n2031-Q1,31,4\n2031-Q2,20,5\n2031-Q3,9,-1\n")
+            .With("narrative/summary.md", "# Summary\n")
+            .Edit("release.json", "\"title\": \"Street\", \"all\": \"All\"", "\"title\": \"Street\", \"period\": true")
+            .Edit("release.json", "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }, ", "")
+            .Edit("release.json", "\"headlines\": [ \"lamps/lit?street=All\" ],", "");
+        var stops = folder.Review().Where(finding => finding.Slug == "sensitivity-too-small").ToList();
+        Assert.Equal(2, stops.Count);
+        Assert.Contains("write \"cellsPerUnit\": 3,", stops[0].Do, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Norm_over_several_levels_says_how_many_it_counts()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"cellsPerUnit\": 2, \"perCell\": 1", "\"l1\": 2");
+        Assert.Contains("\"lamps-broken\" gives an l1, and table \"lamps\" has a keeper in 2 cells of", folder.Text("levels-not-counted"), StringComparison.Ordinal);
+        folder.Edit("mechanisms.json", "\"l1\": 2", "\"l1\": 2, \"l1Levels\": 2");
+        folder.HasNo("levels-not-counted");
+    }
+
+    [Fact]
+    public void Several_columns_of_one_mechanism_are_a_caution()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "{ \"mechanism\": \"lamps-lit\" }", "{ \"mechanism\": \"lamps-broken\" }");
+        var text = folder.Text("counted-in-several-columns");
+        Assert.StartsWith("Caution ", text, StringComparison.Ordinal);
+        Assert.Contains("noises 2 columns and counts a keeper in 2 cells; one that stands in every column is in 3.", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Exact_number_of_units_leaves_no_neighbours_where_one_unit_is_added()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "{ \"mechanism\": \"lamps-broken\" }", "{ \"exact\": \"audited\" }")
+            .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", "\"who\": \"lamp\"");
+        var text = folder.Text("exact-unit-count");
+        Assert.Contains("lamps/broken?street=All is an exact number of lamps, as are 3 more figures of its column.", text, StringComparison.Ordinal);
+        folder.Edit("mechanisms.json", "\"add-or-remove\"", "\"replace\"");
+        folder.HasNo("exact-unit-count");
+    }
+
+    [Fact]
+    public void Value_off_the_grid_of_its_noise_is_a_stop()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": 3.0, \"grid\": 2");
+        var text = folder.Text("off-grid");
+        Assert.Contains("lamps/broken?street=All is 9, which is no multiple of 2, as are 2 more figures of \"lamps-broken\".", text, StringComparison.Ordinal);
+        Assert.Contains("what stands between two steps passed through it unprotected.", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Value_off_its_declared_rounding_is_a_stop_but_a_bound_is_none()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"scale\": 3.0, ", "\"scale\": 3.0, \"afterwards\": [ { \"roundTo\": 5 }, { \"notBelow\": 4 } ], ")
+            .With("tables/lamps.csv", "street,lit,broken\nAll,60,10\nKiln Row,31,4\nQuay,20,5\nWeir Lane,9,7\n");
+        var text = folder.Text("off-grid");
+        Assert.Contains("lamps/broken?street=Weir%20Lane is 7, which is no multiple of 5.", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Confidential_column_and_cells_hidden_by_value_count_as_exact()
+    {
+        using var folder = new TestFolder();
+        folder.With("tables/lamps.csv", "street,lit,broken,watts\nAll,60,9,3\nKiln Row,31,4,1\nQuay,20,5,1\nWeir Lane,9,,1\n")
+            .Edit("release.json", "\"stub\": [", "\"columns\": { \"watts\": { \"from\": \"confidential\" } }, \"hidden\": { \"by\": \"value-before-noise\", \"inTotals\": false }, \"statuses\": { \"marks\": { \"\": \"Q\" } }, \"stub\": [");
+        if (folder.Review().Any(finding => finding.Slug == "csv-number"))
+            Assert.Fail(string.Join('\n', folder.Review().Select(finding => finding.Found)));
+        Assert.Contains("Column \"watts\" of table \"lamps\" comes from the confidential records", folder.Text("confidential-column"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Delta_is_held_against_a_public_number_of_units()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "{ \"mechanism\": \"lamps-broken\" }", "{ \"public\": \"town survey\" }")
+            .With("tables/lamps.csv", "street,lit,broken\nAll,60,2000000000\nKiln Row,31,4\nQuay,20,5\nWeir Lane,9,1\n")
+            .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", "\"who\": \"lamp\"");
+        Assert.Contains("is not below 1 divided by the 2,000,000,000 lamps", folder.Text("delta-too-large"), StringComparison.Ordinal);
+    }
+}
