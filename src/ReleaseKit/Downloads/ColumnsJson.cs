@@ -109,6 +109,7 @@ internal sealed class ColumnsJson(Stream stream, SiteContext context) : IDisposa
         var key = column.Kind.ToString().ToLowerInvariant();
         return column.Kind switch
         {
+            ColumnKind.Value when column.Measure is { InOnes: true } => Say("value-in-ones", title),
             ColumnKind.Value => Say(key, title, ("unit", UnitOf(column.Measure))),
             ColumnKind.Margin or ColumnKind.Low or ColumnKind.High => Say(key, title, ("share", share)),
             _ => Say(key, title),

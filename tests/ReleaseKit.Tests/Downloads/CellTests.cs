@@ -65,6 +65,19 @@ public sealed class CellTests
         Assert.StartsWith("'=cmd(),-7,", lines[1], StringComparison.Ordinal);
     }
 
+    // A CSV that counts in thousands: value, margin and range stand in the figure's own unit, so that they go together.
+    [Fact]
+    public void Value_with_a_multiplier_is_written_in_the_unit_of_its_margin()
+    {
+        var thousands = SmallRelease.Measure(MeasureKind.Count) with { Multiplier = 1000 };
+        var noise = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(4000) with { Grid = 1000 });
+        var release = new SmallRelease().Figures(thousands, [noise], new byte[1], "12").Appraise();
+        var stream = new MemoryStream();
+        using (var file = new WideCsv(stream, release.Release.Tables[0], release.Release.Coverages.Main, null))
+            file.Add(0, [release.Figure(new FigureRef(0, 0, 0))]);
+        Assert.Contains("r1,12000,8000,4000,20000,weak,A", Encoding.UTF8.GetString(stream.ToArray()), StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Label_with_comma_quote_and_line_end_is_one_cell()
     {

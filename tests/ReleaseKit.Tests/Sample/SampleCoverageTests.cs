@@ -87,7 +87,7 @@ public sealed record DrawnFigure(AppraisedFigure Figure, double Before)
 /// <summary>The published sample, and copies of it with noise drawn from other seeds, read and appraised like any release.</summary>
 public sealed class RedrawnSamples
 {
-    public const int Seeds = 60;
+    public const int Seeds = 40;
 
     public RedrawnSamples()
     {
@@ -104,7 +104,8 @@ public sealed class RedrawnSamples
         var tables = SampleRelease.Maker.Noised(seed);
         var outcome = ReleaseFolder.Read(SampleRelease.CopyWith(tables, folder.Path));
         var release = outcome.Release ?? throw new InvalidOperationException(string.Join('\n', outcome.Findings));
-        return [.. tables.SelectMany((table, index) => Figures(AppraisedRelease.Of(release), table, index))];
+        var appraised = AppraisedRelease.Of(release);
+        return [.. tables.SelectMany((table, index) => Figures(appraised, table, index))];
     }
 
     private static IEnumerable<DrawnFigure> Figures(IAppraisedRelease appraised, SampleTable drawn, int table)
