@@ -57,6 +57,8 @@ public static class ReleaseFolder
             var release = Assemble(draft, tables, prose, mechanisms, signOff);
             FolderChecks.Run(draft, tables, mechanisms, release, log);
             tablesAreWhole = draft.HasAllTables && tables.All(table => table.IsWhole);
+            if (tablesAreWhole)
+                labels.CheckUsed(release.Tables, Context(FindingOwner.Writer));
             return mechanisms.Account is null ? null : release;
         }
 

@@ -21,6 +21,18 @@ internal sealed partial class LabelBook
 
     public LabelEntry? Find(string column, string value) => entries.GetValueOrDefault(new StubValue(column, value));
 
+    /// <summary>Entries that no table has a row heading for.</summary>
+    public void CheckUsed(IReadOnlyList<Table> tables, ReadContext context)
+    {
+        var used = tables.SelectMany(table => table.Stub).GroupBy(stub => stub.Column)
+            .ToDictionary(group => group.Key, group => group.SelectMany(stub => stub.Labels).Select(label => label.Value).ToHashSet());
+        foreach (var (value, entry) in entries)
+            if (!used.TryGetValue(value.Column, out var values))
+                context.Add(LabelProblems.Unused(entry.At, value.Column, "stub column", used.Keys, context.Owner));
+            else if (!values.Contains(value.Value))
+                context.Add(LabelProblems.Unused(entry.At, value.Value, $"row heading in column \"{value.Column}\"", values, context.Owner));
+    }
+
     /// <summary>The book of a folder; empty if it has no labels.csv, or one that cannot be read.</summary>
     public static LabelBook Read(FolderFiles files, ReadContext context)
     {

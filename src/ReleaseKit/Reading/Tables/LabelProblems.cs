@@ -27,6 +27,12 @@ internal static class LabelProblems
         "rows are put in this order.",
         "write 1, 2, 3 …");
 
+    public static Finding Unused(Place at, string name, string what, IEnumerable<string> known, FindingOwner owner) => new(
+        FindingLevel.Caution, "label-unused", owner, at,
+        $"\"{KeyProblems.Cut(name)}\" is no {what} of any table.",
+        "what is said of it here has no effect.",
+        Nearest.Of(name, known) is { } near ? $"write \"{near}\", or remove the line." : "correct it, or remove the line.");
+
     public static Finding Twice(Place at, StubValue value, Place first, FindingOwner owner) => new(
         FindingLevel.Stop, "doubled-row", owner, at,
         $"\"{KeyProblems.Cut(value.Value)}\" of column \"{KeyProblems.Cut(value.Column)}\" stands there twice; first at line {first.Line}.",

@@ -9,12 +9,23 @@ internal static class RuleChecks
 {
     public static void Run(ReadTable read, MechanismsDraft mechanisms, FindingLog log)
     {
+        CheckColumns(read, mechanisms, log);
         for (var measure = 0; measure < read.Table.Measures.Count; measure++)
         {
             CheckRules(read, measure, mechanisms, log);
             CheckScales(read, measure, log);
             CheckDeclared(read, measure, log);
         }
+    }
+
+    /// <summary>A column that is said to carry the noise of a mechanism names one that is declared.</summary>
+    private static void CheckColumns(ReadTable read, MechanismsDraft mechanisms, FindingLog log)
+    {
+        if (mechanisms.Account is null)
+            return;
+        foreach (var column in read.Draft.Columns)
+            if (column.Mechanism is { } id && !mechanisms.DeclaredIds.Contains(id))
+                log.Add(MechanismProblems.UnknownMechanism(column.At, id, mechanisms.DeclaredIds, FindingOwner.Noise));
     }
 
     private static void CheckRules(ReadTable read, int measure, MechanismsDraft mechanisms, FindingLog log)
