@@ -19,7 +19,7 @@ internal static class FigureCases
             figure.Mechanism is { } mechanism && mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any(),
             steps.Any(step => step is AfterStep.NotBelow below && below.Bound == value || step is AfterStep.NotAbove above && above.Bound == value),
             capped,
-            threshold is { } from && value - main.Margin < from);
+            threshold is { } from && (value - main.Margin < from || main.Printed.IsUneven));
         return also with { First = First(figure, main, also, value) };
     }
 

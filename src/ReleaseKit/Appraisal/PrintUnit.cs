@@ -22,8 +22,12 @@ internal readonly record struct PrintUnit(int Exponent)
 
     /// <summary>A number of the arithmetic as a decimal of 12 significant digits.</summary>
     /// <exception cref="OverflowException">It is infinite or beyond what can be printed.</exception>
-    public static decimal Rounded(double number) =>
-        decimal.Parse(number.ToString($"E{Digits - 1}", CultureInfo.InvariantCulture), NumberStyles.Float, CultureInfo.InvariantCulture);
+    public static decimal Rounded(double number)
+    {
+        Span<char> digits = stackalloc char[32];
+        number.TryFormat(digits, out var length, $"E{Digits - 1}", CultureInfo.InvariantCulture);
+        return decimal.Parse(digits[..length], NumberStyles.Float, CultureInfo.InvariantCulture);
+    }
 
     public decimal Nearest(decimal number) => decimal.Round(Steps(number), 0, MidpointRounding.AwayFromZero);
 

@@ -42,10 +42,15 @@ internal sealed class NoiseSentences(Voice voice)
                 yield return cut;
     }
 
-    /// <summary>The half-width does not even reach what is possible: here the noise was certainly larger.</summary>
-    private static bool IsBeyondMargin(AppraisedFigure figure, FigureRange main) =>
-        !figure.Error!.DependsOnPublished
-        && (figure.Value.ToDouble() + main.MarginUp < figure.Possible.Lowest || figure.Value.ToDouble() - main.MarginDown > figure.Possible.Highest);
+    /// <summary>The half-width as printed does not even reach what is possible: here the noise was certainly larger.</summary>
+    private static bool IsBeyondMargin(AppraisedFigure figure, FigureRange main)
+    {
+        if (figure.Error!.DependsOnPublished)
+            return false;
+        var (value, factor) = ((double)(figure.Value.ToDecimal() * figure.Measure.PrintFactor), figure.Measure.PrintFactor);
+        return value + main.Printed.MarginUp.ToDouble() < figure.Possible.Lowest * factor
+            || value - main.Printed.MarginDown.ToDouble() > figure.Possible.Highest * factor;
+    }
 
     private string Beyond(AppraisedFigure figure)
     {
