@@ -23,4 +23,15 @@ internal static class Search
         }
         return start + stride * (whole ? works : fails);
     }
+
+    /// <summary>The place nearest to where a condition begins to hold between two places, on the side where it fails.</summary>
+    public static double Between(double fails, double works, Func<double, bool> holds)
+    {
+        for (var halvings = 0; halvings < 44; halvings++)
+        {
+            var middle = fails + (works - fails) / 2;
+            (fails, works) = holds(middle) ? (fails, middle) : (middle, works);
+        }
+        return fails;
+    }
 }

@@ -53,8 +53,8 @@ internal static class StepRules
         var threshold = ThresholdOf(step)!.Value;
         if (at.Count > 1)
             yield return "There are two thresholds: give one.";
-        if (!law.IsLogConcave)
-            yield return $"A threshold after a law of the kind {law.GetType().Name} is not worked out: its figures have no valid range.";
+        if (!law.IsLogConcave && !HullScan.Knows(law))
+            yield return Say($"A threshold after {law.GetType().Name} with these parameters is not worked out: its figures have no valid range.");
         if (Lowest<AfterStep.NotAbove>(steps) < threshold)
             yield return Say($"Nothing above {Lowest<AfterStep.NotAbove>(steps)} is published, yet the threshold is {threshold}: no figure could pass it.");
         if (Highest<AfterStep.NotBelow>(steps.Take(place)) >= threshold)

@@ -9,7 +9,7 @@ namespace ReleaseKit.Noise.Errors;
 /// A value before noise x belongs to the range of y if P(Y ≥ y | passed; x) and P(Y ≤ y | passed; x) are both above β = (1 − c)/2. Each tail
 /// misses with at most β, so among the figures that passed the range holds x in at least c of the cases, for every x. For log-concave noise both
 /// chances move one way as x moves, so that the set is an interval (Lehmann &amp; Romano 2005, Testing Statistical Hypotheses, 3.4: monotone
-/// likelihood ratio, kept by conditioning on a half-line; numbering from memory).
+/// likelihood ratio, kept by conditioning on a half-line; numbering from memory). For other laws the hull of the set is taken, which holds x too.
 /// </remarks>
 internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
 {
@@ -20,17 +20,18 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
     private readonly double passing = chain.Passing();
     private readonly double stride = law is LatticeLaw ? 1 : Math.Sqrt(law.Variance);
 
+    private readonly HullScan? scan = law.IsLogConcave
+        ? null
+        : new HullScan(law, chain.Passing(), chain.ExactRounding is { How: RoundingHow.AtRandom } random ? random.Unit - 1 : 0);
+
     /// <summary>The ends for a value that passed the threshold, in the figure's unit; the published value is never outside.</summary>
     public (double Low, double High) At(double published, Coverage coverage)
     {
         var tail = coverage.Rest / 2 * (1 - Slack);
         var (reaching, exceeding) = (Math.Max(passing, chain.Reaching(published)), chain.Exceeding(published));
-        var low = Search.Farthest(reaching, -stride, lattice is not null, x => IsNotTooHigh(reaching, x, tail));
         var start = lattice is null ? published : Lattice.Floor(published / chain.Unit);
         reaching = double.IsFinite(reaching) ? reaching : start;
-        var high = IsNotTooLow(exceeding, start, tail)
-            ? Search.Farthest(start, stride, lattice is not null, x => IsNotTooLow(exceeding, x, tail))
-            : start;
+        var (low, high) = (LowEnd(reaching, tail), HighEnd(exceeding, start, tail));
         return (Math.Min(low, start) * chain.Unit, high * chain.Unit);
     }
 
@@ -40,6 +41,22 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
         var tail = coverage.Rest / 2 * (1 - Slack);
         var start = passing - (chain.ExactRounding?.Unit ?? 1) * stride;
         return Search.Farthest(start, stride, lattice is not null, x => ChanceBelow(passing - x) > tail) * chain.Unit;
+    }
+
+    private double LowEnd(double reaching, double tail)
+    {
+        bool Holds(double x) => IsNotTooHigh(reaching, x, tail);
+        return scan is null ? Search.Farthest(reaching, -stride, lattice is not null, Holds) : scan.Lowest(reaching, tail, Holds);
+    }
+
+    private double HighEnd(double exceeding, double start, double tail)
+    {
+        bool Holds(double x) => IsNotTooLow(exceeding, x, tail);
+        if (double.IsPositiveInfinity(exceeding) || exceeding <= passing)
+            return exceeding <= passing ? start : exceeding;
+        if (scan is not null)
+            return scan.Highest(exceeding, start, tail, Holds);
+        return Holds(start) ? Search.Farthest(start, stride, lattice is not null, Holds) : start;
     }
 
     private bool IsNotTooHigh(double reaching, double x, double tail)

@@ -72,16 +72,6 @@ public sealed record StaircaseLaw : ContinuousLaw
         return top * Math.Exp(-Epsilon * (past < high ? step : step + 1));
     }
 
-    /// <summary>The places x &gt; 0 where the density falls: ends of the higher and of the lower parts of the steps, in order.</summary>
-    internal IEnumerable<double> Edges()
-    {
-        for (var step = 0; ; step++)
-        {
-            yield return step * Sensitivity + high;
-            yield return (step + 1) * Sensitivity;
-        }
-    }
-
     private protected override double TailFrom(double x)
     {
         if (double.IsPositiveInfinity(x))

@@ -33,6 +33,13 @@ public sealed class StepRulesTests
     }
 
     [Fact]
+    public void Threshold_after_a_law_whose_range_is_not_worked_out_is_refused()
+    {
+        Assert.Throws<ArgumentException>(() => FigureError.Of(TabulatedLaw.Of([(0, 0.9m), (1, 0.09m)]), new PublishedFrom(30)));
+        Assert.Throws<ArgumentException>(() => FigureError.Of(StaircaseLaw.Of(1e-5, 1, 0.5), new PublishedFrom(30)));
+    }
+
+    [Fact]
     public void Several_faults_are_listed_at_once()
     {
         var fault = Assert.Throws<ArgumentException>(() => FigureError.Of(DiscreteLaplaceLaw.Of(4), new NotBelow(3), new RoundTo(5), new ZeroBelow(-1)));

@@ -26,7 +26,7 @@ public sealed class ExtremesTests
             var half = law.HalfWidthAt(coverage);
             Assert.True(double.IsFinite(half.Width) && half.Width >= 0);
             Assert.InRange(half.Attained, coverage.Share - 2e-12, 1);
-            foreach (var steps in Chains.Where(steps => steps is not [AfterStep.PublishedFrom] || law is not StaircaseLaw))
+            foreach (var steps in Chains.Where(steps => steps is not [AfterStep.PublishedFrom] || law is not StaircaseLaw { Epsilon: < 1e-4 }))
             {
                 var error = FigureError.Of(law, steps);
                 foreach (var published in new[] { 40, 1e6, 1e12, -10, -1e12 })

@@ -24,7 +24,7 @@ public sealed class SimulatedCoverageTests
 
     public static TheoryData<string, string> LatticePlain => [.. from law in OnLattice from steps in Steps.WithoutThreshold.Keys select (law, steps)];
 
-    public static TheoryData<string, string> Thresholds => [.. from law in Continuous[..3].Concat(OnLattice)
+    public static TheoryData<string, string> Thresholds => [.. from law in Continuous.Concat(OnLattice)
                                                                from steps in Steps.WithThreshold
                                                                where OnLattice.Contains(law) || !steps.Value.Any(IsRandom)
                                                                select (law, steps.Key)];
