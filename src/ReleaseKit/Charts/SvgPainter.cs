@@ -93,7 +93,7 @@ public sealed class SvgPainter
         return $" fill=\"{palette[ink.Fill]}\"{stroke}{type}";
     }
 
-    private const string Family = "Asap, Verdana, sans-serif";
+    private const string Family = "Asap, Arial, Helvetica, sans-serif";
 
     private static int Weight(Face face) => face switch
     {

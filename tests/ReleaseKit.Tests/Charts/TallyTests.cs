@@ -101,6 +101,20 @@ public sealed class TallyTests
     }
 
     [Theory]
+    [InlineData(1)]
+    [InlineData(5)]
+    [InlineData(12)]
+    public void On_paper_labels_never_meet_either(int pieces)
+    {
+        using var type = TextBoxes.Type();
+
+        var drawing = WideTally.Of(Account(pieces), type, WideTally.PaperWidth).Drawing;
+
+        TextBoxes.DemandNoOverlap(drawing, type);
+        TextBoxes.DemandInside(drawing, type);
+    }
+
+    [Theory]
     [InlineData(true)]
     [InlineData(false)]
     public void Leaders_cross_no_text(bool lying)

@@ -5,6 +5,7 @@ using ReleaseKit.Appraisal;
 using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Pages.Budget;
 using ReleaseKit.Releases;
+using ReleaseKit.Tests.Wording;
 using ReleaseKit.Wording;
 using Xunit;
 
@@ -50,7 +51,7 @@ public sealed class BudgetPageTests
 
         var tables = page.QuerySelectorAll(".odds");
         // e^4.5 = 90.017…, rounded up to three digits.
-        Assert.Contains("to at most 90.1 times", Text(page), StringComparison.Ordinal);
+        Assert.Contains("to at most 90.1 times what they were", Text(page), StringComparison.Ordinal);
         Assert.Contains("at most 1 in 100,000,000 of all outcomes", Text(page), StringComparison.Ordinal);
         foreach (var (belief, row) in meaning.Beliefs.Zip(tables[0].QuerySelectorAll("tbody tr")))
         {
@@ -218,6 +219,26 @@ public sealed class BudgetPageTests
         Assert.Empty(page.QuerySelectorAll("[style], style, script"));
         Assert.Empty(page.QuerySelectorAll("[id]").GroupBy(element => element.Id).Where(group => group.Count() > 1).Select(group => group.Key));
     }
+
+    [Theory]
+    [InlineData(Neighbouring.AddOrRemove)]
+    [InlineData(Neighbouring.Replace)]
+    public void Meaning_can_be_read_at_grade_eight_and_no_sentence_is_long(Neighbouring neighbouring)
+    {
+        var page = Read(new BudgetSample { Neighbouring = neighbouring });
+        var texts = page.QuerySelectorAll(".meaning .exact-first, .meaning .two > div:first-child").ToList();
+
+        Assert.Equal(3, texts.Count);
+        foreach (var text in texts)
+        {
+            string[] sentences = [.. text.QuerySelectorAll("p").DefaultIfEmpty(text).SelectMany(part => Sentences(part.TextContent))];
+            Assert.InRange(Readability.Grade(sentences), -4, 8);
+            Assert.All(sentences, sentence => Assert.True(Readability.Words(sentence).Count <= 25, sentence));
+        }
+    }
+
+    private static IEnumerable<string> Sentences(string text) =>
+        text.Split(". ", StringSplitOptions.RemoveEmptyEntries | StringSplitOptions.TrimEntries).Where(sentence => sentence.Length > 0);
 
     private static IDocument Read(BudgetSample sample) => new HtmlParser().ParseDocument(sample.Page());
 

@@ -15,12 +15,13 @@ internal static partial class Readability
         + "known large late learned least leaves less lies low made marks may mean miss more most moved need no noise none not of "
         + "on or own parts per range rate read rest rough same share show small so some source still strike such sum sums tend "
         + "tends than that the their them there they this to told too touched up use was way weak were what with wrong yet add "
-        + "are checked come make",
+        + "are checked come make all think who knows whole raise odds guess times holds worst say says tests test yes find gives false used has sets two one "
+        + "which",
         "about above added adds after allows alone amount amounts answers before below between cannot carried cases column counted "
         + "covers downward either event exist figure figures filled forecast further given hidden index instead larger level "
         + "limits margin margins minus misses normal number numbers office only other outside people protect public published ranges "
         + "reaches records rounded rounding rules series special table total totals upward valid within without zero",
-        "another certainty collected estimate expected holiday median multiple quality together usual",
+        "another certainty exactly general collected estimate expected holiday median multiple quality together usual",
         "available definition provisional publication",
         "experimental",
     ];

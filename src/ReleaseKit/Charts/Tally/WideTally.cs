@@ -3,9 +3,11 @@ namespace ReleaseKit.Charts.Tally;
 /// <summary>The stick lying: the solid half notched by table, the hatched half below it by level, a scale at the foot.</summary>
 public static class WideTally
 {
-    private const double Width = 1160;
+    /// <summary>Width on a wide page, and on paper, where letters keep their size.</summary>
+    public const double PageWidth = 1160;
+    public const double PaperWidth = 680;
+
     private const double Left = 1;
-    private const double Right = 1159;
     private const double Half = 44;
     private const double Gap = 7;
     private const double Line = 18;
@@ -13,14 +15,15 @@ public static class WideTally
     private const double FirstBelow = 22;
     private const double NotchDepth = 24;
 
-    public static DrawnTally Of(TallyAccount account, TypeCase type)
+    public static DrawnTally Of(TallyAccount account, TypeCase type, double width = PageWidth)
     {
-        var perUnit = (Right - Left) / account.Whole;
+        var right = width - Left;
+        var perUnit = (right - Left) / account.Whole;
         var tables = Slice.Lay(account.ByTable, Left, perUnit);
         var levels = Slice.Lay(account.ByLevel, Left, perUnit);
         var rest = TallyRest.Wide(account, tables, perUnit, type);
-        var above = WideLabels.Of(rest.IsLabelledInside ? tables : [.. tables, rest.Slice], Width, outwardIsUp: true, type);
-        var below = WideLabels.Of(levels, Width, outwardIsUp: false, type);
+        var above = WideLabels.Of(rest.IsLabelledInside ? tables : [.. tables, rest.Slice], width, outwardIsUp: true, type);
+        var below = WideLabels.Of(levels, width, outwardIsUp: false, type);
 
         var top = FirstAbove + (above.Depth * Line);
         var lower = top + Half + Gap;
@@ -30,9 +33,9 @@ public static class WideTally
         [
             .. Solid(tables, top), .. Hatched(levels, lower), .. rest.Shapes(top, foot),
             .. Text(above, slot => top - FirstAbove - (slot * Line), top), .. Text(below, slot => foot + FirstBelow + (slot * Line), foot),
-            .. TallyScale.Lying(account, type, Left, Right, axis),
+            .. TallyScale.Lying(account, type, Left, right, axis),
         ];
-        return new DrawnTally(new Drawing(Width, axis + 27, shapes), [.. above.Unlabelled, .. below.Unlabelled]);
+        return new DrawnTally(new Drawing(width, axis + 27, shapes), [.. above.Unlabelled, .. below.Unlabelled]);
     }
 
     private static IEnumerable<Shape> Solid(IReadOnlyList<Slice> slices, double top) =>

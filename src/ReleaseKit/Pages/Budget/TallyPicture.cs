@@ -4,19 +4,20 @@ using ReleaseKit.Releases;
 
 namespace ReleaseKit.Pages.Budget;
 
-/// <summary>The account as a split tally: lying for wide pages, upright for narrow ones.</summary>
+/// <summary>The account as a split tally: lying for wide pages and for paper, upright for narrow ones.</summary>
 internal static class TallyPicture
 {
     public static (string Html, bool HasUnlabelled) Of(BudgetWords words, TypeCase type)
     {
         var account = AccountOf(words);
-        var (wide, upright) = (WideTally.Of(account, type), UprightTally.Of(account, type));
+        var (wide, upright, paper) = (WideTally.Of(account, type), UprightTally.Of(account, type), WideTally.Of(account, type, WideTally.PaperWidth));
         var title = words.Say("budget.tally.title");
         var description = Description(account, words);
         return (
             SvgPainter.ForPage(wide.Drawing, "tally-wide", "tally only-wide", title, description)
-            + SvgPainter.ForPage(upright.Drawing, "tally-upright", "tally only-narrow", title, description),
-            wide.Unlabelled.Count + upright.Unlabelled.Count > 0);
+            + SvgPainter.ForPage(upright.Drawing, "tally-upright", "tally only-narrow", title, description)
+            + SvgPainter.ForPage(paper.Drawing, "tally-paper", "tally only-paper", title, description),
+            wide.Unlabelled.Count + upright.Unlabelled.Count + paper.Unlabelled.Count > 0);
     }
 
     internal static TallyAccount AccountOf(BudgetWords words)
