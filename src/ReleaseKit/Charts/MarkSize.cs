@@ -22,7 +22,7 @@ public sealed record MarkSize
     public double StemTop => Middle - (StemHeight / 2);
 
     /// <summary>In a cell of a table: canvas 26 high.</summary>
-    public static MarkSize Cell { get; } = new() { Peak = 12, StemHeight = 19, StemWidth = 1.8, StopHeight = 9, StopWidth = 1.4, Middle = 13, PointsASide = 16 };
+    public static MarkSize Cell { get; } = new() { Peak = 12, StemHeight = 19, StemWidth = 1.8, StopHeight = 9, StopWidth = 1.4, Middle = 13, PointsASide = 14 };
 
     /// <summary>Beside a headline figure: canvas 62 high with its labels.</summary>
     public static MarkSize Line { get; } = new() { Peak = 30, StemHeight = 40, StemWidth = 2.2, StopHeight = 16, StopWidth = 1.8, Middle = 24, PointsASide = 36 };

@@ -17,6 +17,9 @@ public sealed record MarkSubject
     /// <summary>The thickness of the body, 0 to 1, at an offset of the noise (published − before noise); null: a line with stops.</summary>
     public Func<double, double>? Density { get; init; }
 
+    /// <summary>What the density belongs to: marks of the same law look alike.</summary>
+    public object? Law { get; init; }
+
     /// <summary>The grid of a law on whole steps, 0 for a law with a density.</summary>
     public double Grid { get; init; }
 
@@ -30,16 +33,22 @@ public sealed record MarkSubject
     public MarkRange Body => Ranges[1];
     public MarkRange Tail => Ranges[2];
 
-    public static MarkSubject Of(AppraisedFigure figure) => new()
+    /// <summary>The figure in the unit in which it is printed: shares that the files hold in ones count to 100.</summary>
+    public static MarkSubject Of(AppraisedFigure figure)
     {
-        Value = figure.Value.ToDouble() * figure.Measure.Multiplier,
-        Ranges = [.. figure.Ranges.Select(RangeOf)],
-        Density = figure.Error is { } error ? error.RelativeDensity : null,
-        Grid = figure.Error?.Law is LatticeLaw law ? law.Grid : 0,
-        Weak = figure.Reliability == Reliability.Weak,
-        Lowest = figure.Measure.Lowest ?? double.NegativeInfinity,
-        Highest = figure.Measure.Highest ?? double.PositiveInfinity,
-    };
+        double factor = figure.Measure.PrintFactor;
+        return new()
+        {
+            Value = factor * figure.Value.ToDouble(),
+            Ranges = [.. figure.Ranges.Select(range => RangeOf(range, factor))],
+            Density = figure.Error is { } error ? offset => error.RelativeDensity(offset / factor) : null,
+            Law = figure.Error,
+            Grid = figure.Error?.Law is LatticeLaw law ? law.Grid * factor : 0,
+            Weak = figure.Reliability == Reliability.Weak,
+            Lowest = figure.Possible.Lowest * factor,
+            Highest = figure.Possible.Highest * factor,
+        };
+    }
 
     /// <summary>The thickness at a place; between the steps of a grid on the straight line from one to the next.</summary>
     public double ThicknessAt(double place)
@@ -54,5 +63,6 @@ public sealed record MarkSubject
     }
 
     // A range of a figure below the possible ends higher than the law alone would have it, so the larger of both ends is drawn.
-    private static MarkRange RangeOf(FigureRange range) => new(Math.Min(range.UncutLow, range.Low), Math.Max(range.UncutHigh, range.High));
+    private static MarkRange RangeOf(FigureRange range, double factor) =>
+        new(factor * Math.Min(range.UncutLow, range.Low), factor * Math.Max(range.UncutHigh, range.High));
 }

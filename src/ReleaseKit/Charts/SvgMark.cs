@@ -6,11 +6,11 @@ namespace ReleaseKit.Charts;
 /// <summary>Paints shapes of a mark as SVG paths: classes and presentation attributes only, no style.</summary>
 public static class SvgMark
 {
-    public static string Paint(IEnumerable<MarkShape> shapes, int decimals = 1)
+    public static string Paint(IEnumerable<MarkShape> shapes, int decimals = 1, int heightDecimals = 2)
     {
         var svg = new StringBuilder();
         foreach (var shape in shapes)
-            svg.Append("<path class=\"").Append(ClassOf(shape.Ink)).Append('"').Append(StrokeOf(shape)).Append(" d=\"").Append(PathOf(shape, decimals)).Append("\"/>");
+            svg.Append("<path class=\"").Append(ClassOf(shape.Ink)).Append('"').Append(StrokeOf(shape)).Append(" d=\"").Append(PathOf(shape, decimals, heightDecimals)).Append("\"/>");
         return svg.ToString();
     }
 
@@ -23,11 +23,11 @@ public static class SvgMark
 
     private static string StrokeOf(MarkShape shape) => shape.Thickness > 0 ? $" stroke-width=\"{Number(shape.Thickness, 2)}\"" : "";
 
-    private static string PathOf(MarkShape shape, int decimals)
+    private static string PathOf(MarkShape shape, int decimals, int heightDecimals)
     {
         var path = new StringBuilder();
         foreach (var point in shape.Points)
-            path.Append(path.Length == 0 ? 'M' : 'L').Append(Number(point.X, decimals)).Append(' ').Append(Number(point.Y, 2));
+            path.Append(path.Length == 0 ? 'M' : 'L').Append(Number(point.X, decimals)).Append(' ').Append(Number(point.Y, heightDecimals));
         return (shape.Closed ? path.Append('Z') : path).ToString();
     }
 

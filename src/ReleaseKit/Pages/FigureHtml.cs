@@ -10,9 +10,8 @@ public static class FigureHtml
     /// <summary>The number in heavy and light digits; the whole number once for screen readers. Its value attribute holds the published value exactly.</summary>
     public static string Number(AppraisedFigure figure, ILanguage language)
     {
-        var printed = figure.Main?.Printed;
-        var text = language.Number(printed?.Value ?? figure.Value);
-        return Data(figure, printed is null ? new(text, "") : LightDigits.Of(text, printed));
+        var text = language.Number(figure.Printed);
+        return Data(figure, figure.Main is { } range ? LightDigits.Of(text, range.Printed) : new(text, ""));
     }
 
     /// <summary>The margin, or the word that stands in its place for a figure without one: plain text.</summary>

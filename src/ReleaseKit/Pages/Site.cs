@@ -27,13 +27,13 @@ public static class Site
         HomePage.Write(context, target);
         ProsePages.Write(context, target);
         BudgetPage.Write(context, target);
+        TablePages.WriteAll(context, target, progress);
         ReadingPage.Write(context, target);
         MethodsPage.Write(context, target);
         DownloadFiles.WriteAll(context, target);
         ChartImages.WriteAll(context, target);
         DownloadsPage.Write(context, target);
         NotFoundPage.Write(context, target);
-        progress?.Report(0);
     }
 
     private static SiteContext ContextOf(

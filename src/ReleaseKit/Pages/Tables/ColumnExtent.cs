@@ -1,0 +1,64 @@
+using ReleaseKit.Charts;
+
+namespace ReleaseKit.Pages.Tables;
+
+/// <summary>What the marks of one column and one level of totals reach: gathered figure by figure, then turned into a scale that fits them.</summary>
+internal sealed class ColumnExtent
+{
+    private const double ZeroFits = 0.4;
+
+    /// <summary>Stems alone are not drawn further apart than this share of their size asks for: they have no noise that a finer scale could show.</summary>
+    private const double LeastOfStems = 0.1;
+
+    /// <summary>Lowest end that must be seen: the stem, and the range as far as it is possible.</summary>
+    private double low = double.PositiveInfinity;
+    private double high = double.NegativeInfinity;
+
+    /// <summary>Lowest end of a figure that lies where the value before noise cannot be.</summary>
+    private double below = double.PositiveInfinity;
+    private double above = double.NegativeInfinity;
+    private bool hasRanges;
+
+    public bool IsEmpty => low > high;
+    public double Low => low;
+    public double High => high;
+
+    public void Add(MarkSubject subject)
+    {
+        See(subject.Value);
+        if (subject.IsStemAlone)
+            return;
+        hasRanges = true;
+        if (subject.Value < subject.Lowest)
+            below = Math.Min(below, subject.Body.Low);
+        if (subject.Value > subject.Highest)
+            above = Math.Max(above, subject.Body.High);
+        // A weak figure's range may run off the scale (an arrow says so); all others are seen to the end of their tails.
+        if (!subject.Weak)
+        {
+            See(Math.Max(subject.Tail.Low, subject.Lowest));
+            See(Math.Min(subject.Tail.High, subject.Highest));
+        }
+    }
+
+    public void Add(ColumnExtent other)
+    {
+        (low, high) = (Math.Min(low, other.low), Math.Max(high, other.high));
+        (below, above) = (Math.Min(below, other.below), Math.Max(above, other.above));
+        hasRanges |= other.hasRanges;
+    }
+
+    /// <summary>The scale of the parts: from zero where zero is not far, below it only for figures that are.</summary>
+    public (double From, double To) Fit()
+    {
+        if (IsEmpty)
+            return (0, 1);
+        var from = low > 0 && low < ZeroFits * high ? 0 : low;
+        var to = Math.Max(high, above);
+        from = Math.Min(from, below);
+        var least = hasRanges ? 0 : LeastOfStems * Math.Max(Math.Abs(from), Math.Abs(to));
+        return to - from > least ? (from, to) : (from - (least / 2), to + Math.Max(least / 2, 1));
+    }
+
+    private void See(double value) => (low, high) = (Math.Min(low, value), Math.Max(high, value));
+}

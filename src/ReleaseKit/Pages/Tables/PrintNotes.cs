@@ -1,0 +1,33 @@
+using ReleaseKit.Appraisal;
+
+namespace ReleaseKit.Pages.Tables;
+
+/// <summary>The readings that paper needs: those of weak and special figures, numbered; the rest have their column's sentence.</summary>
+internal sealed class PrintNotes(Sheet sheet)
+{
+    private readonly List<(string Name, AppraisedFigure Figure)> noted = [];
+
+    /// <summary>The number of the figure's note, or null if its column's sentence says all.</summary>
+    public int? NumberFor(AppraisedFigure figure, SheetRow row)
+    {
+        if (!NeedsNote(figure))
+            return null;
+        noted.Add((row.Name, figure));
+        return noted.Count;
+    }
+
+    public void Write(HtmlWriter html)
+    {
+        if (noted.Count == 0)
+            return;
+        html.Raw("<section class=\"print-notes\"><h2>"u8).Text(sheet.Text("tables.print-notes")).Raw("</h2><ol>"u8);
+        foreach (var (name, figure) in noted)
+            html.Raw("<li><b>"u8).Text(name).Raw(".</b> "u8).Text(figure.Measure.Title.In(sheet.Language.Tag)).Raw(": "u8).Text(sheet.Language.ReadingOf(figure).Text).Raw("</li>\n"u8);
+        html.Raw("</ol></section>\n"u8);
+    }
+
+    // What is special about a whole column (exact, public, amounts capped, noise that mostly leaves a value as it was) its foot says.
+    private static bool NeedsNote(AppraisedFigure figure) => figure.Reliability == Reliability.Weak || figure.Case.First is
+        SpecialCase.NoNumber or SpecialCase.NoMargin or SpecialCase.BelowZero or SpecialCase.AboveHighest or SpecialCase.Zero or SpecialCase.FromThreshold
+        or SpecialCase.NotPublishedBelow or SpecialCase.FlooredSum or SpecialCase.MarginAsLargeAsFigure;
+}

@@ -1,0 +1,70 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Charts;
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+
+namespace ReleaseKit.Pages.Tables;
+
+/// <summary>
+/// A figure unfolded: its sentences, its ranges, the curve of its noise, its own link. It stands in a folded row under the figure's row, in a details element whose
+/// content bears the figure's id, so that going to that address opens it; what has been opened stays open.
+/// </summary>
+internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter html)
+{
+    private const int AttainedDecimals = 1;
+
+    // What figures alike have in common stands together and what differs last, so that a page of readings stays small on its way to the reader.
+    public void Write(AppraisedFigure figure, SheetRow row)
+    {
+        html.Raw("<details><summary><b>"u8).Text(row.Name).Raw("</b> "u8).Text(figure.Measure.Title.In(sheet.Language.Tag))
+            .Raw("</summary><div class=\"panel\" id=\""u8).Raw(figure.Id).Raw("\"><p class=\"panel-links\"><a href=\"#"u8).Raw(figure.Id).Raw("\">"u8)
+            .Text(sheet.Text("tables.permalink")).Raw("</a> <a href=\"#"u8).Raw(Sheet.AboutId(figure.Measure)).Raw("\">"u8).Text(sheet.Text("tables.about")).Raw("</a></p>"u8);
+        WriteSentences(sheet.Language.ReadingOf(figure));
+        if (figure.Main is not null)
+            WriteRanges(figure);
+        if (figure.Main is not null && figure.Error is not null)
+            html.Raw("<figure><figcaption>"u8).Text(sheet.Text("tables.curve")).Raw("</figcaption>"u8).Raw(curves.Draw(figure, MarkSubject.Of(figure), sheet.Language)).Raw("</figure>"u8);
+        html.Raw("</div></details>"u8);
+    }
+
+    private void WriteSentences(Wording.Reading reading)
+    {
+        html.Raw("<div class=\"says\">"u8);
+        WriteParagraph("<p class=\"say\">"u8, Joined(reading, part => part <= ReadingPart.Noise));
+        WriteParagraph("<p>"u8, Joined(reading, part => part > ReadingPart.Noise));
+        html.Raw("</div>"u8);
+    }
+
+    private void WriteParagraph(ReadOnlySpan<byte> start, string text)
+    {
+        if (text.Length > 0)
+            html.Raw(start).Text(text).Raw("</p>"u8);
+    }
+
+    private static string Joined(Wording.Reading reading, Func<ReadingPart, bool> isWanted) =>
+        string.Join(' ', reading.Sentences.Where(sentence => isWanted(sentence.Part)).Select(sentence => sentence.Text));
+
+    // End tags that HTML lets one leave out are left out here, where they would stand a thousand times a page.
+    private void WriteRanges(AppraisedFigure figure)
+    {
+        html.Raw("<table class=\"ranges\"><tr><th>"u8).Text(sheet.Text("tables.ranges"));
+        foreach (var range in figure.Ranges)
+            html.Raw("<th>"u8).Text(sheet.Language.Share(range.Coverage));
+        WriteRangeRow(figure, "tables.margin", range => sheet.Language.Margin(range.Printed));
+        WriteRangeRow(figure, "tables.ranges.attained", range => sheet.Language.Number(AttainedInHundred(range)));
+        WriteRangeRow(figure, "tables.ranges.from", range => sheet.Language.Number(range.Printed.Low));
+        WriteRangeRow(figure, "tables.ranges.to", range => sheet.Language.Number(range.Printed.High));
+        html.Raw("</table>"u8);
+    }
+
+    private void WriteRangeRow(AppraisedFigure figure, string key, Func<FigureRange, string> text)
+    {
+        html.Raw("<tr><th scope=\"row\">"u8).Text(sheet.Text(key));
+        foreach (var range in figure.Ranges)
+            html.Raw("<td>"u8).Text(text(range));
+    }
+
+    /// <summary>The attained coverage of 100 cases, rounded down.</summary>
+    private static PublishedValue AttainedInHundred(FigureRange range) =>
+        new((long)Math.Floor(Math.Round(range.Attained * 1000, 9)), AttainedDecimals);
+}

@@ -1,0 +1,49 @@
+using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
+using ReleaseKit.Wording;
+
+namespace ReleaseKit.Pages.Tables;
+
+/// <summary>A table as its pages see it, read whole before the first of them is written.</summary>
+internal sealed record Sheet
+{
+    public required SiteContext Site { get; init; }
+    public required int Index { get; init; }
+    public required Table Table { get; init; }
+    public required SheetStub Stub { get; init; }
+    public required ColumnScales Scales { get; init; }
+    public required TableFacts Facts { get; init; }
+    public required NoteMarks Notes { get; init; }
+
+    /// <summary>Indices of the measures that are shown, in order.</summary>
+    public required IReadOnlyList<int> Shown { get; init; }
+    public ILanguage Language => Site.Language;
+
+    /// <summary>The table's number in the release, from 1.</summary>
+    public int Number => Index + 1;
+
+    public static Sheet Of(SiteContext site, int index)
+    {
+        var table = site.Release.Tables[index];
+        return new()
+        {
+            Site = site,
+            Index = index,
+            Table = table,
+            Stub = SheetStub.Of(table, site.Language),
+            Scales = ColumnScales.Of(site.Appraised, index),
+            Facts = site.Appraised.FactsOf(index),
+            Notes = NoteMarks.Of(table),
+            Shown = [.. Enumerable.Range(0, table.Measures.Count).Where(measure => table.Measures[measure].Shown)],
+        };
+    }
+
+    public AppraisedFigure Figure(int measure, int row) => Site.Appraised.Figure(new(Index, measure, row));
+
+    public string Text(string key, params (string Name, string Value)[] fill) => Language.Text(key, fill);
+
+    public string Whole(long number) => Language.Number(new(number, 0));
+
+    /// <summary>Id of the section at the foot that tells a measure's noise, cost and citation; the capital keeps it apart from every figure's id.</summary>
+    public static string AboutId(Measure measure) => "M." + measure.Slug;
+}

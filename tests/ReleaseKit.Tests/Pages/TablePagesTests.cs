@@ -1,0 +1,229 @@
+using System.IO.Compression;
+using AngleSharp.Dom;
+using ReleaseKit.Appraisal;
+using ReleaseKit.Pages;
+using Xunit;
+
+namespace ReleaseKit.Tests.Pages;
+
+public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
+{
+    private readonly TableSite site;
+    private readonly IDocument page;
+
+    public TablePagesTests(Wards wards) => (site, page) = (wards.Site, wards.Site.Page());
+
+    [Fact]
+    public void Page_has_one_reading_for_every_figure_at_its_permalink()
+    {
+        var readings = page.QuerySelectorAll(".unfold details > .panel");
+
+        Assert.Equal(4 * 9, readings.Length);
+        foreach (var figure in Figures())
+        {
+            var reading = page.GetElementById(figure.Id);
+            Assert.NotNull(reading);
+            Assert.Contains(site.Language.ReadingOf(figure).Sentences[0].Text, reading.TextContent, StringComparison.Ordinal);
+        }
+    }
+
+    [Fact]
+    public void Reading_holds_every_sentence_in_order()
+    {
+        foreach (var figure in Figures())
+            Assert.Equal(
+                site.Language.ReadingOf(figure).Text,
+                string.Join(' ', page.GetElementById(figure.Id)!.QuerySelectorAll(".says p").Select(paragraph => paragraph.TextContent)));
+    }
+
+    [Fact]
+    public void Permalink_is_what_the_page_map_says() =>
+        Assert.Equal("tables/table/index.html#behind.aldermoor.harrow-lane", PageMap.Of(site.Appraised.Release).Of(new(0, 0, 2)));
+
+    [Fact]
+    public void Every_id_is_there_once()
+    {
+        var ids = page.QuerySelectorAll("[id]").Select(element => element.Id).ToList();
+
+        Assert.Equal(ids.Distinct(), ids);
+    }
+
+    [Fact]
+    public void Every_link_within_the_page_and_every_use_leads_to_something()
+    {
+        var ids = page.QuerySelectorAll("[id]").Select(element => element.Id).ToHashSet();
+        var targets = page.QuerySelectorAll("a, use").Select(element => element.GetAttribute("href")).Where(href => href is not null && href.StartsWith('#')).Select(href => href![1..]);
+
+        Assert.DoesNotContain(targets, target => !ids.Contains(target));
+    }
+
+    [Fact]
+    public void Figure_stands_in_its_row_with_its_exact_value_margin_and_bar()
+    {
+        var row = RowOf("Harrow Lane");
+
+        var figure = row.QuerySelector("td.k1 data")!;
+        Assert.Equal("214", figure.GetAttribute("value"));
+        Assert.Equal("214", figure.QuerySelector(".vh")!.TextContent);
+        Assert.Equal("2", figure.QuerySelector(".firm")!.TextContent);
+        Assert.Equal("14", figure.QuerySelector(".soft")!.TextContent);
+        Assert.Equal("±\u00A030", row.QuerySelector("td.mg.k1")!.TextContent);
+        Assert.NotNull(row.QuerySelector("td.b.k1 svg use"));
+    }
+
+    [Fact]
+    public void Mean_is_printed_to_its_margin_and_keeps_its_published_value()
+    {
+        var data = RowOf("Tithe Barn").QuerySelector("td.k2 data")!;
+
+        Assert.Equal("512.9", data.GetAttribute("value"));
+        Assert.Equal("513", data.QuerySelector(".vh")?.TextContent ?? data.TextContent);
+    }
+
+    [Fact]
+    public void Figure_below_zero_has_a_true_minus_and_the_lozenge_with_its_word()
+    {
+        var row = RowOf("Skerry End");
+
+        Assert.Equal("\u22127", row.QuerySelector("td.k1 data")!.TextContent);
+        Assert.Equal("weak", row.QuerySelector("td.mg.k1 .lz .vh")!.TextContent);
+        Assert.NotNull(row.QuerySelector("td.b.k1 use[href='#zl']"));
+    }
+
+    [Fact]
+    public void Hidden_figure_says_so_in_words_and_has_its_reading()
+    {
+        var cell = RowOf("Bell & <Sons>").QuerySelector("td.none.k3")!;
+
+        Assert.Equal("hidden to protect people", cell.QuerySelector("a")!.TextContent);
+        Assert.NotNull(page.GetElementById(cell.QuerySelector("a")!.GetAttribute("href")![1..]));
+    }
+
+    [Fact]
+    public void Exact_figure_has_the_word_and_a_stem_alone()
+    {
+        var row = RowOf("Harrow Lane");
+
+        Assert.Equal("exact", row.QuerySelector("td.mg.k4")!.TextContent);
+        Assert.Equal(["#st"], row.QuerySelectorAll("td.b.k4 use").Select(use => use.GetAttribute("href")));
+    }
+
+    [Fact]
+    public void Text_from_the_folder_is_escaped()
+    {
+        Assert.Contains("Bell &amp; &lt;Sons&gt;", site.Html("tables/table/index.html"), StringComparison.Ordinal);
+        Assert.Contains("Register &lt;of&gt; hardship &amp; heat", site.Html("tables/table/index.html"), StringComparison.Ordinal);
+        Assert.Null(page.QuerySelector("sons, of"));
+    }
+
+    [Fact]
+    public void Page_has_no_inline_style_and_no_script() =>
+        Assert.Empty(page.QuerySelectorAll("[style], style, script"));
+
+    [Fact]
+    public void Headings_are_headers_and_total_rows_head_their_groups()
+    {
+        Assert.Equal(3, page.QuerySelectorAll("table.sheet > tbody").Length);
+        Assert.Equal(["All", "Aldermoor", "Cindry"], page.QuerySelectorAll("table.sheet > tbody th[scope=rowgroup] .nm").Select(name => name.TextContent));
+        Assert.Equal(4, page.QuerySelectorAll("table.sheet > thead th[scope=colgroup]").Length);
+        Assert.Equal(Enumerable.Range(1, 9).Select(number => $"{number}"), page.QuerySelectorAll("table.sheet > tbody .rn").Select(number => number.TextContent));
+    }
+
+    [Fact]
+    public void Notes_stand_beside_what_they_are_for()
+    {
+        Assert.Equal("a", RowOf("Skerry End").QuerySelector("th .nt")!.TextContent);
+        Assert.Equal("b", RowOf("Old Kiln").QuerySelector("td.mg.k1 .nt")!.TextContent);
+        Assert.Equal(2, page.QuerySelectorAll("table.sheet .nt").Length);
+        Assert.Equal(["a", "b"], page.QuerySelectorAll(".sheet-notes sup").Select(mark => mark.TextContent));
+    }
+
+    [Fact]
+    public void Totals_beyond_the_scale_of_the_parts_stand_on_one_of_their_own_with_both_ends_labelled()
+    {
+        var labels = RowOf("Aldermoor").QuerySelectorAll("td.b.k1 .own i").Select(label => label.TextContent).ToList();
+
+        Assert.Equal(2, labels.Count);
+        Assert.Equal(labels, RowOf("Cindry").QuerySelectorAll("td.b.k1 .own i").Select(label => label.TextContent));
+        Assert.NotEqual(labels, RowOf("All").QuerySelectorAll("td.b.k1 .own i").Select(label => label.TextContent));
+        Assert.Empty(RowOf("Harrow Lane").QuerySelectorAll(".own"));
+    }
+
+    [Fact]
+    public void Marks_of_one_law_share_a_symbol()
+    {
+        var symbols = new[] { "Harrow Lane", "Tithe Barn", "Upper Weir", "Old Kiln" }.Select(row => RowOf(row).QuerySelector("td.b.k1 use:not([href='#zl'])")!.GetAttribute("href"));
+        var ofMeans = new[] { "Harrow Lane", "Tithe Barn", "Upper Weir", "Old Kiln", "Aldermoor" }.Select(row => RowOf(row).QuerySelector("td.b.k2 use")!.GetAttribute("href"));
+
+        Assert.Single(symbols.Distinct());
+        Assert.Single(ofMeans.Distinct());
+    }
+
+    [Fact]
+    public void Paper_gets_the_reading_of_each_weak_and_special_figure_and_no_other()
+    {
+        var expected = Figures().Where(figure => figure.Reliability == Reliability.Weak || !figure.HasNumber).ToList();
+        var notes = page.QuerySelectorAll(".print-notes li").Select(note => note.TextContent).ToList();
+
+        Assert.NotEmpty(expected);
+        foreach (var figure in expected)
+            Assert.Contains(notes, note => note.Contains(figure.Measure.Title.In("en"), StringComparison.Ordinal) && note.EndsWith(site.Language.ReadingOf(figure).Text, StringComparison.Ordinal));
+        Assert.Equal(Enumerable.Range(1, notes.Count).Select(number => $"{number}"), page.QuerySelectorAll("table.sheet .pn").Select(number => number.TextContent));
+    }
+
+    [Fact]
+    public void Foot_tells_noise_cost_and_citation_once_a_measure()
+    {
+        Assert.Equal(["M.behind", "M.owed", "M.cold", "M.credits"], page.QuerySelectorAll(".about").Select(about => about.Id));
+        Assert.Equal(4, page.QuerySelectorAll(".about .cite").Length);
+        Assert.Contains("The Relief Act asks for it.", page.GetElementById("M.credits")!.TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Pages_of_a_cut_table_hold_their_rows_with_numbers_and_ids_that_go_on()
+    {
+        using var cut = TableSite.Of(WardTable.Build(isCut: true));
+
+        var part = cut.Page("tables/table/cindry.html");
+
+        Assert.Equal(["6", "7", "8", "9"], part.QuerySelectorAll("table.sheet > tbody .rn").Select(number => number.TextContent));
+        Assert.NotNull(part.GetElementById("behind.cindry.skerry-end"));
+        Assert.Equal(3, part.QuerySelectorAll(".parts a").Length);
+        Assert.Equal("Cindry", part.QuerySelector(".parts [aria-current]")!.TextContent);
+    }
+
+    [Fact]
+    public void First_view_of_200_rows_and_5_measures_is_at_most_100_kilobytes()
+    {
+        using var large = TableSite.Of(LargeTable.Build());
+
+        var bytes = Compressed(large.Html("tables/table/index.html")) + Directory.EnumerateFiles(Path.Combine(large.Root, "assets"), "*.css").Sum(file => Compressed(File.ReadAllText(file)));
+
+        Assert.Equal(1000, large.Page().QuerySelectorAll(".unfold .panel").Length);
+        TestContext.Current.TestOutputHelper?.WriteLine($"200 rows, 5 measures: {bytes} bytes");
+        Assert.InRange(bytes, 1, 100 * 1024);
+    }
+
+    private IEnumerable<AppraisedFigure> Figures() =>
+        from measure in Enumerable.Range(0, 4)
+        from row in Enumerable.Range(0, 9)
+        select site.Appraised.Figure(new(0, measure, row));
+
+    private IElement RowOf(string name) => page.QuerySelectorAll("table.sheet > tbody > tr").First(row => row.QuerySelector(".nm")?.FirstChild?.TextContent == name);
+
+    // The level that servers use: gzip −6.
+    private static long Compressed(string text)
+    {
+        using var bytes = new MemoryStream();
+        using (var gzip = new GZipStream(bytes, new ZLibCompressionOptions { CompressionLevel = 6 }, leaveOpen: true))
+            gzip.Write(System.Text.Encoding.UTF8.GetBytes(text));
+        return bytes.Length;
+    }
+
+    public sealed class Wards : IDisposable
+    {
+        internal TableSite Site { get; } = TableSite.Of(WardTable.Build());
+
+        public void Dispose() => Site.Dispose();
+    }
+}
