@@ -1,4 +1,6 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Errors;
+using ReleaseKit.Releases;
 
 namespace ReleaseKit.Wording;
 
@@ -20,7 +22,7 @@ internal sealed class NoiseSentences(Voice voice)
     {
         var printed = main.Printed;
         if (figure.Case.Threshold)
-            return voice.Say("reading.noise.threshold");
+            return Threshold(figure);
         // A range that reaches further down than up comes from noise that reaches further up than down.
         if (printed.IsUneven)
             return voice.Say(
@@ -30,8 +32,20 @@ internal sealed class NoiseSentences(Voice voice)
         return voice.Say(key, ("margin", Number(printed.Margin)), ("cases", voice.Cases(figure, main)));
     }
 
+    /// <summary>What the promise of a range under a threshold is about: the figures that passed it.</summary>
+    private string Threshold(AppraisedFigure figure)
+    {
+        var threshold = ("threshold", voice.Threshold(figure));
+        return voice.Say(figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any() ? "reading.noise.zero-below" : "reading.noise.published-from", threshold);
+    }
+
     private IEnumerable<string> Range(AppraisedFigure figure, FigureRange main)
     {
+        if (IsZeroForSmall(figure))
+        {
+            yield return ZeroForSmall(figure, main);
+            yield break;
+        }
         var (low, high) = (main.Printed.Low, main.Printed.High);
         var key = IsBeyondMargin(figure, main) || figure.Case.Threshold ? "reading.range.alone" : "reading.range";
         yield return low == high
@@ -51,6 +65,20 @@ internal sealed class NoiseSentences(Voice voice)
         return value + main.Printed.MarginUp.ToDouble() < figure.Possible.Lowest * factor
             || value - main.Printed.MarginDown.ToDouble() > figure.Possible.Highest * factor;
     }
+
+    /// <summary>A zero that stands for every value that failed the threshold.</summary>
+    private static bool IsZeroForSmall(AppraisedFigure figure) =>
+        figure.Case.First is SpecialCase.Zero && figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any();
+
+    /// <summary>
+    /// What such a zero says is not that the value lies in a range in so many cases (above its end it never does), but how rarely larger values become 0:
+    /// in at most (1 − c)/2 of the cases.
+    /// </summary>
+    private string ZeroForSmall(AppraisedFigure figure, FigureRange main) => voice.Say(
+        "reading.range.zero-for-small",
+        ("kind", voice.Kind(figure.Measure)),
+        ("high", Number(main.Printed.High)),
+        ("cases", voice.Frequency("coverage.cases", NaturalFrequency.UpTo(main.Coverage.Rest / 2))));
 
     private string Beyond(AppraisedFigure figure)
     {
@@ -75,5 +103,5 @@ internal sealed class NoiseSentences(Voice voice)
 
     private static string Together(AppraisedFigure figure, string key) => figure.Case.Rounded ? $"{key}.rounded" : key;
 
-    private string Number(Releases.PublishedValue value) => voice.Numerals.InProse(value);
+    private string Number(PublishedValue value) => voice.Numerals.InProse(value);
 }

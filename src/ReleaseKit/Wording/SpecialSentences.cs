@@ -18,7 +18,7 @@ internal sealed class SpecialSentences(Voice voice)
         SpecialCase.NoMargin => [voice.Say("reading.no-margin")],
         SpecialCase.BelowZero => [Outside(figure, "below", voice.Lowest(figure)), ReadAs(figure)],
         SpecialCase.AboveHighest => [Outside(figure, "above", voice.Highest(figure)), ReadAs(figure)],
-        SpecialCase.Zero => [voice.Say("reading.zero"), .. SetToZero(figure)],
+        SpecialCase.Zero => [voice.Say("reading.zero"), .. figure.Case.Floored ? SetToBound(figure) : Nothing],
         SpecialCase.FromThreshold => [Threshold(figure)],
         SpecialCase.FlooredSum => [voice.Say("reading.floored-sum")],
         SpecialCase.MostlyUnchanged => [MostlyUnchanged(figure)],
@@ -57,7 +57,7 @@ internal sealed class SpecialSentences(Voice voice)
         return voice.Say(key, ("low", voice.Numerals.InProse(printed.Low)), ("high", voice.Numerals.InProse(printed.High)));
     }
 
-    private string Threshold(AppraisedFigure figure) => voice.Say("reading.threshold", ("threshold", InPrint(figure, ThresholdOf(figure))));
+    private string Threshold(AppraisedFigure figure) => voice.Say("reading.threshold", ("threshold", voice.Threshold(figure)));
 
     private string MostlyUnchanged(AppraisedFigure figure) => voice.Say(
         "reading.mostly-unchanged",
@@ -70,16 +70,6 @@ internal sealed class SpecialSentences(Voice voice)
         yield return voice.Say("reading.capped", ("highest", Amount(figure, clipped.To)), ("counted", InPrint(figure, clipped.To)));
         if (clipped.From != 0)
             yield return voice.Say("reading.capped.below", ("lowest", Amount(figure, clipped.From)), ("counted", InPrint(figure, clipped.From)));
-    }
-
-    /// <summary>What a published zero can stand for.</summary>
-    private IEnumerable<string> SetToZero(AppraisedFigure figure)
-    {
-        if (figure.Error is { } error && error.Steps.OfType<AfterStep.ZeroBelow>().FirstOrDefault() is { } zero)
-            yield return voice.Say("reading.set-to-bound.below", ("bound", InPrint(figure, zero.Threshold)), ("as", voice.Numerals.Whole(0)));
-        else if (figure.Case.Floored)
-            foreach (var sentence in SetToBound(figure))
-                yield return sentence;
     }
 
     private IEnumerable<string> SetToBound(AppraisedFigure figure)
@@ -101,13 +91,6 @@ internal sealed class SpecialSentences(Voice voice)
         if (figure.HasNumber && figure.Status != 'A')
             yield return voice.Say("reading.marked", ("status", voice.Say($"status.{figure.Status}")));
     }
-
-    private static double ThresholdOf(AppraisedFigure figure) => figure.Error!.Steps.Max(step => step switch
-    {
-        AfterStep.ZeroBelow zero => zero.Threshold,
-        AfterStep.PublishedFrom from => from.Threshold,
-        _ => double.NegativeInfinity,
-    });
 
     private string Amount(AppraisedFigure figure, double number) =>
         voice.WithUnit(PublishedValue.Shortest((decimal)(number * figure.Measure.PrintFactor)), figure.Measure.Unit);

@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Wording;
@@ -43,6 +44,14 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
     public string Lowest(AppraisedFigure figure) => Numerals.Plain(figure.Possible.Lowest * figure.Measure.PrintFactor);
 
     public string Highest(AppraisedFigure figure) => Numerals.Plain(figure.Possible.Highest * figure.Measure.PrintFactor);
+
+    /// <summary>The level from which values are published as they are.</summary>
+    public string Threshold(AppraisedFigure figure) => Numerals.Plain(figure.Measure.PrintFactor * figure.Error!.Steps.Max(step => step switch
+    {
+        AfterStep.ZeroBelow zero => zero.Threshold,
+        AfterStep.PublishedFrom from => from.Threshold,
+        _ => double.NegativeInfinity,
+    }));
 
     public string Frequency(string key, NaturalFrequency frequency) =>
         Say(key, ("cases", Numerals.Whole(frequency.Cases)), ("all", Numerals.Whole(frequency.All)));

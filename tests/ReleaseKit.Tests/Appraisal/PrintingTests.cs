@@ -9,10 +9,10 @@ public sealed class PrintingTests
 {
     private static readonly Random Chance = new(20310316);
 
-    /// <summary>Two thousand figures of any size beside margins of any size; Laplace noise whose scale stands in a column.</summary>
+    /// <summary>Eight hundred figures of any size beside margins of any size; Laplace noise whose scale stands in a column.</summary>
     private static IReadOnlyList<AppraisedFigure> Many(MeasureKind kind, int? decimals)
     {
-        const int Count = 2000;
+        const int Count = 800;
         var values = Enumerable.Range(0, Count).Select(_ => RandomValue()).ToArray();
         var mechanism = SmallRelease.Mechanism("m", LawName.Laplace) with
         {

@@ -90,6 +90,12 @@ public sealed class LanguageTests
     public void Chance_worked_out_is_rounded_down_and_never_looks_certain(double chance, long cases, long all) =>
         Assert.Equal(new NaturalFrequency(cases, all), NaturalFrequency.About(chance));
 
+    [Theory]
+    [InlineData(0.025, 25, 1000)]
+    [InlineData(0.05, 5, 100)]
+    [InlineData(0.0000012, 2, 1000000)]
+    public void Chance_that_is_a_bound_is_rounded_up(double chance, long cases, long all) => Assert.Equal(new NaturalFrequency(cases, all), NaturalFrequency.UpTo(chance));
+
     [Fact]
     public void Table_says_how_many_ranges_may_miss()
     {

@@ -27,13 +27,16 @@ internal static class ReadingBack
         Sentence($@"It adds up {N} figures, each with noise of its own\.", (figure, g) => Number(g[1]) == figure.Draws && figure.Draws > 1),
         Sentence($@"Noise (?:and rounding together )?moved it by up to {N} upward or {N} downward in {Cases}\.",
             (figure, g) => Is(g[1], figure.Main!.Printed.MarginDown) && Is(g[2], figure.Main.Printed.MarginUp) && Holds(figure, g, 3)),
-        Sentence("Noise was added to it.", (figure, _) => figure.Case.Threshold),
+        Sentence($@"Noise was added, and what then lay below {N} was published as 0\.", (figure, g) => figure.Case.Threshold && figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
+        Sentence($@"Noise was added, and what then lay below {N} was not published\.", (figure, g) => figure.Case.Threshold && figure.Measure.PublishedFrom == (double)Number(g[1])),
         Sentence($@"Here it was more, for the {Kind} cannot be (below|above) {N}\.", (figure, g) => g[2].Value == "below"
             ? Bound(g[3], figure.Possible.Lowest) && figure.Value.ToDouble() + figure.Main!.Margin < figure.Possible.Lowest
             : Bound(g[3], figure.Possible.Highest) && figure.Value.ToDouble() - figure.Main!.Margin > figure.Possible.Highest),
         Sentence($@"(?:So t|T)he {Kind} before noise is between {N} and {N} in {Cases}\.",
             (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.Low) && Is(g[3], figure.Main.Printed.High)
                 && Number(g[2]) < Number(g[3]) && Contains(figure, g[2], g[3]) && Holds(figure, g, 4)),
+        Sentence($@"When the {Kind} before noise is above {N}, 0 is published in at most {N} of {N} cases\.", (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.High)
+            && figure.Value.Unscaled == 0 && Number(g[3]) / Number(g[4]) == 0.025m && figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any()),
         Sentence($@"(?:So t|T)he {Kind} before noise is {N} in {Cases}\.",
             (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.Low) && figure.Main.Low == figure.Main.High && Holds(figure, g, 3)),
         Sentence($@"The {Kind} cannot be below {N}, so the range ends there\.", (figure, g) => Bound(g[2], figure.Possible.Lowest) && figure.Main!.Printed.LowIsCut),
@@ -56,7 +59,8 @@ internal static class ReadingBack
         Sentence($@"Read it as a (?:small )?number,? from {N} to {N}\.", (figure, g) => Is(g[1], figure.Main!.Printed.Low) && Is(g[2], figure.Main.Printed.High)),
         Sentence("It need not be 0.", (figure, _) => figure.Value.Unscaled == 0),
         Sentence($@"Numbers (below|above) {N} were published as {N}\.", SetTo),
-        Sentence($@"Figures just above {N} tend to be too high; the range allows for that\.", (figure, g) => figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
+        Sentence($@"Figures just above {N} tend to be too high; the range allows for that\.", (figure, g) =>
+            figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1]))) || figure.Measure.PublishedFrom == (double)Number(g[1])),
         Sentence("Parts below zero were published as 0, so this sum tends to be too high.", (figure, _) => figure.Case.First == SpecialCase.FlooredSum),
         Sentence($@"Noise was added, but in about ([0-9,]+) of ([0-9,]+) cases it leaves the {Kind} as it was\.",
             (figure, g) => (double)Number(g[1]) / (double)Number(g[2]) is var said && said <= figure.Error!.Law.Within(0) && figure.Error.Law.Within(0) - said < 1.0 / (double)Number(g[2])),
@@ -119,7 +123,7 @@ internal static class ReadingBack
     {
         var (bound, value) = ((double)Number(groups[2]), (double)Number(groups[3]));
         return value == figure.Value.ToDouble() && figure.Error!.Steps.Any(step => groups[1].Value == "below"
-            ? step == new AfterStep.NotBelow(bound) || step == new AfterStep.ZeroBelow(bound)
+            ? step == new AfterStep.NotBelow(bound)
             : step == new AfterStep.NotAbove(bound));
     }
 

@@ -41,6 +41,7 @@ internal static class ReadingCases
         ("An amount not below a bound, published as the bound", Amount(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(-50)), "-50")),
         ("A count at a threshold", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "30")),
         ("A count near a threshold", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "45")),
+        ("A count near the level for publication", PublishedFrom("45")),
         ("A zero that stands for small counts", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "0")),
         ("A sum of twelve counts", SumOf(12, Gauss)),
         ("A share", Of(MeasureKind.Share, Laplace, "51.63")),
@@ -61,7 +62,7 @@ internal static class ReadingCases
         ("A count not collected", Count(Gauss, "L")),
         ("A count that cannot exist", Count(Gauss, "M")),
         ("A count not available", Count(Gauss, "O")),
-        ("A count below the level for publication", BelowPublication()),
+        ("A count below the level for publication", PublishedFrom("Q")),
         ("An exact amount", Fixed(new NoiseRule.Exact(SmallRelease.Words("law")), "48210.00")),
         ("A public count", Fixed(new NoiseRule.Public(SmallRelease.Words("public list")), "9872")),
         ("A count without a valid margin", Count(Gauss with { Adjusted = true }, "1240")),
@@ -114,8 +115,8 @@ internal static class ReadingCases
         .Figures(SmallRelease.Measure(MeasureKind.Rate) with { Per = 1000, Lowest = 0, Unit = SmallRelease.UnitOf("fire", "fires") }, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 0.2)), value)
         .Figure();
 
-    private static AppraisedFigure BelowPublication() => new SmallRelease()
-        .Figures(SmallRelease.Measure(MeasureKind.Count) with { PublishedFrom = 30 }, Gauss, "Q").Figure();
+    private static AppraisedFigure PublishedFrom(string value) => new SmallRelease()
+        .Figures(SmallRelease.Measure(MeasureKind.Count) with { PublishedFrom = 30 }, Gauss, value).Figure();
 
     private static AppraisedFigure Fixed(NoiseRule rule, string value) => new SmallRelease()
         .Figures(SmallRelease.Measure(rule is NoiseRule.Exact ? MeasureKind.Amount : MeasureKind.Count) with { Unit = rule is NoiseRule.Exact ? Crowns : SmallRelease.Households }, [rule], [0], value)

@@ -97,7 +97,7 @@ public sealed class WordingTextsTests : IDisposable
     private static string Example(string key) => Regex.Replace(English.Texts.Template(key), @"\{([a-z]+)\}", hole => hole.Groups[1].Value switch
     {
         "cases" when !English.Texts.Template(key).Contains("in 100", StringComparison.Ordinal) =>
-            key.StartsWith("reading.range", StringComparison.Ordinal) ? "at least 95 of 100 such cases" : "at least 95 of 100 cases",
+            key.StartsWith("reading.range", StringComparison.Ordinal) && key != "reading.range.zero-for-small" ? "at least 95 of 100 such cases" : "at least 95 of 100 cases",
         "value" or "margin" when key is "reading.value" or "reading.value.rate" or "facts.column" => "1,240 households",
         "largest" or "distance" => "19 households",
         "highest" when key == "reading.capped" => "400 crowns",
