@@ -1,4 +1,4 @@
-using MathNet.Numerics;
+using ReleaseKit.Noise;
 
 namespace ReleaseKit.Privacy.Composition;
 
@@ -20,7 +20,7 @@ public sealed record ApproximateCurve(ApproximateLoss Loss) : PrivacyCurve
     {
         if (epsilon >= Loss.Epsilon)
             return Loss.Delta;
-        var excess = -SpecialFunctions.Expm1(epsilon.Value - Loss.Epsilon.Value) / (1 + Math.Exp(-Loss.Epsilon.Value));
+        var excess = -Elementary.ExpM1(epsilon.Value - Loss.Epsilon.Value) / (1 + Math.Exp(-Loss.Epsilon.Value));
         return Delta.AtMost(Loss.Delta.Value + ((1 - Loss.Delta.Value) * excess));
     }
 

@@ -1,4 +1,4 @@
-using MathNet.Numerics;
+using ReleaseKit.Noise;
 
 namespace ReleaseKit.Privacy.Composition;
 
@@ -106,5 +106,5 @@ public static class ConcentratedConversion
     }
 
     // ln(1 − 1/α), without cancellation for large α.
-    private static double LogOneLessReciprocal(double order) => SpecialFunctions.Log1p(-1 / order);
+    private static double LogOneLessReciprocal(double order) => Elementary.Log1P(-1 / order);
 }

@@ -14,6 +14,8 @@ internal sealed class CellOrder
 
     public long Count => laws.Sum(part => part.Count);
 
+    public bool GrowsWithShift => laws.All(part => part.Loss.GrowsWithShift);
+
     public LawLoss First => laws[0].Loss;
 
     public LawLoss Last => laws[^1].Loss;

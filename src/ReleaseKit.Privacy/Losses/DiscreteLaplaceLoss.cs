@@ -1,4 +1,4 @@
-using MathNet.Numerics;
+using ReleaseKit.Noise;
 using ReleaseKit.Noise.Laws;
 using ReleaseKit.Privacy.Composition;
 
@@ -64,17 +64,17 @@ internal sealed class DiscreteLaplaceLoss(DiscreteLaplaceLaw law) : LatticeLoss(
     private double Divergence(double steps)
     {
         var ratio = Math.Exp(-PerStep);
-        var squareFall = -SpecialFunctions.Expm1(-2 * PerStep);
-        return PerStep * (steps + (2 * ratio * SpecialFunctions.Expm1(-steps * PerStep) / squareFall));
+        var squareFall = -Elementary.ExpM1(-2 * PerStep);
+        return PerStep * (steps + (2 * ratio * Elementary.ExpM1(-steps * PerStep) / squareFall));
     }
 
     // D_α = ln(A·a^((1−α)s) + B·a^(αs)) ÷ (α − 1), A = (1 + (1 − a)r/(1 − r))/(1 + a), B = (a − (1 − a)r/(1 − r))/(1 + a), r = a^(2α−1).
     private double Renyi(double order, double steps)
     {
         var ratio = Math.Exp(-PerStep);
-        var fall = -SpecialFunctions.Expm1(-PerStep);
+        var fall = -Elementary.ExpM1(-PerStep);
         var power = Math.Exp(-((2 * order) - 1) * PerStep);
-        var middle = fall * power / -SpecialFunctions.Expm1(-((2 * order) - 1) * PerStep);
+        var middle = fall * power / -Elementary.ExpM1(-((2 * order) - 1) * PerStep);
         var (up, down) = ((1 + middle) / (1 + ratio), (ratio - middle) / (1 + ratio));
         var climb = (order - 1) * steps * PerStep;
         var log = climb + Math.Log(up + (down * Math.Exp(-((2 * order) - 1) * steps * PerStep)));

@@ -28,4 +28,7 @@ internal sealed class GaussianLoss(GaussianLaw law) : LawLoss
         var square = terms.Sum(term => term.Cells * 2 * term.Loss.Concentrated(term.Shift).Upper.Value);
         return new GaussianCurve(Math.Sqrt(square)).DeltaAt(epsilon);
     }
+
+    // Only the Euclidean length of the shifts counts, and every norm bounds it.
+    internal override Delta NormDeltaAt(Epsilon epsilon, LossTerm term) => DeltaAt(epsilon, term.Shift).Upper;
 }

@@ -1,4 +1,4 @@
-using MathNet.Numerics;
+using ReleaseKit.Noise;
 using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Privacy.Losses;
@@ -16,7 +16,7 @@ internal sealed class LaplaceLoss(LaplaceLaw law) : LawLoss
     public override Bounds<Rho> Concentrated(double shift) => Exactly(Rho.Of(Divergence(shift / law.Scale)));
 
     public override Bounds<Delta> DeltaAt(Epsilon epsilon, double shift) =>
-        Exactly(Delta.AtMost(-SpecialFunctions.Expm1(Math.Min(0, (epsilon.Value - (shift / law.Scale)) / 2))));
+        Exactly(Delta.AtMost(-Elementary.ExpM1(Math.Min(0, (epsilon.Value - (shift / law.Scale)) / 2))));
 
     public override string PureArithmetic(double shift) => $"{Signs.Of(shift)} ÷ {Signs.Of(law.Scale)}";
 
@@ -29,5 +29,5 @@ internal sealed class LaplaceLoss(LaplaceLaw law) : LawLoss
     // ε − 1 + e^−ε; its series ε²/2 − ε³/6 + ε⁴/24 − ε⁵/120 where the terms would cancel (cut off above the next term).
     private static double Divergence(double epsilon) => epsilon < 1e-3
         ? epsilon * epsilon * (0.5 - (epsilon * ((1.0 / 6) - (epsilon * ((1.0 / 24) - (epsilon / 120))))))
-        : epsilon + SpecialFunctions.Expm1(-epsilon);
+        : epsilon + Elementary.ExpM1(-epsilon);
 }

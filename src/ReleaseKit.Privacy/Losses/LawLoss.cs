@@ -1,5 +1,6 @@
-using MathNet.Numerics;
+using ReleaseKit.Noise;
 using ReleaseKit.Noise.Laws;
+using ReleaseKit.Privacy.Composition;
 
 namespace ReleaseKit.Privacy.Losses;
 
@@ -50,6 +51,12 @@ public abstract class LawLoss
     /// <summary>The grid of a lattice law; 0 for a continuous one.</summary>
     internal virtual double Grid => 0;
 
+    /// <summary>
+    /// Whether doubling a shift at least doubles the loss of a cell, so that a bounded sum of shifts is worst where it is spent on as few cells
+    /// as can be. A law of steps loses as much for a small shift as for a large one.
+    /// </summary>
+    internal virtual bool GrowsWithShift => true;
+
     /// <summary>Shifts that bound every way in which absolute differences can add up to a sum over a number of cells: all in one cell.</summary>
     internal virtual ShiftRun RunOfAbsoluteSum(double sum, long cells) => new(sum, 1);
 
@@ -68,9 +75,19 @@ public abstract class LawLoss
         return Delta.AtMost(terms.Sum(term => term.Cells * term.Loss.DeltaAt(each, term.Shift).Upper.Value));
     }
 
+    /// <summary>
+    /// An upper bound on δ(ε) where only a norm of the shifts is known, given the shifts that bound its pure loss: the curve of that loss alone,
+    /// because which way of spreading the norm is worst at one ε is not certain.
+    /// </summary>
+    internal virtual Delta NormDeltaAt(Epsilon epsilon, LossTerm term)
+    {
+        var pure = term.Cells * Pure(term.Shift).Upper;
+        return pure.IsFinite ? ApproximateCurve.OfPure(pure).DeltaAt(epsilon) : Delta.One;
+    }
+
     /// <summary>1 − Π(1 − δᵢ): the chance that any of several independent cells shows what it must not.</summary>
     private protected static Delta AnyOf(IReadOnlyList<LossTerm> terms, Func<LossTerm, double> delta) =>
-        Delta.AtMost(-SpecialFunctions.Expm1(terms.Sum(term => term.Cells * SpecialFunctions.Log1p(-delta(term)))));
+        Delta.AtMost(-Elementary.ExpM1(terms.Sum(term => term.Cells * Elementary.Log1P(-delta(term)))));
 
     private protected static Bounds<T> Exactly<T>(T value)
         where T : struct => new(value, value);

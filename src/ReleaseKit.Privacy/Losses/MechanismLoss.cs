@@ -59,7 +59,7 @@ public sealed class MechanismLoss
     {
         if (Pure.Upper <= epsilon)
             return new(Delta.Zero, Delta.Zero);
-        var upper = Delta.Min(ConcentratedConversion.DeltaAt(Concentrated.Upper, epsilon), Joint(epsilon));
+        var upper = Delta.Min(ConcentratedConversion.DeltaAt(Concentrated.Upper, epsilon), movement.DeltaAt(epsilon));
         var one = movement.SingleShift;
         return new(Delta.Min(one.Loss.DeltaAt(epsilon, one.Shift).Lower, upper), upper);
     }
@@ -68,14 +68,6 @@ public sealed class MechanismLoss
     public Bounds<Epsilon> EpsilonAt(Delta delta) => delta == Delta.Zero ? Pure : new(
         Smallest(epsilon => DeltaAt(epsilon).Lower <= delta),
         Epsilon.Min(Pure.Upper, Smallest(epsilon => DeltaAt(epsilon).Upper <= delta)));
-
-    // The worst cells at this ε, split evenly, in the worst arrangement.
-    private Delta Joint(Epsilon epsilon)
-    {
-        var each = Epsilon.Of(epsilon.Value / movement.MostCells);
-        return movement.Charged(loss => loss.DeltaAt(each, movement.LargestShift).Upper.Value)
-            .Max(terms => terms is [{ Cells: 1 } one] ? one.Loss.DeltaAt(epsilon, one.Shift).Upper : terms[0].Loss.JointDeltaAt(epsilon, terms));
-    }
 
     private static double PureOf(LossTerm term) => term.Loss.Pure(term.Shift).Upper.Value;
 

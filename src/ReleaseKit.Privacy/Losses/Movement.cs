@@ -7,9 +7,12 @@ namespace ReleaseKit.Privacy.Losses;
 /// </summary>
 internal static class Movement
 {
-    /// <summary>Arrangements of shifts of which one is the worst. Each is sorted, largest shift first.</summary>
-    public static IReadOnlyList<IReadOnlyList<ShiftRun>> Worst(UnitContribution.PerCell unit, NeighbourRelation relation, long cells) =>
-        Arrangements(unit.Signed ? unit with { PerUnit = null } : unit, relation, cells);
+    /// <summary>
+    /// Arrangements of shifts of which one is the worst. Each is sorted, largest shift first. A bound on a unit's sum counts only if contributions
+    /// have one sign and the loss grows with the shift.
+    /// </summary>
+    public static IReadOnlyList<IReadOnlyList<ShiftRun>> Worst(UnitContribution.PerCell unit, NeighbourRelation relation, long cells, bool growsWithShift) =>
+        Arrangements(unit.Signed || !growsWithShift ? unit with { PerUnit = null } : unit, relation, cells);
 
     /// <summary>Arrangements that two records within the declared bounds attain.</summary>
     public static IReadOnlyList<IReadOnlyList<ShiftRun>> Attained(UnitContribution.PerCell unit, NeighbourRelation relation, long cells) =>

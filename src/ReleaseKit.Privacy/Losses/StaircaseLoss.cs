@@ -14,6 +14,8 @@ internal sealed class StaircaseLoss(StaircaseLaw law) : LawLoss
 
     public override string Source => "Geng & Viswanath 2014";
 
+    internal override bool GrowsWithShift => false;
+
     public override Bounds<Epsilon> Pure(double shift) => Exactly(Epsilon.Of(Crossed(shift) * law.Epsilon));
 
     public override Bounds<Rho> Concentrated(double shift)

@@ -13,6 +13,8 @@ internal sealed class TabulatedLoss(TabulatedLaw law) : LatticeLoss(law)
 
     private double Missing => (double)law.MissingMass;
 
+    internal override bool GrowsWithShift => false;
+
     public override Bounds<Epsilon> Pure(double shift)
     {
         var ratio = Shifts(StepsDown(shift)).SelectMany(LogRatios).Where(IsKnown).DefaultIfEmpty(0).Max();
@@ -39,6 +41,8 @@ internal sealed class TabulatedLoss(TabulatedLaw law) : LatticeLoss(law)
 
     internal override ShiftRun RunOfDistance(double distance, long cells) =>
         new(distance, Math.Min(cells, (long)GridSteps.Up(distance * distance, law.Grid * law.Grid)));
+
+    internal override Delta NormDeltaAt(Epsilon epsilon, LossTerm term) => JointDeltaAt(epsilon, [term]);
 
     // A shift beyond the length of the table leaves nothing in common, as that length plus one does.
     private IEnumerable<long> Shifts(double steps)

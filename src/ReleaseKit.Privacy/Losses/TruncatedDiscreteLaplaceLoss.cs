@@ -34,6 +34,13 @@ internal sealed class TruncatedDiscreteLaplaceLoss(TruncatedDiscreteLaplaceLaw l
             : base.JointDeltaAt(epsilon, terms);
     }
 
+    // The tail of a log-concave law is log-concave, so that all steps in one cell leave the least in common. Below Σd/t nothing is certain.
+    internal override Delta NormDeltaAt(Epsilon epsilon, LossTerm term)
+    {
+        var steps = term.Cells * StepsUp(term.Shift);
+        return epsilon.Value >= steps * PerStep ? DeltaAt(Epsilon.Of(double.MaxValue), steps * law.Grid).Upper : Delta.One;
+    }
+
     private double Within(double shift) => StepsUp(shift) * PerStep;
 
     private double LastAbove(Epsilon epsilon, double steps)

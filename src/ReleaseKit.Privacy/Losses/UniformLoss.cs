@@ -22,4 +22,7 @@ internal sealed class UniformLoss(UniformLaw law) : LawLoss
 
     internal override Delta JointDeltaAt(Epsilon epsilon, IReadOnlyList<LossTerm> terms) =>
         AnyOf(terms, term => term.Loss.DeltaAt(epsilon, term.Shift).Upper.Value);
+
+    // 1 − Π(1 − δᵢ) ≤ Σδᵢ, and δᵢ grows with the shift alone.
+    internal override Delta NormDeltaAt(Epsilon epsilon, LossTerm term) => Delta.AtMost(term.Cells * DeltaAt(epsilon, term.Shift).Upper.Value);
 }

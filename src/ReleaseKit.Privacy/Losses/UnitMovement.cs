@@ -6,9 +6,6 @@ internal abstract class UnitMovement(CellOrder cells)
     /// <summary>The furthest that one cell can be moved.</summary>
     public abstract double LargestShift { get; }
 
-    /// <summary>The most cells that are moved together.</summary>
-    public abstract long MostCells { get; }
-
     /// <summary>One moved cell of a pair of neighbours, at the law it is known to concern.</summary>
     public abstract LossTerm SingleShift { get; }
 
@@ -26,6 +23,9 @@ internal abstract class UnitMovement(CellOrder cells)
     /// <summary>Each way to move the cells, charged in an order of the laws.</summary>
     public abstract IReadOnlyList<IReadOnlyList<LossTerm>> Charged(Func<LawLoss, double> order, bool concentrated = false);
 
+    /// <summary>An upper bound on δ(ε) of all cells together, from the laws themselves.</summary>
+    public abstract Delta DeltaAt(Epsilon epsilon);
+
     /// <summary>A loss that some pair of neighbours attains.</summary>
     public abstract double Proven(Func<LawLoss, double> order, Func<LossTerm, double> loss);
 
@@ -39,12 +39,13 @@ internal abstract class UnitMovement(CellOrder cells)
 /// <summary>Movement by a bound in each cell.</summary>
 internal sealed class PerCellMovement(CellOrder cells, UnitContribution.PerCell unit, NeighbourRelation relation) : UnitMovement(cells)
 {
-    private readonly IReadOnlyList<IReadOnlyList<ShiftRun>> worst = Movement.Worst(unit, relation, cells.Count);
+    private readonly IReadOnlyList<IReadOnlyList<ShiftRun>> worst = Movement.Worst(unit, relation, cells.Count, cells.GrowsWithShift);
+
+    // How a bounded sum is best spread at one ε is not certain: δ is taken without that bound.
+    private readonly IReadOnlyList<IReadOnlyList<ShiftRun>> unbounded = Movement.Worst(unit with { PerUnit = null }, relation, cells.Count, cells.GrowsWithShift);
     private readonly IReadOnlyList<IReadOnlyList<ShiftRun>> attained = Movement.Attained(unit, relation, cells.Count);
 
     public override double LargestShift => worst.Max(runs => runs[0].Shift);
-
-    public override long MostCells => worst.Max(runs => runs.Sum(run => run.Cells));
 
     public override LossTerm SingleShift =>
         new(Cells.WorstFirst(loss => loss.DeltaAt(Epsilon.Zero, LargestShift).Upper.Value).First, attained.Max(runs => runs[0].Shift), 1);
@@ -53,6 +54,15 @@ internal sealed class PerCellMovement(CellOrder cells, UnitContribution.PerCell 
     {
         var ordered = Cells.WorstFirst(order);
         return [.. worst.Select(ordered.Charge)];
+    }
+
+    // The worst cells at this ε, split evenly, in the worst arrangement.
+    public override Delta DeltaAt(Epsilon epsilon)
+    {
+        var each = Epsilon.Of(epsilon.Value / unbounded.Max(runs => runs.Sum(run => run.Cells)));
+        var ordered = Cells.WorstFirst(loss => loss.DeltaAt(each, LargestShift).Upper.Value);
+        return unbounded.Select(ordered.Charge)
+            .Max(terms => terms is [{ Cells: 1 } one] ? one.Loss.DeltaAt(epsilon, one.Shift).Upper : terms[0].Loss.JointDeltaAt(epsilon, terms));
     }
 
     // Where scales vary it is not known which cells go together: either one cell of the worst law, or as many of the mildest.
@@ -72,8 +82,6 @@ internal sealed class NormMovement(CellOrder cells, double norm, bool isSum) : U
 {
     public override double LargestShift => norm;
 
-    public override long MostCells => Cells.Count;
-
     public override LossTerm SingleShift
     {
         get
@@ -90,6 +98,12 @@ internal sealed class NormMovement(CellOrder cells, double norm, bool isSum) : U
             : concentrated ? loss.RunOfDistanceConcentrated(norm, Cells.Count)
             : loss.RunOfDistance(norm, Cells.Count);
         return [[new LossTerm(loss, run.Shift, run.Cells)]];
+    }
+
+    public override Delta DeltaAt(Epsilon epsilon)
+    {
+        var term = Charged(loss => loss.DeltaAt(Epsilon.Zero, norm).Upper.Value)[0][0];
+        return term.Loss.NormDeltaAt(epsilon, term);
     }
 
     public override double Proven(Func<LawLoss, double> order, Func<LossTerm, double> loss)

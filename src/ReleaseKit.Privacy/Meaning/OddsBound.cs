@@ -1,4 +1,4 @@
-using MathNet.Numerics;
+using ReleaseKit.Noise;
 using ReleaseKit.Privacy.Composition;
 
 namespace ReleaseKit.Privacy.Meaning;
@@ -30,7 +30,7 @@ public static class OddsBound
         double Bound(double epsilon)
         {
             var share = curve.DeltaAt(Epsilon.Of(epsilon)).Value / beta.Value;
-            return share >= 1 ? double.PositiveInfinity : epsilon - SpecialFunctions.Log1p(-share);
+            return share >= 1 ? double.PositiveInfinity : epsilon - Elementary.Log1P(-share);
         }
 
         if (!curve.LastUseful.IsFinite)

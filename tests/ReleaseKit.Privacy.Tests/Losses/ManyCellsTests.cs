@@ -1,5 +1,6 @@
 using CsCheck;
 using ReleaseKit.Noise.Laws;
+using ReleaseKit.Privacy.Composition;
 using ReleaseKit.Privacy.Losses;
 using static ReleaseKit.Privacy.Losses.NeighbourRelation;
 
@@ -86,7 +87,7 @@ public sealed class ManyCellsTests
     public void Gaussian_curve_of_many_cells_is_that_of_their_distance()
     {
         var many = MechanismLoss.Of([new NoisedCells(GaussianLaw.Of(3), 8)], new UnitContribution.PerCell(4, 1), AddOrRemove);
-        var exact = new ReleaseKit.Privacy.Composition.GaussianCurve(2.0 / 3);
+        var exact = new GaussianCurve(2.0 / 3);
         ReferenceRow.Near(exact.DeltaAt(Epsilon.Of(1)).Value, many.DeltaAt(Epsilon.Of(1)).Upper.Value, "delta");
         ReferenceRow.Near(exact.EpsilonAt(Delta.Of(1e-6)).Value, many.EpsilonAt(Delta.Of(1e-6)).Upper.Value, "epsilon");
     }
@@ -94,6 +95,27 @@ public sealed class ManyCellsTests
     [Fact]
     public void Uniform_noise_on_two_cells_shows_the_shift_if_either_does() =>
         Assert.Equal(1 - (0.9 * 0.9), MechanismLoss.Of([new NoisedCells(UniformLaw.Of(5), 8)], new UnitContribution.PerCell(2, 1), AddOrRemove).DeltaAt(Epsilon.Of(3)).Upper.Value, 1e-12);
+
+    /// <summary>A shift of a third of a step still crosses one: three small shifts cost as much as three large ones.</summary>
+    [Fact]
+    public void Bound_on_a_units_sum_spares_no_law_of_steps()
+    {
+        var unit = new UnitContribution.PerCell(3, 1, PerUnit: 1);
+        var loss = MechanismLoss.Of([new NoisedCells(StaircaseLaw.Of(0.5, 1, 0.4), 10)], unit, AddOrRemove);
+        Assert.Equal(1.5, loss.Pure.Upper.Value, 1e-12);
+        Assert.Equal(0.5, loss.Pure.Lower.Value, 1e-12);
+    }
+
+    /// <summary>The curve of one cell bounds no spread over several: a norm alone leaves the pure loss and ρ.</summary>
+    [Fact]
+    public void Norm_alone_gives_no_more_than_its_pure_and_concentrated_losses()
+    {
+        var laplace = MechanismLoss.Of([new NoisedCells(LaplaceLaw.Of(2), 9)], new UnitContribution.AbsoluteSum(1), AddOrRemove);
+        var binary = ApproximateCurve.OfPure(Epsilon.Of(0.5));
+        Assert.Equal(binary.DeltaAt(Epsilon.Of(0.2)).Value, laplace.DeltaAt(Epsilon.Of(0.2)).Upper.Value, 1e-12);
+        var lattice = MechanismLoss.Of([new NoisedCells(DiscreteGaussianLaw.Of(2), 9)], new UnitContribution.Euclidean(2), AddOrRemove);
+        Assert.Equal(ConcentratedConversion.DeltaAt(Rho.Of(0.5), Epsilon.Of(2)).Value, lattice.DeltaAt(Epsilon.Of(2)).Upper.Value, 1e-12);
+    }
 
     [Theory]
     [InlineData(AddOrRemove, 1)]
@@ -166,5 +188,25 @@ public sealed class ManyCellsTests
         if (relation == AddOrRemove)
             return records.SelectMany(record => new[] { record, (-record.First, -record.Second) });
         return records.SelectMany(old => records.Select(other => (other.First - old.First, other.Second - old.Second)));
+    }
+
+    /// <summary>Every way to spend a norm of two steps over two cells, enumerated.</summary>
+    [Fact]
+    public void No_way_to_spend_a_norm_loses_more_than_its_bound()
+    {
+        foreach (LatticeLaw law in new LatticeLaw[] { DiscreteLaplaceLaw.Of(1.5), DiscreteGaussianLaw.Of(2), TruncatedDiscreteLaplaceLaw.Of(2, 6), DiscreteUniformLaw.Of(4) })
+        {
+            var sum = MechanismLoss.Of([new NoisedCells(law, 2)], new UnitContribution.AbsoluteSum(2), AddOrRemove);
+            var distance = MechanismLoss.Of([new NoisedCells(law, 2)], new UnitContribution.Euclidean(2), AddOrRemove);
+            foreach (var (first, second) in new (long, long)[] { (2, 0), (1, 1), (1, -1), (1, 0), (-2, 0) })
+            {
+                var pair = Enumerated.OfTwo(law, first, second);
+                foreach (var epsilon in new[] { 0.1, 0.5, 1.4, 3 })
+                {
+                    Assert.InRange(pair.Delta(epsilon), 0, sum.DeltaAt(Epsilon.Of(epsilon)).Upper.Value + 1e-12);
+                    Assert.InRange(pair.Delta(epsilon), 0, distance.DeltaAt(Epsilon.Of(epsilon)).Upper.Value + 1e-12);
+                }
+            }
+        }
     }
 }

@@ -113,9 +113,15 @@ public sealed class OneCellTests
         }
     }
 
-    [Fact]
-    public void Laplace_rho_needs_no_digits_where_its_terms_cancel() =>
-        ReferenceRow.Near(5e-11 - (1e-15 / 6), LawLoss.Of(LaplaceLaw.Of(1e5)).Concentrated(1).Upper.Value, "ε²/2 − ε³/6 at 1e-5", 1e-10);
+    /// <summary>ε − 1 + e^−ε to 17 digits (40-digit arithmetic), also where its terms cancel.</summary>
+    [Theory]
+    [InlineData(1e-5, 4.9999833333749999e-11)]
+    [InlineData(0.0005, 1.2497916927057294e-7)]
+    [InlineData(0.05, 0.0012294245007140091)]
+    [InlineData(0.5, 0.10653065971263342)]
+    [InlineData(3, 2.0497870683678639)]
+    public void Laplace_rho_keeps_its_digits(double epsilon, double rho) =>
+        ReferenceRow.Near(rho, LawLoss.Of(LaplaceLaw.Of(1)).Concentrated(epsilon).Upper.Value, $"rho of {epsilon}", 1e-13);
 
     [Theory]
     [InlineData(0.7, 1)]

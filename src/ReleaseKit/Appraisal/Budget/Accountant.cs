@@ -25,7 +25,7 @@ public abstract class Accountant
     /// <summary>The upper bound that enters the totals.</summary>
     public abstract LossTotal Upper(MechanismSpending spending);
 
-    /// <summary>The lower bound from a named pair of neighbours.</summary>
+    /// <summary>The lower bound from a named pair of neighbours; 0 for what is only stated.</summary>
     public abstract LossTotal Lower(MechanismSpending spending);
 
     /// <summary>What the office declares, in this accounting; null where it declares nothing that can be expressed in it.</summary>

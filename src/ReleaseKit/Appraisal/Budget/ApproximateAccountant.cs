@@ -20,15 +20,13 @@ public sealed class ApproximateAccountant : Accountant
             return AsStated(spending.Mechanism);
         var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
         var rule = delta == Delta.Zero ? AccountRules.Law(loss.PureTerms[0].Loss.Source) : AccountRules.ExactCurve;
-        return Of(delta == Delta.Zero ? loss.Pure.Upper : loss.EpsilonAt(delta).Upper, delta, rule);
+        return Of(loss.EpsilonAt(delta).Upper, delta, rule);
     }
 
     public override LossTotal Lower(MechanismSpending spending)
     {
-        if (spending.Loss is not { } loss)
-            return AsStated(spending.Mechanism);
         var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
-        return Of(delta == Delta.Zero ? loss.Pure.Lower : loss.EpsilonAt(delta).Lower, delta, AccountRules.Pair);
+        return Of(spending.Loss?.EpsilonAt(delta).Lower ?? Epsilon.Zero, delta, AccountRules.Pair);
     }
 
     public override LossTotal? Declared(Mechanism mechanism) =>

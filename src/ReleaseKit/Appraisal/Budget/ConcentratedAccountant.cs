@@ -16,7 +16,7 @@ public sealed class ConcentratedAccountant : Accountant
         : AsStated(spending.Mechanism);
 
     public override LossTotal Lower(MechanismSpending spending) =>
-        spending.Loss is { } loss ? Of(loss.Concentrated.Lower, AccountRules.Pair) : AsStated(spending.Mechanism);
+        Of(spending.Loss?.Concentrated.Lower ?? Rho.Zero, AccountRules.Pair);
 
     public override LossTotal? Declared(Mechanism mechanism) => mechanism.Spent switch
     {

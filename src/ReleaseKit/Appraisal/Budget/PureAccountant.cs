@@ -16,7 +16,7 @@ public sealed class PureAccountant : Accountant
         : AsStated(spending.Mechanism);
 
     public override LossTotal Lower(MechanismSpending spending) =>
-        spending.Loss is { } loss ? Of(loss.Pure.Lower, AccountRules.Pair) : AsStated(spending.Mechanism);
+        Of(spending.Loss?.Pure.Lower ?? Epsilon.Zero, AccountRules.Pair);
 
     public override LossTotal? Declared(Mechanism mechanism) =>
         mechanism.Spent is { Epsilon: { } epsilon, Delta: null or 0 } ? new LossTotal(epsilon, null, null, AccountRules.Declared) : null;

@@ -16,13 +16,13 @@ internal sealed class AccountingCheck : IReviewCheck
             return [];
         var accountant = Accountant.Of(account.Accounting);
         return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))))
-            .Select(spending => Found(spending, account)).OfType<Finding>();
+            .Select(spending => Found(spending, account));
     }
 
-    private static Finding? Found(MechanismSpending spending, NoiseAccount account) => spending switch
+    private static Finding Found(MechanismSpending spending, NoiseAccount account) => spending switch
     {
         { Mechanism: { Law: LawName.Declared, Spent: not null } mechanism } => Stated(mechanism, account),
-        { Loss: null } => null,
+        { Loss: null } => Unknown(spending.Mechanism),
         _ when account.Accounting == Accounting.Approximate => SpentNeeded(spending, account),
         _ => NoLoss(spending, account),
     };
@@ -42,6 +42,12 @@ internal sealed class AccountingCheck : IReviewCheck
         $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\" and {(spending.Mechanism.Spent is null ? "does not say what it spent" : "declares an epsilon and delta that it never meets")}.",
         "this law has no epsilon without a delta; the office chooses the pair, and it is checked against the law.",
         $"add {SpentOf(spending, account)}, or another pair of its curve.");
+
+    private static Finding Unknown(Mechanism mechanism) => new(
+        FindingLevel.Stop, "loss-unknown", FindingOwner.Noise, mechanism.At,
+        $"What \"{mechanism.Id}\" spends cannot be worked out: its law or its sensitivity is not known in full for any of its figures.",
+        "the total of the release would have no limit, and nothing could be promised.",
+        "give the parameters of the law as numbers, or in a column of each table that uses it, and \"sensitivity\" in full.");
 
     private static Finding Stated(Mechanism mechanism, NoiseAccount account) => new(
         FindingLevel.Stop, "no-loss-in-accounting", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "spent"),
