@@ -1,30 +1,33 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Reading;
-using ReleaseKit.Tests.Sample;
+using ReleaseKit.Tests.Folders;
 using Xunit;
 
 namespace ReleaseKit.Tests.Wording;
 
-/// <summary>Every figure of the sample release, read aloud and read back.</summary>
+/// <summary>Every figure of the sample release and of the example in the format's description, read aloud and read back.</summary>
 public sealed class SampleReadingsTests
 {
-    private static readonly IAppraisedRelease Release = AppraisedRelease.Of(ReleaseFolder.Read(SampleRelease.Folder).Release!);
+    private static readonly IReadOnlyList<IAppraisedRelease> Releases = [Appraise(ReferenceFiles.Sample), Appraise(ReferenceFiles.Example)];
 
     private static IEnumerable<AppraisedFigure> Figures =>
-        from table in Enumerable.Range(0, Release.Release.Tables.Count)
-        from measure in Enumerable.Range(0, Release.Release.Tables[table].Measures.Count)
-        from row in Enumerable.Range(0, Release.Release.Tables[table].RowCount)
-        select Release.Figure(new FigureRef(table, measure, row));
+        from release in Releases
+        from table in Enumerable.Range(0, release.Release.Tables.Count)
+        from measure in Enumerable.Range(0, release.Release.Tables[table].Measures.Count)
+        from row in Enumerable.Range(0, release.Release.Tables[table].RowCount)
+        select release.Figure(new FigureRef(table, measure, row));
+
+    private static IAppraisedRelease Appraise(string folder) => AppraisedRelease.Of(ReleaseFolder.Read(folder).Release!);
 
     [Fact]
-    public void Every_reading_of_the_sample_reads_back()
+    public void Every_reading_reads_back()
     {
         foreach (var figure in Figures)
             Assert.True(ReadingBack.Faults(figure, English.Language.ReadingOf(figure)) is [], $"{figure.Address}: {English.Language.ReadingOf(figure).Text}");
     }
 
     [Fact]
-    public void Every_reading_of_the_sample_is_at_grade_eight_or_below()
+    public void Every_reading_is_at_grade_eight_or_below()
     {
         foreach (var figure in Figures)
         {
@@ -34,13 +37,14 @@ public sealed class SampleReadingsTests
     }
 
     [Fact]
-    public void Every_figure_of_the_sample_with_noise_has_a_margin() =>
+    public void Every_figure_with_noise_has_a_margin() =>
         Assert.Empty(Figures.Where(figure => figure.Case.First == SpecialCase.NoMargin).Select(figure => figure.Address));
 
     [Fact]
-    public void Every_table_of_the_sample_has_its_notes()
+    public void Every_table_has_its_notes()
     {
-        for (var table = 0; table < Release.Release.Tables.Count; table++)
-            Assert.NotEmpty(English.Language.NotesOf(Release.FactsOf(table)));
+        foreach (var release in Releases)
+            for (var table = 0; table < release.Release.Tables.Count; table++)
+                Assert.NotEmpty(English.Language.NotesOf(release.FactsOf(table)));
     }
 }
