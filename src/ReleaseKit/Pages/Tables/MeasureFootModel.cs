@@ -43,12 +43,10 @@ internal static class MeasureFootModel
         ["methods"] = Link.From(page.Path, $"{PageMap.Methods}#mechanism-{mechanism.Id}"),
     };
 
-    /// <summary>The mechanism's share of what the release spent, in 100, rounded up to one decimal.</summary>
-    private static string Cost(Sheet sheet, Mechanism mechanism)
-    {
-        var share = sheet.Site.Budget.Mechanisms.Single(account => account.Mechanism.Id == mechanism.Id).ShareOfSpent;
-        return sheet.Text("tables.rule.cost", ("share", sheet.Language.Number(LossPrint.Up(100 * share, 1))));
-    }
+    /// <summary>The mechanism's share of what the release spent, in 100, rounded up to one decimal; empty for a mechanism that the account does not know.</summary>
+    private static string Cost(Sheet sheet, Mechanism mechanism) => sheet.Site.Budget.Mechanisms.FirstOrDefault(account => account.Mechanism.Id == mechanism.Id) is { } account
+        ? sheet.Text("tables.rule.cost", ("share", sheet.Language.Number(LossPrint.Up(100 * account.ShareOfSpent, 1))))
+        : "";
 
     private static string Cite(Sheet sheet, TablePage page, Measure measure)
     {
