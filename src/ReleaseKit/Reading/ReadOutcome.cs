@@ -15,5 +15,8 @@ public sealed record ReadOutcome(Release? Release, IReadOnlyList<Finding> Findin
     /// <summary>Whether every table could be read whole; if not, addresses that lead nowhere are no further fault.</summary>
     public bool TablesAreWhole { get; init; } = true;
 
+    /// <summary>Whether every noise rule could be read; if not, a mechanism that nothing uses is no further fault.</summary>
+    public bool RulesAreWhole { get; init; } = true;
+
     public bool HasStops => Findings.Any(finding => finding.Level == FindingLevel.Stop);
 }

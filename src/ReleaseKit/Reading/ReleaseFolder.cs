@@ -34,6 +34,7 @@ public static class ReleaseFolder
     {
         private readonly FindingLog log = new();
         private bool tablesAreWhole = true;
+        private bool rulesAreWhole = true;
 
         public ReadOutcome Read()
         {
@@ -45,7 +46,7 @@ public static class ReleaseFolder
             if (files.Exists("wording"))
                 log.Add(ReleaseProblems.WordingNotYet(new Place("wording"), FindingOwner.Writer));
             var formed = draft is null ? LoneTables() : Form(draft, mechanisms, signOff);
-            return new ReadOutcome(formed, log.ToList()) { Noise = mechanisms.Account, TablesAreWhole = tablesAreWhole };
+            return new ReadOutcome(formed, log.ToList()) { Noise = mechanisms.Account, TablesAreWhole = tablesAreWhole, RulesAreWhole = rulesAreWhole };
         }
 
         private Release? Form(ReleaseDraft draft, MechanismsDraft mechanisms, SignOff signOff)
@@ -57,6 +58,7 @@ public static class ReleaseFolder
             var release = Assemble(draft, tables, prose, mechanisms, signOff);
             FolderChecks.Run(draft, tables, mechanisms, release, log);
             tablesAreWhole = draft.HasAllTables && tables.All(table => table.IsWhole);
+            rulesAreWhole = tablesAreWhole && tables.All(table => RuleChecks.AreWhole(table, mechanisms));
             if (tablesAreWhole)
                 labels.CheckUsed(release.Tables, Context(FindingOwner.Writer));
             return mechanisms.Account is null ? null : release;

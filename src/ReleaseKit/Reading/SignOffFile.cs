@@ -27,7 +27,7 @@ internal static class SignOffFile
         var waiver = finding is null || reason is null || by is null || on is null
             ? null
             : new Waiver(finding, keys.Text("at"), reason, by, on.Value, Date(keys, "until"));
-        if (finding is null || Waivers.CanWaive(finding))
+        if (finding is null || Waivers.Waivable.Contains(finding))
             return waiver;
         context.Add(WaiverProblems.CannotBeWaived(keys.PlaceOf("finding"), finding, context.Owner));
         return null;

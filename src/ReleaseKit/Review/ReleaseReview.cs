@@ -9,8 +9,8 @@ public static class ReleaseReview
     public static IReadOnlyList<Finding> Of(ReadOutcome read, IAppraisedRelease? appraised)
     {
         var subject = new ReviewSubject(read, appraised);
-        var findings = read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject)));
-        return [.. findings.Distinct().Order(ByOwnerThenPlace)];
+        var findings = read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject))).Distinct().ToList();
+        return [.. Waivers.Apply(findings, read.Release).Order(ByOwnerThenPlace)];
     }
 
     private static Comparer<Finding> ByOwnerThenPlace { get; } = Comparer<Finding>.Create(Compare);

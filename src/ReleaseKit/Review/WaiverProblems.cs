@@ -1,3 +1,6 @@
+using ReleaseKit.Reading.Keys;
+using ReleaseKit.Releases;
+
 namespace ReleaseKit.Review;
 
 /// <summary>What can be wrong with a waiver, one factory a failure.</summary>
@@ -5,7 +8,21 @@ internal static class WaiverProblems
 {
     public static Finding CannotBeWaived(Place at, string slug, FindingOwner owner) => new(
         FindingLevel.Stop, "cannot-be-waived", owner, at,
-        $"\"{slug}\" cannot be waived.",
+        $"\"{KeyProblems.Cut(slug)}\" cannot be waived.",
         "what is wrong with the budget, a margin that is missing and a leak cannot be signed away.",
-        "take the waiver out and mend what the finding names.");
+        Nearest.Of(slug, Waivers.Waivable) is { } near
+            ? $"write \"{near}\" if that is meant; else take the waiver out and mend what the finding names."
+            : "take the waiver out and mend what the finding names.");
+
+    public static Finding HasEnded(Waiver waiver) => new(
+        FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, new Place(Reading.SignOffFile.FileName),
+        FormattableString.Invariant($"The waiver of \"{KeyProblems.Cut(waiver.Finding)}\" ended on {waiver.Until:yyyy-MM-dd}, before this release is published."),
+        "the finding stands again.",
+        "renew the waiver, or take it out.");
+
+    public static Finding CoversNothing(Waiver waiver) => new(
+        FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, new Place(Reading.SignOffFile.FileName),
+        $"There is no finding \"{KeyProblems.Cut(waiver.Finding)}\"{(waiver.At is null ? "" : $" at {KeyProblems.Cut(waiver.At)}")} to waive.",
+        "the record would list a waiver of nothing.",
+        "take it out, or correct \"at\": a file, a place as it is printed, or a figure address.");
 }

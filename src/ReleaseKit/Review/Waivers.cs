@@ -1,20 +1,38 @@
+using ReleaseKit.Releases;
+
 namespace ReleaseKit.Review;
 
-/// <summary>Which findings an office may waive in signoff.json: none about the budget, a missing margin or a leak.</summary>
+/// <summary>
+/// What an office may let stand in signoff.json. Only what is named here: a finding that is not, above all about the budget, a missing margin or a
+/// leak, cannot be waived.
+/// </summary>
 public static class Waivers
 {
-    private static readonly HashSet<string> Never =
-    [
-        // A margin that is missing.
-        "no-rule", "rule-unclear", "rules-and-covers", "covered-twice", "unknown-mechanism", "parts-missing", "sum-differs", "sum-not-a-total", "not-yet",
-        "parameter-missing", "parameter-out-of-range", "parameter-off-grid", "parameter-of-other-law", "scale-not-positive", "law-table",
-        // A leak.
-        "undeclared-column", "hidden-has-value", "path-leaves-folder", "off-grid", "seed",
-        // The budget.
-        "authorised-incomplete", "sensitivity-missing", "spent-missing",
-    ];
+    /// <summary>Slugs of findings that may be waived.</summary>
+    public static IReadOnlySet<string> Waivable { get; } = new HashSet<string>
+    {
+        "formula-cell", "kind-not-given", "label-unused", "no-address", "no-licence", "prose-heading", "prose-html", "undeclared-unit",
+    };
 
-    private static readonly string[] NeverBeginning = ["spent-", "budget-", "leak-", "authorised-", "sensitivity-"];
+    /// <summary>The findings, those that are waived turned into notes that say by whom and why; a waiver without effect is a caution of its own.</summary>
+    public static IEnumerable<Finding> Apply(IReadOnlyList<Finding> findings, Release? release)
+    {
+        var waivers = release?.SignOff.Waivers ?? [];
+        var inForce = waivers.Where(waiver => !HasEnded(waiver, release!)).ToList();
+        return findings.Select(finding => inForce.FirstOrDefault(waiver => Covers(waiver, finding)) is { } waiver ? Waived(finding, waiver) : finding)
+            .Concat(waivers.Where(waiver => HasEnded(waiver, release!)).Select(WaiverProblems.HasEnded))
+            .Concat(inForce.Where(waiver => !findings.Any(finding => Covers(waiver, finding))).Select(WaiverProblems.CoversNothing));
+    }
 
-    public static bool CanWaive(string slug) => !Never.Contains(slug) && !NeverBeginning.Any(start => slug.StartsWith(start, StringComparison.Ordinal));
+    /// <summary>"until" is compared with the moment of publication; it holds on its last day.</summary>
+    private static bool HasEnded(Waiver waiver, Release release) => waiver.Until < DateOnly.FromDateTime(release.Published.Date);
+
+    private static bool Covers(Waiver waiver, Finding finding) => waiver.Finding == finding.Slug && finding.Level != FindingLevel.Stop
+        && (waiver.At is null || waiver.At == finding.At.File || waiver.At == finding.At.ToString() || waiver.At == finding.Address);
+
+    private static Finding Waived(Finding finding, Waiver waiver) => finding with
+    {
+        Level = FindingLevel.Note,
+        Found = FormattableString.Invariant($"{finding.Found}\nWaived by {waiver.By} on {waiver.On:yyyy-MM-dd}: {waiver.Reason}"),
+    };
 }

@@ -162,7 +162,8 @@ public sealed class TableReadingTests
 
     [Fact]
     public void Periods_must_be_iso_8601() => Broken.Stops("bad-date", Csv, "Kiln Row", "2031-Q1",
-        folder => folder.Edit(Release, "\"all\": \"All\" }", "\"all\": \"All\", \"period\": true }").Edit(Csv, "Quay", "2031-Q1").Edit(Csv, "Weir Lane", "2031-02"));
+        folder => folder.Edit(Release, "\"all\": \"All\" }", "\"all\": \"All\", \"period\": true }").Edit(Csv, "Quay", "2031-Q1").Edit(Csv, "Weir Lane", "2031-02")
+            .Edit(Mechanisms, "\"cellsPerUnit\": 1", "\"cellsPerUnit\": 4").Edit(Mechanisms, "\"cellsPerUnit\": 2", "\"cellsPerUnit\": 4"));
 
     private static Table Table(TestFolder folder)
     {

@@ -5,11 +5,19 @@ namespace ReleaseKit.Reading.Keys;
 /// <summary>Which numbers a key may have, with the words that say so in a message.</summary>
 public sealed record NumberRange(string Words, Func<double, bool> Holds, string Example)
 {
-    public static NumberRange Any { get; } = new("a finite number", double.IsFinite, "0");
+    /// <summary>Beyond this no number of a release lies; within it sums and products stay exact enough and finite.</summary>
+    public const double Largest = 1e15;
 
-    public static NumberRange Positive { get; } = new("above 0 and finite", value => value > 0 && double.IsFinite(value), "1");
+    /// <summary>The smallest rounding unit.</summary>
+    private const double Finest = 1e-9;
 
-    public static NumberRange NotNegative { get; } = new("0 or more and finite", value => value >= 0 && double.IsFinite(value), "0");
+    public static NumberRange Any { get; } = new("a number within 1e15 of zero", value => Math.Abs(value) <= Largest, "0");
+
+    public static NumberRange Positive { get; } = new("above 0 and at most 1e15", value => value is > 0 and <= Largest, "1");
+
+    public static NumberRange NotNegative { get; } = new("from 0 to 1e15", value => value is >= 0 and <= Largest, "0");
+
+    public static NumberRange RoundingUnit { get; } = new("from 1e-9 to 1e15", value => value is >= Finest and <= Largest, "5");
 
     /// <summary>Strictly between 0 and 1.</summary>
     public static NumberRange Share { get; } = new("between 0 and 1, neither of them", value => value is > 0 and < 1, "0.5");

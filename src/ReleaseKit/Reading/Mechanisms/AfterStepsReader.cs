@@ -46,7 +46,7 @@ internal static class AfterStepsReader
     {
         var how = keys.Choice("how", Hows) ?? RoundingHow.Nearest;
         var ties = keys.Choice("ties", Ties) ?? RoundingTies.Away;
-        return keys.Number("roundTo", NumberRange.Positive) is { } unit ? new AfterStep.RoundTo(unit, how, ties) : null;
+        return keys.Number("roundTo", NumberRange.RoundingUnit) is { } unit ? new AfterStep.RoundTo(unit, how, ties) : null;
     }
 
     private static AfterStep? Bound(ObjectReader keys)

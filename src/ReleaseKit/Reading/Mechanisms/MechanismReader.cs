@@ -116,7 +116,7 @@ internal static class MechanismReader
     {
         if (keys.Object("clipped", MechanismShapes.Clipped) is not { } clipped
             || clipped.Number("from", NumberRange.Any) is not { } from
-            || clipped.Number("to", new NumberRange(FormattableString.Invariant($"above {from}"), value => value > from && double.IsFinite(value), "400")) is not { } to)
+            || clipped.Number("to", new NumberRange(FormattableString.Invariant($"above {from}"), value => value > from && value <= NumberRange.Largest, "400")) is not { } to)
             return null;
         return new ClippedTo(from, to);
     }

@@ -61,8 +61,8 @@ internal static class FigureDraftReader
     {
         double? least = kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Share ? 0 : null;
         double? most = kind == MeasureKind.Share ? (inOnes ? 1 : 100) : null;
-        var lowest = keys.Number("lowest", new NumberRange(least is null ? NumberRange.Any.Words : "0 or more", value => double.IsFinite(value) && value >= (least ?? double.MinValue), "0")) ?? least;
-        var highest = keys.Number("highest", new NumberRange(FormattableString.Invariant($"above \"lowest\"{(most is null ? "" : $" and at most {most}")}"), value => double.IsFinite(value) && value > (lowest ?? double.MinValue) && value <= (most ?? double.MaxValue), "100")) ?? most;
+        var lowest = keys.Number("lowest", new NumberRange(least is null ? NumberRange.Any.Words : "0 or more", value => NumberRange.Any.Holds(value) && value >= (least ?? double.MinValue), "0")) ?? least;
+        var highest = keys.Number("highest", new NumberRange(FormattableString.Invariant($"above \"lowest\"{(most is null ? "" : $" and at most {most}")}"), value => NumberRange.Any.Holds(value) && value > (lowest ?? double.MinValue) && value <= (most ?? double.MaxValue), "100")) ?? most;
         return (lowest, highest);
     }
 

@@ -102,9 +102,10 @@ internal sealed class MeasureBuilder
         }
         if (draft.Kind != MeasureKind.Count)
             return new PublishedValue(digits, points);
-        if ((Int128)digits * (long)draft.Multiplier % (Int128)PublishedValue.PowerOfTen(points) != 0)
-            context.Add(CellProblems.CountNotWhole(rows.PlaceOf(field), column, rows.Text(field), context.Owner));
-        return WithoutZeros(digits, points);
+        if ((Int128)digits * (long)draft.Multiplier % (Int128)PublishedValue.PowerOfTen(points) == 0)
+            return WithoutZeros(digits, points);
+        context.Add(CellProblems.CountNotWhole(rows.PlaceOf(field), column, rows.Text(field), context.Owner));
+        return null;
     }
 
     /// <summary>A count as a program may have written it, 12.0, without the zeros after its point.</summary>

@@ -18,6 +18,10 @@ internal static class RuleChecks
         }
     }
 
+    /// <summary>Whether each measure of a table has rules, and all of them could be read.</summary>
+    public static bool AreWhole(ReadTable read, MechanismsDraft mechanisms) => read.Table.Measures.Zip(read.Draft.Figures)
+        .All(pair => !HasBrokenRule(pair.First, pair.Second, mechanisms) && pair.First.Rules.Count > 1);
+
     /// <summary>A column that is said to carry the noise of a mechanism names one that is declared.</summary>
     private static void CheckColumns(ReadTable read, MechanismsDraft mechanisms, FindingLog log)
     {
@@ -31,7 +35,7 @@ internal static class RuleChecks
     private static void CheckRules(ReadTable read, int measure, MechanismsDraft mechanisms, FindingLog log)
     {
         var (figure, draft) = (read.Table.Measures[measure], read.Draft.Figures[measure]);
-        if (draft.HasLaterRules || HasBrokenRule(draft, mechanisms))
+        if (HasBrokenRule(figure, draft, mechanisms))
             return;
         if (figure.Rules.Count == 1)
             log.Add(TableProblems.NoNoise(draft.At, figure.Column, FindingOwner.Noise));
@@ -41,8 +45,8 @@ internal static class RuleChecks
     }
 
     /// <summary>Whether a rule could not be read, so that rows without one are no further fault.</summary>
-    private static bool HasBrokenRule(FigureDraft draft, MechanismsDraft mechanisms) => mechanisms.Account is null
-        || draft.Rules?.Any(rule => rule.End is null || (rule.End is RuleEnd.Mechanism named && mechanisms.Find(named.Id) is null)) == true;
+    private static bool HasBrokenRule(Measure figure, FigureDraft draft, MechanismsDraft mechanisms) =>
+        mechanisms.Account is null || draft.HasLaterRules || figure.Rules.Count - 1 < (draft.Rules?.Count ?? 0);
 
     private static IEnumerable<int> RowsWithout(Measure figure, Table table) => Enumerable.Range(0, table.RowCount)
         .Where(row => figure.RuleAt(row) is NoiseRule.NotGiven && (figure.HasNumber(row) || (figure.StatusAt(row) == 'Q' && table.Hidden?.InTotals == true)));

@@ -6,7 +6,7 @@ namespace ReleaseKit.Review.Budget;
 /// <summary>A mechanism that no figure carries, unless its use says why.</summary>
 internal sealed class UnusedMechanismCheck : IReviewCheck
 {
-    public IEnumerable<Finding> Check(ReviewSubject subject) => subject.Release is null
+    public IEnumerable<Finding> Check(ReviewSubject subject) => subject.Release is null || !subject.Read.RulesAreWhole
         ? []
         : subject.Spendings.Where(spending => spending is { Mechanism.Use: MechanismUse.Figures, Cells.Measures.Count: 0 } && !IsNamedByColumn(subject.Release, spending))
             .Select(spending => Unused(spending.Mechanism));
