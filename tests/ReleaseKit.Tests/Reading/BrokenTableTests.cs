@@ -163,8 +163,12 @@ public sealed class BrokenTableTests
             .Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"scale\" }"));
 
     [Fact]
-    public void Scale_column_that_is_not_there_is_a_stop() => Broken.Stops("missing-column", "mechanisms.json", "{ \"id\": \"lamps-broken\"", "add the column",
-        folder => folder.Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }"));
+    public void Scale_column_that_is_not_there_is_a_stop()
+    {
+        using var folder = new TestFolder().Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }");
+        var finding = folder.OnlyStop("missing-column");
+        Assert.Equal(("mechanisms.json:8:5", true), (finding.At.ToString(), finding.Do.StartsWith("add the column", StringComparison.Ordinal)));
+    }
 
     [Fact]
     public void Rules_beside_covers_are_a_stop() => Broken.Stops("rules-and-covers", "mechanisms.json", "\"lamps/broken\"", "keep one of them",
