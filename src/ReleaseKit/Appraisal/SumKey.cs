@@ -15,7 +15,8 @@ internal sealed class SumKey(IReadOnlyDictionary<LatticeLaw, int> counted) : IEq
     {
         try
         {
-            return IntegerSum.Of(Counted.Select(pair => (pair.Key, pair.Value)));
+            // In a fixed order, so that the last digit does not hang on which of two like sums was asked for first.
+            return IntegerSum.Of(Counted.OrderBy(pair => pair.Key.Variance).ThenBy(pair => pair.Key.GetType().Name, StringComparer.Ordinal).Select(pair => (pair.Key, pair.Value)));
         }
         catch (ArgumentException)
         {

@@ -11,7 +11,7 @@ internal static partial class Readability
 {
     private static readonly string[] BySyllables =
     [
-        "a an and apart reach run when then lay as at be break but by can close count do each ends for from got group here high hold in is it its just "
+        "a an and apart reach rests run when then lay as at be break but by can close count do each ends for from got group here high hold in is it its just "
         + "known large late learned least leaves less lies low made marks may mean miss more most moved need no noise none not of "
         + "on or own parts per range rate read rest rough same share show small so some source still strike such sum sums tend "
         + "tends than that the their them there they this to told too touched up use was way weak were what with wrong yet add "

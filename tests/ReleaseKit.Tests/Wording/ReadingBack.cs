@@ -24,7 +24,7 @@ internal static class ReadingBack
             (figure, g) => Is(g[2], figure.Main!.Printed.MarginUp) && Is(g[2], figure.Main.Printed.MarginDown)
                 && g[1].Value.Contains("rounding", StringComparison.Ordinal) == figure.Case.Rounded && Holds(figure, g, 3)),
         Sentence($@"Together that noise was up to {N} either way in {Cases}\.", (figure, g) => Is(g[1], figure.Main!.Printed.Margin) && figure.Draws > 1 && Holds(figure, g, 2)),
-        Sentence($@"It adds up {N} figures, each with noise of its own\.", (figure, g) => Number(g[1]) == figure.Draws && figure.Draws > 1),
+        Sentence($@"It rests on {N} figures, each with noise of its own\.", (figure, g) => Number(g[1]) == figure.Draws && figure.Draws > 1),
         Sentence($@"Noise (?:and rounding together )?moved it by up to {N} upward or {N} downward in {Cases}\.",
             (figure, g) => Is(g[1], figure.Main!.Printed.MarginDown) && Is(g[2], figure.Main.Printed.MarginUp) && Holds(figure, g, 3)),
         Sentence($@"Noise was added, and what then lay below {N} was published as 0\.", (figure, g) => figure.Case.Threshold && figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
