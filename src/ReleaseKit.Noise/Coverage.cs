@@ -26,7 +26,8 @@ public readonly record struct Coverage : IComparable<Coverage>
         : throw new ArgumentOutOfRangeException(nameof(share), share, "A coverage lies strictly between 0 and 1.");
 
     /// <summary>
-    /// Whether a probability reaches this coverage: P ≥ share − 1e-12, so that a tie is decided alike by everyone who works it out in doubles.
+    /// Whether a probability reaches this coverage: P ≥ share − 1e-12, so that a tie is decided alike by everyone who works it out in
+    /// doubles.
     /// </summary>
     /// <param name="probability">The lower end of what the probability can be, in [0, 1].</param>
     public bool IsReachedBy(double probability) => probability >= Share - Slack;

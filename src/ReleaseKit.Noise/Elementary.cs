@@ -3,7 +3,8 @@ namespace ReleaseKit.Noise;
 /// <summary>e^x − 1 and ln(1 + x) without loss of digits near 0, which the runtime's own do not give.</summary>
 internal static class Elementary
 {
-    /// <summary>e^x − 1 (Higham 2002, Accuracy and Stability of Numerical Algorithms, section 1.14.1, after W. Kahan; from memory).</summary>
+    /// <summary>e^x − 1 (Higham 2002, Accuracy and Stability of Numerical Algorithms, section 1.14.1, after W. Kahan; from
+    /// memory).</summary>
     public static double ExpM1(double x)
     {
         var u = Math.Exp(x);

@@ -23,7 +23,8 @@ internal static class Require
         var steps = Math.Round(value / grid);
         return steps is >= 0 and <= Lattice.Exact && Lattice.IsWhole(value / grid)
             ? (long)steps
-            : throw OutOfRange(value, name, FormattableString.Invariant($"is in the unit of the figure and must be 0 or a multiple of the grid {grid:R}"));
+            : throw OutOfRange(value, name, string.Create(
+                CultureInfo.InvariantCulture, $"is in the unit of the figure and must be 0 or a multiple of the grid {grid:R}"));
     }
 
     private static ArgumentOutOfRangeException OutOfRange(double value, string name, string rule) =>

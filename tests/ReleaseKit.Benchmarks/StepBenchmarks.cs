@@ -5,7 +5,8 @@ using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Benchmarks;
 
-/// <summary>How long the first answer takes where after-steps act or parts are added: worked out once per law, steps and coverage, then kept.</summary>
+/// <summary>How long the first answer takes where after-steps act or parts are added: worked out once per law, steps and coverage, then
+/// kept.</summary>
 public class StepBenchmarks
 {
     private static readonly Coverage Main = Coverage.OfShare(0.95);

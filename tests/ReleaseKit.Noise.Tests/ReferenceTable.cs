@@ -9,7 +9,13 @@ internal sealed record ReferenceTable(IReadOnlyList<ReferenceRow> Rows)
     {
         var lines = File.ReadAllLines(Path.Combine(AppContext.BaseDirectory, "reference", file));
         var columns = lines[0].Split(',');
-        return new([.. lines.Skip(1).Select((line, index) => new ReferenceRow(index + 2, columns.Zip(line.Split(',')).ToDictionary(p => p.First, p => p.Second)))]);
+        return new([.. lines.Index().Skip(1).Select(line => new ReferenceRow(line.Index + 1, Cells(columns, line.Item)))]);
+    }
+
+    private static Dictionary<string, string> Cells(string[] columns, string line)
+    {
+        var cells = line.Split(',');
+        return columns.Index().ToDictionary(column => column.Item, column => cells[column.Index]);
     }
 }
 

@@ -4,8 +4,8 @@ using System.Text;
 namespace ReleaseKit.Testing;
 
 /// <summary>
-/// The public surface of an assembly as text, one member a line in ordinal order: what is compared with an approved file, so that no change of a
-/// library's surface goes unseen.
+/// The public surface of an assembly as text, one member a line in ordinal order: what is compared with an approved file, so that no change
+/// of a library's surface goes unseen.
 /// </summary>
 internal static class PublicSurface
 {
@@ -46,11 +46,10 @@ internal static class PublicSurface
     {
         if (type.IsEnum)
             return Enum.GetNames(type);
-        var fields = type.GetFields(Declared).Where(field => IsOpen(field.Attributes)).Select(field => $"{Static(field.IsStatic)}{Name(field.FieldType)} {field.Name}");
+        var fields = type.GetFields(Declared).Where(IsOpen).Select(field => $"{Static(field.IsStatic)}{Name(field.FieldType)} {field.Name}");
         var constructors = type.GetConstructors(Declared).Where(IsOpen).Where(made => !IsCopy(made, type)).Select(made => $"new({Parameters(made)})");
         var properties = type.GetProperties(Declared).Where(IsOpen).Select(PropertyLine);
-        var methods = type.GetMethods(Declared).Where(IsOpen).Where(method => !method.IsSpecialName || method.Name.StartsWith("op_", StringComparison.Ordinal))
-            .Where(method => !IsCompilerMade(method)).Select(MethodLine);
+        var methods = type.GetMethods(Declared).Where(IsOpen).Where(method => !IsAccessor(method) && !IsCompilerMade(method)).Select(MethodLine);
         return [.. fields, .. constructors, .. properties, .. methods];
     }
 
@@ -63,9 +62,13 @@ internal static class PublicSurface
 
     private static string MethodLine(MethodInfo method) => $"{Static(method.IsStatic)}{Name(method.ReturnType)} {method.Name}({Parameters(method)})";
 
-    private static string Parameters(MethodBase method) => string.Join(", ", method.GetParameters().Select(parameter => $"{Name(parameter.ParameterType)} {parameter.Name}{Default(parameter)}"));
+    private static string Parameters(MethodBase method) => string.Join(", ", method.GetParameters().Select(ParameterText));
 
-    private static string Default(ParameterInfo parameter) => parameter.HasDefaultValue ? FormattableString.Invariant($" = {parameter.DefaultValue ?? "null"}") : "";
+    private static string ParameterText(ParameterInfo parameter)
+    {
+        var value = parameter.HasDefaultValue ? FormattableString.Invariant($" = {parameter.DefaultValue ?? "null"}") : "";
+        return $"{Name(parameter.ParameterType)} {parameter.Name}{value}";
+    }
 
     private static string Static(bool isStatic) => isStatic ? "static " : "";
 
@@ -73,8 +76,9 @@ internal static class PublicSurface
 
     private static bool IsOpen(MethodBase method) => method.IsPublic || method.IsFamily || method.IsFamilyOrAssembly;
 
-    private static bool IsOpen(FieldAttributes attributes) => (attributes & FieldAttributes.FieldAccessMask) is FieldAttributes.Public or FieldAttributes.Family or FieldAttributes.FamORAssem
-        && (attributes & FieldAttributes.SpecialName) == 0;
+    private static bool IsOpen(FieldInfo field) => (field.IsPublic || field.IsFamily || field.IsFamilyOrAssembly) && !field.IsSpecialName;
+
+    private static bool IsAccessor(MethodInfo method) => method.IsSpecialName && !method.Name.StartsWith("op_", StringComparison.Ordinal);
 
     private static bool IsInit(MethodInfo setter) =>
         setter.ReturnParameter.GetRequiredCustomModifiers().Contains(typeof(System.Runtime.CompilerServices.IsExternalInit));
@@ -88,7 +92,8 @@ internal static class PublicSurface
     {
         if (type.IsGenericParameter)
             return type.Name;
-        var name = type.DeclaringType is { } outer ? $"{Name(outer)}.{type.Name}" : type.Namespace is "System" ? type.Name : type.FullName?.Split('[')[0] ?? type.Name;
+        var plain = type.Namespace is "System" ? type.Name : type.FullName?.Split('[')[0] ?? type.Name;
+        var name = type.DeclaringType is { } outer ? $"{Name(outer)}.{type.Name}" : plain;
         if (!type.IsGenericType)
             return name;
         var arguments = string.Join(", ", type.GetGenericArguments().Select(Name));

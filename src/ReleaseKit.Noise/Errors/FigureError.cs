@@ -4,11 +4,12 @@ using ReleaseKit.Noise.Laws;
 namespace ReleaseKit.Noise.Errors;
 
 /// <summary>
-/// The error E = published − value before noise of one figure: a noise law and the steps that follow it. Immutable, shared by all figures alike,
-/// safe between threads. Built once per distinct (law, steps).
+/// The error E = published − value before noise of one figure: a noise law and the steps that follow it. Immutable, shared by all figures
+/// alike, safe between threads. Built once per distinct (law, steps).
 /// </summary>
 /// <remarks>
-/// The decimals of a published file are a rounding too: for a continuous law append <c>new AfterStep.RoundTo(0.01)</c> for a file with two decimals.
+/// The decimals of a published file are a rounding too: for a continuous law append <c>new AfterStep.RoundTo(0.01)</c> for a file with two
+/// decimals.
 /// </remarks>
 public sealed class FigureError
 {
@@ -21,7 +22,8 @@ public sealed class FigureError
     private readonly LikelihoodRatioRange? likelihood;
     private readonly ConcurrentDictionary<Coverage, HalfWidth> margins = new();
 
-    // On a lattice the same few values come again and again near a threshold or below a bound; continuous ones seldom repeat and are not kept.
+    // On a lattice the same few values come again and again near a threshold or below a bound; continuous ones seldom repeat and are not
+    // kept.
     private readonly ConcurrentDictionary<(double Value, Coverage Coverage), (double Low, double High)> passedRanges = new();
     private readonly ConcurrentDictionary<(double Value, Coverage Coverage), (double Low, double High)> reaches = new();
 
@@ -52,18 +54,19 @@ public sealed class FigureError
     /// <param name="law">The law of the noise.</param>
     /// <param name="steps">The steps in order; none for the noise alone.</param>
     /// <exception cref="ArgumentException">
-    /// A step has a value that makes no sense; a bound stands before a rounding and is no multiple of its unit; or a threshold stands with steps or a
-    /// law for which its range is not worked out. The message lists every fault.
+    /// A step has a value that makes no sense; a bound stands before a rounding and is no multiple of its unit; or a threshold stands with
+    /// steps or a law for which its range is not worked out. The message lists every fault.
     /// </exception>
     public static FigureError Of(NoiseLaw law, params IReadOnlyList<AfterStep> steps) => new(law, StepChain.Of(law, steps));
 
     /// <summary>
-    /// The smallest half-width that holds |E| at the coverage for every value before noise, without thresholds, and the coverage it attains at the
-    /// worst one. 0 if the noise leaves the value as it was that often.
+    /// The smallest half-width that holds |E| at the coverage for every value before noise, without thresholds, and the coverage it attains
+    /// at the worst one. 0 if the noise leaves the value as it was that often.
     /// </summary>
     public HalfWidth MarginAt(Coverage coverage) => margins.GetOrAdd(coverage, WorkOutMargin);
 
-    /// <summary>The smallest P(|E| ≤ width) over all values before noise, without thresholds; a lower bound where the margin is an upper one.</summary>
+    /// <summary>The smallest P(|E| ≤ width) over all values before noise, without thresholds; a lower bound where the margin is an upper
+    /// one.</summary>
     /// <param name="width">In the unit of the figure; below 0 gives 0.</param>
     public double AttainedAt(double width) => rounded is null
         ? Law.Within(width - chain.Shift)
@@ -73,9 +76,10 @@ public sealed class FigureError
     /// The range of values before noise at a coverage for one published value, cut to the possible values and never empty.
     /// </summary>
     /// <remarks>
-    /// Without thresholds: y ± margin; for a y outside what is possible the far end is the larger one of that and of the likelihood-ratio range
-    /// (Feldman &amp; Cousins 1998). With a threshold: the law given that it was passed, inverted; so among the figures that passed it the range
-    /// holds the value before noise at the coverage, whatever that value is. A 0 under <see cref="AfterStep.ZeroBelow"/> is answered by
+    /// Without thresholds: y ± margin; for a y outside what is possible the far end is the larger one of that and of the likelihood-ratio
+    /// range (Feldman &amp; Cousins 1998). With a threshold: the law given that it was passed, inverted; so among the figures that passed
+    /// it the range holds the value before noise at the coverage, whatever that value is. A 0 under <see cref="AfterStep.ZeroBelow"/> is
+    /// answered by
     /// <see cref="RangeWhenNotPublished"/>.
     /// </remarks>
     /// <param name="published">In the unit of the figure.</param>
@@ -92,8 +96,8 @@ public sealed class FigureError
     }
 
     /// <summary>
-    /// The range of a cell that failed the threshold: every possible value up to the largest one that fails it with a chance above (1 − c)/2.
-    /// A value above the range goes unpublished in at most (1 − c)/2 of the cases; that chance is what <c>Attained</c> leaves to 1.
+    /// The range of a cell that failed the threshold: every possible value up to the largest one that fails it with a chance above (1 −
+    /// c)/2. A value above the range goes unpublished in at most (1 − c)/2 of the cases; that chance is what <c>Attained</c> leaves to 1.
     /// </summary>
     /// <exception cref="InvalidOperationException">The steps hold no threshold.</exception>
     public ErrorRange RangeWhenNotPublished(Coverage coverage, PossibleValues possible) => threshold is null
@@ -125,7 +129,8 @@ public sealed class FigureError
         return possible.Cut(low, high, margin.Attained);
     }
 
-    // The upper end that a value below the lowest possible one needs at least: above that bound, so that a range of one value is never shown.
+    // The upper end that a value below the lowest possible one needs at least: above that bound, so that a range of one value is never
+    // shown.
     private double BeyondLowest(double published, Coverage coverage, PossibleValues possible) => published >= possible.Lowest
         ? double.NegativeInfinity
         : possible.Lowest + LikelyReach(published - possible.Lowest + chain.Lift, coverage);
@@ -134,7 +139,8 @@ public sealed class FigureError
         ? double.PositiveInfinity
         : possible.Highest - LikelyReach(possible.Highest - published + chain.Fall, coverage);
 
-    // How far from a bound at 0 the likelihood-ratio range reaches for a value on its wrong side; the plain margin where that is not worked out.
+    // How far from a bound at 0 the likelihood-ratio range reaches for a value on its wrong side; the plain margin where that is not worked
+    // out.
     private double LikelyReach(double value, Coverage coverage)
     {
         var reach = likelihood is null ? double.NaN : Kept(reaches, value, coverage, (v, c) => (0, likelihood.UpperEnd(v, 0, c))).High;

@@ -3,13 +3,14 @@ using ReleaseKit.Noise.Laws;
 namespace ReleaseKit.Noise.Errors;
 
 /// <summary>
-/// Places to look at, in order, for the ends of a set of values before noise under laws that are not log-concave, where the set may be in several
-/// pieces: its hull is wanted.
+/// Places to look at, in order, for the ends of a set of values before noise under laws that are not log-concave, where the set may be in
+/// several pieces: its hull is wanted.
 /// </summary>
 /// <remarks>
-/// Tabulated laws: every step at which the table can reach the value. Staircase law: both tails are linear in x between the places where an edge of
-/// the density passes the value or the threshold, so their ratio moves one way in between, and looking at those places misses no piece.
-/// Past the threshold the chance of passing it is at least 1/2, so that beyond the distance z with P(N ≥ z) = β/2 every x is rejected.
+/// Tabulated laws: every step at which the table can reach the value. Staircase law: both tails are linear in x between the places where an
+/// edge of the density passes the value or the threshold, so their ratio moves one way in between, and looking at those places misses no
+/// piece. Past the threshold the chance of passing it is at least 1/2, so that beyond the distance z with P(N ≥ z) = β/2 every x is
+/// rejected.
 /// </remarks>
 internal sealed class HullScan(NoiseLaw law, double passing, long blur)
 {
@@ -41,13 +42,15 @@ internal sealed class HullScan(NoiseLaw law, double passing, long blur)
         return FirstThatHolds(From(start, staircase.Sensitivity).SelectMany(from => Block(staircase, value, from)), holds);
     }
 
-    /// <summary>The largest x above a start that satisfies a condition, which rejects all x far enough above; the start if there is none.</summary>
+    /// <summary>The largest x above a start that satisfies a condition, which rejects all x far enough above; the start if there is
+    /// none.</summary>
     public double Highest(double value, double start, double tail, Func<double, bool> holds)
     {
         if (law is TabulatedLaw table)
             return From(value - 1 - table.Rows[0].Step, -1).TakeWhile(x => x > start).Where(holds).FirstOrDefault(start);
         var staircase = (StaircaseLaw)law;
-        var blocks = From(value + Reach(staircase, tail), -staircase.Sensitivity).SelectMany(from => Block(staircase, value, from).Reverse());
+        var blocks = From(value + Reach(staircase, tail), -staircase.Sensitivity)
+            .SelectMany(from => Block(staircase, value, from).Reverse());
         return FirstThatHolds(blocks.TakeWhile(x => x > start).Append(start), x => x <= start || holds(x));
     }
 
@@ -69,7 +72,8 @@ internal sealed class HullScan(NoiseLaw law, double passing, long blur)
         return before;
     }
 
-    // The start of a block one step of the staircase long, and the places in it where an edge of the density can pass the value or the threshold.
+    // The start of a block one step of the staircase long, and the places in it where an edge of the density can pass the value or the
+    // threshold.
     private double[] Block(StaircaseLaw staircase, double value, double from)
     {
         var (length, high) = (staircase.Sensitivity, staircase.Sensitivity * staircase.Gamma);
@@ -77,5 +81,6 @@ internal sealed class HullScan(NoiseLaw law, double passing, long blur)
         return [from, .. edges.Select(edge => edge + Math.Ceiling((from - edge) / length) * length).Order()];
     }
 
-    private static double Reach(StaircaseLaw staircase, double tail) => staircase.HalfWidthAt(Coverage.OfShare(1 - Math.Min(tail, 0.5))).Width;
+    private static double Reach(StaircaseLaw staircase, double tail) =>
+        staircase.HalfWidthAt(Coverage.OfShare(1 - Math.Min(tail, 0.5))).Width;
 }

@@ -3,8 +3,8 @@ using ReleaseKit.Noise.Laws;
 namespace ReleaseKit.Noise.Errors;
 
 /// <summary>
-/// The law of a sum of independent draws on one grid, without after-steps, by convolution: the error of a figure that is published as the sum of
-/// its parts. Chances are right to 1e-14; what was trimmed from the tails (<see cref="LostMass"/>) counts as outside every range.
+/// The law of a sum of independent draws on one grid, without after-steps, by convolution: the error of a figure that is published as the
+/// sum of its parts. Chances are right to 1e-14; what was trimmed from the tails (<see cref="LostMass"/>) counts as outside every range.
 /// </summary>
 public sealed record IntegerSum : LatticeLaw
 {
@@ -18,7 +18,9 @@ public sealed record IntegerSum : LatticeLaw
     {
         Parts = parts;
         var tail = 1e-17 / parts.Sum(part => (double)part.Count);
-        chances = parts.Select(part => StepChances.Of(part.Law, tail).Times(part.Count, tail)).Aggregate((sum, part) => sum.Plus(part, tail));
+        chances = parts
+            .Select(part => StepChances.Of(part.Law, tail).Times(part.Count, tail))
+            .Aggregate((sum, part) => sum.Plus(part, tail));
         (upTo, from) = ([.. chances.Chances], [.. chances.Chances]);
         for (var i = 1; i < upTo.Length; i++)
             (upTo[i], from[^(i + 1)]) = (upTo[i] + upTo[i - 1], from[^(i + 1)] + from[^i]);
@@ -29,7 +31,8 @@ public sealed record IntegerSum : LatticeLaw
     /// <summary>The laws that are added, each with the number of its independent draws.</summary>
     public IReadOnlyList<(LatticeLaw Law, int Count)> Parts { get; }
 
-    /// <summary>A bound on the chance of the steps left out, which count as outside every range; about 1e-15, and what a tabulated part lacks.</summary>
+    /// <summary>A bound on the chance of the steps left out, which count as outside every range; about 1e-15, and what a tabulated part
+    /// lacks.</summary>
     public double LostMass => chances.Lost;
 
     /// <inheritdoc/>
@@ -42,12 +45,14 @@ public sealed record IntegerSum : LatticeLaw
     internal override bool IsLogConcave => Parts.All(part => part.Law.IsLogConcave);
 
     /// <summary>
-    /// The law of a sum. One draw gives its own law, and discrete Gaussian draws of at least 4 grid steps are added in closed form: sigmas as the
-    /// root of the sum of squares, which is right to 1e-60 (the pmf of such a sum is that of the discrete Gaussian times a theta function that
-    /// differs from 1 by at most e^(−16π²) a draw; Canonne, Kamath &amp; Steinke 2020, section on sums; from memory, and by Poisson summation).
+    /// The law of a sum. One draw gives its own law, and discrete Gaussian draws of at least 4 grid steps are added in closed form: sigmas
+    /// as the root of the sum of squares, which is right to 1e-60 (the pmf of such a sum is that of the discrete Gaussian times a theta
+    /// function that differs from 1 by at most e^(−16π²) a draw; Canonne, Kamath &amp; Steinke 2020, section on sums; from memory, and by
+    /// Poisson summation).
     /// </summary>
     /// <param name="parts">Laws on one grid, each with the number ≥ 1 of its independent draws.</param>
-    /// <exception cref="ArgumentException">There is no part, a count is below 1, grids differ, or the sum is too wide to be worked out.</exception>
+    /// <exception cref="ArgumentException">There is no part, a count is below 1, grids differ, or the sum is too wide to be worked
+    /// out.</exception>
     public static LatticeLaw Of(params IEnumerable<(LatticeLaw Law, int Count)> parts)
     {
         var merged = Merged([.. parts]);
@@ -83,10 +88,13 @@ public sealed record IntegerSum : LatticeLaw
 
     private static List<(LatticeLaw Law, int Count)> Merged(IReadOnlyList<(LatticeLaw Law, int Count)> parts)
     {
-        var merged = parts.Where(part => !AddsClosed(part)).GroupBy(part => part.Law).Select(same => (same.Key, same.Sum(part => part.Count))).ToList();
+        var merged = parts.Where(part => !AddsClosed(part))
+            .GroupBy(part => part.Law)
+            .Select(same => (same.Key, same.Sum(part => part.Count)))
+            .ToList();
         foreach (var grid in parts.Where(AddsClosed).GroupBy(part => part.Law.Grid))
         {
-            var sigma = Math.Sqrt(grid.Sum(part => part.Count * ((DiscreteGaussianLaw)part.Law).Sigma * ((DiscreteGaussianLaw)part.Law).Sigma));
+            var sigma = Math.Sqrt(grid.Sum(part => part.Count * Math.Pow(((DiscreteGaussianLaw)part.Law).Sigma, 2)));
             merged.Add((DiscreteGaussianLaw.Of(sigma, grid.Key), 1));
         }
         return merged;

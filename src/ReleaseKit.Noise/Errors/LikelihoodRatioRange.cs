@@ -3,12 +3,13 @@ using ReleaseKit.Noise.Laws;
 namespace ReleaseKit.Noise.Errors;
 
 /// <summary>
-/// The upper end of the likelihood-ratio range for a value before noise that cannot be below a bound. Feldman &amp; Cousins 1998, Unified approach
-/// to the classical statistical analysis of small signals, Phys. Rev. D 57.
+/// The upper end of the likelihood-ratio range for a value before noise that cannot be below a bound. Feldman &amp; Cousins 1998, Unified
+/// approach to the classical statistical analysis of small signals, Phys. Rev. D 57.
 /// </summary>
 /// <remarks>
-/// x belongs to the range of a value v if the values Y whose ratio R(Y, x) = p(Y | x) ÷ p(Y | best possible x) is above R(v, x) have less than the
-/// coverage together. The law is symmetric and log-concave, so R rises with Y up to x and falls after it: those values are one run from a to b.
+/// x belongs to the range of a value v if the values Y whose ratio R(Y, x) = p(Y | x) ÷ p(Y | best possible x) is above R(v, x) have less
+/// than the coverage together. The law is symmetric and log-concave, so R rises with Y up to x and falls after it: those values are one run
+/// from a to b.
 /// </remarks>
 internal sealed class LikelihoodRatioRange(NoiseLaw law)
 {
@@ -24,8 +25,8 @@ internal sealed class LikelihoodRatioRange(NoiseLaw law)
     private readonly double peak = law is LatticeLaw l ? l.Probability(0) : ((ContinuousLaw)law).Density(0);
 
     /// <summary>
-    /// The largest x ≥ lowest in the range of a value; NaN if the law gives the value no chance that a double can hold even at the lowest x.
-    /// All in the figure's unit.
+    /// The largest x ≥ lowest in the range of a value; NaN if the law gives the value no chance that a double can hold even at the lowest
+    /// x. All in the figure's unit.
     /// </summary>
     public double UpperEnd(double value, double lowest, Coverage coverage)
     {

@@ -13,8 +13,8 @@ public readonly record struct PossibleValues(double Lowest, double Highest, bool
     public static PossibleValues Counts { get; } = new(0, double.PositiveInfinity, true);
 
     /// <summary>
-    /// A range cut to the possible values. Whole numbers are taken inward, which loses none of them; a range that would hold nothing is taken
-    /// outward, or shrinks to the nearest possible value.
+    /// A range cut to the possible values. Whole numbers are taken inward, which loses none of them; a range that would hold nothing is
+    /// taken outward, or shrinks to the nearest possible value.
     /// </summary>
     internal ErrorRange Cut(double low, double high, double attained)
     {

@@ -6,9 +6,10 @@ namespace ReleaseKit.Noise.Errors;
 /// The law of E = rounded(x + K) − x in whole steps, at the worst value before noise x: exact, for every x there is.
 /// </summary>
 /// <remarks>
-/// P(|E| ≤ w) depends on x through its remainder and, where ties turn at zero, through whether the window [x − w, x + w] lies above, across or
-/// below zero. Two periods (ties to even repeat after two) on both sides of zero show every remainder of a window across zero; two periods far
-/// out on either side show the rest. A bound that x respects pulls the published value towards x, so the x without bounds are the worst.
+/// P(|E| ≤ w) depends on x through its remainder and, where ties turn at zero, through whether the window [x − w, x + w] lies above, across
+/// or below zero. Two periods (ties to even repeat after two) on both sides of zero show every remainder of a window across zero; two
+/// periods far out on either side show the rest. A bound that x respects pulls the published value towards x, so the x without bounds are
+/// the worst.
 /// </remarks>
 internal sealed class RoundedError(LatticeLaw law, Rounding rounding)
 {

@@ -4,8 +4,8 @@ namespace ReleaseKit.Noise.Errors;
 internal readonly record struct Rounding(long Unit, RoundingHow How, RoundingTies Ties)
 {
     /// <summary>
-    /// The smallest step that is rounded to the given multiple (its number, not its value) or to a higher one; random rounding adds a uniform
-    /// 0..Unit − 1 to the step and then rounds down, so that a step goes up with the chance that its remainder is of the unit.
+    /// The smallest step that is rounded to the given multiple (its number, not its value) or to a higher one; random rounding adds a
+    /// uniform 0..Unit − 1 to the step and then rounds down, so that a step goes up with the chance that its remainder is of the unit.
     /// </summary>
     public long First(long number) => How switch
     {

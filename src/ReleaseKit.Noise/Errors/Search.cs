@@ -4,8 +4,8 @@ namespace ReleaseKit.Noise.Errors;
 internal static class Search
 {
     /// <summary>
-    /// The place farthest from the start, in the direction of the stride's sign, where the condition still holds: a whole number of strides away
-    /// if <paramref name="whole"/>, else the nearest place known to fail, within 1e-13 of the distance. ± ∞ if no end is found.
+    /// The place farthest from the start, in the direction of the stride's sign, where the condition still holds: a whole number of strides
+    /// away if <paramref name="whole"/>, else the nearest place known to fail, within 1e-13 of the distance. ± ∞ if no end is found.
     /// </summary>
     public static double Farthest(double start, double stride, bool whole, Func<double, bool> holds)
     {

@@ -3,8 +3,8 @@ using ReleaseKit.Noise.Laws;
 namespace ReleaseKit.Noise.Errors;
 
 /// <summary>
-/// The steps after the noise, checked against each other and against the law, as one function of the noised value. Every step rises with the value
-/// (a value that is not published counts as the lowest), so "published at least y" is the same as "noised at least t(y)".
+/// The steps after the noise, checked against each other and against the law, as one function of the noised value. Every step rises with
+/// the value (a value that is not published counts as the lowest), so "published at least y" is the same as "noised at least t(y)".
 /// </summary>
 internal sealed class StepChain
 {
@@ -20,9 +20,9 @@ internal sealed class StepChain
         Unit = (law as LatticeLaw)?.Grid ?? 1;
         roundings = [.. EffectiveRoundings(law, steps)];
         ExactRounding = law is LatticeLaw lattice && roundings is [var only] && IsExact(only, lattice) ? Exactly(only) : null;
-        Shift = ExactRounding is null ? roundings.Sum(rounding => rounding.How is RoundingHow.Nearest ? rounding.Unit / 2 : rounding.Unit) : 0;
-        Lift = roundings.Sum(rounding => rounding.How switch { RoundingHow.Nearest => rounding.Unit / 2, RoundingHow.Up => 0, _ => rounding.Unit });
-        Fall = roundings.Sum(rounding => rounding.How switch { RoundingHow.Nearest => rounding.Unit / 2, RoundingHow.Down => 0, _ => rounding.Unit });
+        Shift = ExactRounding is null ? roundings.Sum(rounding => Farthest(rounding, 1)) : 0;
+        Lift = roundings.Sum(rounding => Farthest(rounding, rounding.How is RoundingHow.Up ? 0 : 1));
+        Fall = roundings.Sum(rounding => Farthest(rounding, rounding.How is RoundingHow.Down ? 0 : 1));
         Blur = roundings.Where(rounding => rounding.How is RoundingHow.AtRandom).Sum(rounding => rounding.Unit);
     }
 
@@ -35,12 +35,13 @@ internal sealed class StepChain
     /// <summary>Half a grid step of a lattice law, 0 for a continuous one: what a strict bound stands off.</summary>
     public double HalfStep => law is LatticeLaw ? Unit / 2 : 0;
 
-    /// <summary>The one rounding of a lattice law to a whole number of its steps; null if there is none or it is bounded by <see cref="Shift"/>.</summary>
+    /// <summary>The one rounding of a lattice law to a whole number of its steps; null if there is none or it is bounded by
+    /// <see cref="Shift"/>.</summary>
     public Rounding? ExactRounding { get; }
 
     /// <summary>
-    /// How far rounding can move a value, in the figure's unit; 0 where it is worked out exactly. Rounding to the nearest multiple of r moves a
-    /// value by at most r/2, any other rounding by less than r; several add up. So |E| ≤ |N| + shift for every value before noise.
+    /// How far rounding can move a value, in the figure's unit; 0 where it is worked out exactly. Rounding to the nearest multiple of r
+    /// moves a value by at most r/2, any other rounding by less than r; several add up. So |E| ≤ |N| + shift for every value before noise.
     /// </summary>
     public double Shift { get; }
 
@@ -59,7 +60,8 @@ internal sealed class StepChain
         return new StepChain(law, steps);
     }
 
-    /// <summary>A rounding changes nothing where all values before it are multiples of its unit: on a grid, or after a coarser rounding.</summary>
+    /// <summary>A rounding changes nothing where all values before it are multiples of its unit: on a grid, or after a coarser
+    /// rounding.</summary>
     public static IEnumerable<AfterStep.RoundTo> EffectiveRoundings(NoiseLaw law, IReadOnlyList<AfterStep> steps)
     {
         var finest = (law as LatticeLaw)?.Grid ?? 0;
@@ -76,8 +78,9 @@ internal sealed class StepChain
         rounding.Unit / law.Grid <= LargestExactUnit && Lattice.IsWhole(rounding.Unit / law.Grid);
 
     /// <summary>
-    /// The smallest noised value whose published value is at least the given one; ± ∞ if all are, or none. In steps of the grid for a lattice law,
-    /// in the figure's unit for a continuous one (there the place may itself belong to either side, which has no chance of happening).
+    /// The smallest noised value whose published value is at least the given one; ± ∞ if all are, or none. In steps of the grid for a
+    /// lattice law, in the figure's unit for a continuous one (there the place may itself belong to either side, which has no chance of
+    /// happening).
     /// </summary>
     public double Reaching(double published) => Reaching(published, Steps.Count);
 
@@ -129,6 +132,9 @@ internal sealed class StepChain
 
     private double NextAbove(double published) =>
         Spacing > 0 ? (Lattice.Floor(published / Spacing) + 1) * Spacing : Math.BitIncrement(published);
+
+    private static double Farthest(AfterStep.RoundTo rounding, double units) =>
+        rounding.How is RoundingHow.Nearest ? rounding.Unit / 2 : rounding.Unit * units;
 
     private Rounding Exactly(AfterStep.RoundTo rounding) => new((long)Math.Round(rounding.Unit / Unit), rounding.How, rounding.Ties);
 }

@@ -23,10 +23,14 @@ internal static class StepRules
 
     private static string? Alone(AfterStep step) => step switch
     {
-        AfterStep.RoundTo round when !(double.IsFinite(round.Unit) && round.Unit > 0) => Say($"Rounding to {round.Unit}: the unit must be a finite number above 0."),
-        AfterStep.ZeroBelow zero when !(double.IsFinite(zero.Threshold) && zero.Threshold > 0) => Say($"Zero below {zero.Threshold}: the threshold must be a finite number above 0."),
-        AfterStep.PublishedFrom from when !double.IsFinite(from.Threshold) => Say($"Published from {from.Threshold}: the threshold must be finite."),
-        _ when BoundOf(step) is { } bound && !double.IsFinite(bound) => Say($"A bound of {bound}: a bound must be finite; leave the step out if there is none."),
+        AfterStep.RoundTo round when !IsPositive(round.Unit) =>
+            Say($"Rounding to {round.Unit}: the unit must be a finite number above 0."),
+        AfterStep.ZeroBelow zero when !IsPositive(zero.Threshold) =>
+            Say($"Zero below {zero.Threshold}: the threshold must be a finite number above 0."),
+        AfterStep.PublishedFrom from when !double.IsFinite(from.Threshold) =>
+            Say($"Published from {from.Threshold}: the threshold must be finite."),
+        _ when BoundOf(step) is { } bound && !double.IsFinite(bound) =>
+            Say($"A bound of {bound}: a bound must be finite; leave the step out if there is none."),
         _ => null,
     };
 
@@ -37,7 +41,10 @@ internal static class StepRules
             if (BoundOf(steps[i]) is not { } bound)
                 continue;
             foreach (var later in steps.Skip(i + 1).OfType<AfterStep.RoundTo>().Where(later => !Lattice.IsWhole(bound / later.Unit)))
-                yield return Say($"The bound {bound} stands before rounding to {later.Unit} and is no multiple of it, so rounding can cross the bound: put it after the rounding.");
+            {
+                yield return Say($"The bound {bound} stands before rounding to {later.Unit} and is no multiple of it, so that ")
+                    + "rounding can cross the bound: put it after the rounding.";
+            }
         }
         var (lower, upper) = (Highest<AfterStep.NotBelow>(steps), Lowest<AfterStep.NotAbove>(steps));
         if (lower > upper)
@@ -54,11 +61,15 @@ internal static class StepRules
         if (at.Count > 1)
             yield return "There are two thresholds: give one.";
         if (!law.IsLogConcave && !HullScan.Knows(law))
-            yield return Say($"A threshold after {law.GetType().Name} with these parameters is not worked out: its figures have no valid range.");
-        if (Lowest<AfterStep.NotAbove>(steps) < threshold)
-            yield return Say($"Nothing above {Lowest<AfterStep.NotAbove>(steps)} is published, yet the threshold is {threshold}: no figure could pass it.");
-        if (Highest<AfterStep.NotBelow>(steps.Take(place)) >= threshold)
-            yield return Say($"Every value is at least {Highest<AfterStep.NotBelow>(steps.Take(place))} before the threshold {threshold}: leave the threshold out.");
+        {
+            yield return Say($"A threshold after {law.GetType().Name} with these parameters is not worked out: ")
+                + "its figures have no valid range.";
+        }
+        var (lowest, highest) = (Highest<AfterStep.NotBelow>(steps.Take(place)), Lowest<AfterStep.NotAbove>(steps));
+        if (highest < threshold)
+            yield return Say($"Nothing above {highest} is published, yet the threshold is {threshold}: no figure could pass it.");
+        if (lowest >= threshold)
+            yield return Say($"Every value is at least {lowest} before the threshold {threshold}: leave the threshold out.");
         if (step is AfterStep.ZeroBelow && Highest<AfterStep.NotBelow>(steps.Skip(place)) > 0)
             yield return "A lower bound above 0 after the threshold would change the zeros: put it before the threshold.";
         foreach (var fault in ThresholdAndRounding(law, steps, place))
@@ -73,7 +84,10 @@ internal static class StepRules
         foreach (var rounding in roundings)
         {
             if (law is LatticeLaw lattice && !StepChain.IsExact(rounding, lattice))
-                yield return Say($"A threshold together with rounding to {rounding.Unit} on a grid of {lattice.Grid} is not worked out: round to a whole number of grid steps, at most {StepChain.LargestExactUnit}.");
+            {
+                yield return Say($"A threshold together with rounding to {rounding.Unit} on a grid of {lattice.Grid} is not worked out: ")
+                    + Say($"round to a whole number of grid steps, at most {StepChain.LargestExactUnit}.");
+            }
             if (rounding.How is RoundingHow.AtRandom && (law is not LatticeLaw || steps.Skip(place).Contains(rounding)))
                 yield return "A threshold together with random rounding is worked out for lattice laws alone, and only after the rounding.";
         }
@@ -85,6 +99,8 @@ internal static class StepRules
         AfterStep.PublishedFrom from => from.Threshold,
         _ => null,
     };
+
+    private static bool IsPositive(double value) => double.IsFinite(value) && value > 0;
 
     private static double Highest<T>(IEnumerable<AfterStep> steps)
         where T : AfterStep => steps.OfType<T>().Select(step => BoundOf(step)!.Value).DefaultIfEmpty(double.NegativeInfinity).Max();

@@ -6,10 +6,11 @@ namespace ReleaseKit.Noise.Errors;
 /// Ranges where small values are published as 0 or not at all: the law of the published value given that it passed the threshold, inverted.
 /// </summary>
 /// <remarks>
-/// A value before noise x belongs to the range of y if P(Y ≥ y | passed; x) and P(Y ≤ y | passed; x) are both above β = (1 − c)/2. Each tail
-/// misses with at most β, so among the figures that passed the range holds x in at least c of the cases, for every x. For log-concave noise both
-/// chances move one way as x moves, so that the set is an interval (Lehmann &amp; Romano 2005, Testing Statistical Hypotheses, 3.4: monotone
-/// likelihood ratio, kept by conditioning on a half-line; numbering from memory). For other laws the hull of the set is taken, which holds x too.
+/// A value before noise x belongs to the range of y if P(Y ≥ y | passed; x) and P(Y ≤ y | passed; x) are both above β = (1 − c)/2. Each
+/// tail misses with at most β, so among the figures that passed the range holds x in at least c of the cases, for every x. For log-concave
+/// noise both chances move one way as x moves, so that the set is an interval (Lehmann &amp; Romano 2005, Testing Statistical Hypotheses,
+/// 3.4: monotone likelihood ratio, kept by conditioning on a half-line; numbering from memory). For other laws the hull of the set is
+/// taken, which holds x too.
 /// </remarks>
 internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
 {

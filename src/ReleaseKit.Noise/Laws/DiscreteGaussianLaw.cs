@@ -3,19 +3,21 @@ using MathNet.Numerics;
 namespace ReleaseKit.Noise.Laws;
 
 /// <summary>
-/// The discrete Gaussian law: P(K = k) ∝ e^(−k²/2s²) on all whole numbers, s = σ ÷ grid. σ is the parameter; the standard deviation is a little
-/// smaller for s below about 1. Canonne, Kamath &amp; Steinke 2020, The discrete Gaussian for differential privacy, Definition 1 (numbering from memory).
+/// The discrete Gaussian law: P(K = k) ∝ e^(−k²/2s²) on all whole numbers, s = σ ÷ grid. σ is the parameter; the standard deviation is a
+/// little smaller for s below about 1. Canonne, Kamath &amp; Steinke 2020, The discrete Gaussian for differential privacy, Definition 1
+/// (numbering from memory).
 /// </summary>
 /// <remarks>
-/// Narrow laws (s &lt; 8) are summed term by term. For wide ones the normaliser is s√(2π) to 1e-500 (Poisson summation) and a tail sum is its
-/// integral from half a step before with six terms of the Euler–Maclaurin midpoint formula; the rest is below 1e-19 absolute, and
+/// Narrow laws (s &lt; 8) are summed term by term. For wide ones the normaliser is s√(2π) to 1e-500 (Poisson summation) and a tail sum is
+/// its integral from half a step before with six terms of the Euler–Maclaurin midpoint formula; the rest is below 1e-19 absolute, and
 /// below 1e-9 relative out to ten sigmas.
 /// </remarks>
 public sealed record DiscreteGaussianLaw : LatticeLaw
 {
     private const double Wide = 8;
 
-    // (−1)^j times the coefficients of the midpoint formula, −B₂ⱼ(½)/(2j)!: 1/24, 7/5760, 31/967680, … (Abramowitz & Stegun 1964, 23.1; from memory).
+    // (−1)^j times the coefficients of the midpoint formula, −B₂ⱼ(½)/(2j)!: 1/24, 7/5760, 31/967680, … (Abramowitz & Stegun 1964, 23.1;
+    // from memory).
     private static readonly double[] Midpoint =
     [
         -1.0 / 24, 7.0 / 5760, -31.0 / 967680, 127.0 / 154828800, -73.0 / 3503554560, 1414477.0 / 2678117105664000,

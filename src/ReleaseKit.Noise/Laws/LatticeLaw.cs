@@ -1,6 +1,7 @@
 namespace ReleaseKit.Noise.Laws;
 
-/// <summary>A noise law on the multiples of a grid g: N = g·K with an integer step K. Symmetric about 0 unless the law says otherwise.</summary>
+/// <summary>A noise law on the multiples of a grid g: N = g·K with an integer step K. Symmetric about 0 unless the law says
+/// otherwise.</summary>
 public abstract record LatticeLaw : NoiseLaw
 {
     private protected LatticeLaw(double grid) => Grid = Require.Positive(grid, nameof(grid), "the unit of the figure");
@@ -53,7 +54,10 @@ public abstract record LatticeLaw : NoiseLaw
     public override HalfWidth HalfWidthAt(Coverage coverage)
     {
         if (!coverage.IsReachedBy(WithinSteps(Lattice.Farthest)))
-            throw new ArgumentOutOfRangeException(nameof(coverage), coverage, "The law lacks so much mass that no half-width reaches the coverage.");
+        {
+            throw new ArgumentOutOfRangeException(
+                nameof(coverage), coverage, "The law lacks so much mass that no half-width reaches the coverage.");
+        }
         var steps = SmallestStep(candidate => coverage.IsReachedBy(WithinSteps(candidate)));
         return new HalfWidth(steps * Grid, WithinSteps(steps));
     }

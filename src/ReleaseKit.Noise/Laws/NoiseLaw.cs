@@ -2,7 +2,8 @@ namespace ReleaseKit.Noise.Laws;
 
 /// <summary>
 /// The probability law of the noise N added to one cell, in the figure's unit. Immutable and safe to share between threads;
-/// two laws of the same kind with the same parameters are equal. Every law is either a <see cref="LatticeLaw"/> or a <see cref="ContinuousLaw"/>.
+/// two laws of the same kind with the same parameters are equal. Every law is either a <see cref="LatticeLaw"/> or a
+/// <see cref="ContinuousLaw"/>.
 /// </summary>
 public abstract record NoiseLaw
 {
@@ -17,8 +18,8 @@ public abstract record NoiseLaw
     public abstract double MeanAbsoluteDeviation { get; }
 
     /// <summary>
-    /// Whether the logarithm of the density or pmf is concave, so that the chance of a value given that a threshold was passed moves one way only
-    /// as the value before noise moves.
+    /// Whether the logarithm of the density or pmf is concave, so that the chance of a value given that a threshold was passed moves one
+    /// way only as the value before noise moves.
     /// </summary>
     internal abstract bool IsLogConcave { get; }
 
@@ -38,7 +39,8 @@ public abstract record NoiseLaw
     /// The smallest w ≥ 0 with P(|N| ≤ w) ≥ c, and the coverage it attains. A lattice law answers with a multiple of its grid;
     /// the decision is taken at P ≥ c − 1e-12, so that a tie is decided alike everywhere.
     /// </summary>
-    /// <exception cref="ArgumentOutOfRangeException">A tabulated law lacks so much mass that no half-width reaches the coverage.</exception>
+    /// <exception cref="ArgumentOutOfRangeException">A tabulated law lacks so much mass that no half-width reaches the
+    /// coverage.</exception>
     public abstract HalfWidth HalfWidthAt(Coverage coverage);
 
     /// <summary>The density or pmf at an offset ÷ its largest value, in [0, 1]; a lattice law is drawn at the nearest step.</summary>

@@ -2,8 +2,8 @@ namespace ReleaseKit.Noise.Laws;
 
 /// <summary>
 /// The staircase law: a density of steps, a on [0, γΔ), a·e^−ε on [γΔ, Δ), times e^(−kε) on [kΔ, (k + 1)Δ), symmetric,
-/// with a = (1 − e^−ε) ÷ (2Δ(γ + e^−ε(1 − γ))). Geng &amp; Viswanath 2014, The optimal mechanism in differential privacy (equation from memory;
-/// the reference values integrate it to 1).
+/// with a = (1 − e^−ε) ÷ (2Δ(γ + e^−ε(1 − γ))). Geng &amp; Viswanath 2014, The optimal mechanism in differential privacy (equation from
+/// memory; the reference values integrate it to 1).
 /// </summary>
 public sealed record StaircaseLaw : ContinuousLaw
 {

@@ -46,9 +46,11 @@ public sealed record TabulatedLaw : LatticeLaw
     private double Peak { get; }
 
     /// <summary>The law of a table.</summary>
-    /// <param name="rows">Steps (multiples of the grid, each once, at most 2⁵² either way) and their chances ≥ 0, which add up to more than 0 and at most 1.</param>
+    /// <param name="rows">Steps (multiples of the grid, each once, at most 2⁵² either way) and their chances ≥ 0, which add up to more than
+    /// 0 and at most 1.</param>
     /// <param name="grid">g &gt; 0, finite, in the unit of the figure.</param>
-    /// <exception cref="ArgumentException">A step stands twice, a chance is negative, or the chances add up to 0 or to more than 1.</exception>
+    /// <exception cref="ArgumentException">A step stands twice, a chance is negative, or the chances add up to 0 or to more than
+    /// 1.</exception>
     public static TabulatedLaw Of(IEnumerable<(long Step, decimal Probability)> rows, double grid = 1)
     {
         var sorted = rows.OrderBy(row => row.Step).ToList();
@@ -92,8 +94,9 @@ public sealed record TabulatedLaw : LatticeLaw
             return $"Step {rows.First(row => row.Probability < 0).Step} has a negative chance: a chance lies from 0 to 1.";
         if (rows.Any(row => row.Step is < -Lattice.Exact or > Lattice.Exact))
             return "A step lies beyond 2^52 either way: choose a coarser grid.";
-        if (rows.Zip(rows.Skip(1)).Any(pair => pair.First.Step == pair.Second.Step))
-            return $"Step {rows.Zip(rows.Skip(1)).First(pair => pair.First.Step == pair.Second.Step).First.Step} stands twice: add its chances.";
+        var twice = rows.CountBy(row => row.Step).Where(step => step.Value > 1).ToList();
+        if (twice.Count > 0)
+            return $"Step {twice[0].Key} stands twice: add its chances.";
         var total = rows.Sum(row => row.Probability);
         return total is > 0 and <= 1 ? null : $"The chances add up to {total}: they must add up to more than 0 and at most 1.";
     }

@@ -1,8 +1,8 @@
 namespace ReleaseKit.Noise.Laws;
 
 /// <summary>
-/// The discrete Laplace law held to −A..A and renormalised: P(K = k) = a^|k|·(1 − a)/(1 + a − 2a^(A+1)) with a = e^(−1/t), t = scale ÷ grid,
-/// A = cutoff ÷ grid. Derived from the law of Ghosh, Roughgarden &amp; Sundararajan 2012 by conditioning on |K| ≤ A.
+/// The discrete Laplace law held to −A..A and renormalised: P(K = k) = a^|k|·(1 − a)/(1 + a − 2a^(A+1)) with a = e^(−1/t), t = scale ÷
+/// grid, A = cutoff ÷ grid. Derived from the law of Ghosh, Roughgarden &amp; Sundararajan 2012 by conditioning on |K| ≤ A.
 /// </summary>
 public sealed record TruncatedDiscreteLaplaceLaw : LatticeLaw
 {
@@ -47,7 +47,8 @@ public sealed record TruncatedDiscreteLaplaceLaw : LatticeLaw
 
     private protected override double TailFrom(long step) => step > farthest ? 0 : Power(step) * Fall(farthest - step + 1) / whole;
 
-    // Σ k·a^k and Σ k²·a^k over 1..A by doubling the number of terms, all of them positive, so that no digits are lost for any scale and cutoff.
+    // Σ k·a^k and Σ k²·a^k over 1..A by doubling the number of terms, all of them positive, so that no digits are lost for any scale and
+    // cutoff.
     private (double MeanAbsolute, double Variance) Moments()
     {
         var (n, s0, s1, s2) = (0L, 0.0, 0.0, 0.0);

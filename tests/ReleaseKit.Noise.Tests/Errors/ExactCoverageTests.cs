@@ -5,23 +5,26 @@ using ReleaseKit.Noise.Tests.Simulation;
 namespace ReleaseKit.Noise.Tests.Errors;
 
 /// <summary>
-/// The promise of every lattice law with every after-step at every value before noise in a window around zero, the bounds and the thresholds,
-/// summed over all noise steps: no sampling, so any shortfall shows.
+/// The promise of every lattice law with every after-step at every value before noise in a window around zero, the bounds and the
+/// thresholds, summed over all noise steps: no sampling, so any shortfall shows.
 /// </summary>
 public sealed class ExactCoverageTests
 {
     private const double Rounding = 1e-11;
 
     private static readonly string[] Symmetric =
-        ["discrete-laplace:4", "discrete-laplace:0.4", "discrete-gaussian:9.5", "discrete-gaussian:0.3", "discrete-uniform:10", "discrete-laplace-truncated:3:12"];
+    [
+        "discrete-laplace:4", "discrete-laplace:0.4", "discrete-gaussian:9.5", "discrete-gaussian:0.3", "discrete-uniform:10",
+        "discrete-laplace-truncated:3:12",
+    ];
 
     private static readonly double[] Shares = [0.5, 0.95, 0.99];
 
     public static TheoryData<string, string, double> Plain =>
-        [.. from law in Symmetric.Append("tabulated") from steps in Steps.WithoutThreshold.Keys from share in Shares select (law, steps, share)];
+        Cases("tabulated", Steps.WithoutThreshold.Keys);
 
     public static TheoryData<string, string, double> Thresholds =>
-        [.. from law in Symmetric.Append("tabulated whole") from steps in Steps.WithThreshold.Keys from share in Shares select (law, steps, share)];
+        Cases("tabulated whole", Steps.WithThreshold.Keys);
 
     [Theory, MemberData(nameof(Plain))]
     public void Margin_is_the_smallest_that_holds_at_every_value(string lawName, string stepsName, double share)
@@ -70,6 +73,9 @@ public sealed class ExactCoverageTests
                 Assert.True(exact.Chance(x, y => !Passed(y)) <= coverage.Rest / 2 + Rounding, $"{x}");
         }
     }
+
+    private static TheoryData<string, string, double> Cases(string table, IEnumerable<string> chains) =>
+        [.. from law in Symmetric.Append(table) from steps in chains from share in Shares select (law, steps, share)];
 
     private static (ExactCoverage Exact, FigureError Error, AfterStep[] Steps) Of(string lawName, string stepsName)
     {

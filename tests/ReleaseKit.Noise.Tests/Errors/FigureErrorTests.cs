@@ -3,7 +3,8 @@ using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Noise.Tests.Errors;
 
-/// <summary>Ranges of single figures. The examples for sigma 9.5 are those of the design of the release (derived, worked out there by hand).</summary>
+/// <summary>Ranges of single figures. The examples for sigma 9.5 are those of the design of the release (derived, worked out there by
+/// hand).</summary>
 public sealed class FigureErrorTests
 {
     private static Coverage C95 { get; } = Coverage.OfShare(0.95);

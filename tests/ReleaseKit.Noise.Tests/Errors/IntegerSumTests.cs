@@ -3,7 +3,8 @@ using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Noise.Tests.Errors;
 
-/// <summary>The rows of tests/reference/sums.csv (mpmath, characteristic function; see its README): integer laws, weights 1 and −1.</summary>
+/// <summary>The rows of tests/reference/sums.csv (mpmath, characteristic function; see its README): integer laws, weights 1 and
+/// −1.</summary>
 public sealed class IntegerSumTests
 {
     public static TheoryData<int> Lines => [.. Rows.Select(row => row.Line)];

@@ -32,7 +32,8 @@ public sealed class LikelihoodRatioTests
         double Ratio(int outcome) => law.Probability(outcome - x) / law.Probability(Math.Min(0, outcome));
         var ratio = Ratio(y) * (1 + 1e-11);
         var reach = (int)law.StepsBeyondWhich(1e-13);
-        return Enumerable.Range(x - reach, 2 * reach + 1).Where(outcome => Ratio(outcome) > ratio).Sum(outcome => law.Probability(outcome - x)) < share - 1e-12;
+        var above = Enumerable.Range(x - reach, 2 * reach + 1).Where(outcome => Ratio(outcome) > ratio);
+        return above.Sum(outcome => law.Probability(outcome - x)) < share - 1e-12;
     }
 
     [Fact]

@@ -42,7 +42,8 @@ public sealed class StepRulesTests
     [Fact]
     public void Several_faults_are_listed_at_once()
     {
-        var fault = Assert.Throws<ArgumentException>(() => FigureError.Of(DiscreteLaplaceLaw.Of(4), new NotBelow(3), new RoundTo(5), new ZeroBelow(-1)));
+        var fault = Assert.Throws<ArgumentException>(
+            () => FigureError.Of(DiscreteLaplaceLaw.Of(4), new NotBelow(3), new RoundTo(5), new ZeroBelow(-1)));
         Assert.Contains("The bound 3", fault.Message, StringComparison.Ordinal);
         Assert.Contains("Zero below -1", fault.Message, StringComparison.Ordinal);
     }
@@ -78,7 +79,8 @@ public sealed class StepRulesTests
     [Fact]
     public void Decimals_of_the_file_after_a_coarser_rounding_change_nothing()
     {
-        var (coarse, both) = (FigureError.Of(LaplaceLaw.Of(4), new RoundTo(5)), FigureError.Of(LaplaceLaw.Of(4), new RoundTo(5), new RoundTo(0.01)));
+        var law = LaplaceLaw.Of(4);
+        var (coarse, both) = (FigureError.Of(law, new RoundTo(5)), FigureError.Of(law, new RoundTo(5), new RoundTo(0.01)));
         Assert.Equal(coarse.MarginAt(Coverage.OfShare(0.95)), both.MarginAt(Coverage.OfShare(0.95)));
     }
 

@@ -5,7 +5,8 @@ using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Noise.Tests.Laws;
 
-/// <summary>What holds for every law and every parameter, over generated cases; and the laws that MathNet.Numerics has, against it.</summary>
+/// <summary>What holds for every law and every parameter, over generated cases; and the laws that MathNet.Numerics has, against
+/// it.</summary>
 public sealed class LawPropertyTests
 {
     private static readonly Gen<double> Scale = Gen.Double[-2, 6].Select(exponent => Math.Pow(10, exponent));
@@ -50,7 +51,7 @@ public sealed class LawPropertyTests
     });
 
     [Fact]
-    public void Lattice_probabilities_are_the_steps_of_the_distribution_function() => Gen.Select(Law, Gen.Double[-3, 3]).Sample((law, deviations) =>
+    public void Lattice_probabilities_are_steps_of_the_distribution_function() => Gen.Select(Law, Gen.Double[-3, 3]).Sample((law, deviations) =>
     {
         if (law is not LatticeLaw lattice)
             return true;
@@ -59,7 +60,7 @@ public sealed class LawPropertyTests
     });
 
     [Fact]
-    public void Law_on_a_finer_grid_is_the_same_law_in_a_finer_unit() => Gen.Select(Scale, Gen.Double[0.01, 100], Share).Sample((scale, grid, coverage) =>
+    public void Law_on_another_grid_is_the_law_in_another_unit() => Gen.Select(Scale, Gen.Double[0.01, 100], Share).Sample((scale, grid, coverage) =>
         Same(DiscreteLaplaceLaw.Of(scale), DiscreteLaplaceLaw.Of(scale * grid, grid), grid, coverage)
         && Same(DiscreteGaussianLaw.Of(scale), DiscreteGaussianLaw.Of(scale * grid, grid), grid, coverage)
         && Same(LaplaceLaw.Of(scale), LaplaceLaw.Of(scale * grid), grid, coverage)

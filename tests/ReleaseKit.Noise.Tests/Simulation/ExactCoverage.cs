@@ -3,7 +3,8 @@ using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Noise.Tests.Simulation;
 
-/// <summary>How often ranges hold one value before noise, worked out by going through every noise step: the oracle for lattice laws.</summary>
+/// <summary>How often ranges hold one value before noise, worked out by going through every noise step: the oracle for lattice
+/// laws.</summary>
 internal sealed class ExactCoverage(LatticeLaw law, AfterStep[] steps)
 {
     private readonly long farthest = law.StepsBeyondWhich(1e-14);

@@ -3,8 +3,8 @@ using ReleaseKit.Noise.Errors;
 namespace ReleaseKit.Noise.Tests.Simulation;
 
 /// <summary>
-/// What an office does to a noised value, step by step and in decimal arithmetic: written from the meaning of the steps, sharing nothing with the code
-/// under test. Null is "not published".
+/// What an office does to a noised value, step by step and in decimal arithmetic: written from the meaning of the steps, sharing nothing
+/// with the code under test. Null is "not published".
 /// </summary>
 internal static class Publisher
 {

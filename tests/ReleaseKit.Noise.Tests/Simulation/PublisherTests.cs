@@ -9,8 +9,9 @@ public sealed class PublisherTests
     public static TheoryData<AfterStep, double, double?> Cases => new()
     {
         { new RoundTo(5), 12.5, 15 }, { new RoundTo(5), -12.5, -15 }, { new RoundTo(5), 12.4, 10 },
-        { new RoundTo(5, RoundingHow.Nearest, RoundingTies.Up), -12.5, -10 }, { new RoundTo(5, RoundingHow.Nearest, RoundingTies.Even), 12.5, 10 },
-        { new RoundTo(5, RoundingHow.Nearest, RoundingTies.Even), 17.5, 20 }, { new RoundTo(5, RoundingHow.Down), -1, -5 }, { new RoundTo(5, RoundingHow.Up), -4, 0 },
+        { new RoundTo(5, RoundingHow.Nearest, RoundingTies.Up), -12.5, -10 },
+        { new RoundTo(5, RoundingHow.Nearest, RoundingTies.Even), 12.5, 10 }, { new RoundTo(5, RoundingHow.Nearest, RoundingTies.Even), 17.5, 20 },
+        { new RoundTo(5, RoundingHow.Down), -1, -5 }, { new RoundTo(5, RoundingHow.Up), -4, 0 },
         { new NotBelow(3), 2, 3 }, { new NotAbove(3), 4, 3 }, { new ZeroBelow(7), 6, 0 }, { new ZeroBelow(7), 7, 7 },
         { new PublishedFrom(7), 6, null }, { new PublishedFrom(7), 7, 7 },
     };

@@ -58,7 +58,8 @@ internal static class Samplers
         }
     }
 
-    /// <summary>Geng &amp; Viswanath 2014, Algorithm 1 (from memory): a sign, a geometric step, a part of the step, a place in the part.</summary>
+    /// <summary>Geng &amp; Viswanath 2014, Algorithm 1 (from memory): a sign, a geometric step, a part of the step, a place in the
+    /// part.</summary>
     private static double Staircase(StaircaseLaw law, Random random)
     {
         var ratio = Math.Exp(-law.Epsilon);

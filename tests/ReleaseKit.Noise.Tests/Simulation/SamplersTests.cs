@@ -2,7 +2,8 @@ using ReleaseKit.Noise.Laws;
 
 namespace ReleaseKit.Noise.Tests.Simulation;
 
-/// <summary>Samplers against the reference: the share of draws within the reference half-width is its attained coverage (two-sided, level 1e-6).</summary>
+/// <summary>Samplers against the reference: the share of draws within the reference half-width is its attained coverage (two-sided, level
+/// 1e-6).</summary>
 public sealed class SamplersTests
 {
     private const int Trials = 100_000;
@@ -18,8 +19,7 @@ public sealed class SamplersTests
         var row = Rows[line - 2];
         var (law, random, width) = (NamedLaws.Of(row), new Random(line), row.Number("half_width"));
         var hits = Enumerable.Range(0, Trials).Count(_ => Math.Abs(Samplers.Draw(law, random)) <= width);
-        var attained = row.Number("attained");
-        Assert.InRange(hits, BinomialLimits.AcceptFrom(Trials, attained, BinomialLimits.Level / 2), BinomialLimits.AcceptTo(Trials, attained, BinomialLimits.Level / 2));
+        BinomialLimits.AssertTwoSided(hits, Trials, row.Number("attained"));
     }
 
     [Fact]
@@ -28,6 +28,6 @@ public sealed class SamplersTests
         var (law, random) = (TabulatedLaw.Of([(-1, 0.25m), (0, 0.5m), (3, 0.2m)]), new Random(7));
         var counts = Enumerable.Range(0, Trials).Select(_ => Samplers.Draw(law, random)).CountBy(draw => draw).ToDictionary();
         foreach (var (step, chance) in new[] { (-1, 0.25), (0, 0.5), (3, 0.2), (1_000_000, 0.05) })
-            Assert.InRange(counts[step], BinomialLimits.AcceptFrom(Trials, chance, BinomialLimits.Level / 2), BinomialLimits.AcceptTo(Trials, chance, BinomialLimits.Level / 2));
+            BinomialLimits.AssertTwoSided(counts[step], Trials, chance);
     }
 }

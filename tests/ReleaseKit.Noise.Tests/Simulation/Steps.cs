@@ -43,7 +43,8 @@ internal static class Steps
 
     public static IReadOnlyDictionary<string, AfterStep[]> All { get; } = WithoutThreshold.Concat(WithThreshold).ToDictionary();
 
-    /// <summary>The lowest and highest whole value before noise that respect the bounds among the steps, within a window wide enough for every case here.</summary>
+    /// <summary>The lowest and highest whole value before noise that respect the bounds among the steps, within a window wide enough for
+    /// every case here.</summary>
     public static (int Lowest, int Highest) ValuesBeforeNoise(IReadOnlyList<AfterStep> steps) => (
         (int)steps.OfType<NotBelow>().Select(step => step.Bound).DefaultIfEmpty(-25).Max(),
         (int)steps.OfType<NotAbove>().Select(step => step.Bound).DefaultIfEmpty(60).Min());
