@@ -1,6 +1,7 @@
 using Markdig.Syntax;
 using Markdig.Syntax.Inlines;
 using ReleaseKit.Pages.Prose;
+using ReleaseKit.Reading;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Review.Prose;
@@ -21,7 +22,8 @@ internal sealed class ProseLinkCheck : IReviewCheck
             AutolinkInline { IsEmail: false } address => CheckDestination(address.Url, PlaceOf(address, page), release, resolves),
             _ => null,
         })
-        .OfType<Finding>();
+        .OfType<Finding>()
+        .Take(FindingLog.MostOfAKind);
 
     private static Finding? CheckLink(LinkInline link, ProsePage page, Release release, bool resolves)
     {

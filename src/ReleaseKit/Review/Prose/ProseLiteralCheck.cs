@@ -1,7 +1,9 @@
+using System.Collections;
 using System.Text.RegularExpressions;
 using Markdig.Syntax;
 using Markdig.Syntax.Inlines;
 using ReleaseKit.Pages.Prose;
+using ReleaseKit.Reading;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Review.Prose;
@@ -13,25 +15,32 @@ internal sealed partial class ProseLiteralCheck : IReviewCheck
 
     private static IEnumerable<Finding> CheckPage(ProsePage page)
     {
-        var understood = Understood(ProseDocument.Parse(page.Markdown)).ToList();
-        bool IsLiteral(int at) => !understood.Any(span => at >= span.Start && at <= span.End);
-        var links = LiteralLink.Matches(page.Markdown).Where(match => IsLiteral(match.Index))
+        var understood = Understood(page.Markdown);
+        var links = LiteralLink.Matches(page.Markdown).Where(match => !understood[match.Index]).Take(FindingLog.MostOfAKind)
             .Select(match => ProseProblems.LiteralLink(PlaceOf(match.Index, page), FindingOwner.Writer));
-        var html = Tag.Matches(page.Markdown).Where(match => IsLiteral(match.Index))
+        var html = Tag.Matches(page.Markdown).Where(match => !understood[match.Index]).Take(FindingLog.MostOfAKind)
             .Select(match => ProseProblems.Html(PlaceOf(match.Index, page), match.Value, FindingOwner.Writer));
         return links.Concat(html).Concat(Hidden(page));
     }
 
     private static IEnumerable<Finding> Hidden(ProsePage page) => page.Markdown
         .Select((letter, index) => (letter, index))
-        .Where(pair => pair.letter is not ('\n' or '\r' or '\t') && Reading.Keys.HiddenCharacters.IsOne(pair.letter))
+        .Where(pair => pair.letter is not ('\n' or '\r' or '\t') && ReleaseKit.Reading.Keys.HiddenCharacters.IsOne(pair.letter))
         .Take(1)
         .Select(pair => ProseProblems.HiddenCharacter(PlaceOf(pair.index, page), pair.letter, FindingOwner.Writer));
 
-    /// <summary>The parts of the text that links, images and code take up.</summary>
-    private static IEnumerable<SourceSpan> Understood(MarkdownDocument document) =>
-        document.Descendants<Inline>().Where(inline => inline is LinkInline or AutolinkInline or CodeInline).Select(inline => inline.Span)
+    /// <summary>For each character, whether it belongs to a link, an image or code.</summary>
+    private static BitArray Understood(string markdown)
+    {
+        var document = ProseDocument.Parse(markdown);
+        var spans = document.Descendants<Inline>().Where(inline => inline is LinkInline or AutolinkInline or CodeInline).Select(inline => inline.Span)
             .Concat(document.Descendants<CodeBlock>().Select(block => block.Span));
+        var understood = new BitArray(markdown.Length);
+        foreach (var span in spans)
+            for (var at = Math.Max(span.Start, 0); at <= span.End && at < markdown.Length; at++)
+                understood[at] = true;
+        return understood;
+    }
 
     private static Place PlaceOf(int index, ProsePage page)
     {
