@@ -10,7 +10,7 @@ namespace ReleaseKit.Privacy.Losses;
 /// </summary>
 internal sealed class DiscreteLaplaceLoss(DiscreteLaplaceLaw law) : LatticeLoss(law)
 {
-    private const int Orders = 400;
+    private const int Orders = 64;
 
     public override string Source => "Ghosh, Roughgarden & Sundararajan 2012";
 

@@ -156,7 +156,7 @@ public sealed class ManyCellsTests
                     Assert.True(one.Pure.Upper.Value <= more.Pure.Upper.Value * (1 + 1e-12));
                 }
             }
-        }, iter: 300, seed: "0000KOJ4fUr2");
+        }, iter: 120, seed: "0000KOJ4fUr2");
 
     [Fact]
     public void Lower_bounds_never_exceed_upper_ones_nor_does_replacing_cost_less_than_adding() =>
@@ -172,7 +172,7 @@ public sealed class ManyCellsTests
                 Assert.True(added.Pure.Lower.Value <= added.Pure.Upper.Value * (1 + 1e-12));
                 Assert.True(added.DeltaAt(Epsilon.Of(0.5)).Lower <= added.DeltaAt(Epsilon.Of(0.5)).Upper);
             }
-        }, iter: 200, seed: "0000KOJ4fUr2");
+        }, iter: 80, seed: "0000KOJ4fUr2");
 
     private static MechanismLoss Loss(UnitContribution unit, NeighbourRelation relation, double scale, double other, int count) =>
         MechanismLoss.Of([new NoisedCells(DiscreteLaplaceLaw.Of(scale), count), new NoisedCells(DiscreteLaplaceLaw.Of(other), 2)], unit, relation);

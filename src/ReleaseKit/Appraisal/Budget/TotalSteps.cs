@@ -1,5 +1,6 @@
 using ReleaseKit.Privacy;
 using ReleaseKit.Privacy.Composition;
+using ReleaseKit.Privacy.Losses;
 using ReleaseKit.Privacy.Meaning;
 
 namespace ReleaseKit.Appraisal.Budget;

@@ -1,4 +1,5 @@
 using System.Globalization;
+using ReleaseKit.Privacy.Losses;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Review.Budget;
@@ -18,7 +19,7 @@ internal static class BudgetText
         return (Math.Ceiling((decimal)loss / unit) * unit / 1.000000000000000000000000000m).ToString("0.####################", CultureInfo.InvariantCulture);
     }
 
-    public static string Plain(double number) => number.ToString("G12", CultureInfo.InvariantCulture);
+    public static string Plain(double number) => Signs.Of(number);
 
     /// <summary>"Sigma 9.5", "Scale from column \"owed_scale\"".</summary>
     public static string Law(Mechanism mechanism) => mechanism.Law switch

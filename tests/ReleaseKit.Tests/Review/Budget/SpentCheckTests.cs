@@ -96,7 +96,7 @@ public sealed class SpentCheckTests
         using var folder = new TestFolder();
         folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"");
         folder.WithLit("""{ "id": "lamps-lit", "law": "gaussian", "sigma": 5, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0.5, "delta": 1e-6 } }""");
-        Assert.Contains("\"lamps-lit\" declares epsilon 0.5 at delta 1E-06", folder.Text("spent-too-low"), StringComparison.Ordinal);
+        Assert.Contains("\"lamps-lit\" declares epsilon 0.5 at delta 0.000001", folder.Text("spent-too-low"), StringComparison.Ordinal);
         folder.Edit("mechanisms.json", "\"epsilon\": 0.5", "\"epsilon\": 0.9");
         folder.HasNo("spent-too-low");
     }
