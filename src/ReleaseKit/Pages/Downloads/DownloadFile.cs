@@ -8,6 +8,11 @@ namespace ReleaseKit.Pages.Downloads;
 /// <param name="Kind">Last part of the key that says what it is for.</param>
 internal sealed partial record DownloadFile(string Path, int? Table, string Kind)
 {
+    // The order in which a table's files are offered.
+    private static readonly string[] Order = ["wide", "long", "coverage", "lines", "columns"];
+
+    public int Place => Array.IndexOf(Order, Kind);
+
     public static DownloadFile Of(SiteContext context, string path)
     {
         var name = System.IO.Path.GetFileName(path);

@@ -20,7 +20,7 @@ internal static class DownloadsPage
         {
             ["title"] = context.In(table.Title),
             ["href"] = Link.From(head.Path, context.Pages.FirstPageOf(index)),
-            ["files"] = Rows(context, site, files.Where(file => file.Table == index)),
+            ["files"] = Rows(context, site, files.Where(file => file.Table == index).OrderBy(file => file.Place)),
         }));
         model["others"] = Rows(context, site, files.Where(file => file.Table is null));
         var images = site.Written.Where(path => path.StartsWith(Images, StringComparison.Ordinal)).Select(path => DownloadFile.Of(context, path));

@@ -18,6 +18,7 @@ internal static class MethodsPage
         model["downloads"] = Link.From(head.Path, PageMap.Downloads);
         model["release_title"] = context.In(context.Release.Title);
         model["definition"] = new RawHtml(Formula.ToHtml(context.Language.Text("methods.definition.means")));
+        model["odds"] = new RawHtml(Formula.ToHtml(context.Language.Text("methods.odds.means")));
         model["office"] = context.Release.Publisher.Name;
         AddGuarantee(model, context);
         AddCoverages(model, context);
