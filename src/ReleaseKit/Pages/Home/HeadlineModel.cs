@@ -9,6 +9,10 @@ namespace ReleaseKit.Pages.Home;
 /// <summary>A headline as the home page's template sees it.</summary>
 internal static class HeadlineModel
 {
+    // Printed characters up to which a number is set at full size, and up to which at the middle size.
+    private const int Short = 7;
+    private const int Middle = 11;
+
     public static ScriptObject Of(SiteContext context, Headline headline, bool isLeading)
     {
         var language = context.Language;
@@ -19,6 +23,7 @@ internal static class HeadlineModel
             ["meaning"] = headline.Meaning is { } meaning ? context.In(meaning) : null,
             ["href"] = Link.From(PageMap.Home, context.Pages.Of(figure.Ref)),
             ["number"] = new RawHtml(figure.HasNumber ? FigureHtml.Number(figure, language) : HtmlText.Encode(FigureHtml.Status(figure, language))),
+            ["size"] = SizeOf(language.Number(ValueOf(figure))),
             ["unit"] = figure.HasNumber ? PluralCategory.Form(figure.Measure.Unit, language.Tag, ValueOf(figure)) : "",
             ["margin"] = figure.HasNumber ? FigureHtml.Margin(figure, language) : "",
             ["lozenge"] = new RawHtml(FigureHtml.Lozenge(figure, language)),
@@ -26,6 +31,14 @@ internal static class HeadlineModel
             ["sentences"] = Sentences(language.ReadingOf(figure), figure),
         };
     }
+
+    /// <summary>Long numbers are set smaller, so that they stay in their column and on a phone.</summary>
+    private static string SizeOf(string number) => number.Length switch
+    {
+        <= Short => "",
+        <= Middle => " is-long",
+        _ => " is-longest",
+    };
 
     private static PublishedValue ValueOf(AppraisedFigure figure) => figure.Main?.Printed.Value ?? figure.Value;
 
