@@ -24,7 +24,7 @@ public sealed partial record Assets(string Style)
         foreach (var name in Sheets)
             sheet.Append(File.ReadAllText(Path.Combine(styles, name)));
         sheet.Append(RunningFoot.ToCss(runningFoot));
-        var css = FontAddress().Replace(sheet.ToString(), match => $"url({WriteFont(site, Path.Combine(styles, match.Groups[1].Value))})");
+        var css = FontAddress().Replace(Comment().Replace(sheet.ToString(), ""), match => $"url({WriteFont(site, Path.Combine(styles, match.Groups[1].Value))})");
         return new Assets(WriteNamed(site, "style", ".css", Encoding.UTF8.GetBytes(css)));
     }
 
@@ -41,4 +41,7 @@ public sealed partial record Assets(string Style)
 
     [GeneratedRegex(@"url\((\.\./fonts/[a-z0-9-]+\.woff2)\)")]
     private static partial Regex FontAddress();
+
+    [GeneratedRegex(@"/\*.*?\*/\n?", RegexOptions.Singleline)]
+    private static partial Regex Comment();
 }

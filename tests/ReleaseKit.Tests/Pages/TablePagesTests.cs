@@ -33,7 +33,7 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         foreach (var figure in Figures())
             Assert.Equal(
                 site.Language.ReadingOf(figure).Text,
-                string.Join(' ', page.GetElementById(figure.Id)!.QuerySelectorAll(".says p").Select(paragraph => paragraph.TextContent)));
+                string.Join(' ', page.GetElementById(figure.Id)!.QuerySelectorAll(":scope > p:not(.panel-links)").Select(paragraph => paragraph.TextContent)));
     }
 
     [Fact]

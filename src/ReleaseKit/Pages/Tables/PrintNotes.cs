@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using Scriban.Runtime;
 
 namespace ReleaseKit.Pages.Tables;
 
@@ -16,15 +17,12 @@ internal sealed class PrintNotes(Sheet sheet)
         return noted.Count;
     }
 
-    public void Write(HtmlWriter html)
+    public ScriptArray Model() => new(noted.Select(note => new ScriptObject
     {
-        if (noted.Count == 0)
-            return;
-        html.Raw("<section class=\"print-notes\"><h2>"u8).Text(sheet.Text("tables.print-notes")).Raw("</h2><ol>"u8);
-        foreach (var (name, figure) in noted)
-            html.Raw("<li><b>"u8).Text(name).Raw(".</b> "u8).Text(figure.Measure.Title.In(sheet.Language.Tag)).Raw(": "u8).Text(sheet.Language.ReadingOf(figure).Text).Raw("</li>\n"u8);
-        html.Raw("</ol></section>\n"u8);
-    }
+        ["name"] = note.Name,
+        ["measure"] = note.Figure.Measure.Title.In(sheet.Language.Tag),
+        ["reading"] = sheet.Language.ReadingOf(note.Figure).Text,
+    }));
 
     // What is special about a whole column (exact, public, amounts capped, noise that mostly leaves a value as it was) its foot says.
     private static bool NeedsNote(AppraisedFigure figure) => figure.Reliability == Reliability.Weak || figure.Case.First is

@@ -29,10 +29,8 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
 
     private void WriteSentences(Wording.Reading reading)
     {
-        html.Raw("<div class=\"says\">"u8);
         WriteParagraph("<p class=\"say\">"u8, Joined(reading, part => part <= ReadingPart.Noise));
         WriteParagraph("<p>"u8, Joined(reading, part => part > ReadingPart.Noise));
-        html.Raw("</div>"u8);
     }
 
     private void WriteParagraph(ReadOnlySpan<byte> start, string text)
@@ -44,7 +42,7 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
     private static string Joined(Wording.Reading reading, Func<ReadingPart, bool> isWanted) =>
         string.Join(' ', reading.Sentences.Where(sentence => isWanted(sentence.Part)).Select(sentence => sentence.Text));
 
-    // End tags that HTML lets one leave out are left out here, where they would stand a thousand times a page.
+    // What HTML lets one leave out is left out here, where it would stand a thousand times a page: end tags, and scopes that follow from the table's form.
     private void WriteRanges(AppraisedFigure figure)
     {
         html.Raw("<table class=\"ranges\"><tr><th>"u8).Text(sheet.Text("tables.ranges"));
@@ -59,7 +57,7 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
 
     private void WriteRangeRow(AppraisedFigure figure, string key, Func<FigureRange, string> text)
     {
-        html.Raw("<tr><th scope=\"row\">"u8).Text(sheet.Text(key));
+        html.Raw("<tr><th>"u8).Text(sheet.Text(key));
         foreach (var range in figure.Ranges)
             html.Raw("<td>"u8).Text(text(range));
     }

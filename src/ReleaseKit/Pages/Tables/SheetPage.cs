@@ -14,8 +14,7 @@ internal static class SheetPage
         using var html = sheet.Site.Open(site, head);
         html.Raw(sheet.Site.Templates.Render("table-head.html", SheetHeadModel.Of(sheet, page)));
         new SheetWriter(sheet, page, PageScales.Of(sheet, rows), drawings, notes, html).Write(rows);
-        html.Raw(sheet.Site.Templates.Render("table-foot.html", SheetFootModel.Of(sheet, page)));
-        notes.Write(html);
+        html.Raw(sheet.Site.Templates.Render("table-foot.html", SheetFootModel.Of(sheet, page, notes)));
         drawings.Write(html);
     }
 
