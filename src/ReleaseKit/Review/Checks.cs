@@ -13,6 +13,7 @@ public static class Checks
         new ProseLiteralCheck(),
         new ProseNameCheck(),
         new HiddenPartCheck(),
+        new ChartCheck(),
         new SpentCheck(),
         new AuthorisedCheck(),
         new AccountingCheck(),

@@ -56,7 +56,14 @@ public sealed class HeadlineCardTests
 
     private static HeadlineWords Words(string title) => new()
     {
-        Title = title, Heavy = "1,", Light = "842", Margin = "± 410", Unit = "households", Ends = ("1,432", "2,252"), Reading = Reading, Source = "Source: An office.",
+        Title = title,
+        Heavy = "1,",
+        Light = "842",
+        Margin = "± 410",
+        Unit = "households",
+        Ends = ("1,432", "2,252"),
+        Reading = Reading,
+        Source = "Source: An office.",
     };
 
     private static MarkSubject Subject(double value, double deviation) => new()

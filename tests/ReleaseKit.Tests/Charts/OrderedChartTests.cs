@@ -1,6 +1,5 @@
 using System.Globalization;
 using System.Xml.Linq;
-using ReleaseKit.Appraisal;
 using ReleaseKit.Charts;
 using ReleaseKit.Charts.Ordered;
 using ReleaseKit.Releases;

@@ -81,7 +81,13 @@ internal sealed class BudgetSample
         Accounting = Currency == LossCurrency.Rho ? Accounting.Concentrated : Accounting.Pure,
         Authorised = new Authorised
         {
-            Epsilon = 6, Delta = 1e-9, By = "The Registrar", On = new DateOnly(2031, 9, 4), Paper = "NOPF/2031/7", Unspent = "lapses", At = new Place("mechanisms.json"),
+            Epsilon = 6,
+            Delta = 1e-9,
+            By = "The Registrar",
+            On = new DateOnly(2031, 9, 4),
+            Paper = "NOPF/2031/7",
+            Unspent = "lapses",
+            At = new Place("mechanisms.json"),
         },
         Practice = new Practice("The Registrar's office", "exact integer sampler", null, "same noise kept", null, null, null),
         Mechanisms = [.. Amounts.Select((amount, index) => MechanismOf(index, amount.Level))],

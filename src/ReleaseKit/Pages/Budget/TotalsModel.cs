@@ -17,7 +17,6 @@ internal static class TotalsModel
             ["promise"] = Promise(words),
             ["rows"] = new ScriptArray(Rows(words)),
             ["has_declared"] = statement.Declared is not null,
-            ["conversions"] = new ScriptArray(statement.Conversions.Select(total => Row("budget.total.conversion", total, words, LossPrint.UpTo))),
         };
     }
 
@@ -48,6 +47,8 @@ internal static class TotalsModel
         if (statement.Declared is { } declared)
             yield return Row("budget.total.declared", declared, words, LossPrint.UpTo);
         yield return Row("budget.total.recomputed", statement.Recomputed, words, LossPrint.UpTo);
+        foreach (var conversion in statement.Conversions)
+            yield return Row("budget.total.conversion", conversion, words, LossPrint.UpTo);
         yield return Row("budget.total.smallest", statement.SmallestBound, words, LossPrint.UpTo);
         yield return Row("budget.total.lower", statement.Lower, words, LossPrint.DownTo);
     }
