@@ -61,10 +61,19 @@ internal static class FigureDraftReader
     {
         double? least = kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Share ? 0 : null;
         double? most = kind == MeasureKind.Share ? (inOnes ? 1 : 100) : null;
-        var lowest = keys.Number("lowest", new NumberRange(least is null ? NumberRange.Any.Words : "0 or more", value => NumberRange.Any.Holds(value) && value >= (least ?? double.MinValue), "0")) ?? least;
-        var highest = keys.Number("highest", new NumberRange(FormattableString.Invariant($"above \"lowest\"{(most is null ? "" : $" and at most {most}")}"), value => NumberRange.Any.Holds(value) && value > (lowest ?? double.MinValue) && value <= (most ?? double.MaxValue), "100")) ?? most;
+        var lowest = keys.Number("lowest", AtLeast(least)) ?? least;
+        var highest = keys.Number("highest", Above(lowest, most)) ?? most;
         return (lowest, highest);
     }
+
+    private static NumberRange AtLeast(double? least) => least is not { } bound
+        ? NumberRange.Any
+        : new NumberRange(FormattableString.Invariant($"{bound} or more"), value => value >= bound && value <= NumberRange.Largest, "0");
+
+    private static NumberRange Above(double? lowest, double? most) => new(
+        FormattableString.Invariant($"above \"lowest\"{(most is null ? "" : $" and at most {most}")}"),
+        value => NumberRange.Any.Holds(value) && value > (lowest ?? double.MinValue) && value <= (most ?? double.MaxValue),
+        "100");
 
     private static Unit ReadUnit(ObjectReader keys, IReadOnlyDictionary<string, Unit> units)
     {
