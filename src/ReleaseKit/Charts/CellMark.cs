@@ -8,11 +8,15 @@ namespace ReleaseKit.Charts;
 /// </summary>
 internal sealed class CellMark(MarkSymbols symbols)
 {
-    /// <summary>Definitions that every page with cell marks needs beside its symbols: the stem alone, the zero line, the arrow heads.</summary>
-    public const string Common = "<g id=\"st\"><path class=\"halo\" stroke-width=\"3\" d=\"M0 3.5V22.5\"/><path class=\"stem\" stroke-width=\"1.8\" d=\"M0 3.5V22.5\"/></g>"
-        + "<path id=\"zl\" class=\"zero\" d=\"M0 0V26\"/>"
-        + "<path id=\"al\" class=\"cut\" stroke-width=\"1.6\" d=\"M-3 9L-7 13L-3 17\"/><path id=\"ar\" class=\"cut\" stroke-width=\"1.6\" d=\"M3 9L7 13L3 17\"/>"
-        + "<g id=\"ow\"><line class=\"hair\" x2=\"100%\" y1=\"13\" y2=\"13\"/><line class=\"hair\" y1=\"9\" y2=\"17\"/><line class=\"hair\" x1=\"100%\" x2=\"100%\" y1=\"9\" y2=\"17\"/></g>";
+    /// <summary>
+    /// Definitions that every page with cell marks needs beside its symbols: the stem alone, the zero line, the arrow heads, the line of a scale of its own. Heights in
+    /// per cent, so that they keep to the marks in slots of every height.
+    /// </summary>
+    public const string Common = "<g id=\"st\"><line class=\"halo\" stroke-width=\"3\" y1=\"13.5%\" y2=\"86.5%\"/><line class=\"stem\" stroke-width=\"1.8\" y1=\"13.5%\" y2=\"86.5%\"/></g>"
+        + "<line id=\"zl\" class=\"zero\" y2=\"100%\"/>"
+        + "<g id=\"al\"><line class=\"cut\" stroke-width=\"1.6\" x1=\"-3\" y1=\"35%\" x2=\"-7\" y2=\"50%\"/><line class=\"cut\" stroke-width=\"1.6\" x1=\"-7\" y1=\"50%\" x2=\"-3\" y2=\"65%\"/></g>"
+        + "<g id=\"ar\"><line class=\"cut\" stroke-width=\"1.6\" x1=\"3\" y1=\"35%\" x2=\"7\" y2=\"50%\"/><line class=\"cut\" stroke-width=\"1.6\" x1=\"7\" y1=\"50%\" x2=\"3\" y2=\"65%\"/></g>"
+        + "<g id=\"ow\"><line class=\"hair\" x2=\"100%\" y1=\"50%\" y2=\"50%\"/><line class=\"hair\" y1=\"35%\" y2=\"65%\"/><line class=\"hair\" x1=\"100%\" x2=\"100%\" y1=\"35%\" y2=\"65%\"/></g>";
 
     /// <summary>A symbol narrower than this share of the cell, in per cent, would vanish; it is drawn as wide.</summary>
     private const double Narrowest = 0.1;
