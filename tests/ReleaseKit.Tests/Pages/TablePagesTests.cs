@@ -2,6 +2,8 @@ using System.IO.Compression;
 using AngleSharp.Dom;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Pages;
+using ReleaseKit.Releases;
+using ReleaseKit.Tests.Appraisal;
 using Xunit;
 
 namespace ReleaseKit.Tests.Pages;
@@ -127,6 +129,17 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         Assert.Equal(["All", "Aldermoor", "Cindry"], page.QuerySelectorAll("table.sheet > tbody th[scope=rowgroup] .nm").Select(name => name.TextContent));
         Assert.Equal(4, page.QuerySelectorAll("table.sheet > thead th[scope=colgroup]").Length);
         Assert.Equal(Enumerable.Range(1, 9).Select(number => $"{number}"), page.QuerySelectorAll("table.sheet > tbody .rn").Select(number => number.TextContent));
+    }
+
+    [Fact]
+    public void Totals_that_come_last_head_no_group_and_the_stub_keeps_its_columns()
+    {
+        var release = new SmallRelease().Stub("district", "All", "A", "A", "All").Stub("ward", "All", "a1", "All", "All")
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(2), "40", "41", "42").Build();
+        using var last = TableSite.Of(release);
+
+        Assert.Equal(2, last.Page().QuerySelectorAll("table.sheet > thead th.stub").Length);
+        Assert.Empty(last.Page().QuerySelectorAll("table.sheet.tree, th[scope=rowgroup]"));
     }
 
     [Fact]

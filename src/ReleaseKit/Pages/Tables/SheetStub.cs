@@ -55,7 +55,8 @@ internal sealed class SheetStub
 
     private static bool HasGroupTotals(Table table)
     {
-        if (table.Stub.Count != 2 || table.Stub[1].AllCode < 0)
+        // Rows stand in the order of their labels: a total that is not the first of them would head the next group.
+        if (table.Stub.Count != 2 || table.Stub[1].AllCode != 0)
             return false;
         var rows = Enumerable.Range(0, table.RowCount).ToList();
         var groups = rows.Select(row => table.Stub[0].Codes[row]).ToHashSet();
