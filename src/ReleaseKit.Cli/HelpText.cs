@@ -10,7 +10,7 @@ public static class HelpText
 
         In the order of the work:
           releasekit review FOLDER              what stands in the way, and for whom
-          releasekit compose FOLDER --to SITE   the publication: pages, charts, downloads
+          releasekit compose FOLDER --to SITE   the publication: pages and files
 
         Everywhere:
           --quiet      no progress, only results and stops
