@@ -29,14 +29,14 @@ public sealed class AccessibilityTests(ComposedSample sample, Chromium chromium)
     public async Task Open_panels_have_no_violation()
     {
         var path = sample.Pages.First(page => page.StartsWith("tables/", StringComparison.Ordinal));
-        await using var opened = await chromium.OpenAsync(path, bypassPolicy: true);
+        await using var opened = await chromium.OpenAsync(sample, path, bypassPolicy: true);
         await opened.Page.EvaluateAsync("for (const fold of document.querySelectorAll('details')) fold.open = true");
         Assert.Empty(await RunAsync(opened, path));
     }
 
     private async Task<IEnumerable<string>> ViolationsOf(string path, int width, ColorScheme theme)
     {
-        await using var opened = await chromium.OpenAsync(path, width, theme: theme, bypassPolicy: true);
+        await using var opened = await chromium.OpenAsync(sample, path, width, theme: theme, bypassPolicy: true);
         return await RunAsync(opened, path);
     }
 

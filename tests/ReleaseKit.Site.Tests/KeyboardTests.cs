@@ -41,7 +41,7 @@ public sealed class KeyboardTests(ComposedSample sample, Chromium chromium)
 
     private async Task<IEnumerable<string>> WalkAsync(string path)
     {
-        await using var opened = await chromium.OpenAsync(path, bypassPolicy: true);
+        await using var opened = await chromium.OpenAsync(sample, path, bypassPolicy: true);
         var controls = await opened.Page.EvaluateAsync<int>(CountControls);
         var reached = new HashSet<string>();
         for (var pressed = 0; pressed <= controls; pressed++)

@@ -16,7 +16,7 @@ public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
         var wide = new List<string>();
         foreach (var path in sample.Pages)
         {
-            await using var opened = await chromium.OpenAsync(path, width);
+            await using var opened = await chromium.OpenAsync(sample, path, width);
             var over = await opened.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
             if (over > 0)
                 wide.Add($"{path} is {over} px too wide at {width}");

@@ -13,7 +13,7 @@ public sealed partial class PrintTests(ComposedSample sample, Chromium chromium)
         foreach (var path in sample.Pages.Where(page => page.StartsWith("tables/", StringComparison.Ordinal)))
         {
             using var folder = new TemporaryFolder();
-            await using var opened = await chromium.OpenAsync(path);
+            await using var opened = await chromium.OpenAsync(sample, path);
             var notes = await opened.Page.EvaluateAsync<string[]>("[...document.querySelectorAll('.print-notes li')].map(note => note.textContent)");
             await opened.Page.PdfAsync(new() { Path = folder.In("page.pdf"), PreferCSSPageSize = true, PrintBackground = true, Tagged = true, Outline = true });
             Assert.Matches("Tagged: +yes", ReleaseKitProgram.Start("pdfinfo", [folder.In("page.pdf")]).Output);

@@ -29,7 +29,7 @@ public sealed class ReadingTests(ComposedSample sample, Chromium chromium)
             var id = new HtmlParser().ParseDocument(File.ReadAllText(sample.File(path))).QuerySelector("[data-address]")?.Id;
             if (id is null)
                 continue;
-            await using var opened = await chromium.OpenAsync($"{path}#{id}", script: false);
+            await using var opened = await chromium.OpenAsync(sample, $"{path}#{id}", script: false);
             Assert.True(await opened.Page.Locator($"[id='{id}']").IsVisibleAsync(), $"{path}#{id} does not show");
         }
     }

@@ -12,7 +12,7 @@ public sealed class RequestTests(ComposedSample sample, Chromium chromium)
         var trouble = new List<string>();
         foreach (var path in sample.Pages)
         {
-            await using var opened = await chromium.OpenAsync(path);
+            await using var opened = await chromium.OpenAsync(sample, path);
             await opened.Page.WaitForLoadStateAsync(LoadState.NetworkIdle);
             trouble.AddRange(opened.Foreign.Select(url => $"{path} asks {url}"));
             trouble.AddRange(opened.Missing.Select(file => $"{path} misses {file}"));

@@ -6,7 +6,7 @@ using ReleaseKit.Site.Tests.Fixtures;
 namespace ReleaseKit.Site.Tests.Fixtures;
 
 /// <summary>The distribution's Chromium, started once. Pages are served from the composed folder under a host that exists nowhere else.</summary>
-public sealed class Chromium(ComposedSample sample) : IAsyncLifetime
+public sealed class Chromium : IAsyncLifetime
 {
     public const string Origin = "http://release.test";
     private const string ContentSecurityPolicy = "default-src 'none'; script-src 'self'; style-src 'self'; img-src 'self'; font-src 'self'; base-uri 'none'; form-action 'none'; frame-ancestors 'none'";
@@ -25,7 +25,7 @@ public sealed class Chromium(ComposedSample sample) : IAsyncLifetime
     }
 
     /// <summary>A fresh page at a size and theme; everything it asks for is answered from the site or recorded as foreign.</summary>
-    public async Task<OpenPage> OpenAsync(string path, int width = 1280, int height = 900, ColorScheme theme = ColorScheme.Light, bool script = true, bool bypassPolicy = false)
+    public async Task<OpenPage> OpenAsync(ComposedSample sample, string path, int width = 1280, int height = 900, ColorScheme theme = ColorScheme.Light, bool script = true, bool bypassPolicy = false)
     {
         var context = await browser!.NewContextAsync(new()
         {
@@ -36,7 +36,7 @@ public sealed class Chromium(ComposedSample sample) : IAsyncLifetime
             BypassCSP = bypassPolicy,
         });
         var opened = new OpenPage(context, await context.NewPageAsync());
-        await context.RouteAsync("**/*", route => AnswerAsync(route, opened));
+        await context.RouteAsync("**/*", route => AnswerAsync(route, sample, opened));
         await opened.Page.GotoAsync($"{Origin}/{path}");
         return opened;
     }
@@ -48,7 +48,7 @@ public sealed class Chromium(ComposedSample sample) : IAsyncLifetime
         playwright?.Dispose();
     }
 
-    private Task AnswerAsync(IRoute route, OpenPage opened)
+    private static Task AnswerAsync(IRoute route, ComposedSample sample, OpenPage opened)
     {
         var address = new Uri(route.Request.Url);
         if (address.GetLeftPart(UriPartial.Authority) != Origin)
