@@ -13,7 +13,7 @@ public sealed class RequestTests(ComposedSample sample, Chromium chromium)
         foreach (var path in sample.Pages)
         {
             await using var opened = await chromium.OpenAsync(sample, path);
-            await opened.Page.WaitForLoadStateAsync(LoadState.NetworkIdle);
+            await opened.Page.WaitForLoadStateAsync(LoadState.Load);
             trouble.AddRange(opened.Foreign.Select(url => $"{path} asks {url}"));
             trouble.AddRange(opened.Missing.Select(file => $"{path} misses {file}"));
             trouble.AddRange(opened.Complaints.Select(text => $"{path}: {text}"));

@@ -21,8 +21,8 @@ public static class ChartFigure
             .Append("<figure class=\"chart-figure\"><p class=\"chart-title\" id=\"chart-").Append(HtmlText.Encode(chart.Id)).Append("\">").Append(HtmlText.Encode(title)).Append("</p>")
             .Append(SvgPainter.ForPage(OrderedChart.Wide(figures, type).Drawing, $"chart-{chart.Id}-wide", "chart only-wide", title, words.Description))
             .Append(SvgPainter.ForPage(OrderedChart.Narrow(figures, type).Drawing, $"chart-{chart.Id}-narrow", "chart only-narrow", title, words.Description))
-            .Append("<figcaption>").Append(HtmlText.Encode(string.Join(' ', words.Caption))).Append(Saving(chart, context, page)).Append("</figcaption>")
-            .Append(ChartTable.Html(chart, figures, context, page)).Append("</figure>").ToString();
+            .Append("<figcaption>").Append(HtmlText.Encode(string.Join(' ', words.Caption))).Append(Saving(chart, context, page))
+            .Append(ChartTable.Html(chart, figures, context, page)).Append("</figcaption></figure>").ToString();
     }
 
     private static string Saving(ChartOrder chart, SiteContext context, string page)

@@ -1,5 +1,4 @@
 using ReleaseKit.Appraisal;
-using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 using Xunit;
 

@@ -20,7 +20,7 @@ public sealed class BudgetPageTests
     {
         var page = Read(new BudgetSample());
 
-        var first = page.QuerySelectorAll("main section h2").First();
+        var first = page.QuerySelectorAll("main section h2")[0];
         Assert.Equal("What it means for one household", first.TextContent);
         Assert.Equal(
             "These figures were published exactly. For them there is no limit on what can be learned. All that follows compares two data sets that agree on them.",
