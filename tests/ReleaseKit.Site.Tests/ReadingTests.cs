@@ -1,6 +1,6 @@
-using System.Text.Json;
 using AngleSharp.Dom;
 using AngleSharp.Html.Parser;
+using CsvHelper;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Reading;
 using ReleaseKit.Site.Tests.Fixtures;
@@ -15,13 +15,11 @@ public sealed class ReadingTests(ComposedSample sample, Chromium chromium)
     {
         var inPages = sample.Pages.Where(IsTablePage).SelectMany(ReadingsOf).ToDictionary(reading => reading.Key, reading => reading.Text);
         var figures = Figures().ToList();
-        var inDownloads = Directory.EnumerateFiles(sample.File("downloads"), "*.jsonl").SelectMany(File.ReadLines)
-            .Select(line => JsonDocument.Parse(line).RootElement)
-            .ToDictionary(figure => figure.GetProperty("address").GetString()!, figure => figure.GetProperty("reading").GetString()!);
+        var inDownloads = figures.Select(figure => figure.Table.Id).Distinct().ToDictionary(table => table, ReadingColumnsOf);
         Assert.Equal(figures.Count, inPages.Count);
-        Assert.Equal(figures.Count, inDownloads.Count);
+        Assert.Equal(figures.Count, inDownloads.Values.Sum(rows => rows.Sum(row => row.Count(cell => cell.Value.Length > 0))));
         foreach (var figure in figures)
-            Assert.Equal(inDownloads[figure.Address], inPages[$"{figure.Table.Id}#{figure.Id}"]);
+            Assert.Equal(inDownloads[figure.Table.Id][figure.Row][figure.Measure.Column + "_reading"], inPages[$"{figure.Table.Id}#{figure.Id}"]);
     }
 
     [Fact]
@@ -43,6 +41,16 @@ public sealed class ReadingTests(ComposedSample sample, Chromium chromium)
                from measure in Enumerable.Range(0, release.Tables[table].Measures.Count)
                from row in Enumerable.Range(0, release.Tables[table].RowCount)
                select appraised.Figure(new FigureRef(table, measure, row));
+    }
+
+    /// <summary>For each row of a table's wide CSV, its readings by column.</summary>
+    private List<Dictionary<string, string>> ReadingColumnsOf(string table)
+    {
+        using var csv = CsvReader.FromFile(sample.File($"downloads/{table}.csv"));
+        var rows = new List<Dictionary<string, string>>();
+        while (csv.Read())
+            rows.Add(csv.Headers.Where(column => column.EndsWith("_reading", StringComparison.Ordinal)).ToDictionary(column => column, csv.GetString));
+        return rows;
     }
 
     private static bool IsTablePage(string path) => path.StartsWith("tables/", StringComparison.Ordinal);
