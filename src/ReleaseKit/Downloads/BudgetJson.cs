@@ -26,6 +26,10 @@ internal static class BudgetJson
         json.WriteEndArray();
         json.WriteStartArray("earlier");
         json.WriteEndArray();
+        json.WriteStartArray("exactFigures");
+        foreach (var figures in budget.WithoutNoise.Where(figures => figures.Kind != WithoutNoiseKind.Public))
+            WriteExact(json, release, figures);
+        json.WriteEndArray();
         json.WriteEndObject();
         json.Flush();
         stream.Write("\n"u8);
@@ -59,6 +63,19 @@ internal static class BudgetJson
     {
         if (number is { } given)
             json.WriteNumberOrNull(name, given);
+    }
+
+    /// <summary>Figures that no total of this file covers: where they stand, how many, and why they carry no noise.</summary>
+    private static void WriteExact(Utf8JsonWriter json, Release release, FiguresWithoutNoise figures)
+    {
+        json.WriteStartObject();
+        json.WriteString("table", release.Tables[figures.Table].Id);
+        if (figures.Column.Length > 0)
+            json.WriteString(figures.Measure >= 0 ? "measure" : "column", figures.Column);
+        json.WriteString("kind", JsonNamingPolicy.KebabCaseLower.ConvertName(figures.Kind.ToString()));
+        json.WriteNumber("count", figures.Count);
+        json.WriteString("reason", figures.Reason?.In(release.MainLanguage));
+        json.WriteEndObject();
     }
 
     private static void WriteMechanism(Utf8JsonWriter json, Release release, MechanismAccount account)

@@ -133,9 +133,9 @@ public sealed class OrderedChartTests
     {
         var caption = string.Join(' ', OrderedWords.Of(Figures(Values), Words).Caption);
 
-        Assert.Contains("noise that was added", caption, StringComparison.Ordinal);
+        Assert.Contains("the bar shows how far noise, and rounding where there is any, may have moved it", caption, StringComparison.Ordinal);
         Assert.Contains("at least 95 in 100 lie between such stops", caption, StringComparison.Ordinal);
-        Assert.Contains("Do not rely on the order of neighbours", caption, StringComparison.Ordinal);
+        Assert.Contains("Figures that stand close together may not be separated: noise alone can put them in this order.", caption, StringComparison.Ordinal);
         Assert.Contains("Whether two bars overlap does not show", caption, StringComparison.Ordinal);
     }
 

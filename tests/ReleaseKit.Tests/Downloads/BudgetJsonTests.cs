@@ -10,7 +10,7 @@ public sealed class BudgetJsonTests(SampleDownloads downloads) : IClassFixture<S
 
     [Fact]
     public void Keys_are_those_of_the_record() => Assert.Equal(
-        ["unitOfPrivacy", "neighbouring", "authorised", "declared", "recomputed", "smallestBound", "mechanisms", "earlier"],
+        ["unitOfPrivacy", "neighbouring", "authorised", "declared", "recomputed", "smallestBound", "mechanisms", "earlier", "exactFigures"],
         Budget.EnumerateObject().Select(property => property.Name));
 
     [Fact]
@@ -20,6 +20,15 @@ public sealed class BudgetJsonTests(SampleDownloads downloads) : IClassFixture<S
         Assert.Equal("the year 2031", Budget.GetProperty("unitOfPrivacy").GetProperty("over").GetString());
         Assert.Equal("add-or-remove", Budget.GetProperty("neighbouring").GetString());
         Assert.Empty(Budget.GetProperty("earlier").EnumerateArray());
+    }
+
+    [Fact]
+    public void Figures_that_no_total_covers_are_listed_with_their_reason()
+    {
+        var exact = Assert.Single(Budget.GetProperty("exactFigures").EnumerateArray());
+        Assert.Equal("owed", exact.GetProperty("table").GetString());
+        Assert.Equal("exact", exact.GetProperty("kind").GetString());
+        Assert.Contains("Relief Act", exact.GetProperty("reason").GetString(), StringComparison.Ordinal);
     }
 
     // Summed by hand from the laws of the sample: m/(2σ²) for Gaussian noise, m·ε·tanh(ε/2) at most for the others

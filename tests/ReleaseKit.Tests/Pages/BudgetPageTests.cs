@@ -24,8 +24,39 @@ public sealed class BudgetPageTests
         Assert.Equal("What it means for one household", first.TextContent);
         Assert.Equal(
             "These figures were published exactly. For them there is no limit on what can be learned. All that follows compares two data sets that agree on them.",
-            first.NextElementSibling!.TextContent.Trim());
+            first.NextElementSibling!.NextElementSibling!.TextContent.Trim());
     }
+
+    [Fact]
+    public void Exact_figures_are_named_directly_before_the_sentences_about_them()
+    {
+        var sentences = Read(new BudgetSample()).QuerySelector(".exact-first")!;
+
+        Assert.StartsWith("Published exactly: ", sentences.PreviousElementSibling!.TextContent, StringComparison.Ordinal);
+        Assert.Contains("7 figures", sentences.PreviousElementSibling!.TextContent, StringComparison.Ordinal);
+        Assert.Equal(
+            "Someone who knows what all other households add to such a figure can work out the part of this household to the last digit. The limits below do not cover that.",
+            sentences.NextElementSibling!.TextContent.Trim());
+    }
+
+    [Fact]
+    public void Beside_exact_figures_no_limit_is_said_to_hold_for_the_whole_release()
+    {
+        var page = Read(new BudgetSample());
+
+        const string Beside = "This holds for all figures with noise. The figures published exactly have no limit.";
+        Assert.DoesNotContain("The whole release can", Text(page), StringComparison.Ordinal);
+        Assert.Contains("Apart from the figures published exactly, the release can raise the odds", Text(page), StringComparison.Ordinal);
+        Assert.EndsWith(Beside, page.QuerySelector(".promise")!.TextContent.Trim(), StringComparison.Ordinal);
+        Assert.EndsWith(Beside, page.QuerySelector("#total")!.NextElementSibling!.TextContent.Trim(), StringComparison.Ordinal);
+        Assert.Contains("The whole release can raise the odds", Text(Read(new BudgetSample { WithExactFigures = false })), StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData(Neighbouring.AddOrRemove, "Found at most, of 100 cases where the record was used")]
+    [InlineData(Neighbouring.Replace, "Found at most, of 100 cases where it is the second")]
+    public void Test_table_says_of_which_cases_it_counts(Neighbouring neighbouring, string head) =>
+        Assert.Equal(head, Read(new BudgetSample { Neighbouring = neighbouring }).QuerySelectorAll(".test th.main").Single().TextContent);
 
     [Fact]
     public void Without_exact_figures_their_sentences_are_not_said()
@@ -227,9 +258,9 @@ public sealed class BudgetPageTests
     public void Meaning_can_be_read_at_grade_eight_and_no_sentence_is_long(Neighbouring neighbouring)
     {
         var page = Read(new BudgetSample { Neighbouring = neighbouring });
-        var texts = page.QuerySelectorAll(".meaning .exact-first, .meaning .two > div:first-child").ToList();
+        var texts = page.QuerySelectorAll(".meaning .exact-first, .meaning .exact-sums, .meaning .two > div:first-child").ToList();
 
-        Assert.Equal(3, texts.Count);
+        Assert.Equal(4, texts.Count);
         foreach (var text in texts)
         {
             string[] sentences = [.. text.QuerySelectorAll("p").DefaultIfEmpty(text).SelectMany(part => Sentences(part.TextContent))];

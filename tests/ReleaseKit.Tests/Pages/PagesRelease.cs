@@ -70,6 +70,7 @@ internal static class PagesRelease
             Account = release.Noise,
             Currency = LossCurrency.Rho,
             Spent = 0.0152,
+            Authorised = 1,
             IsWithinAuthorised = true,
             Promise = new LossTotal(null, null, 1, rule),
             Recomputed = total,
@@ -84,7 +85,7 @@ internal static class PagesRelease
                 new BudgetPiece("late-gauss", [0], [new MeasureRef(0, 0)], "", null, 0.0056),
                 new BudgetPiece("paid-laplace", [1], [new MeasureRef(1, 0)], "", null, 0.0096),
             ],
-            WithoutNoise = [],
+            WithoutNoise = [new FiguresWithoutNoise(1, 0, "paid", WithoutNoiseKind.Exact, Words("The law asks for it"), 1)],
             Steps = [],
         };
     }

@@ -21,6 +21,15 @@ public sealed class SiteTests : IDisposable
         Assert.Empty(dead);
     }
 
+    [Fact]
+    public void Beside_exact_figures_methods_and_home_say_what_the_guarantee_and_the_loss_do_not_cover()
+    {
+        var documents = ComposedPages().ToDictionary(page => page.Path, page => page.Document.QuerySelector("main")!.TextContent);
+        Assert.Contains("It covers the figures with noise. The figures published exactly have no limit", documents["methods.html"], StringComparison.Ordinal);
+        Assert.Matches(@"[0-9.]+ of [0-9.]+ authorised, in (rho|epsilon) \(.\), for the figures with noise", documents["index.html"]);
+        Assert.DoesNotContain("The whole release", documents["index.html"], StringComparison.Ordinal);
+    }
+
     private List<(string Path, IDocument Document)> ComposedPages()
     {
         PagesRelease.Compose(PagesRelease.Make(), folder["site"]);

@@ -17,11 +17,16 @@ internal static class MeaningModel
         return new ScriptObject
         {
             ["exact"] = Exact(words),
+            ["exact_sums"] = ExactSums(words),
             ["sentences"] = new ScriptArray(Sentences(meaning, words)),
+            ["beliefs_title"] = words.Say(words.Statement.HasExactFigures ? "budget.beliefs.title.beside-exact" : "budget.beliefs.title"),
             ["beliefs"] = new ScriptArray(meaning.Beliefs.Select((belief, index) => BeliefRow(belief, words.Statement.MeaningOfPromise?.Beliefs[index], words))),
             ["has_promise"] = words.Statement.MeaningOfPromise is not null,
             ["tests"] = new ScriptArray(meaning.Tests.Select(test => TestRow(test, words))),
             ["test_text"] = words.Say(Key("budget.meaning.test", words), ("who", words.One)),
+            ["alarms_head"] = words.Say(Key("budget.test.alarms", words)),
+            ["chance_head"] = words.Say(Key("budget.test.chance", words)),
+            ["most_head"] = words.Say(Key("budget.test.most", words)),
         };
     }
 
@@ -30,7 +35,7 @@ internal static class MeaningModel
     {
         yield return words.Say(Key("budget.meaning.setting", words), ("who", words.One));
         yield return meaning.Odds < MostOdds
-            ? words.Say("budget.meaning.odds", ("odds", words.Language.Number(LossPrint.UpTo(meaning.Odds, DigitsOfOdds))))
+            ? words.Say(OddsKey(words), ("odds", words.Language.Number(LossPrint.UpTo(meaning.Odds, DigitsOfOdds))))
             : words.Say("budget.meaning.odds-huge", ("odds", words.Language.Number(new PublishedValue((long)MostOdds, 0))));
         if (meaning.Beta is { } beta)
             yield return words.Say("budget.meaning.beta", ("beta", Chances.OneIn(beta, words.Language)));
@@ -41,6 +46,18 @@ internal static class MeaningModel
     private static ScriptArray Exact(BudgetWords words) => words.Statement.HasExactFigures
         ? [words.Say("budget.exact.first"), words.Say("budget.exact.second"), words.Say("budget.exact.third")]
         : [];
+
+    /// <summary>What an exact count or sum gives away to someone who knows all other parts of it.</summary>
+    private static string? ExactSums(BudgetWords words) => words.Statement.WithoutNoise.Any(figures => IsExactSum(figures, words.Release))
+        ? words.Say("budget.exact.sums", ("who", words.One), ("others", words.Other))
+        : null;
+
+    private static bool IsExactSum(FiguresWithoutNoise figures, Release release) =>
+        figures is { Kind: WithoutNoiseKind.Exact, Measure: >= 0 }
+        && release.Tables[figures.Table].Measures[figures.Measure].Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount;
+
+    private static string OddsKey(BudgetWords words) =>
+        words.Statement.HasExactFigures ? "budget.meaning.odds.beside-exact" : "budget.meaning.odds";
 
     private static ScriptObject BeliefRow(Belief belief, Belief? promised, BudgetWords words) => new()
     {

@@ -16,6 +16,7 @@ internal static class Contents
             ["tables"] = new ScriptArray(context.Release.Tables.Select((_, index) => Row(context, index, words.Amount(losses.Of(index))))),
             ["shared"] = losses.Shared > 0 ? words.Amount(losses.Shared) : null,
             ["total"] = words.Amount(context.Budget.Spent),
+            ["total_name"] = context.Language.Text(context.Budget.HasExactFigures ? "home.loss.total.beside-exact" : "home.loss.total"),
             ["currency"] = context.Language.Text("home.loss.in", ("currency", words.Currency)),
         };
     }

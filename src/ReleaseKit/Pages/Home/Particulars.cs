@@ -31,7 +31,9 @@ internal static class Particulars
     {
         var words = new BudgetWords(context);
         return context.Budget.Authorised is { } authorised
-            ? context.Language.Text("home.loss.of", ("spent", words.Amount(context.Budget.Spent)), ("authorised", words.Allowance(authorised)))
+            ? context.Language.Text(
+                context.Budget.HasExactFigures ? "home.loss.of.beside-exact" : "home.loss.of",
+                ("spent", words.Amount(context.Budget.Spent)), ("authorised", words.Allowance(authorised)), ("currency", words.Currency))
             : context.Language.Text("home.loss.see");
     }
 }

@@ -35,6 +35,7 @@ internal static class MethodsPage
         var unit = UnitText.One(account.Who, context.Language.Tag);
         model["unit"] = account.Over is { } over ? context.Language.Text("methods.unit.over", ("unit", unit), ("over", context.In(over))) : unit;
         model["one"] = unit;
+        model["has_exact"] = context.Budget.HasExactFigures;
         model["neighbouring"] = account.Neighbouring == Neighbouring.Replace ? "methods.neighbouring.replace" : "methods.neighbouring.add-or-remove";
         model["accounting"] = account.Accounting switch
         {
