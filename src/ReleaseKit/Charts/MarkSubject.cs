@@ -37,13 +37,15 @@ public sealed record MarkSubject
     public static MarkSubject Of(AppraisedFigure figure)
     {
         double factor = figure.Measure.PrintFactor;
+        // Where one value was published for all below a threshold, how likely each of them is does not follow the law around the figure: a line with stops.
+        var error = figure.Ranges.All(range => double.IsFinite(range.UncutLow) && double.IsFinite(range.UncutHigh)) ? figure.Error : null;
         return new()
         {
             Value = factor * figure.Value.ToDouble(),
             Ranges = [.. figure.Ranges.Select(range => RangeOf(range, factor))],
-            Density = figure.Error is { } error ? offset => error.RelativeDensity(offset / factor) : null,
-            Law = figure.Error,
-            Grid = figure.Error?.Law is LatticeLaw law ? law.Grid * factor : 0,
+            Density = error is null ? null : offset => error.RelativeDensity(offset / factor),
+            Law = error,
+            Grid = error?.Law is LatticeLaw law ? law.Grid * factor : 0,
             Weak = figure.Reliability == Reliability.Weak,
             Lowest = figure.Possible.Lowest * factor,
             Highest = figure.Possible.Highest * factor,
@@ -62,7 +64,9 @@ public sealed record MarkSubject
         return share < 1e-9 ? here : here + (share * (Density((step + 1) * Grid) - here));
     }
 
-    // A range of a figure below the possible ends higher than the law alone would have it, so the larger of both ends is drawn.
-    private static MarkRange RangeOf(FigureRange range, double factor) =>
-        new(factor * Math.Min(range.UncutLow, range.Low), factor * Math.Max(range.UncutHigh, range.High));
+    // A range of a figure below the possible ends higher than the law alone would have it, so the larger of both ends is drawn. An end without a limit of its own is
+    // drawn at the limit of the possible.
+    private static MarkRange RangeOf(FigureRange range, double factor) => new(
+        factor * (double.IsFinite(range.UncutLow) ? Math.Min(range.UncutLow, range.Low) : range.Low),
+        factor * (double.IsFinite(range.UncutHigh) ? Math.Max(range.UncutHigh, range.High) : range.High));
 }

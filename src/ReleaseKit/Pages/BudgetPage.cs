@@ -29,6 +29,7 @@ public static class BudgetPage
         model["beside"] = AuthorityModel.Beside(words);
         model["meaning"] = MeaningModel.Of(words);
         model["tally"] = tally;
+        model["nothing_spent"] = words.SpentNothing ? words.WithoutSpending : null;
         model["tally_unlabelled"] = hasUnlabelled;
         model["ledger"] = LedgerModel.Of(words);
         model["totals"] = TotalsModel.Of(words);

@@ -228,6 +228,19 @@ public sealed class BudgetPageTests
         Assert.DoesNotContain("Not spent", page.QuerySelector(".ledger")!.TextContent, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData(LossCurrency.Rho, "The release used nothing in rho (ρ).", false)]
+    [InlineData(LossCurrency.Epsilon, "The release used nothing in epsilon (ε).", true)]
+    public void Release_that_spent_nothing_in_the_currency_says_so_and_draws_no_stick(LossCurrency currency, string words, bool saysDelta)
+    {
+        var page = Read(new BudgetSample { Currency = currency, Amounts = [] });
+
+        Assert.Empty(page.QuerySelectorAll("svg.tally"));
+        Assert.Contains(words, page.QuerySelector("#account")!.ParentElement!.TextContent, StringComparison.Ordinal);
+        Assert.Equal(saysDelta, Text(page).Contains("It used a delta of 0.000000001.", StringComparison.Ordinal));
+        Assert.DoesNotContain("The release used 0", Text(page), StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Every_rule_step_law_and_choice_has_its_words()
     {

@@ -1,6 +1,7 @@
 using System.IO.Compression;
 using AngleSharp.Dom;
 using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Pages;
 using ReleaseKit.Releases;
 using ReleaseKit.Tests.Appraisal;
@@ -215,6 +216,21 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         Assert.Equal(1000, large.Page().QuerySelectorAll(".unfold .panel").Length);
         TestContext.Current.TestOutputHelper?.WriteLine($"200 rows, 5 measures: {bytes} bytes");
         Assert.InRange(bytes, 1, 100 * 1024);
+    }
+
+    [Fact]
+    public void Published_zero_that_stands_for_all_below_a_threshold_is_drawn_as_a_line_without_a_curve()
+    {
+        using var zeros = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South")
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(5, new AfterStep.ZeroBelow(10)), "100", "0").Build());
+
+        var figures = zeros.Page().QuerySelectorAll(".unfold .panel");
+        var bars = zeros.Page().QuerySelectorAll("td.b svg use");
+
+        Assert.Equal([1, 0], figures.Select(panel => panel.QuerySelectorAll("figure").Length));
+        Assert.All(bars, bar => Assert.Matches("^[#a-z0-9]+$", bar.GetAttribute("href")!));
+        Assert.DoesNotContain("NaN", zeros.Html("tables/table/index.html"), StringComparison.Ordinal);
+        Assert.DoesNotContain("∞", zeros.Html("tables/table/index.html"), StringComparison.Ordinal);
     }
 
     private IEnumerable<AppraisedFigure> Figures() =>

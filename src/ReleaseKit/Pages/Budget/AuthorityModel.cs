@@ -20,7 +20,7 @@ internal static class AuthorityModel
             : words.Say("budget.spent.by", ("by", authorised.By ?? words.Release.Publisher.Name), ("promise", promise));
         if (statement.Promise.Epsilon is not null && statement.Currency == Appraisal.LossCurrency.Rho && statement.Authorised is { } converted)
             yield return words.Say("budget.spent.converted", ("amount", words.Allowance(converted)));
-        yield return words.Say("budget.spent.used", ("amount", words.Amount(statement.Spent)));
+        yield return words.SpentNothing ? words.WithoutSpending : words.Say("budget.spent.used", ("amount", words.Amount(statement.Spent)));
         if (words.Left is { } left)
             yield return words.Say("budget.spent.left", ("amount", words.Language.Number(left)));
     }

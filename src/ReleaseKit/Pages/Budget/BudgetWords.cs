@@ -46,6 +46,15 @@ internal sealed class BudgetWords
         ? null
         : Less(LossPrint.Down(authorised, Decimals), LossPrint.Up(Statement.Spent, Decimals));
 
+    /// <summary>Whether no part of the release has a loss in the currency; what it lost may be delta alone.</summary>
+    public bool SpentNothing => Statement.Spent <= 0;
+
+    /// <summary>What was lost where nothing was spent in the currency, in a sentence.</summary>
+    /// <remarks>A delta beside rho is only where its conversion is read off; beside epsilon it is spent.</remarks>
+    public string WithoutSpending => Statement.Currency == LossCurrency.Epsilon && Statement.Recomputed.Delta is { } delta and > 0
+        ? Say("budget.spent.delta-only", ("currency", Currency), ("delta", Language.Number(LossPrint.Delta(delta))))
+        : Say("budget.spent.nothing", ("currency", Currency));
+
     public string Say(string key, params (string Name, string Value)[] fill) => Language.Text(key, fill);
 
     public string TableName(int table) => Say("budget.table-number", ("number", TableNumber(table)));

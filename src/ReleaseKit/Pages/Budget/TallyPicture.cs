@@ -7,8 +7,11 @@ namespace ReleaseKit.Pages.Budget;
 /// <summary>The account as a split tally: lying for wide pages and for paper, upright for narrow ones.</summary>
 internal static class TallyPicture
 {
+    /// <summary>The drawings; none where nothing was spent in the currency, so that there is nothing to cut.</summary>
     public static (string Html, bool HasUnlabelled) Of(BudgetWords words, TypeCase type)
     {
+        if (words.SpentNothing)
+            return ("", false);
         var account = AccountOf(words);
         var (wide, upright, paper) = (WideTally.Of(account, type), UprightTally.Of(account, type), WideTally.Of(account, type, WideTally.PaperWidth));
         var title = words.Say("budget.tally.title");

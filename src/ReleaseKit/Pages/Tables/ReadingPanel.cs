@@ -22,8 +22,8 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
         WriteSentences(sheet.Language.ReadingOf(figure));
         if (figure.Main is not null)
             WriteRanges(figure);
-        if (figure.Main is not null && figure.Error is not null)
-            html.Raw("<figure><figcaption>"u8).Text(sheet.Text("tables.curve")).Raw("</figcaption>"u8).Raw(curves.Draw(figure, MarkSubject.Of(figure), sheet.Language)).Raw("</figure>"u8);
+        if (figure.Main is not null && MarkSubject.Of(figure) is { Density: not null } subject)
+            html.Raw("<figure><figcaption>"u8).Text(sheet.Text("tables.curve")).Raw("</figcaption>"u8).Raw(curves.Draw(figure, subject, sheet.Language)).Raw("</figure>"u8);
         html.Raw("</div></details>"u8);
     }
 
