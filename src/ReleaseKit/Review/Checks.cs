@@ -22,6 +22,9 @@ public static class Checks
         new ExactCountCheck(),
         new UniformNoiseCheck(),
         new OffGridCheck(),
+        new BoundCheck(),
+        new PastStepCheck(),
+        new MultiplierCheck(),
         new ConfidentialColumnCheck(),
         new DeltaCheck(),
     ];

@@ -23,30 +23,22 @@ internal sealed class OffGridCheck : IReviewCheck
     }
 
     // The last rounding decides; without one the grid of the law; a continuous law without rounding has none.
-    private static decimal? GridOf(Mechanism mechanism)
-    {
-        if (mechanism.Afterwards.OfType<AfterStep.RoundTo>().LastOrDefault() is { } rounding)
-            return (decimal)rounding.Unit;
-        return mechanism.Law is LawName.DiscreteLaplace or LawName.DiscreteGaussian or LawName.DiscreteUniform or LawName.TruncatedDiscreteLaplace or LawName.Tabulated
-            ? (decimal)mechanism.Grid
-            : null;
-    }
+    private static decimal? GridOf(Mechanism mechanism) => mechanism.Afterwards.OfType<AfterStep.RoundTo>().LastOrDefault() is { } rounding
+        ? StepGrid.Exactly(rounding.Unit)
+        : StepGrid.OfLaw(mechanism);
 
     private static bool IsOff(Measure measure, int row, Mechanism mechanism, decimal grid)
     {
         if (!measure.HasNumber(row))
             return false;
-        var value = InUnits(measure, measure.ValueAt(row));
+        var value = StepGrid.InUnits(measure, measure.ValueAt(row));
         return value % grid != 0 && !mechanism.Afterwards.Any(step => step switch
         {
-            AfterStep.NotBelow { Bound: var bound } => value == (decimal)bound,
-            AfterStep.NotAbove { Bound: var bound } => value == (decimal)bound,
+            AfterStep.NotBelow { Bound: var bound } => value == StepGrid.Exactly(bound),
+            AfterStep.NotAbove { Bound: var bound } => value == StepGrid.Exactly(bound),
             _ => false,
         });
     }
-
-    private static decimal InUnits(Measure measure, PublishedValue value) =>
-        new decimal(value.Unscaled) / (decimal)PublishedValue.PowerOfTen(value.Decimals) * (decimal)measure.Multiplier;
 
     private static Finding OffGrid(Table table, Measure measure, Mechanism mechanism, decimal grid, List<int> rows)
     {

@@ -164,6 +164,76 @@ public sealed class BudgetCheckTests
     }
 
     [Fact]
+    public void Bound_inside_what_is_possible_is_a_stop_unless_the_release_says_that_it_is_public()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"scale\": 3.0, ", "\"scale\": 3.0, \"afterwards\": [ { \"notAbove\": 50 } ], ");
+        var text = folder.Text("bound-not-respected");
+        Assert.StartsWith("Stop mechanisms.json:8:", text, StringComparison.Ordinal);
+        Assert.Contains("values before noise above 50 are possible in column \"broken\" of table \"lamps\".", text, StringComparison.Ordinal);
+        Assert.Contains("write \"highest\": 50 in the figures \"broken\" of release.json", text, StringComparison.Ordinal);
+        folder.Edit("release.json", "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "\"highest\": 50, \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]");
+        folder.HasNo("bound-not-respected");
+    }
+
+    [Theory]
+    [InlineData("{ \"notBelow\": 100 }", true)]
+    [InlineData("{ \"roundTo\": 5 }, { \"notBelow\": 2 }", true)]
+    [InlineData("{ \"notBelow\": 0 }", false)]
+    [InlineData("{ \"notBelow\": -5 }", false)]
+    public void Bound_is_held_against_what_the_kind_allows(string steps, bool isInside)
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"scale\": 3.0, ", $"\"scale\": 3.0, \"afterwards\": [ {steps} ], ");
+        Assert.Equal(isInside, folder.Review().Any(finding => finding.Slug == "bound-not-respected"));
+    }
+
+    [Theory]
+    [InlineData("{ \"notBelow\": 0 }", "lamps/broken?street=Weir%20Lane is -1, but \"lamps-broken\" says that no figure is below 0.")]
+    [InlineData("{ \"notAbove\": 8 }", "lamps/broken?street=All is 9, but \"lamps-broken\" says that no figure is above 8.")]
+    [InlineData("{ \"zeroBelow\": 5 }", "lamps/broken?street=Kiln%20Row is 4, but \"lamps-broken\" says that every figure below 5 is 0; 1 more")]
+    public void Value_against_its_after_steps_is_a_stop(string step, string found)
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"scale\": 3.0, ", $"\"scale\": 3.0, \"afterwards\": [ {step} ], ");
+        var text = folder.Text("past-afterwards");
+        Assert.Contains(found, text, StringComparison.Ordinal);
+        Assert.Contains($"or take {step} out of \"afterwards\"", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Value_that_a_later_step_makes_is_not_against_an_earlier_one()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"scale\": 3.0, ", "\"scale\": 3.0, \"afterwards\": [ { \"notBelow\": 0 }, { \"zeroBelow\": 5 } ], ")
+            .With("tables/lamps.csv", "street,lit,broken\nAll,60,9\nKiln Row,31,0\nQuay,20,5\nWeir Lane,9,0\n");
+        folder.HasNo("past-afterwards");
+    }
+
+    [Fact]
+    public void Noise_finer_than_the_unit_of_the_file_is_a_stop_unless_a_rounding_says_so()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "\"multiplier\": 1000, \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]");
+        var text = folder.Text("noise-finer-than-unit");
+        Assert.Contains("moves in steps of 1, but column \"broken\" of table \"lamps\" has \"multiplier\": 1000 and its digits move in steps of 1000.", text, StringComparison.Ordinal);
+        Assert.Contains("write \"grid\": 1000", text, StringComparison.Ordinal);
+        folder.Edit("mechanisms.json", "\"scale\": 3.0, ", "\"scale\": 3.0, \"afterwards\": [ { \"roundTo\": 1000 } ], ");
+        folder.HasNo("noise-finer-than-unit");
+        folder.Edit("mechanisms.json", "\"afterwards\": [ { \"roundTo\": 1000 } ]", "\"grid\": 1000");
+        folder.HasNo("noise-finer-than-unit");
+    }
+
+    [Fact]
+    public void Continuous_noise_has_no_steps_to_be_finer_than_the_unit()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "\"multiplier\": 1000, \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]")
+            .Edit("mechanisms.json", "\"discrete-laplace\"", "\"laplace\"");
+        folder.HasNo("noise-finer-than-unit");
+    }
+
+    [Fact]
     public void Confidential_column_and_cells_hidden_by_value_count_as_exact()
     {
         using var folder = new TestFolder();
