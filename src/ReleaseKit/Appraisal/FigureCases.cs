@@ -16,7 +16,7 @@ internal static class FigureCases
         var capped = figure.Mechanism?.Clipped is not null && figure.Measure.Kind is not (MeasureKind.Count or MeasureKind.Share);
         var also = new FigureCase(
             SpecialCase.None,
-            figure.Mechanism is { } mechanism && mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any(),
+            steps.OfType<AfterStep.RoundTo>().Any(),
             steps.Any(step => step is AfterStep.NotBelow below && below.Bound == value || step is AfterStep.NotAbove above && above.Bound == value),
             capped,
             threshold is { } from && (value - main.Margin < from || main.Printed.IsUneven));

@@ -38,7 +38,13 @@ public sealed record MeasureFacts
     /// <summary>Whether some figures have ranges whose reach depends on the figure.</summary>
     public required bool HasThreshold { get; init; }
 
-    /// <summary>Whether some figures were rounded on purpose after the noise.</summary>
+    /// <summary>Whether some totals of this measure are the sums of the published parts.</summary>
+    public required bool HasSums { get; init; }
+
+    /// <summary>Whether some of its totals have noise of their own; never for a measure that does not add up, as a mean.</summary>
+    public required bool HasTotalsOfOwnNoise { get; init; }
+
+    /// <summary>Whether the margins of some figures hold a rounding after the noise: one on purpose, or that of continuous noise to the decimals of the file.</summary>
     public required bool IsRounded { get; init; }
     public required Noise.Coverage Coverage { get; init; }
 

@@ -21,8 +21,8 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
             ExpectedMisses = shown.Sum(error => error.ExpectedMisses),
             SharesDraws = shown.Any(error => error.HasSums),
             HasSums = shown.Any(error => error.HasSums),
-            HasTotalsOfOwnNoise = shown.Any(error => AddsUp(error.Measure) && HasTotalOfOwnNoise(table, error.Measure)),
-            Measures = [.. errors.Select(FactsOf)],
+            HasTotalsOfOwnNoise = shown.Any(error => HasTotalOfOwnNoise(table, error.Measure)),
+            Measures = [.. errors.Select(error => FactsOf(table, error))],
         };
     }
 
@@ -35,14 +35,26 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
         return found;
     }
 
-    private MeasureFacts FactsOf(MeasureErrors found)
+    private static bool HasTotalOfOwnNoise(Table table, Measure measure)
+    {
+        if (!AddsUp(measure))
+            return false;
+        for (var row = 0; row < table.RowCount; row++)
+            if (measure.RuleAt(row) is NoiseRule.FromMechanism && table.Stub.Any(column => column.IsAll(row)))
+                return true;
+        return false;
+    }
+
+    private MeasureFacts FactsOf(Table table, MeasureErrors found)
     {
         var margins = found.Errors.Where(error => !error.Error.DependsOnPublished).Select(error => Margin(found.Measure, error)).ToList();
         return new MeasureFacts
         {
             Measure = found.Measure,
             Coverage = release.Coverages.Main,
-            IsRounded = found.Measure.Rules.OfType<NoiseRule.FromMechanism>().Any(rule => rule.Mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any()),
+            HasSums = found.HasSums,
+            HasTotalsOfOwnNoise = HasTotalOfOwnNoise(table, found.Measure),
+            IsRounded = found.Errors.Any(error => error.Error.Steps.OfType<AfterStep.RoundTo>().Any()),
             HasThreshold = margins.Count < found.Errors.Count,
             SmallestMargin = margins.Count == 0 ? null : margins.MinBy(margin => margin.ToDecimal()),
             LargestMargin = margins.Count == 0 ? null : margins.MaxBy(margin => margin.ToDecimal()),
@@ -67,12 +79,4 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
     }
 
     private static bool AddsUp(Measure measure) => measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount;
-
-    private static bool HasTotalOfOwnNoise(Table table, Measure measure)
-    {
-        for (var row = 0; row < table.RowCount; row++)
-            if (measure.RuleAt(row) is NoiseRule.FromMechanism && table.Stub.Any(column => column.IsAll(row)))
-                return true;
-        return false;
-    }
 }

@@ -28,7 +28,7 @@ public sealed class Language : ILanguage
 
     public Reading ReadingOf(AppraisedFigure figure) => readings.Write(figure);
 
-    public IReadOnlyList<string> NotesOf(TableFacts facts) => factSentences.Of(facts);
+    public IReadOnlyList<string> NotesOf(TableFacts facts, bool onSeveralPages = false) => factSentences.Of(facts, onSeveralPages);
 
     public IReadOnlyList<string> NotesOf(MeasureFacts facts) => factSentences.Of(facts);
 

@@ -18,7 +18,8 @@ internal sealed class ReliabilitySentences(Voice voice)
     {
         _ when IsSaidAlready(figure) => voice.Say("reading.weak.not-alone"),
         null => voice.Say("reading.weak.not-above-zero"),
-        >= 1 => voice.Say("reading.weak.as-large"),
+        > 1 => voice.Say("reading.weak.larger"),
+        1 => voice.Say("reading.weak.as-large"),
         _ => Graded(figure, "reading.weak"),
     };
 
@@ -53,9 +54,13 @@ internal sealed class ReliabilitySentences(Voice voice)
     private string Instead(AppraisedFigure figure, int row)
     {
         var key = figure.Measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount ? "reading.use-total" : "reading.use-figure";
-        var named = figure.Table.Stub.Where(column => !column.IsAll(row)).Select(column => voice.Label(column, row)).ToList();
-        return named.Count > 0
-            ? voice.Say(key, ("place", string.Join(voice.Say("list.names"), named)))
-            : voice.Say($"{key}.all", ("place", voice.Label(figure.Table.Stub[0], row)));
+        return voice.Say(key, ("place", string.Join(voice.Say("list.names"), NameOf(figure.Table, row))));
+    }
+
+    /// <summary>The headings a row stands under, down to the last one that is not "all": "All tenures, 60 to 74".</summary>
+    private IEnumerable<string> NameOf(Table table, int row)
+    {
+        var last = Enumerable.Range(0, table.Stub.Count).LastOrDefault(at => !table.Stub[at].IsAll(row));
+        return table.Stub.Take(last + 1).Select(column => voice.Label(column, row));
     }
 }

@@ -23,7 +23,7 @@ internal sealed class SpecialSentences(Voice voice)
         SpecialCase.FlooredSum => [voice.Say("reading.floored-sum")],
         SpecialCase.MostlyUnchanged => [MostlyUnchanged(figure)],
         SpecialCase.Capped => Capped(figure),
-        SpecialCase.MarginAsLargeAsFigure => [voice.Say("reading.margin-as-large")],
+        SpecialCase.MarginAsLargeAsFigure => [voice.Say(figure.MarginToFigure > 1 ? "reading.margin-larger" : "reading.margin-as-large")],
         _ => [],
     };
 

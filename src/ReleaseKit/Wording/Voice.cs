@@ -18,6 +18,9 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
 
     public string Say(string key, params ReadOnlySpan<(string Name, string Value)> fill) => texts.Fill(key, fill);
 
+    /// <summary>"wards, districts and Norrvale".</summary>
+    public string List(IReadOnlyList<string> items) => language.List(items);
+
     public string WithUnit(PublishedValue value, Unit unit)
     {
         var form = PluralCategory.Form(unit, Tag, value);

@@ -108,10 +108,56 @@ public sealed class LanguageTests
     }
 
     [Fact]
-    public void Table_in_which_one_range_may_miss_says_one()
+    public void Table_in_which_less_than_one_range_may_miss_says_fewer_than_one()
     {
         var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
-        Assert.Equal("Of the 3 ranges in this table, at most about 1 is expected to miss.", En.NotesOf(facts)[0]);
+        Assert.Equal("Of the 3 ranges in this table, fewer than 1 is expected to miss.", En.NotesOf(facts)[0]);
+    }
+
+    [Theory]
+    [InlineData(0.29, "Of the 6 ranges in this table, fewer than 1 is expected to miss.")]
+    [InlineData(1, "Of the 6 ranges in this table, at most about 1 is expected to miss.")]
+    [InlineData(1.2, "Of the 6 ranges in this table, at most about 2 are expected to miss.")]
+    public void Expected_misses_are_never_said_to_be_more_than_they_round_up_to(double expected, string sentence)
+    {
+        var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13").Appraise().FactsOf(0);
+        Assert.Equal(sentence, En.NotesOf(facts with { Ranges = 6, ExpectedMisses = expected })[0]);
+    }
+
+    [Fact]
+    public void Table_cut_into_pages_counts_the_ranges_of_all_pages()
+    {
+        var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
+        Assert.Equal("Of the 3 ranges in this table, on all its pages, fewer than 1 is expected to miss.", En.NotesOf(facts, onSeveralPages: true)[0]);
+    }
+
+    [Fact]
+    public void Totals_that_differ_between_measures_are_told_by_measure_and_means_have_none()
+    {
+        var draw = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5));
+        string[] values = ["31", "10", "21"];
+        var facts = new SmallRelease().Stub("ward", "All", "All", "w1", "w2")
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), [new NoiseRule.SumOver(0), draw], [0, 1, 1], values)
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "cold"), [draw], [0, 0, 0], values)
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "helped"), [draw], [0, 0, 0], values)
+            .Figures(SmallRelease.Measure(MeasureKind.Mean, "mean use"), [draw], [0, 0, 0], values)
+            .Appraise().FactsOf(0);
+        Assert.Equal(
+            ["The totals of “cut off” are sums of the published parts.", "Each figure of “cold” and “helped” got noise of its own, so parts may not add up to their total."],
+            En.NotesOf(facts).TakeLast(2));
+    }
+
+    [Fact]
+    public void Totals_of_two_kinds_in_one_measure_are_named_beside_a_mean()
+    {
+        var draw = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5));
+        var facts = new SmallRelease().Stub("district", "All", "All", "A", "A", "A").Stub("ward", "All", "All", "All", "w1", "w2")
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), [draw, new NoiseRule.SumOver(1)], [0, 1, 0, 0], "31", "31", "10", "21")
+            .Figures(SmallRelease.Measure(MeasureKind.Mean, "mean use"), [draw], [0, 0, 0, 0], "31", "31", "10", "21")
+            .Appraise().FactsOf(0);
+        Assert.Equal(
+            ["Some totals of “cut off” got noise of their own, so parts may not add up to them.", "Other totals of “cut off” are sums of the published parts."],
+            En.NotesOf(facts).TakeLast(2));
     }
 
     [Fact]
@@ -143,6 +189,13 @@ public sealed class LanguageTests
     public void Column_that_was_rounded_says_so()
     {
         var column = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(5)), "10", "1300").Appraise().FactsOf(0).Measures[0];
+        Assert.StartsWith("In at least 999 of 1,000 cases noise and rounding reach no further than ", En.NotesOf(column)[1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Column_of_continuous_noise_written_with_decimals_says_that_it_was_rounded()
+    {
+        var column = new SmallRelease().Figures(MeasureKind.Mean, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 1.4)), "51.63").Appraise().FactsOf(0).Measures[0];
         Assert.StartsWith("In at least 999 of 1,000 cases noise and rounding reach no further than ", En.NotesOf(column)[1], StringComparison.Ordinal);
     }
 

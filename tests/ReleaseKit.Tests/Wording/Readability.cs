@@ -19,9 +19,9 @@ internal static partial class Readability
         + "which",
         "about above added adds after allows alone amount amounts answers before below between cannot carried cases column counted "
         + "covers downward either event exist figure figures filled forecast further given hidden index instead larger level "
-        + "limits margin margins minus misses normal number numbers office only other outside people protect public published ranges "
+        + "fewer limits margin margins minus misses normal number numbers office only other outside pages people protect public published ranges "
         + "reaches records rounded rounding rules series special table total totals upward valid within without zero",
-        "another certainty exactly general collected estimate expected holiday median multiple quality together usual",
+        "another certainty exactly general collected estimate expected holiday median multiple possible quality together usual",
         "available definition provisional publication",
         "experimental",
     ];

@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Text.RegularExpressions;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Noise.Errors;
+using ReleaseKit.Noise.Laws;
 using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
@@ -19,10 +20,11 @@ internal static class ReadingBack
 
     private static readonly (Regex Pattern, Func<AppraisedFigure, GroupCollection, bool> Agrees)[] Patterns =
     [
-        Sentence($@"The published figure is {N} [^.]+?( per [0-9,]+)?\.", (figure, g) => Is(g[1], figure.Printed) && figure.HasNumber && g[2].Success == figure.Measure.Per.HasValue),
+        Sentence($@"The published figure is (about )?{N} [^.]+?( per [0-9,]+)?\.", (figure, g) => Is(g[2], figure.Printed) && figure.HasNumber && g[3].Success == figure.Measure.Per.HasValue
+            && g[1].Success == (Number(g[2]) != figure.Value.ToDecimal() * figure.Measure.PrintFactor)),
         Sentence($@"Noise( and rounding together moved it by| of) up to {N} either way (?:was added )?in {Cases}\.",
             (figure, g) => Is(g[2], figure.Main!.Printed.MarginUp) && Is(g[2], figure.Main.Printed.MarginDown)
-                && g[1].Value.Contains("rounding", StringComparison.Ordinal) == figure.Case.Rounded && Holds(figure, g, 3)),
+                && g[1].Value.Contains("rounding", StringComparison.Ordinal) == HoldsRounding(figure) && Holds(figure, g, 3)),
         Sentence($@"Together that noise was up to {N} either way in {Cases}\.", (figure, g) => Is(g[1], figure.Main!.Printed.Margin) && figure.Draws > 1 && Holds(figure, g, 2)),
         Sentence($@"It rests on {N} figures, each with noise of its own\.", (figure, g) => Number(g[1]) == figure.Draws && figure.Draws > 1),
         Sentence($@"Noise (?:and rounding together )?moved it by up to {N} upward or {N} downward in {Cases}\.",
@@ -44,7 +46,7 @@ internal static class ReadingBack
         Sentence($@"The {Kind} cannot be below {N} or above {N}, so the range ends there\.",
             (figure, g) => Bound(g[2], figure.Possible.Lowest) && Bound(g[3], figure.Possible.Highest) && figure.Main!.Printed is { LowIsCut: true, HighIsCut: true }),
         Sentence("This figure was not collected.", (figure, _) => figure.Status == 'L'),
-        Sentence("This figure cannot exist.", (figure, _) => figure.Status == 'M'),
+        Sentence("There can be no such figure here.", (figure, _) => figure.Status == 'M'),
         Sentence("This figure is not available.", (figure, _) => figure.Status == 'O'),
         Sentence("This figure is hidden to protect people.", (figure, _) => figure.Status == 'Q'),
         Sentence("It is below the level for publication.", (figure, _) => !figure.HasNumber && figure.Measure.PublishedFrom is not null),
@@ -66,21 +68,18 @@ internal static class ReadingBack
             (figure, g) => (double)Number(g[1]) / (double)Number(g[2]) is var said && said <= figure.Error!.Law.Within(0) && figure.Error.Law.Within(0) - said < 1.0 / (double)Number(g[2])),
         Sentence($@"Amounts (above|below) {N} [^.]+ were counted as {N}\.", (figure, g) =>
             Number(g[2]) == Number(g[3]) && (double)Number(g[2]) == (g[1].Value == "above" ? figure.Mechanism!.Clipped!.To : figure.Mechanism!.Clipped!.From)),
-        Sentence("Its margin is as large as the figure, or larger.", (figure, _) => figure.Main!.Margin >= Math.Abs(figure.Value.ToDouble())),
+        Sentence("Its margin is (as large as|larger than) the figure.", IsThatLarge),
         Sentence($@"After the noise it was rounded to a multiple of {N}\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1])))),
         Sentence("The office marks it as provisional.", (figure, _) => figure.Status == 'P'),
         Sentence("This figure is (close|rough|weak): its margin is (about |less than )?([0-9]+) in 100 of it.", Ratio),
-        Sentence("This figure is weak: its margin is as large as the figure, or larger.", (figure, _) => Is(figure, Reliability.Weak) && figure.Main!.Margin >= Math.Abs(figure.Value.ToDouble())),
+        Sentence("This figure is weak: its margin is (as large as|larger than) the figure.", (figure, g) => Is(figure, Reliability.Weak) && IsThatLarge(figure, g)),
         Sentence("This figure is weak: it is not above zero.", (figure, _) => Is(figure, Reliability.Weak) && figure.Value.ToDouble() <= 0),
         Sentence("This figure is weak: do not use it alone.", (figure, _) => Is(figure, Reliability.Weak)),
-        Sentence(@"Use the published (total|figure) for ([^.]+) instead\.", (figure, g) =>
-            figure.UseInstead is { } whole && figure.Table.Stub.Any(column => column.LabelOf(whole.Row).In("en") == g[2].Value || column.Period)),
-        Sentence(@"Use the published (total|figure) “([^.]+)” instead\.", (figure, g) =>
-            figure.UseInstead is { } whole && figure.Table.Stub.All(column => column.IsAll(whole.Row)) && figure.Table.Stub[0].LabelOf(whole.Row).In("en") == g[2].Value),
+        Sentence(@"Use the published (total|figure) “([^.]+)” instead\.", (figure, g) => figure.UseInstead is { } whole && NamesRow(figure.Table, whole.Row, g[2].Value)),
         Sentence($@"Read it as {N}\.", (figure, g) => Is(g[1], figure.Main!.Printed.Low) && Is(g[1], figure.Main.Printed.High)),
         Sentence("Do not use it alone.", (figure, _) => Is(figure, Reliability.Weak) && figure.UseInstead is null),
-        Sentence("The range covers the added noise only, not late records or wrong answers.", (figure, _) => figure.Main is not null && !figure.Case.Rounded),
-        Sentence("The range covers noise and rounding only, not late records or wrong answers.", (figure, _) => figure.Main is not null && figure.Case.Rounded),
+        Sentence("The range covers the added noise only, not late records or wrong answers.", (figure, _) => figure.Main is not null && !HoldsRounding(figure)),
+        Sentence("The range covers noise and rounding only, not late records or wrong answers.", (figure, _) => figure.Main is not null && HoldsRounding(figure)),
     ];
 
     /// <summary>What is wrong with the reading of a figure; empty if nothing is.</summary>
@@ -95,6 +94,21 @@ internal static class ReadingBack
 
     private static (Regex, Func<AppraisedFigure, GroupCollection, bool>) Sentence(string pattern, Func<AppraisedFigure, GroupCollection, bool> agrees) =>
         (new Regex($"^{pattern}$", RegexOptions.CultureInvariant), agrees);
+
+    /// <summary>A rounding on purpose, or continuous noise written with the decimals of a file.</summary>
+    private static bool HoldsRounding(AppraisedFigure figure) => figure.Error!.Law is ContinuousLaw || figure.Error.Steps.OfType<AfterStep.RoundTo>().Any();
+
+    private static bool IsThatLarge(AppraisedFigure figure, GroupCollection groups) => groups[1].Value == "as large as"
+        ? figure.Main!.Margin == Math.Abs(figure.Value.ToDouble())
+        : figure.Main!.Margin > Math.Abs(figure.Value.ToDouble());
+
+    /// <summary>Every heading of the row down to the last one that is not "all" is in the name.</summary>
+    private static bool NamesRow(Table table, int row, string name)
+    {
+        var parts = name.Split(", ");
+        var said = table.Stub.Take(parts.Length).Select((column, at) => column.Period || column.LabelOf(row).In("en") == parts[at]);
+        return said.All(one => one) && table.Stub.Skip(parts.Length).All(column => column.IsAll(row));
+    }
 
     private static decimal Number(Group group) =>
         decimal.Parse(group.Value.Replace("minus ", "-", StringComparison.Ordinal), NumberStyles.Number, CultureInfo.InvariantCulture);

@@ -25,6 +25,8 @@ internal static class ReadingCases
         ("A weak mean with a better figure for the whole", Wards("1.5", "30.0", "40.0", MeasureKind.Mean)),
         ("A weak mean whose only better figure is that of all", Wards("1.5", "1.6", "40.0", MeasureKind.Mean)),
         ("A weak count of a quarter", Quarter()),
+        ("A weak count whose better total crosses its first heading", Tenures()),
+        ("An amount that is rounded for print", Amount(SmallRelease.Mechanism("m", LawName.DiscreteGaussian, ("sigma", 500)) with { Grid = 0.5 }, "321502.5")),
         ("A count whose margin is a tenth of it", Count(SmallRelease.Mechanism("m", LawName.DiscreteUniform, ("halfWidth", 10)), "100")),
         ("A count whose margin is half of it", Count(SmallRelease.Mechanism("m", LawName.DiscreteUniform, ("halfWidth", 10)), "20")),
         ("A count whose margin is four fifths of it", Count(SmallRelease.Mechanism("m", LawName.DiscreteUniform, ("halfWidth", 16)), "20")),
@@ -57,6 +59,7 @@ internal static class ReadingCases
         ("An estimate", Of(MeasureKind.Estimate, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 120)), "18340.6")),
         ("An index", Of(MeasureKind.Index, SmallRelease.Mechanism("m", LawName.Uniform, ("halfWidth", 2)), "104.3", SmallRelease.UnitOf("point", "points"))),
         ("A rate", Rate("4.12")),
+        ("A rate that is rounded for print", Rate("4.1234")),
         ("A provisional count", Count(Gauss, "1240 P")),
         ("A hidden count", Count(Gauss, "Q")),
         ("A count not collected", Count(Gauss, "L")),
@@ -86,6 +89,12 @@ internal static class ReadingCases
         .Stub("ward", "All", "All", "All", "Tithe Barn")
         .Figures(kind, kind == MeasureKind.Count ? Gauss : Laplace, all, district, ward)
         .Figure(2);
+
+    private static AppraisedFigure Tenures() => new SmallRelease()
+        .Stub("tenure", "All tenures", "All tenures", "Owned outright")
+        .Stub("age", null, "60 to 74", "60 to 74")
+        .Figures(MeasureKind.Count, Gauss, "500", "15")
+        .Figure(1);
 
     private static AppraisedFigure Quarter()
     {

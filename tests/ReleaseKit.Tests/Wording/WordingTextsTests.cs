@@ -98,12 +98,14 @@ public sealed class WordingTextsTests : IDisposable
     {
         "cases" when !English.Texts.Template(key).Contains("in 100", StringComparison.Ordinal) =>
             key.StartsWith("reading.range", StringComparison.Ordinal) && key != "reading.range.zero-for-small" ? "at least 95 of 100 such cases" : "at least 95 of 100 cases",
-        "value" or "margin" when key is "reading.value" or "reading.value.rate" or "facts.column" => "1,240 households",
+        "value" or "margin" when key is "facts.column" || key.StartsWith("reading.value", StringComparison.Ordinal) => "1,240 households",
         "largest" or "distance" => "19 households",
         "highest" when key == "reading.capped" => "400 crowns",
         "lowest" when key == "reading.capped.below" => "5 crowns",
         "kind" => "estimate",
         "place" => "Aldermoor",
+        "where" => "in this table, on all its pages",
+        "measures" => "Households",
         "status" => "provisional",
         _ => "19",
     });
