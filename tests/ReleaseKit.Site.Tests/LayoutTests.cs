@@ -7,6 +7,20 @@ public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
 {
     private static readonly int[] Widths = [320, 360, 390, 768, 1280];
 
+    private static readonly int[] FigureWidths = [320, 390, 800, 1121, 1280];
+
+    /// <summary>Numbers whose drawn digits begin before their cell's left edge or end beyond its right one, by more than a rounding of half a pixel.</summary>
+    private const string FiguresOutOfTheirCells = """
+        [...document.querySelectorAll('.sheet td.v')].filter(cell => cell.getClientRects().length > 0).filter(cell => {
+          const [box, text] = [cell.getBoundingClientRect(), cell.querySelector('.num').getBoundingClientRect()];
+          return text.right > box.right + .5 || text.left < box.left - .5;
+        }).map(cell => cell.textContent)
+        """;
+
+    private const string ShownMeasures = """
+        [...document.querySelectorAll('.sheet thead .meas')].filter(head => getComputedStyle(head).display !== 'none').map(head => head.className.split(' ').at(-1))
+        """;
+
     [Fact]
     public async Task No_page_scrolls_sideways()
     {
@@ -24,5 +38,39 @@ public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
         }
 
         Assert.Empty(wide);
+    }
+
+    [Fact]
+    public async Task No_figure_runs_out_of_its_cell()
+    {
+        var over = new List<string>();
+        foreach (var path in sample.Pages.Where(path => path.StartsWith("tables/", StringComparison.Ordinal)))
+        {
+            await using var opened = await chromium.OpenAsync(sample, path, FigureWidths[0]);
+            foreach (var width in FigureWidths)
+            {
+                await opened.Page.SetViewportSizeAsync(width, 900);
+                var figures = await opened.Page.EvaluateAsync<string[]>(FiguresOutOfTheirCells);
+                over.AddRange(figures.Select(figure => $"{path}: {figure} at {width}"));
+            }
+        }
+
+        Assert.Empty(over);
+    }
+
+    [Theory]
+    [InlineData(320)]
+    [InlineData(390)]
+    public async Task Address_of_a_figure_shows_the_column_of_its_measure_until_another_is_chosen(int width)
+    {
+        var path = sample.Pages.First(page => File.ReadAllText(sample.File(page)).Contains("id=\"k2\"", StringComparison.Ordinal));
+        await using var first = await chromium.OpenAsync(sample, path, width);
+        var id = await first.Page.EvaluateAsync<string>("document.querySelector('.unfold details:nth-of-type(2) > .panel').id");
+        await using var opened = await chromium.OpenAsync(sample, $"{path}#{id}", width);
+
+        Assert.Equal(["k1"], await first.Page.EvaluateAsync<string[]>(ShownMeasures));
+        Assert.Equal(["k2"], await opened.Page.EvaluateAsync<string[]>(ShownMeasures));
+        await opened.Page.CheckAsync("#k1");
+        Assert.Equal(["k1"], await opened.Page.EvaluateAsync<string[]>(ShownMeasures));
     }
 }

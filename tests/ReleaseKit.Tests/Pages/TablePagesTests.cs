@@ -233,6 +233,30 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         Assert.DoesNotContain("∞", zeros.Html("tables/table/index.html"), StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void Column_of_figures_is_as_wide_as_its_widest_number()
+    {
+        // 3,418 and 255,456: a comma takes no more room than a digit, two take no more than one.
+        Assert.Equal("c-v k1 w5", page.QuerySelector("col.c-v.k1")!.ClassName);
+        Assert.Equal("c-v k4 w7", page.QuerySelector("col.c-v.k4")!.ClassName);
+    }
+
+    [Theory]
+    [InlineData("homes", "homes in each 100")]
+    [InlineData("homes in each 100", "homes in each 100")]
+    public void Unit_of_a_share_says_once_that_it_counts_in_each_100(string unit, string words)
+    {
+        using var shares = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South").Figures(
+            SmallRelease.Measure(MeasureKind.Share, "share") with { Unit = SmallRelease.UnitOf(unit, unit) },
+            [new NoiseRule.Exact(SmallRelease.Words("A law asks for it."))], new byte[2], "33.3", "20.0").Build());
+
+        Assert.Equal(words, shares.Page().QuerySelector(".meas .u")!.TextContent);
+    }
+
+    [Fact]
+    public void Every_axis_keeps_two_labelled_ticks_where_columns_are_narrow() =>
+        Assert.All(page.QuerySelectorAll("svg.axis"), axis => Assert.True(axis.QuerySelectorAll("g:not(.odd) .axlab").Length >= 2, axis.TextContent));
+
     private IEnumerable<AppraisedFigure> Figures() =>
         from measure in Enumerable.Range(0, 4)
         from row in Enumerable.Range(0, 9)

@@ -12,6 +12,8 @@ internal static class MeasureUnit
         return measure.Kind switch
         {
             MeasureKind.Share when unit.Length == 0 => language.Text("tables.unit.share"),
+            // The unit's own words may say it already.
+            MeasureKind.Share when unit.EndsWith(language.Text("tables.unit.share"), StringComparison.Ordinal) => unit,
             MeasureKind.Share => language.Text("tables.unit.share-of", ("unit", unit)),
             MeasureKind.Rate when measure.Per is { } per => language.Text("tables.unit.rate", ("unit", unit), ("per", language.Number(PublishedValue.Shortest((decimal)per)))),
             _ => unit,

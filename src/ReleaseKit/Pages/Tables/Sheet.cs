@@ -17,6 +17,9 @@ internal sealed record Sheet
 
     /// <summary>Indices of the measures that are shown, in order.</summary>
     public required IReadOnlyList<int> Shown { get; init; }
+
+    /// <summary>For each of them the class of its column of figures.</summary>
+    public required IReadOnlyList<string> Widths { get; init; }
     public ILanguage Language => Site.Language;
 
     /// <summary>The table's number in the release, from 1.</summary>
@@ -25,6 +28,7 @@ internal sealed record Sheet
     public static Sheet Of(SiteContext site, int index)
     {
         var table = site.Release.Tables[index];
+        int[] shown = [.. Enumerable.Range(0, table.Measures.Count).Where(measure => table.Measures[measure].Shown)];
         return new()
         {
             Site = site,
@@ -34,7 +38,8 @@ internal sealed record Sheet
             Scales = ColumnScales.Of(site.Appraised, index),
             Facts = site.Appraised.FactsOf(index),
             Notes = NoteMarks.Of(table),
-            Shown = [.. Enumerable.Range(0, table.Measures.Count).Where(measure => table.Measures[measure].Shown)],
+            Shown = shown,
+            Widths = [.. shown.Select(measure => FigureWidth.Of(site.Appraised, index, measure, site.Language))],
         };
     }
 

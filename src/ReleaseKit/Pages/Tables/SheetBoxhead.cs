@@ -50,18 +50,21 @@ internal static class SheetBoxhead
         {
             var place = scale.At(ticks[index].ToDouble());
             var x = CellMark.Percent(place);
-            html.Raw(index % 2 == 0 ? "<g>"u8 : "<g class=\"odd\">"u8)
+            html.Raw(ticks.Count < 3 || index % 2 == 0 ? "<g>"u8 : "<g class=\"odd\">"u8)
                 .Raw("<line class=\"axtick\" x1=\""u8).Raw(x).Raw("\" x2=\""u8).Raw(x).Raw("\" y1=\"16\" y2=\"22\"/><text class=\"axlab"u8).Raw(place > NearEdge ? " end\" x=\""u8 : "\" x=\""u8).Raw(x).Raw("\" y=\"12\">"u8)
                 .Text(sheet.Language.Number(ticks[index])).Raw("</text></g>"u8);
         }
         html.Raw("</svg>"u8);
     }
 
-    // Long labels leave room for few.
+    // Long labels leave room for few, but one alone would give no scale.
     private static IReadOnlyList<PublishedValue> TicksOf(Sheet sheet, Scale scale)
     {
         var ticks = Ticks.Between(scale.From, scale.To, MostTicks);
-        return ticks.Max(tick => sheet.Language.Number(tick).Length) <= ShortLabel ? ticks : Ticks.Between(scale.From, scale.To, FewTicks);
+        if (ticks.Max(tick => sheet.Language.Number(tick).Length) <= ShortLabel)
+            return ticks;
+        var few = Ticks.Between(scale.From, scale.To, FewTicks);
+        return few.Count > 1 ? few : ticks;
     }
 
     private static string Number(int number) => number.ToString(CultureInfo.InvariantCulture);

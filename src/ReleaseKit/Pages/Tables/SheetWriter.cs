@@ -40,7 +40,7 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
         for (var column = 0; column < sheet.Stub.Width; column++)
             html.Raw("<col class=\"c-stub\">"u8);
         for (var column = 1; column <= sheet.Shown.Count; column++)
-            html.Raw("<col class=\"c-v"u8).Raw(KeyOf(column)).Raw("\"><col class=\"c-mg"u8).Raw(KeyOf(column)).Raw("\"><col class=\"c-b"u8).Raw(KeyOf(column)).Raw("\">"u8);
+            html.Raw("<col class=\"c-v"u8).Raw(KeyOf(column)).Raw(sheet.Widths[column - 1]).Raw("\"><col class=\"c-mg"u8).Raw(KeyOf(column)).Raw("\"><col class=\"c-b"u8).Raw(KeyOf(column)).Raw("\">"u8);
         html.Raw("\n"u8);
     }
 
