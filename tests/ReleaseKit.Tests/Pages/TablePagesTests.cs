@@ -194,6 +194,15 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
     }
 
     [Fact]
+    public void Page_of_a_cut_table_says_that_misses_are_counted_on_all_its_pages()
+    {
+        using var cut = TableSite.Of(WardTable.Build(isCut: true));
+
+        Assert.Contains("ranges in this table, on all its pages, ", cut.Html("tables/table/cindry.html"), StringComparison.Ordinal);
+        Assert.DoesNotContain("on all its pages", page.Body!.TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Pages_of_a_cut_table_hold_their_rows_with_numbers_and_ids_that_go_on()
     {
         using var cut = TableSite.Of(WardTable.Build(isCut: true));

@@ -40,6 +40,15 @@ public sealed class SampleReadingsTests
     public void Every_figure_with_noise_has_a_margin() =>
         Assert.Empty(Figures.Where(figure => figure.Case.First == SpecialCase.NoMargin).Select(figure => figure.Address));
 
+    /// <summary>Its counts of households cut off are added up; its means have noise of their own and are no totals.</summary>
+    [Fact]
+    public void Table_of_quarters_speaks_of_sums_for_the_count_only()
+    {
+        var quarters = Releases[0].Release.Tables.ToList().FindIndex(table => table.Id == "quarters");
+        var notes = English.Language.NotesOf(Releases[0].FactsOf(quarters));
+        Assert.Equal(["The totals of “Households cut off” are sums of the published parts."], notes.Where(note => note.Contains("total", StringComparison.Ordinal)));
+    }
+
     [Fact]
     public void Every_table_has_its_notes()
     {
