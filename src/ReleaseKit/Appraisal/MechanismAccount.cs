@@ -31,8 +31,14 @@ public sealed record MechanismAccount
     /// <summary>Tables that it touches, in the order of the release: those of its measures, or the one whose rows it chose.</summary>
     public required IReadOnlyList<int> Tables { get; init; }
 
-    /// <summary>How many published cells carry a draw of it.</summary>
+    /// <summary>How many cells the account takes to carry a draw of it, whether published or not.</summary>
     public required long Cells { get; init; }
+
+    /// <summary>How many published numbers carry a draw of it.</summary>
+    public required long Published { get; init; }
+
+    /// <summary>How many cells carry a draw of it and are hidden.</summary>
+    public required long Hidden { get; init; }
 
     /// <summary>True if its loss is taken as the office states it, because it cannot be worked out here.</summary>
     public required bool OnlyDeclared { get; init; }

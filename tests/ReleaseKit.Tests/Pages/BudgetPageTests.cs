@@ -138,7 +138,7 @@ public sealed class BudgetPageTests
     {
         var rows = Read(new BudgetSample()).QuerySelectorAll(".totals tbody tr").Select(row => row.Children.Select(Unlabelled).ToList()).ToList();
 
-        Assert.Equal(["Authorised", "Declared by the Office", "Worked out again here", "The same rho, converted", "The same rho, converted", "Smallest upper bound that this program can prove", "Lower bound beside it, rounded down"], rows.Select(row => row[0]));
+        Assert.Equal(["Authorised", "Declared by the Office", "Worked out again here", "The same rho, converted", "The same rho, converted", "Smallest upper bound that this program can prove", "Largest lower bound of any one run of noise, rounded down (runs cannot be added here)"], rows.Select(row => row[0]));
         Assert.Equal(["6", "0.000000001", "none"], rows[0][1..4]);
         Assert.Equal(["none", "none", "0.2301"], rows[1][1..4]);
         Assert.Equal(["4.235", "0.000000001", "0.2242"], rows[2][1..4]);
@@ -168,7 +168,7 @@ public sealed class BudgetPageTests
 
         Assert.Equal(sample.Statement.Mechanisms.Count, items.Count);
         var first = items[0].TextContent;
-        foreach (var words in new[] { "Households counted in question 1", "Discrete Gaussian noise, sigma 9.5.", "One household counts in at most 1 cell, by at most 1.", "0.0311", "13.9 in 100" })
+        foreach (var words in new[] { "Households counted in question 1", "Discrete Gaussian noise, sigma 9.5.", "One household counts in at most 1 cell, by at most 1.", "2 published figures carry it. 1 more carries it and is hidden.", "0.0311", "13.9 in 100" })
             Assert.Contains(words, first, StringComparison.Ordinal);
     }
 

@@ -147,6 +147,8 @@ internal sealed class BudgetSample
         Measures = [.. part.Tables.Select(table => new MeasureRef(table, 0))],
         Tables = part.Tables,
         Cells = 3 + index,
+        Published = 2 + index,
+        Hidden = index == 0 ? 1 : 0,
         OnlyDeclared = index == 2,
     };
 

@@ -13,7 +13,7 @@ public static class AccountRules
     public static AccountRule PureAsConcentrated { get; } = new("pure-as-concentrated", "Bun & Steinke 2016, Proposition 1.4, in its smallest form ε·tanh(ε/2)");
     public static AccountRule ExactCurve { get; } = new("exact-curve", "Balle & Wang 2018 for Gaussian noise; else summed from the law itself");
     public static AccountRule Pair { get; } = new("named-pair", "one unit that uses its declared bounds in full");
-    public static AccountRule Odds { get; } = new("odds", "derived; see the methods page");
+    public static AccountRule Odds { get; } = new("odds", "derived; see “Odds for one unit” on the methods page");
 
     /// <summary>The loss of one law, from its literature.</summary>
     public static AccountRule Law(string source) => new("law", source);
@@ -42,6 +42,9 @@ public static class AccountSteps
     /// <summary>The loss of a mechanism from its law.</summary>
     public const string Loss = "loss";
 
+    /// <summary>The same where the scale stands in a column: from the cells with the smallest.</summary>
+    public const string LossByRow = "loss-by-row";
+
     /// <summary>The loss of a mechanism as the office states it.</summary>
     public const string Stated = "stated";
 
@@ -68,6 +71,6 @@ public static class AccountSteps
 
     public static IReadOnlyList<string> All { get; } =
     [
-        MovedByAdding, MovedByReplacing, AbsoluteSum, Distance, Loss, Stated, Unbounded, Curve, Sum, TightConversion, SimpleConversion, AuthorisedInCurrency, Odds,
+        MovedByAdding, MovedByReplacing, AbsoluteSum, Distance, Loss, LossByRow, Stated, Unbounded, Curve, Sum, TightConversion, SimpleConversion, AuthorisedInCurrency, Odds,
     ];
 }

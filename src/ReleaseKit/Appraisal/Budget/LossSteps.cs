@@ -12,7 +12,7 @@ internal static class LossSteps
         if (spending.Loss is not { } loss)
             return [Named(spending, new AccountStep(double.IsInfinity(amount) ? AccountSteps.Unbounded : AccountSteps.Stated, $"{sign} = {Signs.Of(amount)}", amount, upper.Rule))];
         var terms = accountant.Currency == LossCurrency.Rho ? loss.ConcentratedTerms : loss.PureTerms;
-        return new[] { Moved(spending, loss, terms), Lost(sign, amount, upper, terms, accountant) }.Select(step => Named(spending, step));
+        return new[] { Moved(spending, loss, terms), Lost(spending, amount, upper, terms, accountant) }.Select(step => Named(spending, step));
     }
 
     private static AccountStep Moved(MechanismSpending spending, MechanismLoss loss, IReadOnlyList<LossTerm> terms) => spending.Mechanism.Sensitivity switch
@@ -29,15 +29,23 @@ internal static class LossSteps
         return new AccountStep(key, shifts, moved, AccountRules.Declared);
     }
 
-    private static AccountStep Lost(string sign, double amount, LossTotal upper, IReadOnlyList<LossTerm> terms, Accountant accountant)
+    private static AccountStep Lost(MechanismSpending spending, double amount, LossTotal upper, IReadOnlyList<LossTerm> terms, Accountant accountant)
     {
+        var sign = accountant.Currency == LossCurrency.Rho ? "ρ" : "ε";
         if (double.IsInfinity(amount))
             return new AccountStep(AccountSteps.Unbounded, $"{sign} = ∞", amount, upper.Rule);
         if (upper.Rule == AccountRules.ExactCurve)
             return new AccountStep(AccountSteps.Curve, $"δ({Signs.Of(amount)}) = {Signs.Of(upper.Delta ?? 0)}", amount, upper.Rule);
         var parts = terms.Select(term => Part(term, accountant.Currency));
-        return new AccountStep(AccountSteps.Loss, $"{sign} = {Signs.Plus(parts)} = {Signs.Of(amount)}", amount, upper.Rule);
+        var key = spending.Mechanism.Parameters.Values.Any(parameter => parameter.Column is not null) ? AccountSteps.LossByRow : AccountSteps.Loss;
+        return new AccountStep(key, $"{Divisions(terms, accountant.Currency)}{sign} = {Signs.Plus(parts)} = {Signs.Of(amount)}", amount, upper.Rule);
     }
+
+    /// <summary>"ε = 1 ÷ 0.7 = 1.42857142857; " before a calculation in ρ that goes on from the pure loss of a cell.</summary>
+    private static string Divisions(IReadOnlyList<LossTerm> terms, LossCurrency currency) => currency == LossCurrency.Epsilon ? "" : string.Concat(
+        terms.Select(term => (Calculation: term.Loss.PureArithmetic(term.Shift), Loss: term.Loss.Pure(term.Shift).Upper)).Distinct()
+            .Where(pure => pure.Loss.IsFinite && pure.Calculation != Signs.Of(pure.Loss.Value))
+            .Select(pure => $"ε = {pure.Calculation} = {Signs.Of(pure.Loss.Value)}; "));
 
     private static string Part(LossTerm term, LossCurrency currency)
     {

@@ -9,8 +9,17 @@ namespace ReleaseKit.Appraisal.Budget;
 /// <param name="ByLaw">How many cells carry each law; a row whose law cannot be formed (a stop of the reading) is left out.</param>
 public sealed record MechanismCells(IReadOnlyList<MeasureRef> Measures, IReadOnlyList<NoisedCells> ByLaw)
 {
+    private const byte HiddenStatus = (byte)'Q';
+
     public static MechanismCells None { get; } = new([], []);
 
+    /// <summary>How many of them have a published number.</summary>
+    public long Published { get; init; }
+
+    /// <summary>How many were drawn and then hidden.</summary>
+    public long Hidden { get; init; }
+
+    /// <summary>How many were drawn: what the account counts.</summary>
     public long Count => ByLaw.Sum(part => part.Count);
 
     public IReadOnlyList<int> Tables => [.. Measures.Select(measure => measure.Table).Distinct()];
@@ -46,12 +55,16 @@ public sealed record MechanismCells(IReadOnlyList<MeasureRef> Measures, IReadOnl
         private readonly DeclaredLaws declared = new();
         private readonly List<MeasureRef> measures = [];
         private readonly Dictionary<NoiseLaw, long> counts = [];
+        private long published;
+        private long hidden;
 
         public void Add(Table table, MeasureRef at, int rule)
         {
             if (!measures.Contains(at))
                 measures.Add(at);
-            var ruleOf = table.Measures[at.Measure].RuleOf;
+            var (noised, ruleOf) = (table.Measures[at.Measure], table.Measures[at.Measure].RuleOf);
+            published += Enumerable.Range(0, ruleOf.Length).LongCount(row => ruleOf[row] == rule && noised.HasNumber(row));
+            hidden += Enumerable.Range(0, ruleOf.Length).LongCount(row => ruleOf[row] == rule && noised.Status[row] == HiddenStatus);
             if (mechanism.Parameters.Values.All(parameter => parameter.Number is not null))
             {
                 Count(declared.TryLawOf(mechanism, table, 0), ruleOf.LongCount(one => one == rule));
@@ -71,6 +84,10 @@ public sealed record MechanismCells(IReadOnlyList<MeasureRef> Measures, IReadOnl
                 counts[law] = counts.GetValueOrDefault(law) + cells;
         }
 
-        public MechanismCells Cells() => new(measures, [.. counts.Select(pair => new NoisedCells(pair.Key, pair.Value))]);
+        public MechanismCells Cells() => new(measures, [.. counts.Select(pair => new NoisedCells(pair.Key, pair.Value))])
+        {
+            Published = published,
+            Hidden = hidden,
+        };
     }
 }

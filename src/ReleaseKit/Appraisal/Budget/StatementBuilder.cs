@@ -78,6 +78,8 @@ internal sealed class StatementBuilder
             Measures = spending.Cells.Measures,
             Tables = spending.Cells.Tables,
             Cells = spending.Cells.Count,
+            Published = spending.Cells.Published,
+            Hidden = spending.Cells.Hidden,
             OnlyDeclared = spending.Loss is null,
         };
     }
@@ -119,7 +121,7 @@ internal sealed class StatementBuilder
             TotalSteps.Sum(accountant, losses, total),
             .. Conversions(),
             .. TotalSteps.Authorised(release.Noise.Authorised, accountant.Currency == LossCurrency.Rho ? authorised : null),
-            TotalSteps.Odds(limit, beta),
+            TotalSteps.Odds(limit, beta, bounds.Curves.FirstOrDefault(curve => curve.DeltaAt(limit.At) == limit.DeltaThere)),
         ];
     }
 }

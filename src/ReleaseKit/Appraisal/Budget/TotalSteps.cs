@@ -39,14 +39,30 @@ internal static class TotalSteps
         return [new AccountStep(AccountSteps.AuthorisedInCurrency, arithmetic, rho, AccountRules.TightConversion)];
     }
 
-    public static AccountStep Odds(OddsLimit limit, double? beta)
+    public static AccountStep Odds(OddsLimit limit, double? beta, PrivacyCurve? curve)
     {
         var odds = Math.Exp(limit.EpsilonPrime.Value);
         var prime = Signs.Of(limit.EpsilonPrime.Value);
         var arithmetic = beta is { } share && limit.EpsilonPrime.IsFinite
-            ? $"ε₀ = {Signs.Of(limit.At.Value)}, δ(ε₀) = {Signs.Of(limit.DeltaThere.Value)}, β = {Signs.Of(share)}: ε′ = ε₀ − ln(1 − δ(ε₀) ÷ β) = {prime}; e^{prime} = {Signs.Of(odds)}"
+            ? $"ε₀ = {Signs.Of(limit.At.Value)}, δ(ε₀) = {DeltaThere(limit, curve)}{Signs.Of(limit.DeltaThere.Value)}, β = {Signs.Of(share)}: ε′ = ε₀ − ln(1 − δ(ε₀) ÷ β) = {prime}; e^{prime} = {Signs.Of(odds)}"
             : $"ε′ = {prime}; e^{prime} = {Signs.Of(odds)}";
         return new AccountStep(AccountSteps.Odds, arithmetic, odds, AccountRules.Odds);
+    }
+
+    /// <summary>How δ(ε₀) follows from the curve the limit was found on: "… = "; empty where it is that of a law itself.</summary>
+    private static string DeltaThere(OddsLimit limit, PrivacyCurve? curve)
+    {
+        var at = Signs.Of(limit.At.Value);
+        if (curve is ConcentratedCurve { Rho: { IsFinite: true, Value: > 0 } rho } && limit.At.IsFinite)
+        {
+            var order = Signs.Of(ConcentratedConversion.OrderAt(rho, limit.At));
+            return $"e^(({order} − 1) × ({order} × {Signs.Of(rho.Value)} − {at})) ÷ ({order} − 1) × (1 − 1 ÷ {order})^{order} = ";
+        }
+
+        if (curve is not ApproximateCurve { Loss: var loss } || limit.At >= loss.Epsilon)
+            return "";
+        var (epsilon, delta) = (Signs.Of(loss.Epsilon.Value), Signs.Of(loss.Delta.Value));
+        return $"{delta} + (1 − {delta}) × (e^{epsilon} − e^{at}) ÷ (e^{epsilon} + 1) = ";
     }
 
     private static string Tight(Rho rho, Delta delta, Epsilon epsilon)

@@ -18,7 +18,8 @@ internal static class MechanismsModel
             ["name"] = mechanism.Answers is { } answers ? words.Context.In(answers) : mechanism.Id,
             ["level"] = mechanism.Level is { } level ? words.Context.In(level) : null,
             ["use"] = mechanism.Use == MechanismUse.Figures ? null : words.Say($"budget.use.{mechanism.Use}"),
-            ["cells"] = words.Say(account.Cells == 1 ? "budget.cells.one" : "budget.cells.other", ("count", words.Language.Number(new PublishedValue(account.Cells, 0)))),
+            ["cells"] = Cells(account.Published, "budget.cells", words),
+            ["hidden"] = account.Hidden == 0 ? null : Cells(account.Hidden, "budget.cells.hidden", words),
             ["law"] = MechanismWords.Law(mechanism, words),
             ["sensitivity"] = MechanismWords.Sensitivity(mechanism, words),
             ["after"] = MechanismWords.Afterwards(mechanism, words),
@@ -33,6 +34,9 @@ internal static class MechanismsModel
             ["only_declared"] = account.OnlyDeclared,
         };
     }
+
+    private static string Cells(long count, string key, BudgetWords words) =>
+        words.Say(count == 1 ? $"{key}.one" : $"{key}.other", ("count", words.Language.Number(new PublishedValue(count, 0))));
 
     private static string Clipped(ClippedTo clipped, BudgetWords words) => words.Say(
         "budget.clipped",

@@ -1,3 +1,4 @@
+using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 using Scriban.Runtime;
@@ -83,7 +84,7 @@ internal static class MethodsPage
         return new ScriptArray(rules.Select(rule => new ScriptObject
         {
             ["name"] = context.Language.Text("budget.rule." + rule.Key),
-            ["source"] = rule.Source,
+            ["source"] = rule == AccountRules.Odds ? context.Language.Text("methods.rules.odds") : rule.Source,
         }));
     }
 }

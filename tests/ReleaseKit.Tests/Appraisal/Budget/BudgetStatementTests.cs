@@ -123,6 +123,31 @@ public sealed class BudgetStatementTests
         var statement = BudgetStatement.Of(release);
         Assert.Equal(1 / 1.5, statement.Spent, 1e-12);
         Assert.Equal(3, statement.Mechanisms[0].Cells);
+        var concentrated = BudgetStatement.Of(release with { Noise = release.Noise with { Accounting = Accounting.Concentrated } });
+        var step = concentrated.Steps.Single(step => step.Key == AccountSteps.LossByRow);
+        Assert.StartsWith("ε = 1 ÷ 1.5 = 0.666666666667; ρ = (0.666666666667 − 1 + e^−0.666666666667) = ", step.Arithmetic, StringComparison.Ordinal);
+        Assert.Equal((1 / 1.5) - 1 + Math.Exp(-1 / 1.5), step.Result, 1e-12);
+    }
+
+    /// <summary>The account counts every draw; the reader is told which of them were published.</summary>
+    [Fact]
+    public void Hidden_and_uncollected_cells_are_not_counted_as_published()
+    {
+        var mechanism = Accounts.Gaussian(10);
+        var release = new SmallRelease().Figures(MeasureKind.Count, mechanism, "1", "Q", "L", "4").Build();
+        var account = BudgetStatement.Of(release with { Noise = release.Noise with { Mechanisms = [mechanism] } }).Mechanisms[0];
+        Assert.Equal((4, 2, 1), (account.Cells, account.Published, account.Hidden));
+    }
+
+    [Fact]
+    public void Delta_of_the_odds_can_be_followed_from_its_step()
+    {
+        var step = BudgetStatement.Of(Accounts.Of(Accounting.Concentrated, Accounts.Gaussian(10, "a"), Accounts.Gaussian(10, "b"))).Steps[^1];
+        double After(string sign, char end) => double.Parse(step.Arithmetic[(step.Arithmetic.IndexOf(sign, StringComparison.Ordinal) + sign.Length)..].Split(end)[0].Trim(), CultureInfo.InvariantCulture);
+        var (epsilon, order) = (After("ε₀ = ", ','), After("e^((", '−'));
+        // Canonne, Kamath & Steinke 2020, Corollary 13, as the step writes it; ρ = 2 ÷ (2 · 10²).
+        var delta = Math.Exp((order - 1) * ((order * 0.01) - epsilon)) / (order - 1) * Math.Pow(1 - (1 / order), order);
+        Assert.Equal(1, delta / After($")^{order.ToString("G12", CultureInfo.InvariantCulture)} = ", ','), 1e-8);
     }
 
     [Fact]
