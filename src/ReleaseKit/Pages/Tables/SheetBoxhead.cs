@@ -41,7 +41,9 @@ internal static class SheetBoxhead
         html.Raw("</th>"u8);
     }
 
-    // Every second tick is left out where columns are narrow.
+    // Where columns are narrow the ticks between are left out: every second one, of four both in the middle, so that the outermost always stay.
+    private static bool IsKept(int index, int count) => count == 4 ? index is 0 or 3 : count < 3 || index % 2 == 0;
+
     private static void WriteAxis(Sheet sheet, HtmlWriter html, Scale scale)
     {
         html.Raw("<svg class=\"bar axis\" aria-hidden=\"true\">"u8);
@@ -50,7 +52,7 @@ internal static class SheetBoxhead
         {
             var place = scale.At(ticks[index].ToDouble());
             var x = CellMark.Percent(place);
-            html.Raw(ticks.Count < 3 || index % 2 == 0 ? "<g>"u8 : "<g class=\"odd\">"u8)
+            html.Raw(IsKept(index, ticks.Count) ? "<g>"u8 : "<g class=\"odd\">"u8)
                 .Raw("<line class=\"axtick\" x1=\""u8).Raw(x).Raw("\" x2=\""u8).Raw(x).Raw("\" y1=\"16\" y2=\"22\"/><text class=\"axlab"u8).Raw(place > NearEdge ? " end\" x=\""u8 : "\" x=\""u8).Raw(x).Raw("\" y=\"12\">"u8)
                 .Text(sheet.Language.Number(ticks[index])).Raw("</text></g>"u8);
         }
