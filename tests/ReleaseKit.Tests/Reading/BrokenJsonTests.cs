@@ -86,7 +86,7 @@ public sealed class BrokenJsonTests
         folder => folder.Edit(Mechanisms, "\"neighbouring\": \"add-or-remove\"", "\"neighbouring\": null"));
 
     [Fact]
-    public void Wrong_type_is_said_in_words() => Broken.Stops("wrong-type", Mechanisms, "\"4.0\"", "write \"sigma\": 0",
+    public void Wrong_type_is_said_in_words() => Broken.Stops("wrong-type", Mechanisms, "\"4.0\"", "write \"sigma\": 4.0",
         folder => folder.Edit(Mechanisms, "\"sigma\": 4.0", "\"sigma\": \"4.0\""));
 
     [Fact]

@@ -1,4 +1,5 @@
 using System.Text;
+using ReleaseKit.Review;
 using ReleaseKit.Tests.Folders;
 using Xunit;
 
@@ -39,6 +40,32 @@ public sealed class BrokenTableTests
     [InlineData("many", "declare the mark")]
     public void Other_ways_to_write_a_number_are_named(string text, string remedy) => Broken.Stops("csv-number", Csv, text, remedy,
         folder => folder.Edit(Csv, "Kiln Row,31,", $"Kiln Row,{text},").Edit(Csv, "All,60,", "All,29,"));
+
+    [Theory]
+    [InlineData("\"1,100\"", "bare digits: 1100.")]
+    [InlineData("1 031 500", "bare digits: 1031500.")]
+    [InlineData("\"1.240,5\"", "decimal sign: 1240.5.")]
+    [InlineData("\"1,5\"", "decimal sign: 1.5.")]
+    [InlineData("1e3", "all digits: 1000.")]
+    [InlineData("1.25e1", "all digits: 12.5.")]
+    [InlineData("+31", "without it: 31.")]
+    [InlineData("\u22123", "keyboard: -3.")]
+    public void Remedy_shows_the_number_of_that_cell(string text, string remedy)
+    {
+        using var folder = new TestFolder().Edit(Csv, "Kiln Row,31,", $"Kiln Row,{text},");
+        Assert.Contains(folder.Read().Findings, finding => finding.Slug.StartsWith("csv-", StringComparison.Ordinal) && finding.Do.Contains(remedy, StringComparison.Ordinal));
+    }
+
+    [Theory]
+    [InlineData("\"stub\": [ { \"column\": \"street\", \"title\": \"Street\", \"all\": \"All\" } ]", "\"stub\": []", "stub")]
+    [InlineData("\"figures\": [\n", "\"figures\": [], \"notes\": [\n", "figures")]
+    public void Table_without_rows_or_figures_is_a_stop(string from, string to, string key)
+    {
+        using var folder = new TestFolder().Edit(Release, from, to);
+        var finding = Assert.Single(folder.Read().Findings, finding => finding.Slug == "empty-list");
+        Assert.Equal(FindingLevel.Stop, finding.Level);
+        Assert.Contains($"name at least one: \"{key}\": [", finding.Do, StringComparison.Ordinal);
+    }
 
     [Fact]
     public void Too_many_digits_are_a_stop() => Broken.Stops("csv-overflow", Csv, "1234567890123456789", "larger unit",

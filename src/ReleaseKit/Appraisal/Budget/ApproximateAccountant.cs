@@ -20,7 +20,7 @@ public sealed class ApproximateAccountant : Accountant
             return AsStated(spending.Mechanism);
         var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
         var rule = delta == Delta.Zero ? AccountRules.Law(loss.PureTerms[0].Loss.Source) : AccountRules.ExactCurve;
-        return Of(loss.EpsilonAt(delta).Upper, delta, rule);
+        return Of(DeclaredDelta.EpsilonAt(loss, delta.Value).Upper, delta, rule);
     }
 
     public override LossTotal Lower(MechanismSpending spending)

@@ -27,6 +27,12 @@ internal static class KeyProblems
         "it must be given and has no default.",
         $"add {paste}");
 
+    public static Finding EmptyList(Place at, string key, string paste, FindingOwner owner) => new(
+        FindingLevel.Stop, "empty-list", owner, at,
+        $"\"{key}\" is an empty list.",
+        "nothing of the table could be published, and what was spent on it would go unseen.",
+        $"name at least one: {paste}");
+
     public static Finding NotYet(Place at, string key, FindingOwner owner, string instead) => new(
         FindingLevel.Stop, "not-yet", owner, at,
         $"\"{key}\" is not worked out by this version of the program.",

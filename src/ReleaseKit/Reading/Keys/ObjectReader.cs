@@ -11,9 +11,10 @@ namespace ReleaseKit.Reading.Keys;
 public sealed class ObjectReader
 {
     private readonly JsonObject json;
+    private readonly ObjectShape shape;
     private readonly ReadContext context;
 
-    private ObjectReader(JsonObject json, ReadContext context) => (this.json, this.context) = (json, context);
+    private ObjectReader(JsonObject json, ObjectShape shape, ReadContext context) => (this.json, this.shape, this.context) = (json, shape, context);
 
     /// <summary>Reads an object; null, with a stop, if the value is none.</summary>
     public static ObjectReader? Open(JsonValue value, string key, ObjectShape shape, ReadContext context)
@@ -25,7 +26,7 @@ public sealed class ObjectReader
             return null;
         }
         CheckKeys(json, shape, context);
-        return new ObjectReader(json, context);
+        return new ObjectReader(json, shape, context);
     }
 
     public Place At => json.At;
@@ -77,6 +78,14 @@ public sealed class ObjectReader
             return (value as JsonArray)?.Items ?? [];
         context.Add(KeyProblems.WrongType(value, key, "a list [ … ]", $"\"{key}\": [ … ]", context.Owner));
         return [];
+    }
+
+    /// <summary>A list that must be given and must hold something.</summary>
+    public IReadOnlyList<JsonValue> Filled(string key)
+    {
+        if (Find(key) is JsonArray { Items.Count: 0 } empty)
+            context.Add(KeyProblems.EmptyList(empty.At, key, shape.Must.First(must => must.Key == key).Paste, context.Owner));
+        return List(key);
     }
 
     public ObjectReader? Object(string key, ObjectShape shape) => Find(key) is { } value ? Open(value, key, shape, context) : null;

@@ -34,7 +34,7 @@ internal static partial class Values
     {
         if (value is not JsonNumber number)
         {
-            context.Add(KeyProblems.WrongType(value, key, "a number", $"\"{key}\": {range.Example}", context.Owner));
+            context.Add(KeyProblems.WrongType(value, key, "a number", $"\"{key}\": {Meant(value, range) ?? range.Example}", context.Owner));
             return null;
         }
         if (range.Holds(number.Value))
@@ -77,6 +77,16 @@ internal static partial class Values
         return null;
     }
 
+    /// <summary>The number that stands between quotation marks, if it is one that the key can have.</summary>
+    private static string? Meant(JsonValue value, NumberRange range) => value is JsonText { Value: var text }
+        && double.TryParse(text, NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out var number)
+        && double.IsFinite(number) && range.Holds(number)
+            ? Bare(text, number)
+            : null;
+
+    private static string Bare(string text, double number) =>
+        JsonForm.IsMatch(text) ? text : number.ToString("R", CultureInfo.InvariantCulture);
+
     private static Dictionary<string, string> ByLanguage(JsonObject json, string key, ReadContext context)
     {
         var texts = new Dictionary<string, string>();
@@ -101,6 +111,9 @@ internal static partial class Values
             return true;
         return false;
     }
+
+    [GeneratedRegex("^-?(0|[1-9][0-9]*)([.][0-9]+)?([eE][+-]?[0-9]+)?$")]
+    private static partial Regex JsonForm { get; }
 
     [GeneratedRegex("^[a-z]{2,3}(-[A-Za-z0-9]{2,8})*$")]
     private static partial Regex LanguageTag { get; }

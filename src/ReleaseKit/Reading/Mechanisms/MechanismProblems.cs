@@ -36,11 +36,11 @@ internal static class MechanismProblems
         "adding is never too little.",
         $"nothing, or name \"{id}\" under \"together\".");
 
-    public static Finding UnknownMechanism(Place at, string id, IEnumerable<string> known, FindingOwner owner) => new(
+    public static Finding UnknownMechanism(Place at, string id, IReadOnlyCollection<string> known, FindingOwner owner) => new(
         FindingLevel.Stop, "unknown-mechanism", owner, at,
         $"\"{KeyProblems.Cut(id)}\" is no mechanism of mechanisms.json.",
         "no margin can be worked out without it.",
-        Nearest.Of(id, known) is { } near ? $"write \"{near}\"." : $"add a mechanism with this id to mechanisms.json, or name one of: {string.Join(", ", known)}.");
+        Nearest.Of(id, known) is { } near ? $"write \"{near}\"." : $"add a mechanism with this id to mechanisms.json{(known.Count > 0 ? $", or name one of: {string.Join(", ", known)}" : ", which has none")}.");
 
     public static Finding ParameterMissing(Place at, string law, string key, FindingOwner owner) => new(
         FindingLevel.Stop, "parameter-missing", owner, at,

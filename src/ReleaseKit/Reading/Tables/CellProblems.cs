@@ -8,7 +8,7 @@ internal static class CellProblems
 {
     public static Finding Number(Place at, string column, string text, NumberFault fault, FindingOwner owner)
     {
-        var (slug, what, how) = Say(fault);
+        var (slug, what, how) = Say(fault, MeantNumber.Of(text, fault));
         return new Finding(
             FindingLevel.Stop, slug, owner, at,
             $"\"{KeyProblems.Cut(text)}\" in column \"{column}\" {what}.",
@@ -16,15 +16,15 @@ internal static class CellProblems
             how);
     }
 
-    private static (string Slug, string What, string How) Say(NumberFault fault) => fault switch
+    private static (string Slug, string What, string How) Say(NumberFault fault, string? meant) => fault switch
     {
         NumberFault.DecimalComma => ("csv-decimal-comma", "has a decimal comma",
-            "export the table with a point as decimal sign: 12.5. In a spreadsheet set the language of the file to English before saving."),
+            $"export the table with a point as decimal sign: {meant ?? "12.5"}. In a spreadsheet set the language of the file to English before saving."),
         NumberFault.ThousandsMarks => ("csv-thousands", "has marks between thousands",
-            "export bare digits: 1240. In a spreadsheet set the cells to the format \"Number\" without thousands marks before saving."),
-        NumberFault.Exponent => ("csv-number", "is written with an exponent", "export all digits: 120000. In a spreadsheet set the cells to the format \"Number\"."),
-        NumberFault.PlusSign => ("csv-number", "begins with a plus sign", "write the number without it."),
-        NumberFault.OtherMinus => ("csv-number", "begins with a dash or a typographic minus", "write the hyphen of the keyboard: -7."),
+            $"export bare digits: {meant ?? "1240"}. In a spreadsheet set the cells to the format \"Number\" without thousands marks before saving."),
+        NumberFault.Exponent => ("csv-number", "is written with an exponent", $"export all digits: {meant ?? "120000"}. In a spreadsheet set the cells to the format \"Number\"."),
+        NumberFault.PlusSign => ("csv-number", "begins with a plus sign", meant is null ? "write the number without it." : $"write the number without it: {meant}."),
+        NumberFault.OtherMinus => ("csv-number", "begins with a dash or a typographic minus", $"write the hyphen of the keyboard: {meant ?? "-7"}."),
         NumberFault.Percent => ("csv-number", "has a per cent sign", "write the number alone, and \"kind\": \"share\" in release.json."),
         NumberFault.TooLong => ("csv-overflow", $"has more than 18 digits, or more than {FigureParser.MostDecimals} after the point",
             "no figure is known that well: round it as declared in \"afterwards\", or give it in a larger unit."),

@@ -29,8 +29,8 @@ internal static class TableDraftReader
             return null;
         var id = ReadId(keys);
         var file = keys.Text("file");
-        var stub = keys.List("stub").Select(one => ReadStub(one, context)).OfType<StubDraft>().ToList();
-        var figures = keys.List("figures").Select(one => FigureDraftReader.Read(one, units, context)).OfType<FigureDraft>().ToList();
+        var stub = keys.Filled("stub").Select(one => ReadStub(one, context)).OfType<StubDraft>().ToList();
+        var figures = keys.Filled("figures").Select(one => FigureDraftReader.Read(one, units, context)).OfType<FigureDraft>().ToList();
         var rest = Rest(keys);
         CheckRows(keys);
         return id is null || file is null || stub.Count == 0 || figures.Count == 0

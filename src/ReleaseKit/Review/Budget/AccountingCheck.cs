@@ -38,10 +38,10 @@ internal sealed class AccountingCheck : IReviewCheck
     }
 
     private static Finding SpentNeeded(MechanismSpending spending, NoiseAccount account) => new(
-        FindingLevel.Stop, "spent-needed", FindingOwner.Noise, spending.Mechanism.At,
-        $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\" and {(spending.Mechanism.Spent is null ? "does not say what it spent" : "declares an epsilon and delta that it never meets")}.",
+        FindingLevel.Stop, "spent-needed", FindingOwner.Noise, BudgetText.PlaceOf(spending.Mechanism, "spent"),
+        $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\" and {(spending.Mechanism.Spent is null ? "does not say what it spent" : "declares a \"spent\" that it never meets, whatever the epsilon, at that delta")}.",
         "this law has no epsilon without a delta; the office chooses the pair, and it is checked against the law.",
-        $"add {SpentOf(spending, account)}, or another pair of its curve.");
+        $"{(spending.Mechanism.Spent is null ? "add" : "write")} {SpentOf(spending, account)}, or another pair of its curve.");
 
     private static Finding Unknown(Mechanism mechanism) => new(
         FindingLevel.Stop, "loss-unknown", FindingOwner.Noise, mechanism.At,

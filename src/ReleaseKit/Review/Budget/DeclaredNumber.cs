@@ -1,5 +1,5 @@
 using System.Globalization;
-using ReleaseKit.Privacy;
+using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Privacy.Losses;
 using ReleaseKit.Releases;
 
@@ -24,7 +24,7 @@ internal sealed record DeclaredNumber(string Name, double Declared, double Lower
             yield return new DeclaredNumber("rho", rho, loss.Concentrated.Lower.Value, loss.Concentrated.Upper.Value);
         if (declared.Epsilon is not { } epsilon)
             yield break;
-        var bounds = loss.EpsilonAt(Delta.AtMost(declared.Delta ?? 0));
+        var bounds = DeclaredDelta.EpsilonAt(loss, declared.Delta);
         var name = declared.Delta is > 0 and var delta ? $"epsilon at delta {BudgetText.Plain(delta)}" : "epsilon";
         yield return new DeclaredNumber(name, epsilon, bounds.Lower.Value, bounds.Upper.Value);
     }

@@ -11,11 +11,30 @@ internal sealed class ExactCountCheck : IReviewCheck
 
     private static Finding? Found(Release release, Table table, Measure measure)
     {
-        if (measure.Kind != MeasureKind.Count || measure.Unit.Key != release.Noise.Who.Key)
+        var isNamed = measure.Unit.Key.Length > 0;
+        var isOfUnits = measure.Kind is MeasureKind.Count or MeasureKind.Estimate && isNamed && IsSame(measure.Unit, release.Noise.Who);
+        if (!isOfUnits && (measure.Kind != MeasureKind.Count || isNamed))
             return null;
         var rows = Enumerable.Range(0, measure.RuleOf.Length).Where(row => measure.RuleAt(row) is NoiseRule.Exact && measure.HasNumber(row)).ToList();
-        return rows.Count == 0 ? null : Exact(release, FigureAddress.Canonical(table, measure, rows[0]), rows.Count);
+        if (rows.Count == 0)
+            return null;
+        var address = FigureAddress.Canonical(table, measure, rows[0]);
+        return isOfUnits ? Exact(release, address, rows.Count) : WithoutUnit(release, measure, address);
     }
+
+    // The key, the singular and the plural are one unit, however each of the two files writes it.
+    private static bool IsSame(Unit one, Unit other) => Words(one).Intersect(Words(other), StringComparer.OrdinalIgnoreCase).Any();
+
+    private static IEnumerable<string> Words(Unit unit) => unit.Forms.Values.SelectMany(forms => new[] { forms.One, forms.Other }).Append(unit.Key);
+
+    private static Finding WithoutUnit(Release release, Measure measure, string address) => new(
+        FindingLevel.Caution, "exact-count-without-unit", FindingOwner.Noise, new Place("release.json"),
+        $"{address} is an exact count, and column \"{measure.Column}\" does not say of what.",
+        $"an exact number of {BudgetText.Other(release.Noise)} would protect nobody: one {BudgetText.One(release.Noise)} more or less changes it.",
+        $"give the figures \"{measure.Column}\" their \"unit\" in release.json; noise them if they count {BudgetText.Other(release.Noise)}.")
+    {
+        Address = address,
+    };
 
     private static Finding Exact(Release release, string address, int count) => new(
         FindingLevel.Stop, "exact-unit-count", FindingOwner.Noise, new Place("release.json"),

@@ -143,6 +143,29 @@ public sealed class BudgetCheckTests
         folder.HasNo("exact-unit-count");
     }
 
+    [Theory]
+    [InlineData("\"lamps\"", "count")]
+    [InlineData("{ \"one\": \"Lamp\", \"other\": \"lamps\" }", "count")]
+    [InlineData("\"lamp\"", "estimate")]
+    public void Exact_number_of_units_is_recognised_in_any_form_and_as_an_estimate(string who, string kind)
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "\"kind\": \"count\", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", $"\"kind\": \"{kind}\", \"noise\": [ {{ \"exact\": \"audited\" }} ]")
+            .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", $"\"who\": {who}");
+        Assert.StartsWith("Stop ", folder.Text("exact-unit-count"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Exact_count_that_does_not_say_of_what_is_a_caution()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "\"title\": \"Lamps broken\", \"unit\": \"lamp\", \"kind\": \"count\", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "\"title\": \"Lamps broken\", \"kind\": \"count\", \"noise\": [ { \"exact\": \"audited\" } ]");
+        var text = folder.Text("exact-count-without-unit");
+        Assert.StartsWith("Caution ", text, StringComparison.Ordinal);
+        Assert.Contains("give the figures \"broken\" their \"unit\"", text, StringComparison.Ordinal);
+        folder.HasNo("exact-unit-count");
+    }
+
     [Fact]
     public void Value_off_the_grid_of_its_noise_is_a_stop()
     {

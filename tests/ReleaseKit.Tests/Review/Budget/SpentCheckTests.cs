@@ -101,6 +101,30 @@ public sealed class SpentCheckTests
         folder.HasNo("spent-too-low");
     }
 
+    [Fact]
+    public void Pair_that_a_law_never_meets_is_told_once_with_one_that_it_meets()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"");
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-uniform", "halfWidth": 12, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0, "delta": 0.01 } }""");
+        Assert.Contains("Do: write \"spent\": { \"epsilon\": 0, \"delta\": 0.04000004 }", folder.Text("spent-needed"), StringComparison.Ordinal);
+        folder.HasNo("spent-too-low");
+    }
+
+    /// <summary>By hand: moved by 1, the table's end (0.1) has no counterpart, and elsewhere the chances differ by the factor 2 at most, so δ(ln 2) = 0.1.</summary>
+    [Fact]
+    public void Pair_that_a_table_meets_exactly_is_enough()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"")
+            .With("tables/noise.csv", "noise,probability\n-2,0.1\n-1,0.2\n0,0.4\n1,0.2\n2,0.1\n");
+        folder.WithLit("""{ "id": "lamps-lit", "law": "tabulated", "file": "tables/noise.csv", "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0.7, "delta": 0.1 } }""");
+        folder.HasNo("spent-needed");
+        folder.HasNo("spent-below-proof");
+        folder.Edit("mechanisms.json", "\"delta\": 0.1 ", "\"delta\": 0.09 ");
+        Assert.Contains("\"delta\": 0.1000002 }", folder.Text("spent-needed"), StringComparison.Ordinal);
+    }
+
     private static string Spent(string sigma, string cells, string spent) =>
         $$"""{ "id": "lamps-lit", "law": "discrete-gaussian", "sigma": {{sigma}}, "sensitivity": { "cellsPerUnit": {{cells}}, "perCell": 1 }, "spent": { {{spent}} } }""";
 }

@@ -1,0 +1,21 @@
+using ReleaseKit.Privacy;
+using ReleaseKit.Privacy.Losses;
+
+namespace ReleaseKit.Appraisal.Budget;
+
+/// <summary>The ε of a mechanism at the δ that the office declares for it.</summary>
+internal static class DeclaredDelta
+{
+    private const double Tolerance = 1e-9;
+
+    /// <summary>
+    /// The smallest ε at a δ. Where the law never comes below a δ by no more than a billionth of it (the sum of a table's tail, worked out in
+    /// binary), that δ is met.
+    /// </summary>
+    public static Bounds<Epsilon> EpsilonAt(MechanismLoss loss, double? declared)
+    {
+        var delta = declared ?? 0;
+        var exact = loss.EpsilonAt(Delta.AtMost(delta));
+        return delta == 0 || exact.Upper.IsFinite ? exact : loss.EpsilonAt(Delta.AtMost(delta * (1 + Tolerance)));
+    }
+}
