@@ -1,5 +1,6 @@
 using AngleSharp.Dom;
 using AngleSharp.Html.Parser;
+using ReleaseKit.Releases;
 using Xunit;
 
 namespace ReleaseKit.Tests.Pages;
@@ -28,6 +29,26 @@ public sealed class SiteTests : IDisposable
         Assert.Contains("It covers the figures with noise. The figures published exactly have no limit", documents["methods.html"], StringComparison.Ordinal);
         Assert.Matches(@"[0-9.]+ of [0-9.]+ authorised, in (rho|epsilon) \(.\), for the figures with noise", documents["index.html"]);
         Assert.DoesNotContain("The whole release", documents["index.html"], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Downloads_name_the_coverages_and_the_pictures_of_headlines()
+    {
+        var page = ComposedPages().Single(page => page.Path == "downloads.html").Document.QuerySelector("main")!.TextContent;
+        Assert.Contains("at a coverage of 50 in 100", page, StringComparison.Ordinal);
+        Assert.Contains("at a coverage of 99 in 100", page, StringComparison.Ordinal);
+        Assert.Contains("A headline with its figure, as picture (PNG)", page, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Methods_say_that_continuous_noise_is_rounded_when_printed()
+    {
+        var release = PagesRelease.Make();
+        var gauss = release.Noise.Mechanisms[0] with { Id = "plain", Law = LawName.Gaussian };
+        PagesRelease.Compose(release with { Noise = release.Noise with { Mechanisms = [.. release.Noise.Mechanisms, gauss] } }, folder["site"]);
+        var page = new HtmlParser().ParseDocument(File.ReadAllText(folder["site/methods.html"]));
+        Assert.Contains("half a step of that rounding is added", page.QuerySelector("#law-gaussian")!.ParentElement!.TextContent, StringComparison.Ordinal);
+        Assert.EndsWith("rounded to the digits printed", page.QuerySelector("#mechanism-plain")!.TextContent, StringComparison.Ordinal);
     }
 
     private List<(string Path, IDocument Document)> ComposedPages()

@@ -1,4 +1,5 @@
 using System.Text.RegularExpressions;
+using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages.Downloads;
 
@@ -12,6 +13,11 @@ internal sealed partial record DownloadFile(string Path, int? Table, string Kind
     private static readonly string[] Order = ["wide", "long", "coverage", "lines", "columns"];
 
     public int Place => Array.IndexOf(Order, Kind);
+
+    /// <summary>What it holds, in words.</summary>
+    public string What(ILanguage language) => Kind == "coverage"
+        ? language.Text("downloads-page.what.coverage", ("number", OtherCoverage().Match(Path).Groups["number"].Value))
+        : language.Text("downloads-page.what." + Kind);
 
     public static DownloadFile Of(SiteContext context, string path)
     {
@@ -30,7 +36,7 @@ internal sealed partial record DownloadFile(string Path, int? Table, string Kind
         ".jsonl" => "lines",
         ".csv-metadata.json" => "columns",
         "-long.csv-metadata.json" => "columns",
-        var rest when OtherCoverage().IsMatch(rest) => "coverage",
+        var rest when OtherCoverage().Match(rest) is { Success: true, Index: 0 } => "coverage",
         _ => null,
     };
 
@@ -40,11 +46,12 @@ internal sealed partial record DownloadFile(string Path, int? Table, string Kind
         "derived.csv" => "derived",
         "checksums.txt" => "checksums",
         "release.zip" => "whole",
+        _ when name.StartsWith("headline.", StringComparison.Ordinal) => "headline",
         _ when name.EndsWith(".svg", StringComparison.Ordinal) => "picture-drawn",
         _ when name.EndsWith(".png", StringComparison.Ordinal) => "picture",
         _ => "other",
     };
 
-    [GeneratedRegex(@"^-[0-9.]+\.csv$")]
+    [GeneratedRegex(@"-(?<number>[0-9.]+)\.csv$")]
     private static partial Regex OtherCoverage();
 }

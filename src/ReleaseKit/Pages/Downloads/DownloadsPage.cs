@@ -32,7 +32,7 @@ internal static class DownloadsPage
     {
         ["name"] = Path.GetFileName(file.Path),
         ["href"] = Link.From(PageMap.Downloads, file.Path),
-        ["what"] = context.Language.Text("downloads-page.what." + file.Kind),
+        ["what"] = file.What(context.Language),
         ["size"] = FileSize.Of(site.LengthOf(file.Path), context.Language),
     }));
 }

@@ -17,7 +17,7 @@ internal static class LawModel
             ["id"] = "law-" + KeyOf(law),
             ["name"] = context.Language.Text(key),
             ["formula"] = new RawHtml(Formula.ToHtml(context.Language.Text(key + ".formula"))),
-            ["margin"] = new RawHtml(Formula.ToHtml(context.Language.Text(key + ".margin"))),
+            ["margin"] = new RawHtml(Formula.ToHtml(Margin(context, law, key))),
             ["source"] = context.Language.Text(key + ".source"),
             ["mechanisms"] = new ScriptArray(mechanisms.Select(mechanism => Row(context, mechanism))),
         };
@@ -43,10 +43,22 @@ internal static class LawModel
         ["answers"] = mechanism.Answers is { } answers ? context.In(answers) : "",
         ["parameters"] = string.Join(", ", Parameters(context, mechanism)),
         ["sensitivity"] = string.Join(", ", SensitivityOf(context, mechanism.Sensitivity)),
-        ["afterwards"] = mechanism.Afterwards.Count == 0
-            ? context.Language.Text("methods.no-steps")
-            : string.Join(", ", mechanism.Afterwards.Select(step => StepOf(context, step))),
+        ["afterwards"] = string.Join(", ", Afterwards(context, mechanism).DefaultIfEmpty(context.Language.Text("methods.no-steps"))),
     };
+
+    private static string Margin(SiteContext context, LawName law, string key) =>
+        context.Language.Text(key + ".margin") + (IsContinuous(law) ? " " + context.Language.Text("methods.margin.rounded") : "");
+
+    /// <summary>The declared steps; continuous noise is at least rounded to the digits printed.</summary>
+    private static IEnumerable<string> Afterwards(SiteContext context, Mechanism mechanism)
+    {
+        var steps = mechanism.Afterwards.Select(step => StepOf(context, step));
+        return IsContinuous(mechanism.Law) && !mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any()
+            ? steps.Append(context.Language.Text("methods.after.printed"))
+            : steps;
+    }
+
+    private static bool IsContinuous(LawName law) => law is LawName.Laplace or LawName.Gaussian or LawName.Uniform or LawName.Staircase;
 
     private static IEnumerable<string> Parameters(SiteContext context, Mechanism mechanism)
     {
