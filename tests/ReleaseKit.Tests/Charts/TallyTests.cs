@@ -155,6 +155,23 @@ public sealed class TallyTests
         TextBoxes.DemandInside(drawing, type);
     }
 
+    [Theory]
+    [InlineData(0.4353)]
+    [InlineData(0.4101)]
+    public void Label_of_the_whole_takes_no_place_from_the_label_of_a_mark(double whole)
+    {
+        using var type = TextBoxes.Type();
+        var account = AccountOf([0.1, 0.1364]) with { Whole = whole, Rest = new TallyPiece("Not spent", "", "0.1989", whole - 0.2364), WholeLabel = "0.4353 authorised" };
+
+        var drawing = WideTally.Of(account, type).Drawing;
+
+        var words = drawing.Marks.OfType<Shape.Words>().Where(words => words.Ink == Inks.TallyAxisText).ToList();
+        Assert.Contains(words, label => label.Text is "0.4" or "0.40");
+        Assert.True(words.Single(label => label.Text == account.WholeLabel).At.Y > words.Single(label => label.Text is "0.4" or "0.40").At.Y);
+        TextBoxes.DemandNoOverlap(drawing, type);
+        TextBoxes.DemandInside(drawing, type);
+    }
+
     private static DrawnTally Draw(TallyAccount account, bool lying, TypeCase type) => lying ? WideTally.Of(account, type) : UprightTally.Of(account, type);
 
     private static TallyAccount Account(int pieces)

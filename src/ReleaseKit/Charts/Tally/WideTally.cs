@@ -35,7 +35,7 @@ public static class WideTally
             .. Text(above, slot => top - FirstAbove - (slot * Line), top), .. Text(below, slot => foot + FirstBelow + (slot * Line), foot),
             .. TallyScale.Lying(account, type, Left, right, axis),
         ];
-        return new DrawnTally(new Drawing(width, axis + 27, shapes), [.. above.Unlabelled, .. below.Unlabelled]);
+        return new DrawnTally(new Drawing(width, axis + 45, shapes), [.. above.Unlabelled, .. below.Unlabelled]);
     }
 
     private static IEnumerable<Shape> Solid(IReadOnlyList<Slice> slices, double top) =>
