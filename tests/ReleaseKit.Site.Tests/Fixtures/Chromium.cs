@@ -10,6 +10,9 @@ public sealed class Chromium : IAsyncLifetime
 {
     public const string Origin = "http://release.test";
     private const string ContentSecurityPolicy = "default-src 'none'; script-src 'self'; style-src 'self'; img-src 'self'; font-src 'self'; base-uri 'none'; form-action 'none'; frame-ancestors 'none'";
+
+    // Browsers wait long on a machine that also runs simulations; the default of 30 s would turn load into failures.
+    private const float PatienceInMilliseconds = 180_000;
     private IPlaywright? playwright;
     private IBrowser? browser;
 
@@ -35,6 +38,7 @@ public sealed class Chromium : IAsyncLifetime
             ReducedMotion = ReducedMotion.Reduce,
             BypassCSP = bypassPolicy,
         });
+        context.SetDefaultTimeout(PatienceInMilliseconds);
         var opened = new OpenPage(context, await context.NewPageAsync());
         await context.RouteAsync("**/*", route => AnswerAsync(route, sample, opened));
         await opened.Page.GotoAsync($"{Origin}/{path}");
