@@ -1,4 +1,4 @@
-namespace ReleaseKit.Site.Tests.Fixtures;
+namespace ReleaseKit.Testing;
 
 /// <summary>A folder of the test's own, gone afterwards.</summary>
 public sealed class TemporaryFolder : IDisposable
@@ -6,6 +6,14 @@ public sealed class TemporaryFolder : IDisposable
     public string Path { get; } = Directory.CreateTempSubdirectory("releasekit-").FullName;
 
     public string In(string name) => System.IO.Path.Combine(Path, name);
+
+    public string Write(string name, string text)
+    {
+        var file = In(name);
+        Directory.CreateDirectory(System.IO.Path.GetDirectoryName(file)!);
+        File.WriteAllText(file, text);
+        return file;
+    }
 
     public void Dispose() => Directory.Delete(Path, recursive: true);
 }

@@ -1,4 +1,4 @@
-namespace ReleaseKit.Site.Tests.Fixtures;
+namespace ReleaseKit.Testing;
 
 /// <summary>Where the repository lies, found from the test program's own place.</summary>
 public static class Repository
@@ -6,6 +6,8 @@ public static class Repository
     public static string Root { get; } = FindRoot(AppContext.BaseDirectory);
 
     public static string Sample => Path.Combine(Root, "sample-release");
+
+    public static string Release(string name) => Path.Combine(Root, "tests", "releases", name);
 
     private static string FindRoot(string from) => File.Exists(Path.Combine(from, "ReleaseKit.sln"))
         ? from
