@@ -40,8 +40,10 @@ internal static class ComposeCommand
         using var target = SiteFolder.Open(site);
         var budget = BudgetStatement.Of(appraised.Release);
         ProgressReport.Around(talk, FigureCount(appraised), progress => Site.Compose(appraised, language, budget, templates, target, progress));
-        target.Finish();
+        var changes = target.Finish();
         talk.Result($"Composed {Path.Combine(site, "index.html")}");
+        foreach (var line in ChangeText.Of(changes, target))
+            talk.Result(line);
     }
 
     private static long FigureCount(IAppraisedRelease appraised) =>

@@ -52,7 +52,10 @@ public static class HelpText
         FOLDER is reviewed first. With any stop nothing is written.
         SITE must be missing, empty, or a folder that compose wrote before. The new
         pages are made beside it and swapped in at the end, so a crash or a full
-        disk leaves what stood.
+        disk leaves what stood. The site that was replaced is kept as SITE.before,
+        only the last one. The last lines say what changed since, how to switch the
+        new site on, and the lines to paste to go back. If nothing changed, all is
+        left as it was.
 
         Options:
           --to SITE    where the publication goes

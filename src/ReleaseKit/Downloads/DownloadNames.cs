@@ -8,6 +8,8 @@ namespace ReleaseKit.Downloads;
 public static class DownloadNames
 {
     public const string Folder = "downloads/";
+    private const string LongEnd = "-long.csv";
+
     public const string Budget = Folder + "budget.json";
     public const string Checksums = Folder + "checksums.txt";
 
@@ -18,7 +20,11 @@ public static class DownloadNames
     public static string WideAt(Table table, Coverage coverage) => $"{Folder}{table.Id}-{Percent(coverage)}.csv";
 
     /// <summary>One row a figure.</summary>
-    public static string Long(Table table) => $"{Folder}{table.Id}-long.csv";
+    public static string Long(Table table) => $"{Folder}{table.Id}{LongEnd}";
+
+    /// <summary>The id of the table whose long file this is; null for any other path.</summary>
+    public static string? TableOfLong(string path) =>
+        path.StartsWith(Folder, StringComparison.Ordinal) && path.EndsWith(LongEnd, StringComparison.Ordinal) ? path[Folder.Length..^LongEnd.Length] : null;
 
     /// <summary>One JSON object a figure, with its noise law and draws.</summary>
     public static string JsonLines(Table table) => $"{Folder}{table.Id}.jsonl";

@@ -14,6 +14,16 @@ internal static class FolderOwnership
             throw SiteFolderException.NotOurs(target);
     }
 
+    /// <exception cref="SiteFolderException">The place where the replaced site is kept holds something that is not ours.</exception>
+    public static void DemandBefore(string before)
+    {
+        if (File.Exists(before) || new DirectoryInfo(before).LinkTarget is not null || Directory.Exists(before) && !IsOurs(before))
+            throw SiteFolderException.BeforeIsNotOurs(before);
+    }
+
+    /// <summary>Whether the folder bears the marker of a composition.</summary>
+    public static bool IsComposed(string folder) => File.Exists(Path.Combine(folder, SiteFolder.Marker));
+
     /// <summary>Removes a folder of ours, the marker last, so that a removal cut off half-way can be taken up again.</summary>
     /// <exception cref="SiteFolderException">The folder is there and is not ours.</exception>
     public static void Remove(string folder)
@@ -29,5 +39,5 @@ internal static class FolderOwnership
     }
 
     private static bool IsOurs(string folder) =>
-        File.Exists(Path.Combine(folder, SiteFolder.Marker)) || !Directory.EnumerateFileSystemEntries(folder).Any();
+        IsComposed(folder) || !Directory.EnumerateFileSystemEntries(folder).Any();
 }

@@ -2,7 +2,9 @@ using System.Runtime.InteropServices;
 
 namespace ReleaseKit.Pages;
 
-/// <summary>Puts one folder in the place of another: in one step where the system can exchange two names, else in two renames.</summary>
+/// <summary>
+/// Puts the new site in the place of what stood, which is kept beside it: in one step where the system can exchange two names, else in two renames.
+/// </summary>
 internal static partial class FolderSwap
 {
     // From linux/fcntl.h and linux/fs.h.
@@ -13,10 +15,26 @@ internal static partial class FolderSwap
     {
         if (!Directory.Exists(paths.Target))
             Directory.Move(paths.New, paths.Target);
-        else if (TryExchange(paths.New, paths.Target))
-            FolderOwnership.Remove(paths.New);
         else
-            RenameTwice(paths);
+        {
+            if (TryExchange(paths.New, paths.Target))
+                Directory.Move(paths.New, paths.Old);
+            else
+                RenameTwice(paths);
+            Keep(paths);
+        }
+    }
+
+    /// <summary>What was replaced takes the place of what was kept before; an empty folder is not worth keeping. Cut off, it can be taken up again.</summary>
+    public static void Keep(SwapPaths paths)
+    {
+        if (!FolderOwnership.IsComposed(paths.Old))
+        {
+            FolderOwnership.Remove(paths.Old);
+            return;
+        }
+        FolderOwnership.Remove(paths.Before);
+        Directory.Move(paths.Old, paths.Before);
     }
 
     /// <summary>Cut off between its renames, it leaves the old site beside the target, from where the next run puts it back.</summary>
@@ -24,7 +42,6 @@ internal static partial class FolderSwap
     {
         Directory.Move(paths.Target, paths.Old);
         Directory.Move(paths.New, paths.Target);
-        FolderOwnership.Remove(paths.Old);
     }
 
     internal static bool TryExchange(string one, string other)

@@ -4,8 +4,8 @@ namespace ReleaseKit.Pages;
 
 /// <summary>
 /// The folder of a publication while it is being composed. Everything is written beside the target and swapped in by
-/// <see cref="Finish"/>: until then, and whatever happens, what stood before stands whole. A target must be missing, empty, or bear the
-/// marker that <see cref="Finish"/> leaves.
+/// <see cref="Finish"/>: until then, and whatever happens, what stood before stands whole; afterwards it is kept as <see cref="Before"/>.
+/// A target must be missing, empty, or bear the marker that <see cref="Finish"/> leaves.
 /// </summary>
 public sealed class SiteFolder : IDisposable
 {
@@ -27,6 +27,9 @@ public sealed class SiteFolder : IDisposable
     /// <summary>Full path of the folder that will be there at the end.</summary>
     public string Target => paths.Target;
 
+    /// <summary>Full path of the folder where the site that was replaced is kept, beside the target.</summary>
+    public string Before => paths.Before;
+
     /// <summary>Paths written so far, in the site's notation with slashes, sorted.</summary>
     public IReadOnlyList<string> Written => [.. written.Keys.Order(StringComparer.Ordinal)];
 
@@ -43,6 +46,8 @@ public sealed class SiteFolder : IDisposable
             {
                 Recover(paths);
                 FolderOwnership.Demand(paths.Target);
+                if (FolderOwnership.IsComposed(paths.Target))
+                    FolderOwnership.DemandBefore(paths.Before);
                 Directory.CreateDirectory(paths.New);
                 File.WriteAllText(Path.Combine(paths.New, Marker), MarkerText);
                 return new SiteFolder(paths, hold);
@@ -85,12 +90,16 @@ public sealed class SiteFolder : IDisposable
     /// <summary>Opens a file written and closed before, to read it again (checksums, the release's zip).</summary>
     public Stream Read(string path) => File.OpenRead(Path.Combine(paths.New, path));
 
-    /// <summary>Swaps the new site in for what stood at the target.</summary>
-    public void Finish()
+    /// <summary>Swaps the new site in for what stood at the target, unless the two are the same: then all stays as it was.</summary>
+    /// <returns>What changed since the last composing; null if there was none.</returns>
+    public SiteChanges? Finish()
     {
         try
         {
-            FolderSwap.Swap(paths);
+            var changes = FolderOwnership.IsComposed(paths.Target) ? SiteChanges.Between(paths.Target, paths.New) : null;
+            if (changes is not { IsNone: true })
+                FolderSwap.Swap(paths);
+            return changes;
         }
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
         {
@@ -121,7 +130,11 @@ public sealed class SiteFolder : IDisposable
     {
         if (Directory.Exists(paths.Old) && !Path.Exists(paths.Target))
             Directory.Move(paths.Old, paths.Target);
-        FolderOwnership.Remove(paths.Old);
+        if (Directory.Exists(paths.Old))
+        {
+            FolderOwnership.DemandBefore(paths.Before);
+            FolderSwap.Keep(paths);
+        }
         FolderOwnership.Remove(paths.New);
     }
 }

@@ -21,6 +21,9 @@ public sealed class SiteFolderException : Exception
     internal static SiteFolderException NotOurs(string target) =>
         new($"{target} holds files that were not composed here; nothing was changed. Give a folder that is missing, empty or was composed before.");
 
+    internal static SiteFolderException BeforeIsNotOurs(string before) =>
+        new($"{before} was not composed here, and the site that is replaced is to be kept there; nothing was changed. Move it away, or compose to another folder.");
+
     internal static SiteFolderException InUse(string target) => new($"{target} is being composed by another run; wait for it to end.");
 
     internal static SiteFolderException CannotWrite(string target, Exception inner) => new($"{target} cannot be written: {inner.Message}", inner);

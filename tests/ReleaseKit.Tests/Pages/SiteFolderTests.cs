@@ -36,7 +36,66 @@ public sealed class SiteFolderTests : IDisposable
         Compose("two");
         Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
         Assert.False(File.Exists(folder["site/old.html"]));
-        Assert.Equal(["site"], Neighbours());
+        Assert.Equal(["site", "site.before"], Neighbours());
+    }
+
+    [Fact]
+    public void Site_replaced_is_kept_beside_and_only_the_last_one()
+    {
+        Compose("one", "old.html");
+        Compose("two");
+        Compose("three");
+        Assert.Equal("three", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal("two", File.ReadAllText(folder["site.before/index.html"]));
+        Assert.False(File.Exists(folder["site.before/old.html"]));
+        Assert.Equal(["site", "site.before"], Neighbours());
+    }
+
+    [Fact]
+    public void Composing_the_same_again_leaves_all_as_it_was()
+    {
+        Compose("one");
+        Compose("two");
+        var stood = Directory.GetCreationTimeUtc(Target);
+        Assert.True(Compose("two")!.IsNone);
+        Assert.Equal(stood, Directory.GetCreationTimeUtc(Target));
+        Assert.Equal("one", File.ReadAllText(folder["site.before/index.html"]));
+        Assert.Equal(["site", "site.before"], Neighbours());
+    }
+
+    [Fact]
+    public void First_composing_has_nothing_to_compare_with() => Assert.Null(Compose("one"));
+
+    [Fact]
+    public void Changes_count_pages_and_other_files()
+    {
+        Compose("one", "same.html", "gone.html", "gone.css");
+        var changes = Compose("two", "same.html", "new.html", "new.svg", "new.css");
+        Assert.Equal(new FileChanges(New: 1, Changed: 1, Gone: 1), changes!.Pages);
+        Assert.Equal(new FileChanges(New: 2, Changed: 0, Gone: 1), changes.Others);
+        Assert.Empty(changes.Figures);
+    }
+
+    [Fact]
+    public void Changed_figures_are_found_by_address_wherever_their_row_stands()
+    {
+        ComposeTable("t/n?a=1,5\nt/n?a=2,6\nt/n?a=3,7\nt/n?a=4,8\n");
+        var changes = ComposeTable("t/n?a=3,7\nt/n?a=1,5\nt/n?a=2,66\nt/n?a=5,9\nt/n?a=6,9\n");
+        Assert.Equal([new FigureChanges("t", New: 2, Changed: 1, Gone: 1)], changes!.Figures);
+    }
+
+    [Fact]
+    public void Folder_of_others_where_the_replaced_site_is_to_be_kept_is_refused_and_untouched()
+    {
+        Compose("one");
+        Directory.CreateDirectory(folder["site.before"]);
+        File.WriteAllText(folder["site.before/letter.txt"], "mine");
+        var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
+        Assert.Contains("site.before was not composed here", fault.Message, StringComparison.Ordinal);
+        Assert.DoesNotContain('\n', fault.Message);
+        Assert.Equal("mine", File.ReadAllText(folder["site.before/letter.txt"]));
+        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal(["site", "site.before"], Neighbours());
     }
 
     [Fact]
@@ -98,7 +157,7 @@ public sealed class SiteFolderTests : IDisposable
         LeaveBehind(".site.releasekit-new", "half");
         Compose("two");
         Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
-        Assert.Equal(["site"], Neighbours());
+        Assert.Equal(["site", "site.before"], Neighbours());
     }
 
     [Fact]
@@ -112,13 +171,14 @@ public sealed class SiteFolderTests : IDisposable
     }
 
     [Fact]
-    public void Run_cut_off_after_the_swap_is_cleared_away()
+    public void Run_cut_off_after_the_swap_is_taken_up_again()
     {
         Compose("two");
         LeaveBehind(".site.releasekit-old", "one");
         using (SiteFolder.Open(Target))
             Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
-        Assert.Equal(["site"], Neighbours());
+        Assert.Equal("one", File.ReadAllText(folder["site.before/index.html"]));
+        Assert.Equal(["site", "site.before"], Neighbours());
     }
 
     [Fact]
@@ -126,9 +186,12 @@ public sealed class SiteFolderTests : IDisposable
     {
         Compose("one");
         LeaveBehind(".site.releasekit-new", "two");
-        FolderSwap.RenameTwice(SwapPaths.Beside(Target));
+        var paths = SwapPaths.Beside(Target);
+        FolderSwap.RenameTwice(paths);
+        FolderSwap.Keep(paths);
         Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
-        Assert.Equal(["site"], Neighbours());
+        Assert.Equal("one", File.ReadAllText(folder["site.before/index.html"]));
+        Assert.Equal(["site", "site.before"], Neighbours());
     }
 
     [Fact]
@@ -166,13 +229,20 @@ public sealed class SiteFolderTests : IDisposable
         Assert.Throws<ArgumentException>(() => site.Write("A.html", "y"u8));
     }
 
-    private void Compose(string home, params string[] others)
+    private SiteChanges? Compose(string home, params string[] others)
     {
         using var site = SiteFolder.Open(Target);
         site.Write("index.html", Encoding.UTF8.GetBytes(home));
         foreach (var other in others)
             site.Write(other, "x"u8);
-        site.Finish();
+        return site.Finish();
+    }
+
+    private SiteChanges? ComposeTable(string rows)
+    {
+        using var site = SiteFolder.Open(Target);
+        site.Write("downloads/t-long.csv", Encoding.UTF8.GetBytes("address,value\n" + rows));
+        return site.Finish();
     }
 
     private void LeaveBehind(string name, string home)
