@@ -22,8 +22,8 @@ internal static class LineMark
         return subject.IsStemAlone ? DrawStem(figure, subject, language) : DrawRule(figure, subject, language);
     }
 
+    // Without noise there is no scale to show.
     private static string DrawStem(AppraisedFigure figure, MarkSubject subject, ILanguage language) => Marks.Open("line-bar", Width, 48, Marks.Description(figure, language))
-        .AppendPath("hair", "M8 24H372")
         .Append(SvgMark.Paint(SwelledRule.Of(subject, new(subject.Value - 1, subject.Value + 1, Left, Right), MarkSize.Line).Shapes))
         .Append("</svg>").ToString();
 
@@ -32,7 +32,7 @@ internal static class LineMark
         var (from, to) = Ends(subject);
         var rule = SwelledRule.Of(subject, new(from.ToDouble(), to.ToDouble(), Left, Right), MarkSize.Line);
         var labels = LabelsOf(figure, language, from, to, rule.Stops!.Value);
-        var svg = Marks.Open("line-bar", Width, labels.EndLine + Gap, Marks.Description(figure, language))
+        var svg = Marks.Open("line-bar", Width, SecondLine + Gap, Marks.Description(figure, language))
             .AppendPath("hair", "M8 24H372").AppendPath("hair", "M8 18V30M372 18V30")
             .Append(SvgMark.Paint(rule.Shapes));
         return labels.Append(svg).Append("</svg>").ToString();
@@ -58,21 +58,15 @@ internal static class LineMark
         return new(language.Number(from), language.WithUnit(to, figure.Measure.Unit), language.Number(printed.Low), language.Number(printed.High), stops);
     }
 
-    /// <summary>The four labels; the ends of the scale move to a second line where they would touch the ends of the range.</summary>
+    /// <summary>The four labels: the ends of the range under its stops, the ends of the scale on a line of their own, so that they never touch.</summary>
     private sealed record Labels(string From, string To, string Low, string High, (double Left, double Right) Stops)
     {
         private double LowEnd => Math.Max(Stops.Left - 2, LabelWidth.Of(Low, LabelSize));
         private double HighStart => Math.Min(Stops.Right + 2, Width - LabelWidth.Of(High, LabelSize));
 
-        public double EndLine =>
-            Gap + LabelWidth.Of(From, LabelSize) + Gap > LowEnd - LabelWidth.Of(Low, LabelSize)
-            || Width - Gap - LabelWidth.Of(To, LabelSize) - Gap < HighStart + LabelWidth.Of(High, LabelSize)
-                ? SecondLine
-                : LabelLine;
-
         public StringBuilder Append(StringBuilder svg) => svg
-            .AppendLabel("axlab", Gap, EndLine, From)
-            .AppendLabel("axlab", Width - Gap, EndLine, To, atEnd: true)
+            .AppendLabel("axlab", Gap, SecondLine, From)
+            .AppendLabel("axlab", Width - Gap, SecondLine, To, atEnd: true)
             .AppendLabel("endlab", LowEnd, LabelLine, Low, atEnd: true)
             .AppendLabel("endlab", HighStart, LabelLine, High);
     }

@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.IO.Compression;
 using AngleSharp.Dom;
 using ReleaseKit.Appraisal;
@@ -144,10 +145,10 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
     }
 
     [Fact]
-    public void Notes_stand_beside_what_they_are_for()
+    public void Notes_stand_beside_what_they_are_for_lettered_in_the_order_of_the_rows()
     {
-        Assert.Equal("a", RowOf("Skerry End").QuerySelector("th .nt")!.TextContent);
-        Assert.Equal("b", RowOf("Old Kiln").QuerySelector("td.mg.k1 .nt")!.TextContent);
+        Assert.Equal("a", RowOf("Old Kiln").QuerySelector("td.mg.k1 .nt")!.TextContent);
+        Assert.Equal("b", RowOf("Skerry End").QuerySelector("th .nt")!.TextContent);
         Assert.Equal(2, page.QuerySelectorAll("table.sheet .nt").Length);
         Assert.Equal(["a", "b"], page.QuerySelectorAll(".sheet-notes sup").Select(mark => mark.TextContent));
     }
@@ -270,6 +271,19 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         Assert.False(ticks[0].ClassList.Contains("odd"));
         Assert.False(ticks[^1].ClassList.Contains("odd"));
     });
+
+    [Fact]
+    public void Axis_of_a_page_with_one_total_is_labelled_at_its_ends()
+    {
+        using var cut = TableSite.Of(WardTable.Build(isCut: true));
+
+        var labels = cut.Page().QuerySelectorAll("table.sheet > thead th.k1 svg.axis text");
+
+        Assert.Equal(["axlab start", "axlab end"], labels.Select(label => label.ClassName));
+        Assert.InRange(3418, Number(labels[0]), Number(labels[1]));
+    }
+
+    private static double Number(IElement label) => double.Parse(label.TextContent, NumberStyles.AllowThousands, CultureInfo.InvariantCulture);
 
     private IEnumerable<AppraisedFigure> Figures() =>
         from measure in Enumerable.Range(0, 4)

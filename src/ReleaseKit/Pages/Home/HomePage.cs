@@ -19,6 +19,7 @@ internal static class HomePage
         model["key"] = new RawHtml(Marks.Key(context.Release, context.Language));
         model["contents"] = Contents.Of(context);
         model["budget"] = PageMap.Budget;
+        model["unit"] = UnitText.One(context.Release.Noise.Who, context.Language.Tag);
         model["reading"] = PageMap.Reading;
         context.Write(site, head, "home.html", model);
     }

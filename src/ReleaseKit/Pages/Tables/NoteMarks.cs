@@ -23,36 +23,30 @@ internal sealed class NoteMarks
 
     public bool AreOn(IEnumerable<int> rows, string mark) => rowsOf.TryGetValue(mark, out var marked) && rows.Any(marked.Contains);
 
+    /// <summary>Letters in the order in which a reader meets them: row by row, and in a row from the stub to the right.</summary>
     public static NoteMarks Of(Table table)
     {
-        var number = 0;
-        var marks = table.Notes.Select(note => note.At is null ? "" : MarkOf(number++)).ToList();
-        var result = new NoteMarks([.. table.Notes.Zip(marks, (note, mark) => new MarkedNote(mark, note.Text))]);
-        foreach (var (note, mark) in table.Notes.Zip(marks).Where(pair => pair.First.At is not null))
-            result.Place(table, note.At!, mark);
+        var met = table.Notes.Where(note => note.At is not null).Select(note => (note.Text, Place: NotePlace.Of(table, note.At!)))
+            .OrderBy(note => note.Place.FirstRow).ThenBy(note => note.Place.Measure).ToList();
+        var result = new NoteMarks([
+            .. table.Notes.Where(note => note.At is null).Select(note => new MarkedNote("", note.Text)),
+            .. met.Select((note, index) => new MarkedNote(MarkOf(index), note.Text))]);
+        for (var index = 0; index < met.Count; index++)
+            result.Mark(met[index].Place, MarkOf(index));
         return result;
     }
 
     private static string MarkOf(int index) => index < Letters.Length ? Letters[index..(index + 1)] : MarkOf((index / Letters.Length) - 1) + Letters[index % Letters.Length];
 
-    // "?ward=Skerry%20End" is for rows, "in_arrears?ward=Skerry%20End" for figures; the table before a slash is this one.
-    private void Place(Table table, string at, string mark)
+    private void Mark(NotePlace place, string mark)
     {
-        var query = at.IndexOf('?', StringComparison.Ordinal);
-        var path = (query < 0 ? at : at[..query])[(at.LastIndexOf('/', query < 0 ? at.Length - 1 : Math.Max(query - 1, 0)) + 1)..];
-        var wanted = FigureAddress.ParseQuery(query < 0 ? "" : at[(query + 1)..], at);
-        var measure = path.Length == 0 ? -1 : table.Measures.ToList().FindIndex(one => one.Column == path);
-        var rows = Enumerable.Range(0, table.RowCount).Where(row => Matches(table, row, wanted)).ToHashSet();
-        rowsOf[mark] = rows;
-        foreach (var row in rows)
-            if (measure < 0)
+        rowsOf[mark] = place.Rows;
+        foreach (var row in place.Rows)
+            if (place.Measure < 0)
                 ofRow[row] = Joined(ofRow.GetValueOrDefault(row), mark);
             else
-                ofFigure[(measure, row)] = Joined(ofFigure.GetValueOrDefault((measure, row)), mark);
+                ofFigure[(place.Measure, row)] = Joined(ofFigure.GetValueOrDefault((place.Measure, row)), mark);
     }
 
     private static string Joined(string? before, string mark) => before is null ? mark : $"{before}, {mark}";
-
-    private static bool Matches(Table table, int row, IReadOnlyList<StubValue> wanted) =>
-        wanted.All(value => table.Stub.Any(column => column.Column == value.Column && column.LabelOf(row).Value == value.Value));
 }

@@ -9,6 +9,9 @@ internal sealed record CellScale(Scale Scale, PublishedValue? FromLabel, Publish
     public bool IsOwn => FromLabel is not null;
 }
 
+/// <summary>The scale whose ticks stand in the boxhead; its two ends as numbers where they are round, for ticks that stand at the ends.</summary>
+internal sealed record HeadScale(Scale Scale, IReadOnlyList<PublishedValue>? Ends);
+
 /// <summary>The scales of one page: for each measure the one that most of its rows have, whose ticks stand in the boxhead, and for other rows one of their own.</summary>
 internal sealed class PageScales
 {
@@ -26,15 +29,19 @@ internal sealed class PageScales
         measure => rows.Where(row => sheet.Table.Measures[measure].HasNumber(row.Row)).Select(row => sheet.Scales.Of(measure, row.Row))
             .GroupBy(scale => scale).MaxBy(group => group.Count())?.Key ?? new(0, 1)));
 
-    public Scale HeadOf(int measure) => new(heads[measure].From, heads[measure].To, Start, 100 - Start);
+    public HeadScale HeadOf(int measure) => heads[measure] is { FromLabel: { } from, ToLabel: { } to }
+        ? new(Between(heads[measure], OwnStart), [from, to])
+        : new(Between(heads[measure], Start), null);
 
     public CellScale Of(int measure, int row)
     {
         var reach = scales.Of(measure, row);
         return reach == heads[measure]
-            ? new(HeadOf(measure), null, null)
-            : new(new(reach.From, reach.To, OwnStart, 100 - OwnStart), LabelOf(reach.FromLabel, reach.From), LabelOf(reach.ToLabel, reach.To));
+            ? new(HeadOf(measure).Scale, null, null)
+            : new(Between(reach, OwnStart), LabelOf(reach.FromLabel, reach.From), LabelOf(reach.ToLabel, reach.To));
     }
+
+    private static Scale Between(Reach reach, double start) => new(reach.From, reach.To, start, 100 - start);
 
     private static PublishedValue LabelOf(PublishedValue? label, double end) => label ?? new((long)Math.Round(end), 0);
 }

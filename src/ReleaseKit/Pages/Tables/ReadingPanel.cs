@@ -16,8 +16,8 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
     // What figures alike have in common stands together and what differs last, so that a page of readings stays small on its way to the reader.
     public void Write(AppraisedFigure figure, SheetRow row)
     {
-        html.Raw("<details><summary><b>"u8).Text(row.Name).Raw("</b> "u8).Text(figure.Measure.Title.In(sheet.Language.Tag))
-            .Raw("</summary><div class=\"panel\" id=\""u8).Raw(figure.Id).Raw("\"><p class=\"panel-links\"><a href=\"#"u8).Raw(figure.Id).Raw("\">"u8)
+        html.Raw("<details><summary><b>"u8).Text(row.Name).Raw("</b> <span>"u8).Text(figure.Measure.Title.In(sheet.Language.Tag))
+            .Raw("</span></summary><div class=\"panel\" id=\""u8).Raw(figure.Id).Raw("\"><p class=\"panel-links\"><a href=\"#"u8).Raw(figure.Id).Raw("\">"u8)
             .Text(sheet.Text("tables.permalink")).Raw("</a> <a href=\"#"u8).Raw(Sheet.AboutId(figure.Measure)).Raw("\">"u8).Text(sheet.Text("tables.about")).Raw("</a></p>"u8);
         WriteSentences(sheet.Language.ReadingOf(figure));
         if (figure.Main is not null)
