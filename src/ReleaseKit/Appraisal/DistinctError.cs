@@ -50,7 +50,7 @@ internal sealed class DistinctError
             ranges[at] = RangeAt(value.ToDouble(), at, printing.Possible);
         if (ranges.Any(range => !double.IsFinite(range.Low) || !double.IsFinite(range.High)))
             return [];
-        var unit = printing.UnitFor(Margins(value.ToDouble(), 1, ranges[1]).Larger);
+        var unit = printing.UnitFor(value, Margins(value.ToDouble(), 1, ranges[1]).Larger);
         return [.. ranges.Select((range, at) => FigureRangeOf(value, at, range, printing, unit))];
     }
 

@@ -15,6 +15,9 @@ internal sealed record Printing(bool Whole, int? Decimals, decimal Factor, Possi
         measure.InOnes ? 100 : 1,
         PossibleOf.Measure(measure));
 
+    /// <summary>The unit for a figure: that of its margin, or a coarser one where a double would not hold the figure so finely.</summary>
+    public PrintUnit UnitFor(PublishedValue value, double mainMargin) => UnitFor(mainMargin).ThatHolds(value.ToDecimal() * Factor);
+
     public PrintUnit UnitFor(double mainMargin) =>
         Whole ? PrintUnit.One : PrintUnit.OfTwoDigits(Scaled(mainMargin), Decimals);
 
@@ -43,13 +46,13 @@ internal sealed record Printing(bool Whole, int? Decimals, decimal Factor, Possi
     /// <summary>The end of the half-width, but where the possible ends first, or where the range reaches further than the half-width.</summary>
     private (decimal Steps, bool IsCut) LowEnd(decimal uncut, ErrorRange range, PrintUnit unit)
     {
-        var low = unit.Down(Scaled(range.Low));
+        var low = unit.Down(unit.Rounded(range.Low, Factor));
         return IsBelow(unit.Value(uncut), Possible.Lowest) || low < uncut ? (low, true) : (uncut, false);
     }
 
     private (decimal Steps, bool IsCut) HighEnd(decimal uncut, ErrorRange range, PrintUnit unit)
     {
-        var high = unit.Up(Scaled(range.High));
+        var high = unit.Up(unit.Rounded(range.High, Factor));
         return IsBelow(-unit.Value(uncut), -Possible.Highest) || high > uncut ? (high, true) : (uncut, false);
     }
 

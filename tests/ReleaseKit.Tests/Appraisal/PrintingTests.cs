@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Downloads;
 using ReleaseKit.Releases;
 using Xunit;
 
@@ -125,6 +126,26 @@ public sealed class PrintingTests
         Assert.Equal(0.0300073, figure.Main!.Margin, 1e-7);
         Assert.Equal(("98.8", "3.1", "95.7", "100.0"), Printed(figure));
         Assert.Equal(1, figure.Main.High);
+    }
+
+    [Theory]
+    [InlineData("1234567890123", "1234567890106", "1234567890140")]
+    [InlineData("999999999999999", "999999999999982", "1000000000000016")]
+    public void Ends_of_a_large_count_have_all_their_digits_and_are_not_cut(string value, string low, string high)
+    {
+        // Discrete Gaussian, sigma 8.5: half-width 17 at 95 in 100.
+        var range = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(8.5), value).Figure().Main!;
+        Assert.Equal((value, "17", low, high), (range.Printed.Value.ToString(), range.Printed.Margin.ToString(), range.Printed.Low.ToString(), range.Printed.High.ToString()));
+        Assert.False(range.Printed.LowIsCut || range.Printed.HighIsCut);
+        Assert.Equal((low, high), (PlainNumber.Of(range.Low), PlainNumber.Of(range.High)));
+    }
+
+    [Fact]
+    public void Figure_so_large_that_a_double_does_not_hold_the_unit_of_its_margin_prints_in_a_coarser_one()
+    {
+        // Half-width ln 20 · 0.001 = 0.003 and half of the last decimal of the file, 0.5.
+        var figure = new SmallRelease().Figures(MeasureKind.Amount, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 0.001)), "123456789012345").Figure();
+        Assert.Equal(("123456789012345", "1", "123456789012344", "123456789012346"), Printed(figure));
     }
 
     [Fact]

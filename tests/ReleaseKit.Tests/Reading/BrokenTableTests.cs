@@ -72,6 +72,26 @@ public sealed class BrokenTableTests
         folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,1234567890123456789"));
 
     [Fact]
+    public void More_digits_than_a_margin_is_worked_out_for_are_a_stop() => Broken.StopsAtLine("csv-overflow", Csv, 3, "larger unit",
+        folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,1000000000000000"));
+
+    [Fact]
+    public void More_digits_after_the_multiplier_are_a_stop()
+    {
+        using var folder = new TestFolder().Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,1000000000000")
+            .Edit(Release, "\"title\": \"Lamps broken\",", "\"title\": \"Lamps broken\", \"multiplier\": 1000,");
+        var finding = Assert.Single(folder.Read().Findings, finding => finding.Slug == "csv-overflow");
+        Assert.Equal((FindingLevel.Stop, 3), (finding.Level, finding.At.Line));
+    }
+
+    [Fact]
+    public void Fifteen_digits_are_no_fault()
+    {
+        using var folder = new TestFolder().Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,999999999999999");
+        Assert.DoesNotContain(folder.Read().Findings, finding => finding.Slug == "csv-overflow");
+    }
+
+    [Fact]
     public void Utf16_is_recognised() => Broken.StopsAtLine("csv-encoding", Csv, 1, "iconv -f UTF-16",
         folder => folder.With(Csv, [.. Encoding.Unicode.GetPreamble(), .. Encoding.Unicode.GetBytes(TestFolder.Table)]));
 

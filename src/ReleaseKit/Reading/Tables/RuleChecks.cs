@@ -4,9 +4,12 @@ using ReleaseKit.Review;
 
 namespace ReleaseKit.Reading.Tables;
 
-/// <summary>Every figure has a rule, and every number that a mechanism takes from a column is there, row by row.</summary>
+/// <summary>Every figure has a rule and no more digits than its margin can be worked out for, and every number that a mechanism takes from a column is there, row by row.</summary>
 internal static class RuleChecks
 {
+    // 10^15: decimals of up to 15 digits go through a double unharmed (IEEE 754, DBL_DIG of C).
+    private const decimal BeyondDouble = 1_000_000_000_000_000;
+
     public static void Run(ReadTable read, MechanismsDraft mechanisms, FindingLog log)
     {
         CheckColumns(read, mechanisms, log);
@@ -15,6 +18,7 @@ internal static class RuleChecks
             CheckRules(read, measure, mechanisms, log);
             CheckScales(read, measure, log);
             CheckDeclared(read, measure, log);
+            CheckDigits(read, measure, log);
         }
     }
 
@@ -74,6 +78,22 @@ internal static class RuleChecks
                 log.Add(MechanismProblems.ParameterOutOfRange(
                     read.PlaceOf(row), key, $"{number.ToString("R", System.Globalization.CultureInfo.InvariantCulture)} (column \"{side.Column}\")", FindingOwner.Noise));
         }
+    }
+
+    /// <summary>Figures with noise have so few digits, before and after a multiplier, that a double holds them and the ends of their ranges.</summary>
+    private static void CheckDigits(ReadTable read, int measure, FindingLog log)
+    {
+        var figure = read.Table.Measures[measure];
+        for (var row = 0; row < read.Table.RowCount; row++)
+            if (figure.HasNumber(row) && figure.RuleAt(row) is NoiseRule.FromMechanism or NoiseRule.SumOver && HasTooManyDigits(figure, row))
+                log.Add(TableProblems.TooManyDigits(read.PlaceOf(row), read.Address(measure, row), FindingOwner.Noise));
+    }
+
+    private static bool HasTooManyDigits(Measure figure, int row)
+    {
+        var digits = Math.Abs((decimal)figure.Unscaled[row]);
+        var magnitude = Math.Abs(figure.ValueAt(row).ToDouble()) * figure.Multiplier;
+        return digits >= BeyondDouble || magnitude >= (double)BeyondDouble;
     }
 
     /// <summary>A figure of a mechanism that is only declared would have to be stated, which is of a later version.</summary>

@@ -145,4 +145,10 @@ internal static class TableProblems
         "rename one of them in the CSV, in letters a to z and digits.");
 
     private static string Quote(string value) => value.AsSpan().IndexOfAny(',', '"') < 0 ? KeyProblems.Cut(value) : $"\"{KeyProblems.Cut(value).Replace("\"", "\"\"", StringComparison.Ordinal)}\"";
+
+    public static Finding TooManyDigits(Place at, string address, FindingOwner owner) => new(
+        FindingLevel.Stop, "csv-overflow", owner, at,
+        $"{address} has noise, and more than 15 digits, counted after \"multiplier\".",
+        "margins and ranges are worked out to 15 digits; the last ones here would be wrong.",
+        "give the figure in a larger unit, or round it as declared in \"afterwards\".");
 }
