@@ -24,6 +24,9 @@ public sealed record AppraisedFigure
     /// <summary>The value as it stands on pages: to the unit of its main margin, or to the measure's decimals where there is none. Shares in 100.</summary>
     public required PublishedValue Printed { get; init; }
 
+    /// <summary>Whether the file holds more digits than stand on pages; said as "about".</summary>
+    public bool IsRoundedForPrint => Value.ToDecimal() * Measure.PrintFactor != Printed.ToDecimal();
+
     /// <summary>SDMX CL_OBS_STATUS letter.</summary>
     public required char Status { get; init; }
     public required bool HasNumber { get; init; }
@@ -36,6 +39,10 @@ public sealed record AppraisedFigure
 
     /// <summary>For a sum of parts published as such: how many draws it holds; 1 for a draw of its own.</summary>
     public int Draws { get; init; } = 1;
+
+    /// <summary>For a sum of parts published as such: how many parts there are, and how many of them are not published and not in the sum.</summary>
+    public int Parts { get; init; }
+    public int PartsLeftOut { get; init; }
 
     /// <summary>Ranges at the lower, main and upper coverage, in that order; empty where there is no margin.</summary>
     public required IReadOnlyList<FigureRange> Ranges { get; init; }

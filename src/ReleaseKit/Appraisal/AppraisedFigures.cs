@@ -41,6 +41,8 @@ internal sealed class AppraisedFigures(Release release)
             Error = error?.Error,
             Mechanism = origin.Mechanism,
             Draws = Math.Max(1, origin.Draws),
+            Parts = origin.Parts,
+            PartsLeftOut = origin.PartsLeftOut,
             Ranges = ranges,
             Reliability = ReliabilityOf(measure, value, hasNumber, origin, ranges),
             MarginToFigure = ranges.Count > 0 ? ReliabilityRule.Share(value.ToDecimal(), ranges[1].Margin, CanBeNegative(measure)) : null,

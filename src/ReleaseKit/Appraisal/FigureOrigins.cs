@@ -78,16 +78,22 @@ internal sealed class FigureOrigins(Release release)
     private FigureOrigin OfSum(FigureRef at)
     {
         var table = release.Tables[at.Table];
-        var (draws, withoutNoise) = parts.GetOrAdd(at.Table, index => new SumParts(release.Tables[index])).Below(table.Measures[at.Measure], at.Row);
-        if (draws.Count == 0)
-            return new FigureOrigin(SumWithoutNoise(withoutNoise) ?? table.Measures[at.Measure].RuleAt(at.Row), null, null, 0);
-        var mechanisms = draws.Select(draw => draw.Mechanism).Distinct().ToList();
-        var error = LawOfSum(table, draws) is { } law ? Shared(law, []) : null;
-        return new FigureOrigin(table.Measures[at.Measure].RuleAt(at.Row), error, mechanisms.Count == 1 ? mechanisms[0] : null, draws.Count);
+        var content = parts.GetOrAdd(at.Table, index => new SumParts(release.Tables[index])).Below(table.Measures[at.Measure], at.Row);
+        var origin = OfSum(content, table, table.Measures[at.Measure].RuleAt(at.Row));
+        return origin with { Parts = content.Draws.Count + content.WithoutNoise.Count + content.LeftOut, PartsLeftOut = content.LeftOut };
+    }
+
+    private FigureOrigin OfSum(SumContent content, Table table, NoiseRule rule)
+    {
+        if (content.Draws.Count == 0)
+            return new FigureOrigin(SumWithoutNoise(content.WithoutNoise) ?? rule, null, null, 0);
+        var mechanisms = content.Draws.Select(draw => draw.Mechanism).Distinct().ToList();
+        var error = LawOfSum(table, content.Draws) is { } law ? Shared(law, []) : null;
+        return new FigureOrigin(rule, error, mechanisms.Count == 1 ? mechanisms[0] : null, content.Draws.Count);
     }
 
     /// <summary>A sum of figures without noise is exact if one of them is.</summary>
-    private static NoiseRule? SumWithoutNoise(IReadOnlyList<NoiseRule> rules) =>
+    private static NoiseRule? SumWithoutNoise(List<NoiseRule> rules) =>
         rules.OfType<NoiseRule.Exact>().FirstOrDefault() ?? (rules.Count > 0 ? rules[0] : null);
 
     /// <summary>Draws of one law are counted, so that a sum of many parts is worked out from few laws; the same sum is worked out once.</summary>

@@ -6,6 +6,16 @@ namespace ReleaseKit.Appraisal;
 /// <summary>One draw of noise below a sum: its mechanism, and the row it was drawn for.</summary>
 internal readonly record struct BaseDraw(Mechanism Mechanism, int Row);
 
+/// <summary>What a sum holds: its draws, the rules of its parts without noise, and how many parts have no number and are left out.</summary>
+internal sealed class SumContent
+{
+    public List<BaseDraw> Draws { get; } = [];
+
+    public List<NoiseRule> WithoutNoise { get; } = [];
+
+    public int LeftOut { get; set; }
+}
+
 /// <summary>
 /// The draws that a published sum of a table rests on. Over a stub column a row of "all" has as parts the values without a parent among the others;
 /// a value that others name as their parent has those. Sums of sums go down to the draws.
@@ -16,32 +26,35 @@ internal sealed class SumParts(Table table)
     private readonly RowKeys keys = new(table);
     private readonly ConcurrentDictionary<int, IReadOnlyDictionary<UInt128, List<int>>> byWhole = new();
 
-    /// <summary>All draws below a row, and the rules of its parts without noise.</summary>
-    public (IReadOnlyList<BaseDraw> Draws, IReadOnlyList<NoiseRule> WithoutNoise) Below(Measure measure, int row)
+    /// <summary>All that lies below a row.</summary>
+    public SumContent Below(Measure measure, int row)
     {
-        var draws = new List<BaseDraw>();
-        var withoutNoise = new List<NoiseRule>();
-        Add(measure, row, draws, withoutNoise);
-        return (draws, withoutNoise);
+        var content = new SumContent();
+        Add(measure, row, content);
+        return content;
     }
 
-    private void Add(Measure measure, int row, List<BaseDraw> draws, List<NoiseRule> withoutNoise)
+    private void Add(Measure measure, int row, SumContent content)
     {
         switch (measure.RuleAt(row))
         {
             case NoiseRule.FromMechanism from:
-                draws.Add(new(from.Mechanism, row));
+                content.Draws.Add(new(from.Mechanism, row));
                 break;
             case NoiseRule.SumOver sum:
                 foreach (var part in PartsOf(row, sum.StubColumn))
                     if (IsIn(measure, part))
-                        Add(measure, part, draws, withoutNoise);
+                        Add(measure, part, content);
+                    else
+                        content.LeftOut += CanExist(measure, part) ? 1 : 0;
                 break;
             case var rule:
-                withoutNoise.Add(rule);
+                content.WithoutNoise.Add(rule);
                 break;
         }
     }
+
+    private static bool CanExist(Measure measure, int part) => measure.StatusAt(part) != 'M';
 
     /// <summary>A part without a number is in the sum only if it is hidden and the table says that its totals hold hidden parts.</summary>
     private bool IsIn(Measure measure, int part) =>

@@ -9,7 +9,7 @@ internal static class FigureDigits
     public static (string Heavy, string Light, string Margin) Of(AppraisedFigure figure, ILanguage language)
     {
         if (figure.Main?.Printed is not { } printed)
-            return (language.Number(figure.Value), "", WithoutMargin(figure, language));
+            return (language.Number(figure.Printed), "", WithoutMargin(figure, language));
         var digits = LightDigits.Of(language.Number(printed.Value), printed);
         return (digits.Heavy, digits.Light, language.Margin(printed));
     }

@@ -55,7 +55,7 @@ internal static class LineMark
     private static Labels LabelsOf(AppraisedFigure figure, ILanguage language, PublishedValue from, PublishedValue to, (double Left, double Right) stops)
     {
         var printed = figure.Main!.Printed;
-        return new(language.Number(from), language.WithUnit(to, figure.Measure.Unit), language.Number(printed.Low), language.Number(printed.High), stops);
+        return new(language.Number(from), language.WithUnit(to, figure.Measure), language.Number(printed.Low), language.Number(printed.High), stops);
     }
 
     /// <summary>The four labels: the ends of the range under its stops, the ends of the scale on a line of their own, so that they never touch.</summary>

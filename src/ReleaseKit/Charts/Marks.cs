@@ -22,7 +22,7 @@ public static class Marks
     /// <summary>What a mark shows, in words.</summary>
     public static string Description(AppraisedFigure figure, ILanguage language)
     {
-        var value = language.WithUnit(figure.Printed, figure.Measure.Unit);
+        var value = language.WithUnit(figure.Printed, figure.Measure);
         if (figure.Ranges.Count == 0)
             return language.Text("marks.stem-alone", ("figure", value));
         var ranges = figure.Ranges.Select(range => language.Text(

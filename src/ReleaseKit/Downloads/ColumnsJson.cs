@@ -120,8 +120,7 @@ internal sealed class ColumnsJson(Stream stream, SiteContext context) : IDisposa
 
     private string Say(string key, params (string Name, string Value)[] fill) => context.Language.Text("downloads.column." + key, fill);
 
-    private string UnitOf(Measure? measure) =>
-        measure is not null && measure.Unit.Forms.TryGetValue(context.Language.Tag, out var forms) ? forms.Other : measure?.Unit.Key ?? "";
+    private string UnitOf(Measure? measure) => measure is null ? "" : context.Language.UnitOf(measure, new PublishedValue(2, 0));
 
     private static string DatatypeOf(WideColumn column) =>
         column.Kind is ColumnKind.Value or ColumnKind.Margin or ColumnKind.Low or ColumnKind.High ? "decimal" : "string";

@@ -56,7 +56,7 @@ internal sealed class FactSentences(Voice voice)
             return [voice.Say("facts.column.ranges", kind, cases)];
         if (facts is not { SmallestMargin: { } smallest, LargestMargin: { } largest })
             return [];
-        var margin = voice.WithUnit(largest, facts.Measure.Unit);
+        var margin = voice.WithUnit(largest, facts.Measure);
         return smallest == largest
             ? [voice.Say("facts.column", kind, cases, ("margin", margin))]
             : [voice.Say("facts.column.several", kind, cases), voice.Say("facts.column.margins", ("smallest", voice.Numerals.InProse(smallest)), ("largest", margin))];
@@ -68,6 +68,6 @@ internal sealed class FactSentences(Voice voice)
             yield return voice.Say(
                 facts.IsRounded ? "facts.distance.rounded" : "facts.distance",
                 ("cases", voice.Frequency("coverage.cases.at-least", new NaturalFrequency(999, 1000))),
-                ("distance", voice.WithUnit(distance, facts.Measure.Unit)));
+                ("distance", voice.WithUnit(distance, facts.Measure)));
     }
 }

@@ -23,8 +23,11 @@ public interface ILanguage
     /// <summary>A number as the language writes it in running text: "minus 7".</summary>
     string NumberInProse(PublishedValue value);
 
-    /// <summary>"1,240 households": number, non-breaking space, unit in the right form.</summary>
-    string WithUnit(PublishedValue value, Unit unit);
+    /// <summary>"1,240 households", "51.3 in each 100": number, non-breaking space, unit in the right form.</summary>
+    string WithUnit(PublishedValue value, Measure measure);
+
+    /// <summary>The unit of a measure in the form that goes with a number; a share says that it counts in each 100, whatever its unit is.</summary>
+    string UnitOf(Measure measure, PublishedValue value);
 
     /// <summary>"±&#160;19", or "−12 +17" if uneven.</summary>
     string Margin(PrintedRange range);

@@ -36,7 +36,9 @@ public sealed class Language : ILanguage
 
     public string NumberInProse(PublishedValue value) => voice.Numerals.InProse(value);
 
-    public string WithUnit(PublishedValue value, Unit unit) => voice.WithUnit(value, unit);
+    public string WithUnit(PublishedValue value, Measure measure) => voice.WithUnit(value, measure);
+
+    public string UnitOf(Measure measure, PublishedValue value) => voice.UnitOf(measure, value);
 
     public string Margin(PrintedRange range) => range.IsUneven
         ? texts.Fill("margin.uneven", ("down", voice.Numerals.InTable(range.MarginDown)), ("up", voice.Numerals.InTable(range.MarginUp)))

@@ -23,15 +23,12 @@ internal sealed class ReadingWriter(Voice voice)
     {
         if (!figure.HasNumber)
             yield break;
-        var value = voice.WithUnit(figure.Printed, figure.Measure.Unit);
-        var about = IsRoundedForPrint(figure) ? ".about" : "";
+        var value = voice.WithUnit(figure.Printed, figure.Measure);
+        var about = figure.IsRoundedForPrint ? ".about" : "";
         yield return figure.Measure.Per is { } per
             ? voice.Say($"reading.value.rate{about}", ("value", value), ("per", voice.Numerals.Plain(per)))
             : voice.Say($"reading.value{about}", ("value", value));
     }
-
-    /// <summary>Whether the file holds more digits than stand on pages.</summary>
-    private static bool IsRoundedForPrint(AppraisedFigure figure) => figure.Value.ToDecimal() * figure.Measure.PrintFactor != figure.Printed.ToDecimal();
 
     /// <summary>What the range leaves out; a figure without noise can still be wrong.</summary>
     private IEnumerable<string> NotCovered(AppraisedFigure figure)

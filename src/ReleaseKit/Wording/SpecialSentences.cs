@@ -31,9 +31,10 @@ internal sealed class SpecialSentences(Voice voice)
     {
         var (first, rounded, floored, capped, threshold) = figure.Case;
         if (figure.Main is null)
-            return Marked(figure);
+            return [.. LeftOut(figure), .. Marked(figure)];
         return
         [
+            .. LeftOut(figure),
             .. threshold && first is not (SpecialCase.FromThreshold or SpecialCase.Zero) ? [Threshold(figure)] : Nothing,
             .. capped && first is not SpecialCase.Capped ? Capped(figure) : Nothing,
             .. rounded ? Rounded(figure) : Nothing,
@@ -85,6 +86,15 @@ internal sealed class SpecialSentences(Voice voice)
         .OfType<AfterStep.RoundTo>()
         .Select(step => voice.Say("reading.rounded", ("unit", InPrint(figure, step.Unit))));
 
+    /// <summary>A sum says of how many of its parts it is not the sum.</summary>
+    private IEnumerable<string> LeftOut(AppraisedFigure figure)
+    {
+        if (figure is { HasNumber: true, PartsLeftOut: > 0 and var leftOut })
+            yield return voice.Say(
+                leftOut == 1 ? "reading.left-out.one" : "reading.left-out",
+                ("parts", voice.Numerals.Whole(figure.Parts)), ("missing", voice.Numerals.Whole(leftOut)));
+    }
+
     /// <summary>A number that the office marks (provisional, estimated …) says so.</summary>
     private IEnumerable<string> Marked(AppraisedFigure figure)
     {
@@ -93,7 +103,7 @@ internal sealed class SpecialSentences(Voice voice)
     }
 
     private string Amount(AppraisedFigure figure, double number) =>
-        voice.WithUnit(PublishedValue.Shortest((decimal)(number * figure.Measure.PrintFactor)), figure.Measure.Unit);
+        voice.WithUnit(PublishedValue.Shortest((decimal)(number * figure.Measure.PrintFactor)), figure.Measure);
 
     private string InPrint(AppraisedFigure figure, double number) => voice.Numerals.Plain(number * figure.Measure.PrintFactor);
 }

@@ -21,10 +21,19 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
     /// <summary>"wards, districts and Norrvale".</summary>
     public string List(IReadOnlyList<string> items) => language.List(items);
 
-    public string WithUnit(PublishedValue value, Unit unit)
+    public string WithUnit(PublishedValue value, Measure measure)
     {
-        var form = PluralCategory.Form(unit, Tag, value);
+        var form = UnitOf(measure, value);
         return form.Length == 0 ? Numerals.InProse(value) : $"{Numerals.InProse(value)}{Numerals.NoBreak}{form}";
+    }
+
+    /// <summary>The unit as it goes with a number; of a share its own words may say already that it counts in each 100.</summary>
+    public string UnitOf(Measure measure, PublishedValue value)
+    {
+        var form = PluralCategory.Form(measure.Unit, Tag, value);
+        if (measure.Kind != MeasureKind.Share || Say("unit.share.said").Split('|').Any(said => form.Contains(said, StringComparison.OrdinalIgnoreCase)))
+            return form;
+        return form.Length == 0 ? Say("unit.share") : Say("unit.share-of", ("unit", form));
     }
 
     /// <summary>What a row is called in a stub column: its name for readers, else its period in words, else its value.</summary>

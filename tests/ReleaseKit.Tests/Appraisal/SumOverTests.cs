@@ -53,6 +53,25 @@ public sealed class SumOverTests
         Assert.Same(release.Figure(new FigureRef(0, 0, 5)).Error, release.Figure(new FigureRef(0, 0, 4)).Error);
     }
 
+    [Theory]
+    [InlineData("20", "10", "O", "10", "10", "10", 3, 1)]
+    [InlineData("10", "10", "O", "10", "O", "10", 3, 2)]
+    [InlineData("20", "10", "M", "10", "10", "10", 2, 0)]
+    [InlineData("30", "20", "12", "8", "10", "10", 3, 0)]
+    public void Sum_knows_how_many_of_its_parts_have_no_number(
+        string all, string aldermoor, string harrow, string tithe, string cindry, string kiln, int parts, int leftOut)
+    {
+        var total = Nested(SmallRelease.DiscreteGaussian(8), null, all, aldermoor, harrow, tithe, cindry, kiln).Appraise().Figure(new FigureRef(0, 0, 0));
+        Assert.Equal((parts, leftOut), (total.Parts, total.PartsLeftOut));
+    }
+
+    [Fact]
+    public void Hidden_part_that_the_total_holds_is_not_left_out()
+    {
+        var release = Nested(SmallRelease.DiscreteGaussian(8), new Hiding(HiddenBy.PublicRule, true), "30", "20", "Q", "10", "10", "10").Appraise();
+        Assert.Equal(0, release.Figure(new FigureRef(0, 0, 0)).PartsLeftOut);
+    }
+
     [Fact]
     public void Hidden_part_is_no_draw_of_a_total_that_leaves_it_out()
     {

@@ -43,7 +43,7 @@ public sealed class WordsOfPagesTests
     public void File_size_is_rounded_up(long bytes, string words) => Assert.Equal(words, FileSize.Of(bytes, PagesRelease.English));
 
     [Theory]
-    [InlineData(EditionStatus.First, 1, "Edition 2")]
+    [InlineData(EditionStatus.First, 1, "Edition 2, as first published")]
     [InlineData(EditionStatus.Corrected, 1, "Edition 2, corrected")]
     [InlineData(EditionStatus.Provisional, 3, "Edition 2, provisional, printing 3")]
     public void Edition_names_number_status_and_printing(EditionStatus status, int printing, string words) => Assert.Equal(

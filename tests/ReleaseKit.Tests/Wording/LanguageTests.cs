@@ -41,11 +41,20 @@ public sealed class LanguageTests
     [InlineData(2, 0, "2\u00a0households")]
     [InlineData(10, 1, "1.0\u00a0households")]
     [InlineData(1001, 0, "1,001\u00a0households")]
-    public void Unit_agrees_in_number(long unscaled, byte decimals, string expected) => Assert.Equal(expected, En.WithUnit(new(unscaled, decimals), SmallRelease.Households));
+    public void Unit_agrees_in_number(long unscaled, byte decimals, string expected) => Assert.Equal(expected, En.WithUnit(new(unscaled, decimals), SmallRelease.Measure(MeasureKind.Count)));
 
     [Fact]
     public void Unit_that_is_not_declared_is_used_as_written() =>
-        Assert.Equal("5\u00a0kWh", En.WithUnit(new(5, 0), new Unit("kWh", new Dictionary<string, UnitForms>())));
+        Assert.Equal("5\u00a0kWh", En.WithUnit(new(5, 0), SmallRelease.Measure(MeasureKind.Mean) with { Unit = new Unit("kWh", new Dictionary<string, UnitForms>()) }));
+
+    [Theory]
+    [InlineData("", "51.3\u00a0in each 100")]
+    [InlineData("homes", "51.3\u00a0homes in each 100")]
+    [InlineData("homes in each 100", "51.3\u00a0homes in each 100")]
+    [InlineData("in 100", "51.3\u00a0in 100")]
+    [InlineData("per cent", "51.3\u00a0per cent")]
+    public void Share_says_once_that_it_counts_in_each_100(string unit, string expected) =>
+        Assert.Equal(expected, En.WithUnit(new(513, 1), SmallRelease.Measure(MeasureKind.Share) with { Unit = SmallRelease.UnitOf(unit, unit) }));
 
     [Fact]
     public void Even_margin_has_one_number() =>

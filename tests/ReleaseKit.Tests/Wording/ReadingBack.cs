@@ -70,6 +70,7 @@ internal static class ReadingBack
             Number(g[2]) == Number(g[3]) && (double)Number(g[2]) == (g[1].Value == "above" ? figure.Mechanism!.Clipped!.To : figure.Mechanism!.Clipped!.From)),
         Sentence("Its margin is (as large as|larger than) the figure.", IsThatLarge),
         Sentence($@"After the noise it was rounded to a multiple of {N}\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1])))),
+        Sentence($@"Of its {N} parts, {N} (?:is|are) not published and not in this sum\.", LeavesOut),
         Sentence("The office marks it as provisional.", (figure, _) => figure.Status == 'P'),
         Sentence("This figure is (close|rough|weak): its margin is (about |less than )?([0-9]+) in 100 of it.", Ratio),
         Sentence("This figure is weak: its margin is (as large as|larger than) the figure.", (figure, g) => Is(figure, Reliability.Weak) && IsThatLarge(figure, g)),
@@ -131,6 +132,13 @@ internal static class ReadingBack
         var said = (double)Number(groups[at + 1]) / (double)Number(groups[at + 2]);
         var isMore = figure.Main!.Attained > 0.95 + 1e-9;
         return said == 0.95 && said <= figure.Main.Attained + 1e-12 && (groups[at].Success || !isMore);
+    }
+
+    /// <summary>The parts are all rows but the first, which is the total.</summary>
+    private static bool LeavesOut(AppraisedFigure figure, GroupCollection groups)
+    {
+        var parts = Enumerable.Range(1, figure.Table.RowCount - 1).Where(row => figure.Measure.StatusAt(row) != 'M').ToList();
+        return Number(groups[1]) == parts.Count && Number(groups[2]) == parts.Count(row => !figure.Measure.HasNumber(row));
     }
 
     private static bool SetTo(AppraisedFigure figure, GroupCollection groups)

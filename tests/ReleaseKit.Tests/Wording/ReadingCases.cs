@@ -47,6 +47,10 @@ internal static class ReadingCases
         ("A zero that stands for small counts", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "0")),
         ("A sum of twelve counts", SumOf(12, Gauss)),
         ("A share", Of(MeasureKind.Share, Laplace, "51.63")),
+        ("A share without a unit", Of(MeasureKind.Share, Laplace, "51.63", SmallRelease.UnitOf("", ""))),
+        ("A share of homes", Of(MeasureKind.Share, Laplace, "51.63", SmallRelease.UnitOf("home", "homes"))),
+        ("A sum that leaves out one of its parts", SumOf(Gauss, "1840", "1840", "O")),
+        ("A sum that leaves out two of its parts", SumOf(Gauss, "1840", "O", "1840", "L", "M")),
         ("A share near a hundred", Of(MeasureKind.Share, Laplace, "99.21")),
         ("A share above a hundred", Of(MeasureKind.Share, Laplace, "101.24")),
         ("A share above a hundred by more than the margin", Of(MeasureKind.Share, Laplace, "120.55")),
@@ -112,6 +116,14 @@ internal static class ReadingCases
         .Figures(
             SmallRelease.Measure(MeasureKind.Count), [new NoiseRule.SumOver(0), new NoiseRule.FromMechanism(mechanism)],
             [0, .. Enumerable.Repeat((byte)1, parts)], [.. Enumerable.Repeat("1840", parts + 1)])
+        .Figure();
+
+    /// <summary>A total of 3,680 over parts, some of which have no number.</summary>
+    private static AppraisedFigure SumOf(Mechanism mechanism, params string[] parts) => new SmallRelease()
+        .Stub("ward", "All", ["All", .. parts.Select((_, part) => $"w{part}")])
+        .Figures(
+            SmallRelease.Measure(MeasureKind.Count), [new NoiseRule.SumOver(0), new NoiseRule.FromMechanism(mechanism)],
+            [0, .. Enumerable.Repeat((byte)1, parts.Length)], ["3680", .. parts])
         .Figure();
 
     private static AppraisedFigure Bounded(AfterStep step, string value) => new SmallRelease()

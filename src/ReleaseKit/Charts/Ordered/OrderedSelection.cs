@@ -19,7 +19,7 @@ public static class OrderedSelection
         {
             Rows = [.. numbers.Select(figure => RowOf(figure, names.Of(figure), language))],
             WithoutNumber = [.. figures.Where(figure => !figure.HasNumber)],
-            Unit = UnitWords.Many(numbers[0].Measure.Unit, language),
+            Unit = UnitWords.Many(numbers[0].Measure, language),
             Print = language.Number,
             NameOf = names.Of,
         };

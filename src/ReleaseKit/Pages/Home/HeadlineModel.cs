@@ -23,8 +23,8 @@ internal static class HeadlineModel
             ["meaning"] = headline.Meaning is { } meaning ? context.In(meaning) : null,
             ["href"] = Link.From(PageMap.Home, context.Pages.Of(figure.Ref)),
             ["number"] = new RawHtml(figure.HasNumber ? FigureHtml.Number(figure, language) : HtmlText.Encode(FigureHtml.Status(figure, language))),
-            ["size"] = SizeOf(language.Number(ValueOf(figure))),
-            ["unit"] = figure.HasNumber ? PluralCategory.Form(figure.Measure.Unit, language.Tag, ValueOf(figure)) : "",
+            ["size"] = SizeOf(language.Number(figure.Printed)),
+            ["unit"] = figure.HasNumber ? language.UnitOf(figure.Measure, figure.Printed) : "",
             ["margin"] = figure.HasNumber ? FigureHtml.Margin(figure, language) : "",
             ["lozenge"] = new RawHtml(FigureHtml.Lozenge(figure, language)),
             ["mark"] = new RawHtml(!figure.HasNumber ? "" : isLeading ? Marks.Hero(figure, language) : Marks.Line(figure, language)),
@@ -40,12 +40,10 @@ internal static class HeadlineModel
         _ => " is-longest",
     };
 
-    private static PublishedValue ValueOf(AppraisedFigure figure) => figure.Main?.Printed.Value ?? figure.Value;
-
-    /// <summary>The value stands in large digits beside; where there is nothing else to say, its sentence says it.</summary>
+    /// <summary>The value stands in large digits beside; where it was rounded for them, or there is nothing else to say, its sentence says it.</summary>
     private static string Sentences(Wording.Reading reading, AppraisedFigure figure)
     {
-        var rest = reading.Sentences.Where(sentence => sentence.Part != ReadingPart.Value).Select(sentence => sentence.Text).ToList();
+        var rest = reading.Sentences.Where(sentence => sentence.Part != ReadingPart.Value || figure.IsRoundedForPrint).Select(sentence => sentence.Text).ToList();
         return rest.Count > 0 && figure.HasNumber ? string.Join(' ', rest) : reading.Text;
     }
 }

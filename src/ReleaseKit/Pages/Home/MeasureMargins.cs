@@ -5,7 +5,7 @@ using ReleaseKit.Wording;
 namespace ReleaseKit.Pages.Home;
 
 /// <summary>The smallest and largest main margin of a measure, over all its rows, as printed; null where no figure has one.</summary>
-internal sealed record MeasureMargins(PublishedValue? Smallest, PublishedValue? Largest, Reliability Without, Unit Unit)
+internal sealed record MeasureMargins(PublishedValue? Smallest, PublishedValue? Largest, Reliability Without, Measure Measure)
 {
     public static MeasureMargins Of(IAppraisedRelease appraised, int table, int measure)
     {
@@ -22,7 +22,7 @@ internal sealed record MeasureMargins(PublishedValue? Smallest, PublishedValue? 
                 largest = largest is { } most && most.ToDecimal() >= margin.ToDecimal() ? most : margin;
             }
         }
-        return new MeasureMargins(smallest, largest, without, appraised.Release.Tables[table].Measures[measure].Unit);
+        return new MeasureMargins(smallest, largest, without, appraised.Release.Tables[table].Measures[measure]);
     }
 
     public string InWords(ILanguage language)
@@ -34,7 +34,7 @@ internal sealed record MeasureMargins(PublishedValue? Smallest, PublishedValue? 
                 Reliability.Public => "figure.public",
                 _ => "figure.no-margin",
             });
-        var unit = PluralCategory.Form(Unit, language.Tag, largest);
+        var unit = language.UnitOf(Measure, largest);
         return smallest.ToDecimal() == largest.ToDecimal()
             ? language.Text("home.margin.one", ("margin", language.Number(largest)), ("unit", unit))
             : language.Text("home.margin.from-to", ("least", language.Number(smallest)), ("most", language.Number(largest)), ("unit", unit));

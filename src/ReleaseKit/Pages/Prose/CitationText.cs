@@ -7,39 +7,46 @@ namespace ReleaseKit.Pages.Prose;
 internal sealed class CitationText(ILanguage language)
 {
     /// <summary>The text of a form that is generated, linked to the figure.</summary>
-    public string Of(CitationForm form, AppraisedFigure figure, string href) => form == CitationForm.Reading
+    /// <param name="form">What is asked for.</param>
+    /// <param name="figure">The figure.</param>
+    /// <param name="href">Where it stands.</param>
+    /// <param name="about">The word that goes before a number rounded for print, in the form that its place asks for; empty where none does.</param>
+    public string Of(CitationForm form, AppraisedFigure figure, string href, string about) => form == CitationForm.Reading
         ? Reading(figure, href)
-        : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure)}</a>";
+        : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, about)}</a>";
 
     /// <summary>What follows the writer's own words: " (± 19)"; nothing for a figure without a margin.</summary>
     public string MarginAfter(AppraisedFigure figure) => figure.Main is { } range
         ? $" <span class=\"cite-margin\">({HtmlText.Encode(language.Margin(range.Printed))})</span>"
         : "";
 
-    private string Generated(CitationForm form, AppraisedFigure figure) => form switch
+    private string Generated(CitationForm form, AppraisedFigure figure, string about) => form switch
     {
         _ when !figure.HasNumber => HtmlText.Encode(FigureHtml.Status(figure, language)),
-        CitationForm.Value => Value(figure),
+        CitationForm.Value => Value(figure, about),
         CitationForm.Margin => HtmlText.Encode(FigureHtml.Margin(figure, language)),
-        CitationForm.Range => Range(figure),
-        _ => ValueAndMargin(figure),
+        CitationForm.Range => Range(figure, about),
+        _ => ValueAndMargin(figure, about),
     };
 
-    private string Value(AppraisedFigure figure) =>
-        $"<data value=\"{figure.Value}\">{HtmlText.Encode(language.NumberInProse(figure.Main?.Printed.Value ?? figure.Value))}</data>";
-
-    private string ValueAndMargin(AppraisedFigure figure)
+    private string Value(AppraisedFigure figure, string about)
     {
-        var margin = HtmlText.Encode(FigureHtml.Margin(figure, language));
-        return figure.Main is null ? $"{Value(figure)} ({margin})" : $"{Value(figure)}&#160;{margin}";
+        var before = figure.IsRoundedForPrint && about.Length > 0 ? HtmlText.Encode(about) + " " : "";
+        return $"{before}<data value=\"{figure.Value}\">{HtmlText.Encode(language.NumberInProse(figure.Printed))}</data>";
     }
 
-    private string Range(AppraisedFigure figure) => figure.Main is { } range
+    private string ValueAndMargin(AppraisedFigure figure, string about)
+    {
+        var margin = HtmlText.Encode(FigureHtml.Margin(figure, language));
+        return figure.Main is null ? $"{Value(figure, about)} ({margin})" : $"{Value(figure, about)}&#160;{margin}";
+    }
+
+    private string Range(AppraisedFigure figure, string about) => figure.Main is { } range
         ? HtmlText.Encode(language.Text(
             "prose.range",
             ("low", language.NumberInProse(range.Printed.Low)),
             ("high", language.NumberInProse(range.Printed.High))))
-        : ValueAndMargin(figure);
+        : ValueAndMargin(figure, about);
 
     private string Reading(AppraisedFigure figure, string href)
     {

@@ -76,7 +76,7 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
     private void Resolve(AutolinkInline address)
     {
         if (ProseLink.FigureIn(address.Url) is { } figure)
-            address.ReplaceBy(Cited(CitationForm.ValueAndMargin, figure));
+            address.ReplaceBy(Cited(CitationForm.ValueAndMargin, figure, address));
         else if (!ProseLink.IsAllowed(address.Url))
             address.ReplaceBy(new LiteralInline(address.Url));
     }
@@ -97,7 +97,7 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
         var form = CitationForms.Of(ProseDocument.PlainText(link), context.Language);
         if (form != CitationForm.OwnWords)
         {
-            link.ReplaceBy(Cited(form, address), copyChildren: false);
+            link.ReplaceBy(Cited(form, address, link), copyChildren: false);
             return;
         }
         var figure = context.Appraised.FigureAt(address);
@@ -107,11 +107,11 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
             link.InsertAfter(new HtmlInline(citations.MarginAfter(figure)));
     }
 
-    private HtmlInline Cited(CitationForm form, string address)
+    private HtmlInline Cited(CitationForm form, string address, Inline place)
     {
         var figure = context.Appraised.FigureAt(address);
         mentioned.Add(figure.Address);
-        return new HtmlInline(citations.Of(form, figure, Link.From(page, context.Pages.Of(figure.Ref))));
+        return new HtmlInline(citations.Of(form, figure, Link.From(page, context.Pages.Of(figure.Ref)), AboutWord.At(place, context.Language)));
     }
 
     /// <summary>A link to another prose file leads to its page.</summary>
