@@ -127,7 +127,10 @@ internal sealed class StepChain
         var number = Lattice.Ceiling(target / rounding.Unit);
         if (ExactRounding is { } exact)
             return exact.First(Lattice.ToStep(number)) * Unit;
-        return (number - (rounding.How is RoundingHow.Nearest ? 0.5 : rounding.How is RoundingHow.Up ? 1 : 0)) * rounding.Unit;
+        // The multiple below is not itself rounded up to the target; that counts where a threshold before the rounding heaps values on it.
+        if (rounding.How is RoundingHow.Up)
+            return Math.BitIncrement((number - 1) * rounding.Unit);
+        return (number - (rounding.How is RoundingHow.Nearest ? 0.5 : 0)) * rounding.Unit;
     }
 
     private double NextAbove(double published) =>

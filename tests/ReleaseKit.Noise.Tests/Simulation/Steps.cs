@@ -33,6 +33,8 @@ internal static class Steps
         ["not below 0, published from 12"] = [new NotBelow(0), new PublishedFrom(12)],
         ["nearest 5, zero below 10"] = [new RoundTo(5), new ZeroBelow(10)],
         ["zero below 12, nearest 5"] = [new ZeroBelow(12), new RoundTo(5)],
+        ["zero below 12, up to 4"] = [new ZeroBelow(12), new RoundTo(4, RoundingHow.Up)],
+        ["zero below 12, down to 4"] = [new ZeroBelow(12), new RoundTo(4, RoundingHow.Down)],
         ["zero below 2, nearest 10"] = [new ZeroBelow(2), new RoundTo(10)],
         ["nearest 10, ties even, published from 30"] = [new RoundTo(10, RoundingHow.Nearest, RoundingTies.Even), new PublishedFrom(30)],
         ["down to 4, published from 8"] = [new RoundTo(4, RoundingHow.Down), new PublishedFrom(8)],
