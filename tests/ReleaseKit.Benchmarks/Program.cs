@@ -1,3 +1,7 @@
 using BenchmarkDotNet.Running;
+using ReleaseKit.Benchmarks;
 
-BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+if (args is ["questions"])
+    QuestionTable.Print(Console.Out);
+else
+    BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);

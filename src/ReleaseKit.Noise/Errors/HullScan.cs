@@ -10,7 +10,9 @@ namespace ReleaseKit.Noise.Errors;
 /// Tabulated laws: every step at which the table can reach the value. Staircase law: both tails are linear in x between the places where an
 /// edge of the density passes the value or the threshold, so their ratio moves one way in between, and looking at those places misses no
 /// piece. Past the threshold the chance of passing it is at least 1/2, so that beyond the distance z with P(N ≥ z) = β/2 every x is
-/// rejected.
+/// rejected. From one step of the staircase to the next a tail changes by e^±ε. So k steps above a place past the threshold the lower
+/// end's condition reads a·e^(kε) + b·e^(−kε) &gt; d with a, b ≥ 0, and k steps above a place past the value the upper end's reads
+/// a·e^(−kε) &gt; d: a place that is rejected at the start is accepted from some step on for good, which halving finds.
 /// </remarks>
 internal sealed class HullScan(NoiseLaw law, double passing, long blur)
 {
@@ -39,7 +41,9 @@ internal sealed class HullScan(NoiseLaw law, double passing, long blur)
         if (Block(staircase, value, passing - staircase.Sensitivity).Append(passing).Any(holds))
             return double.NegativeInfinity;
         var start = Math.Max(passing, value - Reach(staircase, tail));
-        return FirstThatHolds(From(start, staircase.Sensitivity).SelectMany(from => Block(staircase, value, from)), holds);
+        double[] BlockAt(long k) => Block(staircase, value, start + k * staircase.Sensitivity);
+        var last = (long)Math.Ceiling((value - start) / staircase.Sensitivity) + 1;
+        return FirstThatHolds(Blocks(BlockBefore(last, k => BlockAt(k).Any(holds)), BlockAt), holds);
     }
 
     /// <summary>The largest x above a start that satisfies a condition, which rejects all x far enough above; the start if there is
@@ -49,9 +53,35 @@ internal sealed class HullScan(NoiseLaw law, double passing, long blur)
         if (law is TabulatedLaw table)
             return From(value - 1 - table.Rows[0].Step, -1).TakeWhile(x => x > start).Where(holds).FirstOrDefault(start);
         var staircase = (StaircaseLaw)law;
-        var blocks = From(value + Reach(staircase, tail), -staircase.Sensitivity)
-            .SelectMany(from => Block(staircase, value, from).Reverse());
-        return FirstThatHolds(blocks.TakeWhile(x => x > start).Append(start), x => x <= start || holds(x));
+        var reach = Reach(staircase, tail);
+        double[] BlockAt(long k) => [.. Block(staircase, value, value + reach - k * staircase.Sensitivity).Reverse()];
+        var last = (long)Math.Floor(reach / staircase.Sensitivity);
+        var places = Blocks(BlockBefore(last, k => BlockAt(k).Any(holds)), BlockAt);
+        return FirstThatHolds(places.TakeWhile(x => x > start).Append(start), x => x <= start || holds(x));
+    }
+
+    private static IEnumerable<double> Blocks(long first, Func<long, double[]> blockAt)
+    {
+        for (var k = first; ; k++)
+        {
+            foreach (var place in blockAt(k))
+                yield return place;
+        }
+    }
+
+    // The block before the first one of 0..last that satisfies a condition, which stays true from there on; 0 if that one does, and the one
+    // before the last if none does.
+    private static long BlockBefore(long last, Func<long, bool> holds)
+    {
+        if (holds(0))
+            return 0;
+        var (fails, works) = (0L, last);
+        while (works - fails > 1)
+        {
+            var middle = fails + (works - fails) / 2;
+            (fails, works) = holds(middle) ? (fails, middle) : (middle, works);
+        }
+        return fails;
     }
 
     private static IEnumerable<double> From(double start, double stride)

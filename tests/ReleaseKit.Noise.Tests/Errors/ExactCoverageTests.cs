@@ -40,6 +40,24 @@ public sealed class ExactCoverageTests
         Assert.True(margin.Attained >= share - Rounding);
     }
 
+    [Theory]
+    [InlineData("discrete-laplace:20", 30, RoundingHow.Nearest, RoundingTies.Away)]
+    [InlineData("discrete-gaussian:30", 50, RoundingHow.Nearest, RoundingTies.Even)]
+    [InlineData("discrete-gaussian:30", 7, RoundingHow.Nearest, RoundingTies.Up)]
+    [InlineData("discrete-uniform:25", 40, RoundingHow.Up, RoundingTies.Away)]
+    [InlineData("discrete-laplace-truncated:20:80", 40, RoundingHow.Down, RoundingTies.Away)]
+    [InlineData("discrete-gaussian:9.5", 20, RoundingHow.AtRandom, RoundingTies.Away)]
+    public void Margin_after_a_wide_rounding_is_the_smallest_that_holds_at_every_value(string lawName, int unit, RoundingHow how, RoundingTies ties)
+    {
+        var law = (LatticeLaw)NamedLaws.Of(lawName);
+        AfterStep[] steps = [new AfterStep.RoundTo(unit, how, ties)];
+        var (exact, margin) = (new ExactCoverage(law, steps), FigureError.Of(law, steps).MarginAt(Coverage.OfShare(0.9)));
+        var farthest = (int)margin.Width + 3 * unit;
+        double Worst(double width) => Enumerable.Range(-farthest, 2 * farthest + 1).Min(x => exact.Chance(x, y => Math.Abs(y!.Value - x) <= width));
+        Assert.Equal(Worst(margin.Width), margin.Attained, Rounding);
+        Assert.True(Worst(margin.Width - 1) < 0.9);
+    }
+
     [Theory, MemberData(nameof(Plain))]
     public void Range_holds_at_every_possible_value(string lawName, string stepsName, double share)
     {
