@@ -1,16 +1,35 @@
-using System.Text.RegularExpressions;
 using ReleaseKit.Review;
 
 namespace ReleaseKit.Reading.Json;
 
 /// <summary>What can be wrong with the text of a JSON file, one factory a failure.</summary>
-internal static partial class JsonProblems
+internal static class JsonProblems
 {
-    public static Finding Broken(Place at, FindingOwner owner, string message) => new(
+    private const string Why = "nothing of this file can be read; the other files were reviewed.";
+
+    public static Finding Broken(Place at, FindingOwner owner, string found) => new(
         FindingLevel.Stop, "json-broken", owner, at,
-        $"The JSON breaks here: {Shorten(message)}",
-        "nothing of this file can be read; the other files were reviewed.",
+        $"The JSON breaks here. {found}",
+        Why,
         "look at this place and just before it: a comma between two members, a quote at both ends of a text, a bracket for each bracket.");
+
+    public static Finding Unfinished(Place at, FindingOwner owner, char bracket, Place opened) => new(
+        FindingLevel.Stop, "json-broken", owner, at,
+        $"The file ends here, and the {bracket} of line {opened.Line}, column {opened.Column}, is still open.",
+        Why,
+        $"write {(bracket == '{' ? '}' : ']')} where it should end; if the rest of the file is lost, write it again from its source.");
+
+    public static Finding NoValue(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "json-broken", owner, at,
+        "The file is empty, or ends in the middle of its first value.",
+        Why,
+        "write the file again from its source.");
+
+    public static Finding TooDeep(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "json-broken", owner, at,
+        $"Here brackets stand inside brackets more than {FolderLimits.JsonDepth} deep.",
+        Why,
+        "take out the brackets that are too many: no key of a release folder stands half as deep.");
 
     public static Finding Encoding(Place at, FindingOwner owner, string likely) => new(
         FindingLevel.Stop, "json-encoding", owner, at,
@@ -23,12 +42,4 @@ internal static partial class JsonProblems
         "There is a zero byte in the file.",
         "a text file has none: it is damaged, or no text at all.",
         "write the file again from its source.");
-
-    private static string Shorten(string message) => Position.Replace(Depth.Replace(message, "nested deeper than 32 levels."), "").Trim();
-
-    [GeneratedRegex(@"\s*(LineNumber|BytePositionInLine): \d+( \| BytePositionInLine: \d+)?\.?")]
-    private static partial Regex Position { get; }
-
-    [GeneratedRegex(@"The maximum configured depth of \d+ has been exceeded\. Cannot read next JSON (object|array)\.")]
-    private static partial Regex Depth { get; }
 }

@@ -31,9 +31,21 @@ public static class JsonTreeReader
         }
         catch (JsonException broken)
         {
-            log.Add(JsonProblems.Broken(lines.At(broken.LineNumber ?? 0, broken.BytePositionInLine ?? 0), owner, broken.Message));
+            log.Add(Problem(broken, text, lines, owner));
             return null;
         }
+    }
+
+    private static Finding Problem(JsonException broken, byte[] text, LineMap lines, FindingOwner owner)
+    {
+        var offset = lines.OffsetOf(broken.LineNumber ?? 0, broken.BytePositionInLine ?? 0);
+        if (JsonFaults.IsDepth(broken.Message))
+            return JsonProblems.TooDeep(lines.At(offset), owner);
+        if (JsonFaults.Open(text, Options) is { } open)
+            return JsonProblems.Unfinished(lines.At(text.Length), owner, open.Bracket, lines.At(open.Offset));
+        return offset < text.Length
+            ? JsonProblems.Broken(lines.At(offset), owner, JsonFaults.Words(broken.Message, text.AsSpan(offset)))
+            : JsonProblems.NoValue(lines.At(offset), owner);
     }
 
     private static byte[] WithoutMark(byte[] bytes) => bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes[3..] : bytes;

@@ -28,5 +28,8 @@ public sealed class LineMap
     }
 
     /// <summary>The place of a byte given by its line and its offset in that line, both from 0.</summary>
-    public Place At(long line, long byteInLine) => line < starts.Count ? At(starts[(int)line] + byteInLine) : At(bytes.Length);
+    public Place At(long line, long byteInLine) => At(OffsetOf(line, byteInLine));
+
+    /// <summary>The byte given by its line and its offset in that line, both from 0; the end of the file if that is beyond it.</summary>
+    public int OffsetOf(long line, long byteInLine) => line < starts.Count ? (int)Math.Min(starts[(int)line] + byteInLine, bytes.Length) : bytes.Length;
 }
