@@ -14,6 +14,7 @@ internal static class FolderChecks
         foreach (var table in tables.Where(table => table.IsWhole))
         {
             TableChecks.Run(table, log);
+            TotalRowChecks.Run(table, log);
             RuleChecks.Run(table, mechanisms, log);
             SumChecks.Run(table, log);
         }

@@ -8,7 +8,7 @@ using ReleaseKit.Review;
 namespace ReleaseKit.Reading.Tables;
 
 /// <summary>What labels.csv says about one value of a stub column.</summary>
-internal sealed record LabelEntry(string? Id, decimal? Order, string? Parent, ReaderText? Name, Place At);
+internal sealed record LabelEntry(string? Id, decimal? Order, string? Parent, ReaderText? Name, Place At, Place ParentAt);
 
 /// <summary>labels.csv: stub values' ids, order, parents and names by language. Columns column,value and any of id,order,parent,name_LANGUAGE.</summary>
 internal sealed partial class LabelBook
@@ -31,6 +31,8 @@ internal sealed partial class LabelBook
                 context.Add(LabelProblems.Unused(entry.At, value.Column, "stub column", used.Keys, context.Owner));
             else if (!values.Contains(value.Value))
                 context.Add(LabelProblems.Unused(entry.At, value.Value, $"row heading in column \"{value.Column}\"", values, context.Owner));
+            else if (entry.Parent is { } parent && !values.Contains(parent))
+                context.Add(LabelProblems.UnknownParent(entry.ParentAt, value, parent, values, context.Owner));
     }
 
     /// <summary>The book of a folder; empty if it has no labels.csv, or one that cannot be read.</summary>
@@ -43,6 +45,7 @@ internal sealed partial class LabelBook
         if (rows is not null && ColumnsAreKnown(rows, context))
             while (rows.Read())
                 book.Add(rows, context);
+        LabelParents.BreakCycles(book.entries, context);
         return book;
     }
 
@@ -59,7 +62,7 @@ internal sealed partial class LabelBook
     private void Add(CsvFile rows, ReadContext context)
     {
         var value = new StubValue(Field(rows, "column") ?? "", Field(rows, "value") ?? "");
-        var entry = new LabelEntry(Field(rows, "id"), Order(rows, context), Field(rows, "parent"), Name(rows, context), rows.PlaceOf(0));
+        var entry = new LabelEntry(Field(rows, "id"), Order(rows, context), Field(rows, "parent"), Name(rows, context), rows.PlaceOf(0), PlaceOf(rows, "parent"));
         if (entry.Id is { } id && !Slug.IsOne(id))
             context.Add(LabelProblems.BadId(rows.PlaceOf(IndexOf(rows, "id")), id, context.Owner));
         if (!entries.TryAdd(value, entry))
@@ -89,6 +92,8 @@ internal sealed partial class LabelBook
 
     private static string? Field(CsvFile rows, string column) =>
         IndexOf(rows, column) is >= 0 and var index && rows.Text(index) is { Length: > 0 } text ? text : null;
+
+    private static Place PlaceOf(CsvFile rows, string column) => rows.PlaceOf(Math.Max(0, IndexOf(rows, column)));
 
     private static int IndexOf(CsvFile rows, string column) => rows.Headers.ToList().IndexOf(column);
 

@@ -33,6 +33,18 @@ internal static class LabelProblems
         "what is said of it here has no effect.",
         Nearest.Of(name, known) is { } near ? $"write \"{near}\", or remove the line." : "correct it, or remove the line.");
 
+    public static Finding UnknownParent(Place at, StubValue value, string parent, IEnumerable<string> known, FindingOwner owner) => new(
+        FindingLevel.Stop, "unknown-label", owner, at,
+        $"The parent \"{KeyProblems.Cut(parent)}\" of \"{KeyProblems.Cut(value.Value)}\" is no row heading in column \"{KeyProblems.Cut(value.Column)}\".",
+        "on which level a row stands decides in how many cells one unit is counted.",
+        Nearest.Of(parent, known) is { } near ? $"write \"{near}\"." : "write a row heading of that column, or leave the field empty.");
+
+    public static Finding ParentCycle(Place at, IEnumerable<string> values, FindingOwner owner) => new(
+        FindingLevel.Stop, "parent-cycle", owner, at,
+        $"These row headings are each said to be part of the next, and the last of the first: {string.Join(", ", values.Select(value => $"\"{KeyProblems.Cut(value)}\""))}.",
+        "on which level a row stands decides in how many cells one unit is counted; in a circle no row stands on any.",
+        "leave \"parent\" empty for the one of them that stands highest.");
+
     public static Finding Twice(Place at, StubValue value, Place first, FindingOwner owner) => new(
         FindingLevel.Stop, "doubled-row", owner, at,
         $"\"{KeyProblems.Cut(value.Value)}\" of column \"{KeyProblems.Cut(value.Column)}\" stands there twice; first at line {first.Line}.",

@@ -13,6 +13,12 @@ internal static class TotalProblems
         "a total under another heading would be counted among its parts.",
         Nearest.Of(total, known) is { } near ? $"write \"all\": \"{near}\"." : "write the heading that totals have in the CSV, or take \"all\" out if there is none.");
 
+    public static Finding LooksLikeTotal(Place at, string column, string label, int line, FindingOwner owner) => new(
+        FindingLevel.Caution, "looks-like-total", owner, at,
+        $"\"{KeyProblems.Cut(label)}\" in column \"{column}\", first at line {line} of the CSV, reads like the heading of totals, and \"all\" does not say so.",
+        "the total would be counted among its own parts: in charts, in selections, and in what one unit costs.",
+        $"if it is the total, write {{ \"column\": \"{column}\", …, \"all\": \"{KeyProblems.Cut(label)}\" }}; if it is one row among the others, leave it.");
+
     public static Finding NotATotal(Place at, string address, string column, FindingOwner owner) => new(
         FindingLevel.Stop, "sum-not-a-total", owner, at,
         $"{address} has the rule \"sumOver\" \"{column}\" but is no total there.",
