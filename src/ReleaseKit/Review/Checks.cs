@@ -19,6 +19,7 @@ public static class Checks
         new AccountingCheck(),
         new UnusedMechanismCheck(),
         new LevelsCheck(),
+        new SensitivityFormsCheck(),
         new ExactCountCheck(),
         new UniformNoiseCheck(),
         new OffGridCheck(),

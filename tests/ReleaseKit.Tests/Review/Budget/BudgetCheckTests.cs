@@ -275,4 +275,30 @@ public sealed class BudgetCheckTests
             .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", "\"who\": \"lamp\"");
         Assert.Contains("is not below 1 divided by the 2,000,000,000 lamps", folder.Text("delta-too-large"), StringComparison.Ordinal);
     }
+
+    /// <summary>Norms by Dwork, McSherry, Nissim and Smith 2006, definition 3: one unit in four cells by 1 each has an l1 of 4 and an l2 of 2.</summary>
+    [Theory]
+    [InlineData("\"cellsPerUnit\": 4, \"perCell\": 1, \"l2\": 1.5", "an l2 of 2, and an l2 of 1.5")]
+    [InlineData("\"cellsPerUnit\": 4, \"perCell\": 1, \"l2\": 3", "an l2 of 2, and an l2 of 3")]
+    [InlineData("\"cellsPerUnit\": 4, \"perCell\": 1, \"l1\": 1", "an l1 of 4, and an l1 of 1")]
+    [InlineData("\"l1\": 2, \"l2\": 3, \"l1Levels\": 1", "an l1 of 2 and an l2 of 3")]
+    public void Sensitivity_given_in_two_ways_that_differ_is_a_stop(string sensitivity, string words)
+    {
+        using var folder = new TestFolder();
+        folder.WithLit($"{{ \"id\": \"lamps-lit\", \"law\": \"discrete-gaussian\", \"sigma\": 8.0, \"sensitivity\": {{ {sensitivity} }} }}");
+        var text = folder.Text("sensitivity-unclear");
+        Assert.Contains("Stop mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains(words, text, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("\"cellsPerUnit\": 4, \"perCell\": 1, \"l2\": 2")]
+    [InlineData("\"cellsPerUnit\": 2, \"perCell\": 1, \"l1\": 2, \"l2\": 1.41421")]
+    [InlineData("\"l1\": 3, \"l2\": 2, \"l1Levels\": 1")]
+    public void Sensitivity_given_in_two_ways_that_agree_is_no_finding(string sensitivity)
+    {
+        using var folder = new TestFolder();
+        folder.WithLit($"{{ \"id\": \"lamps-lit\", \"law\": \"discrete-gaussian\", \"sigma\": 8.0, \"sensitivity\": {{ {sensitivity} }} }}");
+        folder.HasNo("sensitivity-unclear");
+    }
 }
