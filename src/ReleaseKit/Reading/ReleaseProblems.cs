@@ -25,6 +25,12 @@ internal static class ReleaseProblems
         "canonical links, the feed, the sitemap and the link to the latest edition are left out.",
         "add \"address\": \"https://office.example/release/1/\"");
 
+    public static Finding HeadlineTwice(Place at, string address, Place first, FindingOwner owner) => new(
+        FindingLevel.Caution, "headline-twice", owner, at,
+        $"\"{KeyProblems.Cut(address)}\" is a headline already; first at line {first.Line}.",
+        "the first page would show the same figure twice.",
+        "name another figure, or take it out.");
+
     public static Finding LanguageNotYet(Place at, string language, FindingOwner owner) => KeyProblems.NotYet(
         at, $"languages\": \"{KeyProblems.Cut(language)}", owner, "write \"languages\": [\"en\"], and text in English; other languages come later.");
 

@@ -20,23 +20,23 @@ internal static class AddressProblems
         $"\"{part}\" in \"{whole}\" is not properly percent-encoded", "Write % as %25, # as %23, & as %26, a space as %20.");
 
     public static AddressException UnknownTable(FigureAddress address, IReadOnlyList<Table> tables) => new(
-        $"{address} names a table \"{address.Table}\" that is not in the release", Suggest(address.Table, tables.Select(table => table.Id)));
+        $"{Quoted(address)} names a table \"{address.Table}\" that is not in the release", Suggest(address.Table, tables.Select(table => table.Id)));
 
     public static AddressException UnknownFigure(FigureAddress address, Table table) => new(
-        $"{address} names a figure \"{address.Figure}\" that table \"{table.Id}\" does not have",
+        $"{Quoted(address)} names a figure \"{address.Figure}\" that table \"{table.Id}\" does not have",
         Suggest(address.Figure, table.Measures.Select(measure => measure.Column)));
 
     public static AddressException UnknownColumn(FigureAddress address, string column, Table table) => new(
-        $"{address} names a column \"{column}\" that is no stub column of \"{table.Id}\"", Suggest(column, table.Stub.Select(stub => stub.Column)));
+        $"{Quoted(address)} names a column \"{column}\" that is no stub column of \"{table.Id}\"", Suggest(column, table.Stub.Select(stub => stub.Column)));
 
     public static AddressException UnknownValue(FigureAddress address, StubColumn column, string value) => new(
-        $"{address}: column \"{column.Column}\" has no value \"{value}\"", Suggest(value, column.Labels.Select(label => label.Value)));
+        $"{Quoted(address)}: column \"{column.Column}\" has no value \"{value}\"", Suggest(value, column.Labels.Select(label => label.Value)));
 
     public static AddressException NamedTwice(FigureAddress address, string column) => new(
-        $"{address} names the column \"{column}\" twice", "Name each column once.");
+        $"{Quoted(address)} names the column \"{column}\" twice", "Name each column once.");
 
     public static AddressException NothingMatches(FigureAddress address, Table table) => new(
-        $"{address} matches no row of \"{table.Id}\"",
+        $"{Quoted(address)} matches no row of \"{table.Id}\"",
         "Check the values against the CSV; rows for all are left out of a column that the address does not name.");
 
     public static AddressException Several(FigureAddress address, FigureSelection selection, Release release) =>
@@ -47,9 +47,11 @@ internal static class AddressProblems
         var table = tables[selection.Table];
         var first = selection.Rows.Take(Listed).Select(row => FigureAddress.Canonical(table, table.Measures[selection.Measure], row));
         return new AddressException(
-            $"{address} means {selection.Rows.Count} figures, but one is needed here",
+            $"{Quoted(address)} means {selection.Rows.Count} figures, but one is needed here",
             $"Name every stub column. The first are: {string.Join(", ", first)}.");
     }
+
+    private static string Quoted(FigureAddress address) => address.Written is { } written ? $"\"{written}\"" : address.ToString();
 
     private static string Suggest(string given, IEnumerable<string> known)
     {

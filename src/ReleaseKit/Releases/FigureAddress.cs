@@ -8,6 +8,9 @@ namespace ReleaseKit.Releases;
 /// </summary>
 public sealed record FigureAddress(string Table, string Figure, IReadOnlyList<StubValue> Query)
 {
+    /// <summary>As the writer wrote it where that is not a whole address; messages quote it.</summary>
+    public string? Written { get; init; }
+
     /// <summary>Reads an address as written; short names are not looked up here, see <see cref="Of"/>.</summary>
     /// <exception cref="AddressException">It does not have the form of an address.</exception>
     public static FigureAddress Parse(string text)

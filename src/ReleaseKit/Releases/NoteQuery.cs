@@ -23,6 +23,10 @@ public static class NoteQuery
         return index >= 0 ? index : throw AddressProblems.UnknownFigure(Address(table, at), table);
     }
 
-    private static FigureAddress Address(Table table, string at) =>
-        FigureAddress.Parse(at.StartsWith('?') ? $"{Uri.EscapeDataString(table.Id)}/-{at}" : at.Contains('/', StringComparison.Ordinal) ? at : $"{Uri.EscapeDataString(table.Id)}/{at}");
+    private static FigureAddress Address(Table table, string at)
+    {
+        if (at.StartsWith('?'))
+            return new FigureAddress(table.Id, "", FigureAddress.ParseQuery(at[1..], at)) { Written = at };
+        return FigureAddress.Parse(at.Contains('/', StringComparison.Ordinal) ? at : $"{Uri.EscapeDataString(table.Id)}/{at}") with { Written = at };
+    }
 }

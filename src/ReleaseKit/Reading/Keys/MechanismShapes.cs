@@ -17,12 +17,21 @@ public static class MechanismShapes
 
     public static ObjectShape Who { get; } = new("mechanisms:forms", [("one", "\"one\": \"household\""), ("other", "\"other\": \"households\"")], [], []);
 
-    public static ObjectShape Authorised { get; } = new("mechanisms:authorised", [], ["epsilon", "delta", "rho", "by", "on", "paper", "unspent", "over"], []);
+    public static ObjectShape Authorised { get; } = new("mechanisms:authorised", [], ["epsilon", "delta", "rho", "by", "on", "paper", "unspent", "over"], [])
+    {
+        Example = "{ \"epsilon\": 6.0, \"delta\": 1e-9 }",
+    };
 
     public static ObjectShape Practice { get; } = new("mechanisms:practice", [],
-        ["heldBy", "sampler", "rows", "corrections", "tuned", "span", "renewal"], []);
+        ["heldBy", "sampler", "rows", "corrections", "tuned", "span", "renewal"], [])
+    {
+        Example = "{ \"sampler\": \"exact integer sampler\" }",
+    };
 
-    public static ObjectShape Composition { get; } = new("mechanisms:composition", [], ["together"], []);
+    public static ObjectShape Composition { get; } = new("mechanisms:composition", [], ["together"], [])
+    {
+        Example = "{ \"together\": [ \"ward-arrears\" ] }",
+    };
 
     public static ObjectShape Group { get; } = new("mechanisms:group", [], [], ["disjoint", "by"]);
 
@@ -35,12 +44,21 @@ public static class MechanismShapes
         ["reportTruth", "categories", "respondents", "questionsPerUnit", "weights", "target", "domain", "records", "noTies"]);
 
     public static ObjectShape Sensitivity { get; } = new("mechanisms:sensitivity", [],
-        ["cellsPerUnit", "perCell", "signed", "perUnit", "moves", "l1", "l2", "l1Levels"], []);
+        ["cellsPerUnit", "perCell", "signed", "perUnit", "moves", "l1", "l2", "l1Levels"], [])
+    {
+        Example = "{ \"cellsPerUnit\": 1, \"perCell\": 1 }",
+    };
 
-    public static ObjectShape Spent { get; } = new("mechanisms:spent", [], ["epsilon", "delta", "rho"], []);
+    public static ObjectShape Spent { get; } = new("mechanisms:spent", [], ["epsilon", "delta", "rho"], [])
+    {
+        Example = "{ \"rho\": 0.005540167 }",
+    };
 
     public static ObjectShape AfterStep { get; } = new("mechanisms:afterStep", [],
-        ["roundTo", "how", "ties", "notBelow", "notAbove", "zeroBelow"], ["adjusted"]);
+        ["roundTo", "how", "ties", "notBelow", "notAbove", "zeroBelow"], ["adjusted"])
+    {
+        Example = "{ \"roundTo\": 5 }",
+    };
 
     public static ObjectShape Clipped { get; } = new("mechanisms:clipped", [("from", "\"from\": 0"), ("to", "\"to\": 400")], [], []);
 

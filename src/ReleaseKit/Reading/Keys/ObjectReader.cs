@@ -17,11 +17,12 @@ public sealed class ObjectReader
     private ObjectReader(JsonObject json, ObjectShape shape, ReadContext context) => (this.json, this.shape, this.context) = (json, shape, context);
 
     /// <summary>Reads an object; null, with a stop, if the value is none.</summary>
-    public static ObjectReader? Open(JsonValue value, string key, ObjectShape shape, ReadContext context)
+    public static ObjectReader? Open(JsonValue value, string key, ObjectShape shape, ReadContext context) => Open(value, key, shape, shape.Paste, context);
+
+    private static ObjectReader? Open(JsonValue value, string key, ObjectShape shape, string paste, ReadContext context)
     {
         if (value is not JsonObject json)
         {
-            var paste = shape.Must.Count == 0 ? "{ }" : $"{{ {string.Join(", ", shape.Must.Select(must => must.Paste))} }}";
             context.Add(KeyProblems.WrongType(value, key, "an object { … }", paste, context.Owner));
             return null;
         }
@@ -88,7 +89,8 @@ public sealed class ObjectReader
         return List(key);
     }
 
-    public ObjectReader? Object(string key, ObjectShape shape) => Find(key) is { } value ? Open(value, key, shape, context) : null;
+    public ObjectReader? Object(string key, ObjectShape shape) =>
+        Find(key) is { } value ? Open(value, key, shape, $"\"{key}\": {shape.Paste}", context) : null;
 
     /// <summary>The members of an object whose keys are names of the folder's own (units, columns, marks).</summary>
     public IReadOnlyList<JsonMember> Members(string key) => Find(key) is { } value ? Values.Members(value, key, context) : [];

@@ -22,15 +22,27 @@ public static class ReleaseShapes
 
     public static ObjectShape Licence { get; } = new("release:licence", [("name", "\"name\": \"CC BY 4.0\"")], ["url"], []);
 
-    public static ObjectShape Coverage { get; } = new("release:coverage", [], ["main", "also"], []);
+    public static ObjectShape Coverage { get; } = new("release:coverage", [], ["main", "also"], [])
+    {
+        Example = "{ \"main\": 0.95, \"also\": [0.5, 0.99] }",
+    };
 
-    public static ObjectShape Reliability { get; } = new("release:reliability", [], ["close", "rough"], []);
+    public static ObjectShape Reliability { get; } = new("release:reliability", [], ["close", "rough"], [])
+    {
+        Example = "{ \"close\": 0.1, \"rough\": 0.5 }",
+    };
 
-    public static ObjectShape Edition { get; } = new("release:edition", [], ["number", "printing", "status"], ["replaces", "changes"]);
+    public static ObjectShape Edition { get; } = new("release:edition", [], ["number", "printing", "status"], ["replaces", "changes"])
+    {
+        Example = "{ \"number\": 1, \"printing\": 1, \"status\": \"first\" }",
+    };
 
     public static ObjectShape Forms { get; } = new("release:forms", [("one", "\"one\": \"household\""), ("other", "\"other\": \"households\"")], [], []);
 
-    public static ObjectShape Look { get; } = new("release:look", [], ["accent", "foot"], []);
+    public static ObjectShape Look { get; } = new("release:look", [], ["accent", "foot"], [])
+    {
+        Example = "{ \"accent\": \"#7A1D4E\" }",
+    };
 
     public static ObjectShape Narrative { get; } = new("release:narrative", [("file", "\"file\": \"narrative/summary.md\"")], ["language"], []);
 
@@ -56,20 +68,29 @@ public static class ReleaseShapes
         ["derived", "publishedWhen", "drawColumn", "sampling"]);
 
     public static ObjectShape NoiseRule { get; } = new("release:noiseRule", [],
-        ["where", "mechanism", "sumOver", "exact", "public"], ["sameDrawAs", "stated", "mechanisms"]);
+        ["where", "mechanism", "sumOver", "exact", "public"], ["sameDrawAs", "stated", "mechanisms"])
+    {
+        Example = "{ \"mechanism\": \"ward-arrears\" }",
+    };
 
     public static ObjectShape Column { get; } = new("release:column", [("from", "\"from\": \"public\"")], ["mechanism"], []);
 
     public static ObjectShape Addition { get; } = new("release:addition",
         [("figure", "\"figure\": \"in_arrears\""), ("over", "\"over\": \"ward\"")], ["total"], []);
 
-    public static ObjectShape Page { get; } = new("release:page", [], ["cutBy"], []);
+    public static ObjectShape Page { get; } = new("release:page", [], ["cutBy"], [])
+    {
+        Example = "{ \"cutBy\": \"district\" }",
+    };
 
     public static ObjectShape Rows { get; } = new("release:rows", [], [], ["foundInData"]);
 
     public static ObjectShape Hidden { get; } = new("release:hidden", [("by", "\"by\": \"public-rule\"")], ["inTotals"], []);
 
-    public static ObjectShape Statuses { get; } = new("release:statuses", [], ["column", "marks"], []);
+    public static ObjectShape Statuses { get; } = new("release:statuses", [], ["column", "marks"], [])
+    {
+        Example = "{ \"marks\": { \"[c]\": \"Q\" } }",
+    };
 
     public static ObjectShape Chart { get; } = new("release:chart",
         [("id", "\"id\": \"by-district\""), ("title", "\"title\": \"In arrears by district\""), ("figures", "\"figures\": \"arrears/in_arrears?ward=All\"")],

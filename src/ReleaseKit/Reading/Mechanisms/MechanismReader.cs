@@ -80,12 +80,15 @@ internal static class MechanismReader
         var said = keys.Object("sensitivity", MechanismShapes.Sensitivity);
         var sensitivity = said is null ? new Sensitivity() : ReadNumbers(said);
         var isSaid = sensitivity is { CellsPerUnit: not null, PerCell: not null } or { L1: not null } or { L2: not null };
-        if (!isSaid && (said is not null || !keys.Has("sensitivity")))
+        if (!isSaid && (said is null ? !keys.Has("sensitivity") : !IsGiven(said)))
             keys.Context.Add(MechanismProblems.SensitivityMissing(keys.PlaceOf("sensitivity"), id, keys.Context.Owner));
         if (isSaid && law == LawName.Staircase && sensitivity.PerCell is null)
             keys.Context.Add(MechanismProblems.StaircaseNeedsPerCell(keys.PlaceOf("sensitivity"), id, keys.Context.Owner));
         return isSaid && (law != LawName.Staircase || sensitivity.PerCell is not null) ? sensitivity : null;
     }
+
+    /// <summary>Whether the keys that are needed are there; a number of theirs that is wrong has been reported.</summary>
+    private static bool IsGiven(ObjectReader keys) => (keys.Has("cellsPerUnit") && keys.Has("perCell")) || keys.Has("l1") || keys.Has("l2");
 
     private static Sensitivity ReadNumbers(ObjectReader keys) => new()
     {

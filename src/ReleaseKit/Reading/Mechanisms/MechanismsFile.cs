@@ -21,6 +21,8 @@ internal static class MechanismsFile
         ["concentrated"] = Accounting.Concentrated,
     };
 
+    private static readonly string[] AuthorisedNumbers = ["epsilon", "delta", "rho"];
+
     public static MechanismsDraft Read(JsonValue root, IReadOnlyDictionary<string, Unit> units, FolderFiles files, ReadContext context)
     {
         if (ObjectReader.Open(root, "mechanisms.json", MechanismShapes.Root, context) is not { } keys)
@@ -89,11 +91,16 @@ internal static class MechanismsFile
             Over = keys.Text("over"),
             At = keys.At,
         };
+        if (NumbersOf(authorised) != AuthorisedNumbers.Count(keys.Has))
+            authorised = authorised with { Epsilon = null, Delta = null, Rho = null };
         if (accounting is null || IsComplete(keys, accounting.Value))
             return authorised;
         keys.Context.Add(MechanismProblems.AuthorisedIncomplete(keys.At, accounting.Value, keys.Context.Owner));
         return null;
     }
+
+    /// <summary>Where one of the numbers could not be read, the others alone would say something else.</summary>
+    private static int NumbersOf(Authorised authorised) => new[] { authorised.Epsilon, authorised.Delta, authorised.Rho }.Count(number => number is not null);
 
     private static bool IsComplete(ObjectReader keys, Accounting accounting) => accounting switch
     {

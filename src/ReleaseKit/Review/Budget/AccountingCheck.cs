@@ -15,8 +15,16 @@ internal sealed class AccountingCheck : IReviewCheck
         if (subject.Noise is not { } account)
             return [];
         var accountant = Accountant.Of(account.Accounting);
-        return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))))
+        return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))) && !IsToldByColumn(spending, subject.Read))
             .Select(spending => Found(spending, account));
+    }
+
+    // A column that gives a parameter and is not there, not declared or without numbers is told where it stands.
+    private static bool IsToldByColumn(MechanismSpending spending, Reading.ReadOutcome read)
+    {
+        var columns = spending.Mechanism.Parameters.Values.Select(value => value.Column).OfType<string>().ToList();
+        return spending.Loss is null && columns.Count > 0 && (!read.TablesAreWhole || read.Findings.Any(finding =>
+            finding.Level == FindingLevel.Stop && columns.Exists(column => finding.Found.Contains($"\"{column}\"", StringComparison.Ordinal))));
     }
 
     private static Finding Found(MechanismSpending spending, NoiseAccount account) => spending switch

@@ -23,7 +23,13 @@ internal sealed class ProseLinkCheck : IReviewCheck
             _ => null,
         })
         .OfType<Finding>()
+        .Concat(ChartsAgain(page))
         .Take(FindingLog.MostOfAKind);
+
+    private static IEnumerable<Finding> ChartsAgain(ProsePage page) => ProseDocument.Parse(page.Markdown)
+        .Descendants<LinkInline>().Where(image => image.IsImage && ProseLink.ChartIn(image.Url) is not null)
+        .GroupBy(image => ProseLink.ChartIn(image.Url)!)
+        .SelectMany(same => same.Skip(1).Select(image => ProseProblems.ChartAgain(PlaceOf(image, page), same.Key, same.First().Line + 1, FindingOwner.Writer)));
 
     private static Finding? CheckLink(LinkInline link, ProsePage page, Release release, bool resolves)
     {

@@ -60,6 +60,12 @@ internal static class ProseProblems
         "nothing can be placed here.",
         Nearest.Of(id, known) is { } near ? $"write chart:{near}." : "add it to \"charts\" in release.json, or take the image out.");
 
+    public static Finding ChartAgain(Place at, string id, int first, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-chart", owner, at,
+        $"The chart \"{KeyProblems.Cut(id)}\" stands on this page already; first at line {first}.",
+        "a link to the chart must lead to one place, and whoever listens to the page would hear it twice.",
+        "take one of the two out, and refer to the other in words.");
+
     public static Finding NoAlt(Place at, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-alt", owner, at,
         "This image has no alternative text.",

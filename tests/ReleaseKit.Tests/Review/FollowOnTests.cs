@@ -1,0 +1,70 @@
+using ReleaseKit.Review;
+using ReleaseKit.Tests.Folders;
+using Xunit;
+
+namespace ReleaseKit.Tests.Review;
+
+/// <summary>Where one thing is wrong, one finding says so, and what follows from it is no finding of its own.</summary>
+public sealed class FollowOnTests
+{
+    private const string Mechanisms = "mechanisms.json";
+    private const string Release = "release.json";
+
+    [Theory]
+    [InlineData("1", "is 1, but")]
+    [InlineData("2", "is 2, but")]
+    public void Delta_out_of_range_is_not_said_to_be_missing(string delta, string found) =>
+        Assert.Contains(found, OnlyStop("out-of-range", folder => folder.Edit(Mechanisms, "\"delta\": 1e-9", $"\"delta\": {delta}")), StringComparison.Ordinal);
+
+    [Fact]
+    public void Sensitivity_of_nought_is_not_said_to_be_missing() => OnlyStop(
+        "out-of-range", folder => folder.Edit(Mechanisms, "\"cellsPerUnit\": 1", "\"cellsPerUnit\": 0"));
+
+    [Fact]
+    public void Column_of_scales_that_nobody_declared_is_one_finding() => OnlyStop("undeclared-column", folder => folder
+        .With("tables/lamps.csv", "street,lit,broken,noise_scale\nAll,60,9,3\nKiln Row,31,4,2.5\nQuay,20,5,3\nWeir Lane,9,-1,3\n")
+        .Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }"));
+
+    [Fact]
+    public void Column_of_scales_that_is_missing_is_one_finding() => OnlyStop(
+        "missing-column", folder => folder.Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }"));
+
+    [Theory]
+    [InlineData("\"practice\": {", "\"composition\": [ \"lamps-lit\" ], \"practice\": {", "write \"composition\": { \"together\": [")]
+    [InlineData("\"sensitivity\": { \"cellsPerUnit\": 2, \"perCell\": 1 }", "\"sensitivity\": 1", "write \"sensitivity\": { \"cellsPerUnit\": 1, \"perCell\": 1 }")]
+    public void Object_of_the_wrong_kind_is_told_what_to_paste(string from, string to, string paste)
+    {
+        using var folder = new TestFolder().Edit(Mechanisms, from, to);
+        Assert.Contains(paste, folder.OnlyStop("wrong-type").Do, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("?street=Quai", "\"?street=Quai\": column \"street\" has no value \"Quai\".")]
+    [InlineData("?strete=Quay", "\"?strete=Quay\" names a column \"strete\" that is no stub column of \"lamps\".")]
+    [InlineData("?street", "\"street\" in \"?street\" is no column=value.")]
+    [InlineData("lit?street=Weir%20Lain", "\"lit?street=Weir%20Lain\": column \"street\" has no value \"Weir Lain\".")]
+    public void Selection_of_a_note_is_quoted_as_it_was_written(string at, string found)
+    {
+        using var folder = new TestFolder().Edit(Release, "\"figures\": [\n", $"\"notes\": [ {{ \"at\": \"{at}\", \"text\": \"New lamps.\" }} ], \"figures\": [\n");
+        Assert.Equal(found, folder.OnlyStop("unknown-figure").Found);
+    }
+
+    [Fact]
+    public void Headline_that_stands_there_already_is_a_caution() => Broken.Cautions(
+        "headline-twice", Release, "\"total\", \"title\"", "name another figure",
+        folder => folder.Edit(Release, "\"headlines\": [ \"lamps/lit?street=All\" ]",
+            "\"short\": { \"total\": \"lamps/lit?street=All\" }, \"headlines\": [ \"lamps/lit?street=All\", { \"figure\": \"total\", \"title\": \"Lamps lit\" } ]"));
+
+    [Fact]
+    public void Chart_that_stands_on_the_page_already_is_a_stop() => Broken.Stops(
+        "prose-chart", "narrative/summary.md", "![Again]", "take one of the two out",
+        folder => folder.With("narrative/summary.md", TestFolder.Prose + "\n![Again](chart:by-street)\n"));
+
+    private static string OnlyStop(string slug, Action<TestFolder> damage)
+    {
+        using var broken = new Broken(damage);
+        var stop = Assert.Single(broken.Review(), finding => finding.Level == FindingLevel.Stop);
+        Assert.Equal(slug, stop.Slug);
+        return stop.Found;
+    }
+}
