@@ -19,7 +19,7 @@ internal sealed class HiddenPartCheck : IReviewCheck
         var column = table.Stub.ToList().FindIndex(stub => stub.Column == addition.Over);
         if (measure is null || column < 0)
             yield break;
-        foreach (var group in new Reading.Tables.RowKeys(table).GroupsOver(column))
+        foreach (var group in new Reading.Tables.RowGroups(table).GroupsOver(column))
             if (GivenBack(table, measure, addition, column, group) is { } row)
                 yield return Found(table, measure, row, addition);
     }

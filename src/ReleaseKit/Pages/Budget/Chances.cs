@@ -24,11 +24,11 @@ internal static class Chances
     public static string OneIn(double share, ILanguage language) =>
         language.Text("budget.one-in", ("all", language.Number(new PublishedValue((long)Math.Floor((1 / share) + 1e-6), 0))));
 
-    // One decimal, more where it takes more to tell the chance from 0 or from 100.
+    // One decimal; below 1 in 100 two digits; just below 100 as many as it takes to tell the chance from 100.
     private static int DecimalsFor(double chance)
     {
-        var nearest = 100 * Math.Min(chance, 1 - chance);
-        return nearest <= 0 ? 1 : Math.Clamp(LossPrint.DecimalsFor(nearest, 2), 1, MostDecimals);
+        var (nearest, digits) = chance < 0.5 ? (100 * chance, 2) : (100 * (1 - chance), 1);
+        return nearest <= 0 ? 1 : Math.Clamp(LossPrint.DecimalsFor(nearest, digits), 1, MostDecimals);
     }
 
     private static string InHundred(PublishedValue value, ILanguage language) => language.Text("budget.in-100", ("number", language.Number(value)));

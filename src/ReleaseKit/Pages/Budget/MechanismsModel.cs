@@ -30,7 +30,7 @@ internal static class MechanismsModel
             ["lower"] = TotalsModel.InWords(account.Lower, words, LossPrint.DownTo),
             ["rule"] = words.Rule(account.Recomputed.Rule),
             ["source"] = account.Recomputed.Rule.Source,
-            ["share"] = Share(account.ShareOfSpent, words),
+            ["share"] = words.Say("budget.in-100", ("number", words.Language.Number(PrintedShares.Of(account, words.Statement)))),
             ["only_declared"] = account.OnlyDeclared,
         };
     }
@@ -41,7 +41,4 @@ internal static class MechanismsModel
     private static string Clipped(ClippedTo clipped, BudgetWords words) => words.Say(
         "budget.clipped",
         ("from", words.Language.NumberInProse(LossPrint.AsWritten(clipped.From))), ("to", words.Language.NumberInProse(LossPrint.AsWritten(clipped.To))));
-
-    private static string Share(double share, BudgetWords words) =>
-        double.IsFinite(share) ? words.Say("budget.in-100", ("number", words.Language.Number(LossPrint.Up(100 * share, 1)))) : words.Say("budget.no-bound");
 }

@@ -43,9 +43,9 @@ internal static class MeasureFootModel
         ["methods"] = Link.From(page.Path, $"{PageMap.Methods}#mechanism-{mechanism.Id}"),
     };
 
-    /// <summary>The mechanism's share of what the release spent, in 100, rounded up to one decimal; empty for a mechanism that the account does not know.</summary>
+    /// <summary>The mechanism's share of what the release spent, in 100, as on the budget page; empty for a mechanism that the account does not know.</summary>
     private static string Cost(Sheet sheet, Mechanism mechanism) => sheet.Site.Budget.Mechanisms.FirstOrDefault(account => account.Mechanism.Id == mechanism.Id) is { } account
-        ? sheet.Text("tables.rule.cost", ("share", sheet.Language.Number(LossPrint.Up(100 * account.ShareOfSpent, 1))))
+        ? sheet.Text("tables.rule.cost", ("share", sheet.Language.Number(PrintedShares.Of(account, sheet.Site.Budget))))
         : "";
 
     private static string Cite(Sheet sheet, TablePage page, Measure measure)

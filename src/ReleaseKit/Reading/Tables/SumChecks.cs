@@ -19,7 +19,7 @@ internal static class SumChecks
     private static void CheckOver(ReadTable read, int measure, int column, FindingLog log)
     {
         var figure = read.Table.Measures[measure];
-        foreach (var group in new RowKeys(read.Table).GroupsOver(column))
+        foreach (var group in new RowGroups(read.Table).GroupsOver(column))
             foreach (var total in group)
                 if (figure.RuleAt(total) is NoiseRule.SumOver { StubColumn: var over } && over == column)
                     CheckTotal(read, measure, column, total, group, log);

@@ -20,8 +20,8 @@ internal static class TableChecks
 
     private static void CheckDoubledRows(ReadTable read, FindingLog log)
     {
-        var keys = new RowKeys(read.Table);
-        foreach (var (first, again) in keys.Doubled())
+        var groups = new RowGroups(read.Table);
+        foreach (var (first, again) in groups.Doubled())
             log.Add(CellProblems.DoubledRow(
                 read.PlaceOf(again), string.Join(", ", read.Table.Stub.Select(column => $"\"{Keys.KeyProblems.Cut(column.LabelOf(again).Value)}\"")),
                 read.Lines[first], FindingOwner.Noise));

@@ -1,6 +1,4 @@
-using ReleaseKit.Releases;
-
-namespace ReleaseKit.Appraisal;
+namespace ReleaseKit.Releases;
 
 /// <summary>The stub values of a row as one number, one column left out or put in its place: how rows of a table find each other without a search.</summary>
 internal sealed class RowKeys
@@ -24,6 +22,9 @@ internal sealed class RowKeys
             key += weights[column] * (UInt128)(table.Stub[column].Codes[row] + 1);
         return key;
     }
+
+    /// <summary>The key of a row, one column left out: alike for rows that differ in it alone.</summary>
+    public UInt128 Without(int row, int column) => With(Of(row), row, column, -1);
 
     /// <summary>The key of a row like this one that has another value in one column.</summary>
     public UInt128 With(UInt128 key, int row, int column, int code) =>
