@@ -41,7 +41,7 @@ internal static class TotalRowChecks
     private static bool IsNearSum(Table table, int column, int code)
     {
         var first = Array.IndexOf(table.Stub[column].Codes, code);
-        var group = new RowKeys(table).GroupsOver(column).First(rows => rows.Contains(first));
+        var group = new RowGroups(table).GroupsOver(column).First(rows => rows.Contains(first));
         var measures = table.Measures.Where(measure => measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount).ToList();
         return measures.Count > 0 && group.Count > 2 && measures.TrueForAll(measure => IsNearSum(measure, first, group));
     }
