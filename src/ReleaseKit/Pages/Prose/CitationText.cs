@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages.Prose;
@@ -10,15 +11,18 @@ internal sealed class CitationText(ILanguage language)
     /// <param name="form">What is asked for.</param>
     /// <param name="figure">The figure.</param>
     /// <param name="href">Where it stands.</param>
-    /// <param name="about">The word that goes before a number rounded for print, in the form that its place asks for; empty where none does.</param>
-    public string Of(CitationForm form, AppraisedFigure figure, string href, string about) => form == CitationForm.Reading
+    /// <param name="place">The words that its place asks for.</param>
+    public string Of(CitationForm form, AppraisedFigure figure, string href, CitationPlace place) => form == CitationForm.Reading
         ? Reading(figure, href)
-        : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, about)}</a>";
+        : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, place.About)}{InEach(form, figure, place)}</a>";
 
     /// <summary>What follows the writer's own words: " (± 19)"; nothing for a figure without a margin.</summary>
     public string MarginAfter(AppraisedFigure figure) => figure.Main is { } range
         ? $" <span class=\"cite-margin\">({HtmlText.Encode(language.Margin(range.Printed))})</span>"
         : "";
+
+    private static string InEach(CitationForm form, AppraisedFigure figure, CitationPlace place) =>
+        figure is { HasNumber: true, Measure.Kind: MeasureKind.Share } && form != CitationForm.Margin && place.InEach.Length > 0 ? " " + HtmlText.Encode(place.InEach) : "";
 
     private string Generated(CitationForm form, AppraisedFigure figure, string about) => form switch
     {
