@@ -78,6 +78,20 @@ public sealed partial class BrokenFolderTests
         Assert.False(Directory.Exists(folder.In("site")), $"{fault}: something was written");
     }
 
+    /// <summary>What a message is about that stands in no one line of a file: the file as a whole, or one that is not there.</summary>
+    private static readonly string[] OfWholeFiles = ["csv-empty"];
+
+    [Theory]
+    [MemberData(nameof(Faults))]
+    public void Every_message_names_line_and_column(string fault, string file, string old, string replacement, string named)
+    {
+        using var folder = new TemporaryFolder();
+        var heads = Head().Matches(Call.Of("review", Broken(folder, file, old, replacement)).Output).ToList();
+        Assert.True(heads.Count > 0, $"{fault}: nothing was found in {named}");
+        Assert.All(heads, head => Assert.True(
+            PlaceInFile().IsMatch(head.Groups["place"].Value) || OfWholeFiles.Contains(head.Groups["slug"].Value), $"{fault}: {head.Value}"));
+    }
+
     [Fact]
     public void A_table_in_another_encoding_stops_and_says_how_to_export_it()
     {
@@ -123,6 +137,12 @@ public sealed partial class BrokenFolderTests
         var at = text.IndexOf(old, StringComparison.Ordinal);
         return text[..at] + replacement + text[(at + old.Length)..];
     }
+
+    [GeneratedRegex(@"^(?:STOP|CAUTION|NOTE)  (?<slug>\S+) +for: .*\n(?<place>\S+)\s", RegexOptions.Multiline)]
+    private static partial Regex Head();
+
+    [GeneratedRegex(@"^[^:]+:[1-9][0-9]*:[1-9][0-9]*$")]
+    private static partial Regex PlaceInFile();
 
     [GeneratedRegex(@"^STOP .*?(?=\n\n|\z)", RegexOptions.Singleline | RegexOptions.Multiline)]
     private static partial Regex Stop();

@@ -18,5 +18,8 @@ public sealed record ReadOutcome(Release? Release, IReadOnlyList<Finding> Findin
     /// <summary>Whether every noise rule could be read; if not, a mechanism that nothing uses is no further fault.</summary>
     public bool RulesAreWhole { get; init; } = true;
 
+    /// <summary>The files that were read, to look up where a cell stands; null where a release was made without any.</summary>
+    internal Files.FolderFiles? Files { get; init; }
+
     public bool HasStops => Findings.Any(finding => finding.Level == FindingLevel.Stop);
 }

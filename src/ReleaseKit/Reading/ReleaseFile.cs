@@ -66,7 +66,7 @@ internal static class ReleaseFile
             return null;
         if (!Slug.IsOne(id))
             context.Add(Mechanisms.MechanismProblems.BadId(keys.PlaceOf("id"), id, context.Owner));
-        return new Named<ChartOrder>(new ChartOrder(id, title, figures, ReadForm(keys)), keys.PlaceOf("figures"));
+        return new Named<ChartOrder>(new ChartOrder(id, title, figures, ReadForm(keys)) { At = keys.PlaceOf("figures") }, keys.PlaceOf("figures"));
     }
 
     /// <summary>The form; beside a stop the one that is worked out, so that the chart's id stays known.</summary>

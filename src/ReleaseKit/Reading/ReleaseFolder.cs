@@ -46,7 +46,7 @@ public static class ReleaseFolder
             if (files.Exists("wording"))
                 log.Add(ReleaseProblems.WordingNotYet(new Place("wording"), FindingOwner.Writer));
             var formed = draft is null ? LoneTables() : Form(draft, mechanisms, signOff);
-            return new ReadOutcome(formed, log.ToList()) { Noise = mechanisms.Account, TablesAreWhole = tablesAreWhole, RulesAreWhole = rulesAreWhole };
+            return new ReadOutcome(formed, CellPlaces.Fill(log.ToList(), files)) { Files = files, Noise = mechanisms.Account, TablesAreWhole = tablesAreWhole, RulesAreWhole = rulesAreWhole };
         }
 
         private Release? Form(ReleaseDraft draft, MechanismsDraft mechanisms, SignOff signOff)

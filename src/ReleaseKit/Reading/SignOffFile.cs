@@ -26,7 +26,7 @@ internal static class SignOffFile
         var (finding, reason, by, on) = (keys.Text("finding"), keys.Text("reason"), keys.Text("by"), Date(keys, "on"));
         var waiver = finding is null || reason is null || by is null || on is null
             ? null
-            : new Waiver(finding, keys.Text("at"), reason, by, on.Value, Date(keys, "until"));
+            : new Waiver(finding, keys.Text("at"), reason, by, on.Value, Date(keys, "until")) { Place = keys.At };
         if (finding is null || Waivers.Waivable.Contains(finding))
             return waiver;
         context.Add(WaiverProblems.CannotBeWaived(keys.PlaceOf("finding"), finding, context.Owner));

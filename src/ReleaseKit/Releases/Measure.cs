@@ -74,7 +74,11 @@ public abstract record NoiseRule
     public sealed record SumOver(int StubColumn) : NoiseRule;
 
     /// <summary>From the confidential records without noise: outside the guarantee.</summary>
-    public sealed record Exact(ReaderText Reason) : NoiseRule;
+    public sealed record Exact(ReaderText Reason) : NoiseRule
+    {
+        /// <summary>Where release.json says so.</summary>
+        public Review.Place At { get; init; } = new("release.json");
+    }
 
     /// <summary>Known from elsewhere, not from the records.</summary>
     public sealed record Public(ReaderText Source) : NoiseRule;

@@ -63,13 +63,21 @@ public sealed record UnitForms(string One, string Other);
 public sealed record Look(string? Accent, string? Foot);
 
 /// <summary>A prose file: its path in the folder, its language, its CommonMark source.</summary>
-public sealed record ProsePage(string File, string Language, string Markdown);
+public sealed record ProsePage(string File, string Language, string Markdown)
+{
+    /// <summary>Where release.json names the file.</summary>
+    public Review.Place At { get; init; } = new("release.json");
+}
 
 /// <summary>A headline: the address of one figure; title and meaning if given.</summary>
 public sealed record Headline(string Address, ReaderText? Title, ReaderText? Meaning);
 
 /// <summary>A chart asked for: form "ordered" over a selection of one measure.</summary>
-public sealed record ChartOrder(string Id, ReaderText Title, string Figures, string Form);
+public sealed record ChartOrder(string Id, ReaderText Title, string Figures, string Form)
+{
+    /// <summary>Where release.json names its figures.</summary>
+    public Review.Place At { get; init; } = new("release.json");
+}
 
 /// <summary>signoff.json. Waivers and approvals as written.</summary>
 public sealed record SignOff(IReadOnlyList<Waiver> Waivers, IReadOnlyList<Approval> Approvals)
@@ -77,6 +85,10 @@ public sealed record SignOff(IReadOnlyList<Waiver> Waivers, IReadOnlyList<Approv
     public static SignOff Empty { get; } = new([], []);
 }
 
-public sealed record Waiver(string Finding, string? At, string Reason, string By, DateOnly On, DateOnly? Until);
+public sealed record Waiver(string Finding, string? At, string Reason, string By, DateOnly On, DateOnly? Until)
+{
+    /// <summary>Where it stands in signoff.json.</summary>
+    public Review.Place Place { get; init; } = new("signoff.json");
+}
 
 public sealed record Approval(string By, string Role, DateOnly On, string Folder);

@@ -30,7 +30,11 @@ public sealed record TableNote(string? At, ReaderText Text);
 
 public enum HiddenBy { PublicRule, NoisedValue, ValueBeforeNoise }
 
-public sealed record Hiding(HiddenBy By, bool InTotals);
+public sealed record Hiding(HiddenBy By, bool InTotals)
+{
+    /// <summary>Where release.json says so.</summary>
+    public Review.Place At { get; init; } = new("release.json");
+}
 
 /// <summary>measure adds up over a stub column to the row whose value there is Total.</summary>
 public sealed record Addition(string Measure, string Over, string Total);
@@ -69,4 +73,8 @@ public sealed record StubLabel(string Value, string Slug, string? Parent, Reader
 public enum SideColumnOrigin { Public, Published, Confidential }
 
 /// <summary>A declared column that is no stub, measure or status: scales, weights, keys. Numbers are NaN where the column is no number.</summary>
-public sealed record SideColumn(string Column, SideColumnOrigin From, string? Mechanism, double[] Numbers);
+public sealed record SideColumn(string Column, SideColumnOrigin From, string? Mechanism, double[] Numbers)
+{
+    /// <summary>Where release.json says so.</summary>
+    public Review.Place At { get; init; } = new("release.json");
+}

@@ -41,5 +41,5 @@ internal sealed class ChartCheck : IReviewCheck
     }
 
     private static Finding Found(ChartOrder chart, string slug, string found, string why, string remedy) =>
-        new(FindingLevel.Stop, slug, FindingOwner.Writer, new Place("release.json"), $"The chart \"{chart.Id}\" {found}", why, remedy) { Address = chart.Figures };
+        new(FindingLevel.Stop, slug, FindingOwner.Writer, chart.At, $"The chart \"{chart.Id}\" {found}", why, remedy) { Address = chart.Figures };
 }

@@ -19,8 +19,16 @@ public enum FindingOwner
 /// <summary>A place in a file of the folder; line and column count from 1, 0 where only the file is meant.</summary>
 public readonly record struct Place(string File, int Line = 0, int Column = 0)
 {
+    /// <summary>A cell of a CSV file whose line and column are still to be looked up; null once they are.</summary>
+    public Cell? Cell { get; init; }
+
+    public static Place OfCell(string file, int row, string column) => new(file) { Cell = new Cell(row, column) };
+
     public override string ToString() => Line == 0 ? File : Column == 0 ? $"{File}:{Line}" : $"{File}:{Line}:{Column}";
 }
+
+/// <summary>A row of a table as it was read, from 0, and the name of a column of its CSV file.</summary>
+public readonly record struct Cell(int Row, string Column);
 
 /// <summary>One thing the review reports. <c>Slug</c> is a stable name; <c>Found</c> says what is there, <c>Why</c> why it matters, <c>Do</c> what to do, ready to paste.</summary>
 public sealed record Finding(FindingLevel Level, string Slug, FindingOwner For, Place At, string Found, string Why, string Do)

@@ -35,7 +35,7 @@ internal sealed class HiddenPartCheck : IReviewCheck
     {
         var address = FigureAddress.Canonical(table, measure, row);
         return new Finding(
-            FindingLevel.Caution, "hidden-given-back", FindingOwner.Noise, new Place(table.File),
+            FindingLevel.Caution, "hidden-given-back", FindingOwner.Noise, Place.OfCell(table.File, row, measure.Column),
             $"{address} is hidden, but it is the only hidden part of a published total over \"{addition.Over}\".",
             "the total less the other parts gives its noised value back.",
             "hide a second part, or publish the figure: with its noise it may not need hiding.")

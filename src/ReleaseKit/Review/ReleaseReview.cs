@@ -1,5 +1,6 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Reading;
+using ReleaseKit.Reading.Tables;
 
 namespace ReleaseKit.Review;
 
@@ -10,7 +11,8 @@ public static class ReleaseReview
     {
         var subject = new ReviewSubject(read, appraised);
         var findings = read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject))).Distinct().ToList();
-        return [.. Waivers.Apply(findings, read.Release).Order(ByOwnerThenPlace)];
+        var placed = read.Files is { } files ? CellPlaces.Fill(findings, files) : findings;
+        return [.. Waivers.Apply(placed, read.Release).Order(ByOwnerThenPlace)];
     }
 
     private static Comparer<Finding> ByOwnerThenPlace { get; } = Comparer<Finding>.Create(Compare);

@@ -15,13 +15,13 @@ internal static class WaiverProblems
             : "take the waiver out and mend what the finding names.");
 
     public static Finding HasEnded(Waiver waiver) => new(
-        FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, new Place(Reading.SignOffFile.FileName),
+        FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, waiver.Place,
         FormattableString.Invariant($"The waiver of \"{KeyProblems.Cut(waiver.Finding)}\" ended on {waiver.Until:yyyy-MM-dd}, before this release is published."),
         "the finding stands again.",
         "renew the waiver, or take it out.");
 
     public static Finding CoversNothing(Waiver waiver) => new(
-        FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, new Place(Reading.SignOffFile.FileName),
+        FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, waiver.Place,
         $"There is no finding \"{KeyProblems.Cut(waiver.Finding)}\"{(waiver.At is null ? "" : $" at {KeyProblems.Cut(waiver.At)}")} to waive.",
         "the record would list a waiver of nothing.",
         "take it out, or correct \"at\": a file, a place as it is printed, or a figure address.");

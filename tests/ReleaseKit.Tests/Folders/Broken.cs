@@ -16,11 +16,11 @@ internal sealed class Broken : IDisposable
 
     public static void Cautions(string slug, string file, string? at, string remedy, Action<TestFolder> damage) => Has(FindingLevel.Caution, slug, file, at, remedy, damage);
 
-    /// <summary>A stop whose place is a line of a table that was only found wrong when all rows were read.</summary>
-    public static void StopsAtLine(string slug, string file, int line, string remedy, Action<TestFolder> damage)
+    /// <summary>A stop at a line and column, for files that cannot be searched as text.</summary>
+    public static void StopsAt(string slug, string file, int line, int column, string remedy, Action<TestFolder> damage)
     {
         using var broken = new Broken(damage);
-        broken.Check(FindingLevel.Stop, slug, new Place(file, line), remedy);
+        broken.Check(FindingLevel.Stop, slug, new Place(file, line, column), remedy);
     }
 
     private static void Has(FindingLevel level, string slug, string file, string? at, string remedy, Action<TestFolder> damage)

@@ -72,7 +72,7 @@ public sealed class BrokenTableTests
         folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,1234567890123456789"));
 
     [Fact]
-    public void More_digits_than_a_margin_is_worked_out_for_are_a_stop() => Broken.StopsAtLine("csv-overflow", Csv, 3, "larger unit",
+    public void More_digits_than_a_margin_is_worked_out_for_are_a_stop() => Broken.StopsAt("csv-overflow", Csv, 3, 13, "larger unit",
         folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row,31,1000000000000000"));
 
     [Fact]
@@ -92,19 +92,19 @@ public sealed class BrokenTableTests
     }
 
     [Fact]
-    public void Utf16_is_recognised() => Broken.StopsAtLine("csv-encoding", Csv, 1, "iconv -f UTF-16",
+    public void Utf16_is_recognised() => Broken.Stops("csv-encoding", Csv, null, "iconv -f UTF-16",
         folder => folder.With(Csv, [.. Encoding.Unicode.GetPreamble(), .. Encoding.Unicode.GetBytes(TestFolder.Table)]));
 
     [Fact]
-    public void Utf16_without_a_mark_is_recognised() => Broken.StopsAtLine("csv-encoding", Csv, 1, "iconv -f UTF-16",
+    public void Utf16_without_a_mark_is_recognised() => Broken.Stops("csv-encoding", Csv, null, "iconv -f UTF-16",
         folder => folder.With(Csv, Encoding.Unicode.GetBytes(TestFolder.Table)));
 
     [Fact]
-    public void Windows_1252_is_recognised_at_its_line() => Broken.StopsAtLine("csv-encoding", Csv, 3, "WINDOWS-1252",
+    public void Windows_1252_is_recognised_at_its_line() => Broken.StopsAt("csv-encoding", Csv, 3, 2, "WINDOWS-1252",
         folder => folder.With(Csv, Encoding.Latin1.GetBytes(TestFolder.Table.Replace("Kiln", "K\u00EDln", StringComparison.Ordinal))));
 
     [Fact]
-    public void Zero_byte_is_found_at_its_line() => Broken.StopsAtLine("csv-nul", Csv, 4, "export it again",
+    public void Zero_byte_is_found_at_its_line() => Broken.StopsAt("csv-nul", Csv, 4, 3, "export it again",
         folder => folder.Edit(Csv, "Quay", "Qu\0y"));
 
     [Fact]
@@ -122,18 +122,18 @@ public sealed class BrokenTableTests
     }
 
     [Fact]
-    public void Ragged_row_is_found_at_its_line() => Broken.StopsAtLine("csv-ragged", Csv, 3, "between double quotes",
+    public void Ragged_row_is_found_at_its_line() => Broken.StopsAt("csv-ragged", Csv, 3, 1, "between double quotes",
         folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row, Upper,31,4"));
 
     [Fact]
-    public void Quote_that_never_closes_is_found() => Broken.StopsAtLine("csv-quotes", Csv, 5, "twice",
+    public void Quote_that_never_closes_is_found() => Broken.StopsAt("csv-quotes", Csv, 5, 1, "twice",
         folder => folder.Edit(Csv, "Weir Lane,9,-1", "\"Weir Lane,9,-1"));
 
     [Fact]
     public void Empty_file_is_a_stop() => Broken.Stops("csv-empty", Csv, null, "a header row", folder => folder.With(Csv, ""));
 
     [Fact]
-    public void Header_alone_is_a_stop() => Broken.StopsAtLine("csv-empty", Csv, 1, "one row a line", folder => folder.With(Csv, "street,lit,broken\n"));
+    public void Header_alone_is_a_stop() => Broken.StopsAt("csv-empty", Csv, 1, 1, "one row a line", folder => folder.With(Csv, "street,lit,broken\n"));
 
     [Fact]
     public void Missing_file_is_a_stop() => Broken.Stops("missing-file", Release, "\"tables/lamps.csv\"", "put it there", folder => folder.Without(Csv));
@@ -155,7 +155,7 @@ public sealed class BrokenTableTests
         folder => folder.Edit(Csv, "street,lit,broken", "street,lit,lit"));
 
     [Fact]
-    public void Doubled_row_is_found_at_the_second() => Broken.StopsAtLine("doubled-row", Csv, 6, "remove one of them",
+    public void Doubled_row_is_found_at_the_second() => Broken.StopsAt("doubled-row", Csv, 6, 1, "remove one of them",
         folder => folder.With(Csv, TestFolder.Table + "Kiln Row,0,4\n"));
 
     [Fact]
@@ -176,7 +176,7 @@ public sealed class BrokenTableTests
     {
         using var broken = new Broken(folder => folder.Edit(Csv, "All,60,", "All,63,"));
         var finding = Assert.Single(broken.Review(), finding => finding.Slug == "sum-differs");
-        Assert.Equal(("tables/lamps.csv:2", "lamps/lit?street=All is 63, but its parts over \"street\" add up to 60: a gap of 3."), (finding.At.ToString(), finding.Found));
+        Assert.Equal(("tables/lamps.csv:2:5", "lamps/lit?street=All is 63, but its parts over \"street\" add up to 60: a gap of 3."), (finding.At.ToString(), finding.Found));
     }
 
     [Fact]
@@ -184,7 +184,7 @@ public sealed class BrokenTableTests
         folder => folder.Edit(Release, "\"all\": \"All\"", "\"all\": \"all\"").Edit(Release, "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }, ", ""));
 
     [Fact]
-    public void Figure_without_a_rule_is_a_stop() => Broken.StopsAtLine("no-rule", Csv, 2, "\"mechanism\"",
+    public void Figure_without_a_rule_is_a_stop() => Broken.StopsAt("no-rule", Csv, 2, 8, "\"mechanism\"",
         folder => folder.Edit(Release, "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "\"noise\": [ { \"where\": { \"street\": \"Quay\" }, \"mechanism\": \"lamps-broken\" }, { \"where\": { \"street\": \"Kiln Row\" }, \"mechanism\": \"lamps-broken\" }, { \"where\": { \"street\": \"Weir Lane\" }, \"mechanism\": \"lamps-broken\" } ]"));
 
     [Fact]
@@ -204,7 +204,7 @@ public sealed class BrokenTableTests
         folder => folder.Edit(Release, "{ \"mechanism\": \"lamps-broken\" }", "{ \"mechanism\": \"lamp-broken\" }"));
 
     [Fact]
-    public void Scale_that_is_not_positive_is_found_at_its_line() => Broken.StopsAtLine("scale-not-positive", Csv, 4, "drawn with",
+    public void Scale_that_is_not_positive_is_found_at_its_line() => Broken.StopsAt("scale-not-positive", Csv, 4, 11, "drawn with",
         folder => folder.With(Csv, "street,lit,broken,scale\nAll,60,9,3\nKiln Row,31,4,3\nQuay,20,5,0\nWeir Lane,9,-1,3\n")
             .Edit(Release, "\"figures\": [\n", "\"columns\": { \"scale\": { \"from\": \"public\" } }, \"figures\": [\n")
             .Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"scale\" }"));
@@ -214,7 +214,7 @@ public sealed class BrokenTableTests
     {
         using var folder = new TestFolder().Edit("mechanisms.json", "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }");
         var finding = folder.OnlyStop("missing-column");
-        Assert.Equal(("mechanisms.json:8:5", true), (finding.At.ToString(), finding.Do.StartsWith("add the column", StringComparison.Ordinal)));
+        Assert.Equal(("mechanisms.json:8:65", true), (finding.At.ToString(), finding.Do.StartsWith("add the column", StringComparison.Ordinal)));
     }
 
     [Fact]

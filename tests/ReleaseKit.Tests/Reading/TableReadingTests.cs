@@ -27,7 +27,7 @@ public sealed class TableReadingTests
     {
         using var folder = new TestFolder().Edit(Release, ", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "")
             .Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": 3.0, \"covers\": [\"lamps/broken\"]");
-        Assert.Equal("tables/lamps.csv:2", folder.OnlyStop("no-rule").At.ToString());
+        Assert.Equal("tables/lamps.csv:2:8", folder.OnlyStop("no-rule").At.ToString());
     }
 
     [Fact]

@@ -66,7 +66,7 @@ public sealed class ProseCheckTests
     }
 
     [Fact]
-    public void Page_without_a_heading_is_a_stop() => Broken.StopsAtLine("prose-title", Prose, 1, "# Summary", folder => folder.Edit(Prose, "# Summary", "Summary"));
+    public void Page_without_a_heading_is_a_stop() => Broken.StopsAt("prose-title", Prose, 1, 1, "# Summary", folder => folder.Edit(Prose, "# Summary", "Summary"));
 
     [Fact]
     public void Skipped_level_is_a_caution() => Broken.Cautions("prose-heading", Prose, "### Lamps", "write ## before it",
@@ -81,7 +81,7 @@ public sealed class ProseCheckTests
         folder => folder.Edit(Prose, "lamps were lit", "lamps \u202Ewere lit"));
 
     [Fact]
-    public void Name_of_a_page_of_the_publication_is_taken() => Broken.Stops("prose-name", "narrative/Budget.md", null, "rename the file",
+    public void Name_of_a_page_of_the_publication_is_taken() => Broken.Stops("prose-name", "release.json", "\"narrative/Budget.md\"", "rename the file",
         folder => folder.With("narrative/Budget.md", "# Budget\n").Edit("release.json", "{ \"file\": \"narrative/summary.md\" }", "{ \"file\": \"narrative/summary.md\" }, { \"file\": \"narrative/Budget.md\" }"));
 
     [Fact]

@@ -44,7 +44,7 @@ internal static class TabulatedLaw
             return null;
         if (steps.Values.Sum() <= 1m)
             return [.. steps.Select(pair => (pair.Key, pair.Value))];
-        context.Add(MechanismProblems.LawRow(new Place(path), FormattableString.Invariant($"The probabilities add up to {steps.Values.Sum()}."), context.Owner));
+        context.Add(MechanismProblems.LawRow(new Place(path, 1, 1), FormattableString.Invariant($"The probabilities add up to {steps.Values.Sum()}."), context.Owner));
         return null;
     }
 

@@ -21,7 +21,7 @@ internal static class ProseReader
             return null;
         var invalid = Utf8Text.FirstInvalid(bytes);
         if (invalid < 0 && !bytes.AsSpan().Contains((byte)0))
-            return new ProsePage(file, language, Encoding.UTF8.GetString(bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes.AsSpan(3) : bytes));
+            return new ProsePage(file, language, Encoding.UTF8.GetString(bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes.AsSpan(3) : bytes)) { At = entry.At };
         context.Add(NoUtf8(new LineMap(file, bytes).At(invalid < 0 ? bytes.AsSpan().IndexOf((byte)0) : invalid), context.Owner));
         return null;
     }

@@ -66,7 +66,7 @@ internal sealed class CsvFile : IDisposable
         catch (CsvFormatException broken)
         {
             IsSound = false;
-            context.Add(CsvProblems.RowTooLong(new Place(path, (int)broken.LineNumber), context.Owner));
+            context.Add(CsvProblems.RowTooLong(new Place(path, (int)broken.LineNumber, 1), context.Owner));
             return false;
         }
     }
@@ -80,8 +80,12 @@ internal sealed class CsvFile : IDisposable
     public Place PlaceOf(int column)
     {
         var record = reader.RawRecord;
-        return record.Overlaps(reader.GetRawSpan(column), out var offset) ? PlaceAt(record[..offset]) : new Place(path, Line);
+        return record.Overlaps(reader.GetRawSpan(column), out var offset) ? PlaceAt(record[..offset]) : new Place(path, Line, 1);
     }
+
+    /// <summary>Where the name of a column begins, as long as no name before it is quoted.</summary>
+    public static Place PlaceOfHeader(string path, IReadOnlyList<string> headers, int index) =>
+        new(path, 1, headers.Take(index).Sum(name => name.Length + 1) + 1);
 
     public void Dispose() => reader.Dispose();
 
@@ -95,7 +99,7 @@ internal sealed class CsvFile : IDisposable
     private void Report(CsvMalformedRecord record)
     {
         IsSound = false;
-        var at = new Place(path, (int)record.LineNumber);
+        var at = new Place(path, (int)record.LineNumber, 1);
         if (at.Line == lastReported)
             return;
         lastReported = at.Line;
@@ -133,7 +137,7 @@ internal sealed class CsvFile : IDisposable
         }
         catch (CsvFormatException)
         {
-            context.Add(CsvProblems.RowTooLong(new Place(path, 1), context.Owner));
+            context.Add(CsvProblems.RowTooLong(new Place(path, 1, 1), context.Owner));
             return false;
         }
     }
@@ -146,9 +150,9 @@ internal sealed class CsvFile : IDisposable
             return FileProblems.TooLarge(new Place(path), file.Length, FolderLimits.TableBytes, owner);
         return EncodingScan.Of(file) switch
         {
-            { Encoding: ScannedEncoding.Utf16, Line: var line } => CsvProblems.Encoding(new Place(path, line), "UTF-16", owner),
-            { Encoding: ScannedEncoding.SingleByte, Line: var line } => CsvProblems.Encoding(new Place(path, line), "Windows-1252 or Latin-1", owner),
-            { Encoding: ScannedEncoding.Nul, Line: var line } => CsvProblems.Nul(new Place(path, line), owner),
+            { Encoding: ScannedEncoding.Utf16 } => CsvProblems.Encoding(new Place(path), "UTF-16", owner),
+            { Encoding: ScannedEncoding.SingleByte } scan => CsvProblems.Encoding(new Place(path, scan.Line, scan.Column), "Windows-1252 or Latin-1", owner),
+            { Encoding: ScannedEncoding.Nul } scan => CsvProblems.Nul(new Place(path, scan.Line, scan.Column), owner),
             _ => null,
         };
     }

@@ -16,8 +16,8 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
             draft.Context.Add(TableProblems.MissingColumn(at, column, draft.File, headers, draft.Context.Owner));
             isWhole = false;
         }
-        foreach (var (mechanism, column) in ScaleColumns().Where(scale => !headers.Contains(scale.Column)))
-            draft.Context.Add(TableProblems.ScaleColumnMissing(mechanism.At, column, mechanism.Id, draft.File, headers, FindingOwner.Noise));
+        foreach (var (mechanism, key, column) in ScaleColumns().Where(scale => !headers.Contains(scale.Column)))
+            draft.Context.Add(TableProblems.ScaleColumnMissing(mechanism.KeyPlaces.GetValueOrDefault(key, mechanism.At), column, mechanism.Id, draft.File, headers, FindingOwner.Noise));
         CheckStatusColumns();
         CheckUndeclared();
         return isWhole;
@@ -28,11 +28,11 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
         .Concat(draft.Figures.Where(figure => figure.UnadjustedColumn is not null).Select(figure => (figure.UnadjustedColumn!, figure.At)))
         .Concat(draft.Columns.Select(column => (column.Column, column.At)));
 
-    private IEnumerable<(Mechanism Mechanism, string Column)> ScaleColumns() => draft.Figures
+    private IEnumerable<(Mechanism Mechanism, string Key, string Column)> ScaleColumns() => draft.Figures
         .SelectMany(figure => figure.Rules ?? []).Select(rule => rule.End).OfType<RuleEnd.Mechanism>()
         .Select(end => mechanisms.Find(end.Id)).OfType<Mechanism>().Distinct()
-        .SelectMany(mechanism => mechanism.Parameters.Values.Select(value => value.Column).Append(mechanism.DenominatorColumn).OfType<string>()
-            .Distinct().Select(column => (mechanism, column)));
+        .SelectMany(mechanism => mechanism.Parameters.Select(parameter => (parameter.Key, Column: parameter.Value.Column)).Append((Key: "denominator", Column: mechanism.DenominatorColumn))
+            .Where(named => named.Column is not null).DistinctBy(named => named.Column).Select(named => (mechanism, named.Key, named.Column!)));
 
     private void CheckStatusColumns()
     {
@@ -46,9 +46,6 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
             .Concat(draft.Figures.Select(figure => draft.Statuses.ColumnOf(figure.Column)).OfType<string>()).ToHashSet();
         for (var index = 0; index < headers.Count; index++)
             if (!declared.Contains(headers[index]))
-                draft.Context.Add(TableProblems.UndeclaredColumn(new Place(draft.File, 1, StartOf(index)), headers[index], FindingOwner.Noise));
+                draft.Context.Add(TableProblems.UndeclaredColumn(CsvFile.PlaceOfHeader(draft.File, headers, index), headers[index], FindingOwner.Noise));
     }
-
-    /// <summary>The column of a header in its line, as long as no header is quoted.</summary>
-    private int StartOf(int index) => headers.Take(index).Sum(name => name.Length + 1) + 1;
 }

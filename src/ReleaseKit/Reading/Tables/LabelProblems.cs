@@ -7,8 +7,8 @@ namespace ReleaseKit.Reading.Tables;
 /// <summary>What can be wrong with labels.csv, one factory a failure.</summary>
 internal static class LabelProblems
 {
-    public static Finding UnknownColumn(string column, IReadOnlyList<string> known, FindingOwner owner) => new(
-        FindingLevel.Stop, "unknown-key", owner, new Place(LabelBook.FileName, 1),
+    public static Finding UnknownColumn(Place at, string column, IReadOnlyList<string> known, FindingOwner owner) => new(
+        FindingLevel.Stop, "unknown-key", owner, at,
         $"\"{KeyProblems.Cut(column)}\" is no column of labels.csv.",
         "what stands in it has no effect.",
         Nearest.Of(column, known) is { } near ? $"write \"{near}\", or remove it." : $"remove it. Known: {string.Join(",", known)} and name_ with another language.");

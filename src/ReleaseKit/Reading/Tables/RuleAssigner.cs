@@ -43,7 +43,7 @@ internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> s
     {
         RuleEnd.Mechanism named => Mechanism(named),
         RuleEnd.SumOver sum => SumOver(sum),
-        RuleEnd.Exact exact => new NoiseRule.Exact(exact.Reason),
+        RuleEnd.Exact exact => new NoiseRule.Exact(exact.Reason) { At = exact.At },
         RuleEnd.Public known => new NoiseRule.Public(known.Source),
         _ => throw new InvalidOperationException($"No such rule end: {end}"),
     };

@@ -45,7 +45,7 @@ internal static class RuleChecks
             log.Add(TableProblems.NoNoise(draft.At, figure.Column, FindingOwner.Noise));
         else
             foreach (var row in RowsWithout(figure, read.Table))
-                log.Add(TableProblems.NoRule(read.PlaceOf(row), read.Address(measure, row), figure.Column, FindingOwner.Noise));
+                log.Add(TableProblems.NoRule(read.PlaceOf(row, measure), read.Address(measure, row), figure.Column, FindingOwner.Noise));
     }
 
     /// <summary>Whether a rule could not be read, so that rows without one are no further fault.</summary>
@@ -73,10 +73,10 @@ internal static class RuleChecks
                 continue;
             var number = side.Numbers[row];
             if (!(number > 0))
-                log.Add(TableProblems.ScaleNotPositive(read.PlaceOf(row), side.Column, key, FindingOwner.Noise));
+                log.Add(TableProblems.ScaleNotPositive(read.PlaceOf(row, side.Column), side.Column, key, FindingOwner.Noise));
             else if (!LawReader.IsInRange(key, number))
                 log.Add(MechanismProblems.ParameterOutOfRange(
-                    read.PlaceOf(row), key, $"{number.ToString("R", System.Globalization.CultureInfo.InvariantCulture)} (column \"{side.Column}\")", FindingOwner.Noise));
+                    read.PlaceOf(row, side.Column), key, $"{number.ToString("R", System.Globalization.CultureInfo.InvariantCulture)} (column \"{side.Column}\")", FindingOwner.Noise));
         }
     }
 
@@ -86,7 +86,7 @@ internal static class RuleChecks
         var figure = read.Table.Measures[measure];
         for (var row = 0; row < read.Table.RowCount; row++)
             if (figure.HasNumber(row) && figure.RuleAt(row) is NoiseRule.FromMechanism or NoiseRule.SumOver && HasTooManyDigits(figure, row))
-                log.Add(TableProblems.TooManyDigits(read.PlaceOf(row), read.Address(measure, row), FindingOwner.Noise));
+                log.Add(TableProblems.TooManyDigits(read.PlaceOf(row, measure), read.Address(measure, row), FindingOwner.Noise));
     }
 
     private static bool HasTooManyDigits(Measure figure, int row)

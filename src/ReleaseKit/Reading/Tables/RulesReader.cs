@@ -49,7 +49,7 @@ internal static class RulesReader
     {
         "mechanism" => keys.Text(end) is { } id ? new RuleEnd.Mechanism(id, keys.PlaceOf(end)) : null,
         "sumOver" => keys.Text(end) is { } column ? new RuleEnd.SumOver(column, keys.PlaceOf(end)) : null,
-        "exact" => keys.ReaderText(end) is { } reason ? new RuleEnd.Exact(reason) : null,
+        "exact" => keys.ReaderText(end) is { } reason ? new RuleEnd.Exact(reason, keys.PlaceOf(end)) : null,
         "public" => keys.ReaderText(end) is { } source ? new RuleEnd.Public(source) : null,
         _ => null,
     };

@@ -13,5 +13,5 @@ internal sealed class SideBuilder(SideDraft draft, int field)
     public void Add(CsvFile rows) =>
         numbers.Add(double.TryParse(rows.Span(field), Plain, CultureInfo.InvariantCulture, out var number) && double.IsFinite(number) ? number : double.NaN);
 
-    public SideColumn Build() => new(draft.Column, draft.From, draft.Mechanism, [.. numbers]);
+    public SideColumn Build() => new(draft.Column, draft.From, draft.Mechanism, [.. numbers]) { At = draft.At };
 }

@@ -30,9 +30,9 @@ internal static class SumChecks
         var stub = read.Table.Stub[column];
         var parts = group.Where(row => row != total && !stub.IsAll(row)).ToList();
         if (!stub.IsAll(total))
-            log.Add(TotalProblems.NotATotal(read.PlaceOf(total), read.Address(measure, total), stub.Column, FindingOwner.Noise));
+            log.Add(TotalProblems.NotATotal(read.PlaceOf(total, measure), read.Address(measure, total), stub.Column, FindingOwner.Noise));
         else if (parts.Count == 0)
-            log.Add(TotalProblems.NoParts(read.PlaceOf(total), read.Address(measure, total), stub.Column, FindingOwner.Noise));
+            log.Add(TotalProblems.NoParts(read.PlaceOf(total, measure), read.Address(measure, total), stub.Column, FindingOwner.Noise));
         else
         {
             Compare(read, measure, column, total, parts, log);
@@ -51,7 +51,7 @@ internal static class SumChecks
         if (published.Equals(sum))
             return;
         log.Add(TotalProblems.SumDiffers(
-            read.PlaceOf(total), read.Address(measure, total), read.Table.Stub[column].Column,
+            read.PlaceOf(total, measure), read.Address(measure, total), read.Table.Stub[column].Column,
             published.ToString(), sum.ToString(), published.Less(sum).ToString(), hasHidden ? TotalProblems.SayInTotals : null, FindingOwner.Noise));
     }
 
@@ -60,9 +60,9 @@ internal static class SumChecks
         var mechanisms = parts.Select(part => read.Table.Measures[measure].RuleAt(part)).OfType<NoiseRule.FromMechanism>()
             .Select(rule => rule.Mechanism).Distinct().ToList();
         if (mechanisms.Select(NotSummable).FirstOrDefault(why => why is not null) is { } problem)
-            log.Add(TotalProblems.PartsNotYet(read.PlaceOf(total), read.Address(measure, total), problem, FindingOwner.Noise));
+            log.Add(TotalProblems.PartsNotYet(read.PlaceOf(total, measure), read.Address(measure, total), problem, FindingOwner.Noise));
         else if (mechanisms.Select(mechanism => mechanism.Grid).Distinct().Count() > 1)
-            log.Add(TotalProblems.PartsNotYet(read.PlaceOf(total), read.Address(measure, total), "on different grids", FindingOwner.Noise));
+            log.Add(TotalProblems.PartsNotYet(read.PlaceOf(total, measure), read.Address(measure, total), "on different grids", FindingOwner.Noise));
     }
 
     /// <summary>Why a sum of this mechanism's draws has no law that is worked out yet; null if it has.</summary>

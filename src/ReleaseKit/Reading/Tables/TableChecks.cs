@@ -23,7 +23,7 @@ internal static class TableChecks
         var groups = new RowGroups(read.Table);
         foreach (var (first, again) in groups.Doubled())
             log.Add(CellProblems.DoubledRow(
-                read.PlaceOf(again), string.Join(", ", read.Table.Stub.Select(column => $"\"{Keys.KeyProblems.Cut(column.LabelOf(again).Value)}\"")),
+                read.PlaceOf(again, read.Table.Stub[0].Column), string.Join(", ", read.Table.Stub.Select(column => $"\"{Keys.KeyProblems.Cut(column.LabelOf(again).Value)}\"")),
                 read.Lines[first], FindingOwner.Noise));
     }
 

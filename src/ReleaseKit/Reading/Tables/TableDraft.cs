@@ -76,7 +76,7 @@ internal abstract record RuleEnd
 
     internal sealed record SumOver(string Column, Place At) : RuleEnd;
 
-    internal sealed record Exact(ReaderText Reason) : RuleEnd;
+    internal sealed record Exact(ReaderText Reason, Place At) : RuleEnd;
 
     internal sealed record Public(ReaderText Source) : RuleEnd;
 }

@@ -103,7 +103,7 @@ internal static class TableDraftReader
 
     private static Hiding? ReadHidden(ObjectReader table) =>
         table.Object("hidden", ReleaseShapes.Hidden) is { } keys && keys.Choice("by", Hiders) is { } by
-            ? new Hiding(by, keys.Flag("inTotals") ?? false)
+            ? new Hiding(by, keys.Flag("inTotals") ?? false) { At = keys.PlaceOf("by") }
             : null;
 
     /// <summary>"rows" is "public", or an object of a later version.</summary>

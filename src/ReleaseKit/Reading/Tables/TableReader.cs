@@ -50,9 +50,9 @@ internal sealed class TableReader(TableDraft draft, MechanismsDraft mechanisms, 
             lines.Add(rows.Line);
         }
         if (lines.Count == FolderLimits.TableRows)
-            context.Add(CsvProblems.TooManyRows(new Place(draft.File, lines[^1]), context.Owner));
+            context.Add(CsvProblems.TooManyRows(new Place(draft.File, lines[^1], 1), context.Owner));
         if (lines.Count == 0 && rows.IsSound)
-            context.Add(CsvProblems.Empty(new Place(draft.File, 1), context.Owner));
+            context.Add(CsvProblems.Empty(new Place(draft.File, 1, 1), context.Owner));
         return rows.IsSound && lines.Count > 0;
     }
 

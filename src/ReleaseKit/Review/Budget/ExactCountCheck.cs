@@ -19,7 +19,8 @@ internal sealed class ExactCountCheck : IReviewCheck
         if (rows.Count == 0)
             return null;
         var address = FigureAddress.Canonical(table, measure, rows[0]);
-        return isOfUnits ? Exact(release, address, rows.Count) : WithoutUnit(release, measure, address);
+        var at = ((NoiseRule.Exact)measure.RuleAt(rows[0])).At;
+        return isOfUnits ? Exact(release, at, address, rows.Count) : WithoutUnit(release, at, measure, address);
     }
 
     // The key, the singular and the plural are one unit, however each of the two files writes it.
@@ -27,8 +28,8 @@ internal sealed class ExactCountCheck : IReviewCheck
 
     private static IEnumerable<string> Words(Unit unit) => unit.Forms.Values.SelectMany(forms => new[] { forms.One, forms.Other }).Append(unit.Key);
 
-    private static Finding WithoutUnit(Release release, Measure measure, string address) => new(
-        FindingLevel.Caution, "exact-count-without-unit", FindingOwner.Noise, new Place("release.json"),
+    private static Finding WithoutUnit(Release release, Place at, Measure measure, string address) => new(
+        FindingLevel.Caution, "exact-count-without-unit", FindingOwner.Noise, at,
         $"{address} is an exact count, and column \"{measure.Column}\" does not say of what.",
         $"an exact number of {BudgetText.Other(release.Noise)} would protect nobody: one {BudgetText.One(release.Noise)} more or less changes it.",
         $"give the figures \"{measure.Column}\" their \"unit\" in release.json; noise them if they count {BudgetText.Other(release.Noise)}.")
@@ -36,8 +37,8 @@ internal sealed class ExactCountCheck : IReviewCheck
         Address = address,
     };
 
-    private static Finding Exact(Release release, string address, int count) => new(
-        FindingLevel.Stop, "exact-unit-count", FindingOwner.Noise, new Place("release.json"),
+    private static Finding Exact(Release release, Place at, string address, int count) => new(
+        FindingLevel.Stop, "exact-unit-count", FindingOwner.Noise, at,
         $"{address} is an exact number of {BudgetText.Other(release.Noise)}{(count > 1 ? $", as are {count - 1} more figures of its column" : "")}.",
         $"one {BudgetText.One(release.Noise)} more or less would change it, so no two neighbouring data sets agree on it and the guarantee protects nobody.",
         "write \"neighbouring\": \"replace\" in mechanisms.json, or noise the figure, or give it as \"public\" if it is known from elsewhere and not from the records.")

@@ -45,7 +45,7 @@ internal sealed class OffGridCheck : IReviewCheck
         var address = FigureAddress.Canonical(table, measure, rows[0]);
         var isRounded = mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any();
         return new Finding(
-            FindingLevel.Stop, "off-grid", FindingOwner.Noise, new Place(table.File),
+            FindingLevel.Stop, "off-grid", FindingOwner.Noise, Place.OfCell(table.File, rows[0], measure.Column),
             FormattableString.Invariant($"{address} is {measure.ValueAt(rows[0])}, which is no multiple of {grid}{(rows.Count > 1 ? $", as are {rows.Count - 1} more figures of \"{mechanism.Id}\"" : "")}."),
             isRounded
                 ? $"\"{mechanism.Id}\" says that its figures are rounded to {BudgetText.Plain((double)grid)}; if they are not, their margins are wrong."

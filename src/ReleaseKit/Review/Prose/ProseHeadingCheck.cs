@@ -13,13 +13,15 @@ internal sealed class ProseHeadingCheck : IReviewCheck
     {
         var headings = ProseDocument.Parse(page.Markdown).OfType<HeadingBlock>().ToList();
         if (headings.Count == 0 || ProseDocument.PlainText(headings[0].Inline).Trim().Length == 0)
-            return [ProseProblems.NoTitle(new Place(page.File, headings.Count == 0 ? 1 : headings[0].Line + 1), FindingOwner.Writer)];
+            return [ProseProblems.NoTitle(headings.Count == 0 ? new Place(page.File, 1, 1) : PlaceOf(headings[0], page), FindingOwner.Writer)];
         return headings.Skip(1).Zip(headings, (heading, before) => CheckLevel(heading, before, page)).OfType<Finding>();
     }
 
+    private static Place PlaceOf(HeadingBlock heading, ProsePage page) => new(page.File, heading.Line + 1, heading.Column + 1);
+
     private static Finding? CheckLevel(HeadingBlock heading, HeadingBlock before, ProsePage page)
     {
-        var at = new Place(page.File, heading.Line + 1, heading.Column + 1);
+        var at = PlaceOf(heading, page);
         if (heading.Level == 1)
             return ProseProblems.SecondTitle(at, FindingOwner.Writer);
         return heading.Level > before.Level + 1 ? ProseProblems.HeadingSkips(at, before.Level, heading.Level, FindingOwner.Writer) : null;

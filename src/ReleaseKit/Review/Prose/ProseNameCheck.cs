@@ -17,7 +17,7 @@ internal sealed class ProseNameCheck : IReviewCheck
         var first = new Dictionary<string, string>(StringComparer.OrdinalIgnoreCase);
         foreach (var page in subject.Release?.Narrative.Skip(1) ?? [])
         {
-            var (stem, at) = (Path.GetFileNameWithoutExtension(page.File), new Place(page.File));
+            var (stem, at) = (Path.GetFileNameWithoutExtension(page.File), page.At);
             if (!Slug.IsOne(stem))
                 yield return ProseProblems.StemForm(at, stem, FindingOwner.Writer);
             else if (Taken.Contains(stem))
