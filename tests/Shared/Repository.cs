@@ -7,6 +7,8 @@ public static class Repository
 
     public static string Sample => Path.Combine(Root, "sample-release");
 
+    public static string Example => Path.Combine(Root, "tests", "reference", "example");
+
     public static string Release(string name) => Path.Combine(Root, "tests", "releases", name);
 
     private static string FindRoot(string from) => File.Exists(Path.Combine(from, "ReleaseKit.sln"))

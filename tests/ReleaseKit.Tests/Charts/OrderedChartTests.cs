@@ -160,7 +160,7 @@ public sealed class OrderedChartTests
     [Fact]
     public void Font_that_is_missing_is_an_error_and_no_empty_picture()
     {
-        using var folder = new ReleaseKit.Tests.Pages.TemporaryFolder();
+        using var folder = new TemporaryFolder();
 
         var fault = Assert.Throws<FileNotFoundException>(() => TypeCase.Load(folder.Path));
 

@@ -4,7 +4,6 @@ using ReleaseKit.Downloads;
 using ReleaseKit.Pages;
 using ReleaseKit.Reading;
 using ReleaseKit.Releases;
-using ReleaseKit.Tests.Pages;
 using ReleaseKit.Tests.Sample;
 using ReleaseKit.Wording;
 
@@ -23,7 +22,7 @@ public sealed class SampleDownloads : IDisposable
         Appraised = AppraisedRelease.Of(Release);
         Language = ReleaseKit.Wording.Language.Load(templates, "en");
         Budget = BudgetStatement.Of(Release);
-        using var site = SiteFolder.Open(folder["site"]);
+        using var site = SiteFolder.Open(folder.In("site"));
         var assets = Assets.Write(site, templates, Release.Look, "");
         DownloadFiles.WriteAll(new SiteContext(Appraised, Language, Budget, Templates.Load(templates), assets, PageMap.Of(Release)), site);
         site.Finish();
@@ -40,7 +39,7 @@ public sealed class SampleDownloads : IDisposable
         from measure in Enumerable.Range(0, Release.Tables[table].Measures.Count)
         select Appraised.Figure(new FigureRef(table, measure, row));
 
-    public string PathOf(string download) => folder["site/" + download];
+    public string PathOf(string download) => folder.In("site/" + download);
 
     public IReadOnlyList<IReadOnlyDictionary<string, string>> Rows(string download)
     {

@@ -43,8 +43,8 @@ internal sealed class BudgetSample
     public string Page()
     {
         using var folder = new TemporaryFolder();
-        WriteTo(folder["site"]);
-        return File.ReadAllText(Path.Combine(folder["site"], PageMap.Budget));
+        WriteTo(folder.In("site"));
+        return File.ReadAllText(Path.Combine(folder.In("site"), PageMap.Budget));
     }
 
     public void WriteTo(string target)

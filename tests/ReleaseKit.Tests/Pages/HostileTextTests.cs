@@ -22,20 +22,20 @@ public sealed class HostileTextTests : IDisposable
     [InlineData("line\u2028and\u2029paragraph")]
     public void Text_of_the_folder_is_never_markup(string hostile)
     {
-        PagesRelease.Compose(PagesRelease.Make(text => text + hostile), folder["site"]);
+        PagesRelease.Compose(PagesRelease.Make(text => text + hostile), folder.In("site"));
         Assert.All(Pages(), page => Assert.Empty(Foreign(page)));
-        Assert.Contains(hostile, Parsed(folder["site/index.html"]).QuerySelector("h1")!.TextContent, StringComparison.Ordinal);
+        Assert.Contains(hostile, Parsed(folder.In("site/index.html")).QuerySelector("h1")!.TextContent, StringComparison.Ordinal);
     }
 
     [Fact]
     public void Text_of_ten_thousand_characters_is_written_whole()
     {
         var longText = new string('<', 10_000);
-        PagesRelease.Compose(PagesRelease.Make(text => text + longText), folder["site"]);
-        Assert.EndsWith(longText, Parsed(folder["site/404.html"]).Title, StringComparison.Ordinal);
+        PagesRelease.Compose(PagesRelease.Make(text => text + longText), folder.In("site"));
+        Assert.EndsWith(longText, Parsed(folder.In("site/404.html")).Title, StringComparison.Ordinal);
     }
 
-    private IEnumerable<IDocument> Pages() => Directory.EnumerateFiles(folder["site"], "*.html", SearchOption.AllDirectories).Select(Parsed);
+    private IEnumerable<IDocument> Pages() => Directory.EnumerateFiles(folder.In("site"), "*.html", SearchOption.AllDirectories).Select(Parsed);
 
     private static IDocument Parsed(string file) => new HtmlParser().ParseDocument(File.ReadAllText(file));
 

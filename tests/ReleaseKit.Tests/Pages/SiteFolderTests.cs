@@ -8,7 +8,7 @@ public sealed class SiteFolderTests : IDisposable
 {
     private readonly TemporaryFolder folder = new();
 
-    private string Target => folder["site"];
+    private string Target => folder.In("site");
 
     public void Dispose() => folder.Dispose();
 
@@ -16,8 +16,8 @@ public sealed class SiteFolderTests : IDisposable
     public void Target_missing_is_made_with_the_marker()
     {
         Compose("one");
-        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
-        Assert.True(File.Exists(folder["site/.releasekit"]));
+        Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
+        Assert.True(File.Exists(folder.In("site/.releasekit")));
         Assert.Equal(["site"], Neighbours());
     }
 
@@ -26,7 +26,7 @@ public sealed class SiteFolderTests : IDisposable
     {
         Directory.CreateDirectory(Target);
         Compose("one");
-        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
     }
 
     [Fact]
@@ -34,8 +34,8 @@ public sealed class SiteFolderTests : IDisposable
     {
         Compose("one", "old.html");
         Compose("two");
-        Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
-        Assert.False(File.Exists(folder["site/old.html"]));
+        Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+        Assert.False(File.Exists(folder.In("site/old.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -45,9 +45,9 @@ public sealed class SiteFolderTests : IDisposable
         Compose("one", "old.html");
         Compose("two");
         Compose("three");
-        Assert.Equal("three", File.ReadAllText(folder["site/index.html"]));
-        Assert.Equal("two", File.ReadAllText(folder["site.before/index.html"]));
-        Assert.False(File.Exists(folder["site.before/old.html"]));
+        Assert.Equal("three", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("two", File.ReadAllText(folder.In("site.before/index.html")));
+        Assert.False(File.Exists(folder.In("site.before/old.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -59,7 +59,7 @@ public sealed class SiteFolderTests : IDisposable
         var stood = Directory.GetCreationTimeUtc(Target);
         Assert.True(Compose("two")!.IsNone);
         Assert.Equal(stood, Directory.GetCreationTimeUtc(Target));
-        Assert.Equal("one", File.ReadAllText(folder["site.before/index.html"]));
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -88,13 +88,13 @@ public sealed class SiteFolderTests : IDisposable
     public void Folder_of_others_where_the_replaced_site_is_to_be_kept_is_refused_and_untouched()
     {
         Compose("one");
-        Directory.CreateDirectory(folder["site.before"]);
-        File.WriteAllText(folder["site.before/letter.txt"], "mine");
+        Directory.CreateDirectory(folder.In("site.before"));
+        File.WriteAllText(folder.In("site.before/letter.txt"), "mine");
         var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
         Assert.Contains("site.before was not composed here", fault.Message, StringComparison.Ordinal);
         Assert.DoesNotContain('\n', fault.Message);
-        Assert.Equal("mine", File.ReadAllText(folder["site.before/letter.txt"]));
-        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal("mine", File.ReadAllText(folder.In("site.before/letter.txt")));
+        Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -102,11 +102,11 @@ public sealed class SiteFolderTests : IDisposable
     public void Target_with_files_of_others_is_refused_and_untouched()
     {
         Directory.CreateDirectory(Target);
-        File.WriteAllText(folder["site/letter.txt"], "mine");
+        File.WriteAllText(folder.In("site/letter.txt"), "mine");
         var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
         Assert.Contains("holds files that were not composed here", fault.Message, StringComparison.Ordinal);
         Assert.DoesNotContain('\n', fault.Message);
-        Assert.Equal("mine", File.ReadAllText(folder["site/letter.txt"]));
+        Assert.Equal("mine", File.ReadAllText(folder.In("site/letter.txt")));
         Assert.Equal(["site"], Neighbours());
     }
 
@@ -121,8 +121,8 @@ public sealed class SiteFolderTests : IDisposable
     [Fact]
     public void Target_that_is_a_link_is_refused()
     {
-        Directory.CreateDirectory(folder["elsewhere"]);
-        File.CreateSymbolicLink(Target, folder["elsewhere"]);
+        Directory.CreateDirectory(folder.In("elsewhere"));
+        File.CreateSymbolicLink(Target, folder.In("elsewhere"));
         Assert.Contains("is a link", Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target)).Message, StringComparison.Ordinal);
     }
 
@@ -137,7 +137,7 @@ public sealed class SiteFolderTests : IDisposable
         Assert.Contains("another run", Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target)).Message, StringComparison.Ordinal);
         first.Write("index.html", "one"u8);
         first.Finish();
-        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
     }
 
     [Fact]
@@ -146,7 +146,7 @@ public sealed class SiteFolderTests : IDisposable
         Compose("one");
         using (var site = SiteFolder.Open(Target))
             site.Write("index.html", "half"u8);
-        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
         Assert.Equal(["site"], Neighbours());
     }
 
@@ -156,7 +156,7 @@ public sealed class SiteFolderTests : IDisposable
         Compose("one");
         LeaveBehind(".site.releasekit-new", "half");
         Compose("two");
-        Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
+        Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -166,8 +166,8 @@ public sealed class SiteFolderTests : IDisposable
         LeaveBehind(".site.releasekit-old", "one");
         LeaveBehind(".site.releasekit-new", "two");
         using var site = SiteFolder.Open(Target);
-        Assert.Equal("one", File.ReadAllText(folder["site/index.html"]));
-        Assert.False(Directory.Exists(folder[".site.releasekit-old"]));
+        Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
+        Assert.False(Directory.Exists(folder.In(".site.releasekit-old")));
     }
 
     [Fact]
@@ -176,8 +176,8 @@ public sealed class SiteFolderTests : IDisposable
         Compose("two");
         LeaveBehind(".site.releasekit-old", "one");
         using (SiteFolder.Open(Target))
-            Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
-        Assert.Equal("one", File.ReadAllText(folder["site.before/index.html"]));
+            Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -189,8 +189,8 @@ public sealed class SiteFolderTests : IDisposable
         var paths = SwapPaths.Beside(Target);
         FolderSwap.RenameTwice(paths);
         FolderSwap.Keep(paths);
-        Assert.Equal("two", File.ReadAllText(folder["site/index.html"]));
-        Assert.Equal("one", File.ReadAllText(folder["site.before/index.html"]));
+        Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
         Assert.Equal(["site", "site.before"], Neighbours());
     }
 
@@ -199,8 +199,8 @@ public sealed class SiteFolderTests : IDisposable
     {
         LeaveBehind("a", "one");
         LeaveBehind("b", "two");
-        Assert.Equal(OperatingSystem.IsLinux(), FolderSwap.TryExchange(folder["a"], folder["b"]));
-        Assert.Equal(OperatingSystem.IsLinux() ? "two" : "one", File.ReadAllText(folder["a/index.html"]));
+        Assert.Equal(OperatingSystem.IsLinux(), FolderSwap.TryExchange(folder.In("a"), folder.In("b")));
+        Assert.Equal(OperatingSystem.IsLinux() ? "two" : "one", File.ReadAllText(folder.In("a/index.html")));
     }
 
     [Theory]
@@ -247,9 +247,9 @@ public sealed class SiteFolderTests : IDisposable
 
     private void LeaveBehind(string name, string home)
     {
-        Directory.CreateDirectory(folder[name]);
-        File.WriteAllText(folder[$"{name}/{SiteFolder.Marker}"], "");
-        File.WriteAllText(folder[$"{name}/index.html"], home);
+        Directory.CreateDirectory(folder.In(name));
+        File.WriteAllText(folder.In($"{name}/{SiteFolder.Marker}"), "");
+        File.WriteAllText(folder.In($"{name}/index.html"), home);
     }
 
     private string[] Neighbours() =>

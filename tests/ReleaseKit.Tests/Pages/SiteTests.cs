@@ -45,26 +45,26 @@ public sealed class SiteTests : IDisposable
     {
         var release = PagesRelease.Make();
         var gauss = release.Noise.Mechanisms[0] with { Id = "plain", Law = LawName.Gaussian };
-        PagesRelease.Compose(release with { Noise = release.Noise with { Mechanisms = [.. release.Noise.Mechanisms, gauss] } }, folder["site"]);
-        var page = new HtmlParser().ParseDocument(File.ReadAllText(folder["site/methods.html"]));
+        PagesRelease.Compose(release with { Noise = release.Noise with { Mechanisms = [.. release.Noise.Mechanisms, gauss] } }, folder.In("site"));
+        var page = new HtmlParser().ParseDocument(File.ReadAllText(folder.In("site/methods.html")));
         Assert.Contains("half a step of that rounding is added", page.QuerySelector("#law-gaussian")!.ParentElement!.TextContent, StringComparison.Ordinal);
         Assert.EndsWith("rounded to the digits printed", page.QuerySelector("#mechanism-plain")!.TextContent, StringComparison.Ordinal);
     }
 
     private List<(string Path, IDocument Document)> ComposedPages()
     {
-        PagesRelease.Compose(PagesRelease.Make(), folder["site"]);
+        PagesRelease.Compose(PagesRelease.Make(), folder.In("site"));
         var parser = new HtmlParser();
-        return [.. Directory.EnumerateFiles(folder["site"], "*.html", SearchOption.AllDirectories)
-            .Select(file => (Path.GetRelativePath(folder["site"], file), (IDocument)parser.ParseDocument(File.ReadAllText(file))))];
+        return [.. Directory.EnumerateFiles(folder.In("site"), "*.html", SearchOption.AllDirectories)
+            .Select(file => (Path.GetRelativePath(folder.In("site"), file), (IDocument)parser.ParseDocument(File.ReadAllText(file))))];
     }
 
     private bool Leads(string page, string address, List<(string Path, IDocument Document)> documents)
     {
         var parts = address.Split('#');
-        var path = parts[0].Length == 0 ? page : Path.GetRelativePath(folder["site"], Path.Combine(folder["site"], Path.GetDirectoryName(page)!, parts[0]));
+        var path = parts[0].Length == 0 ? page : Path.GetRelativePath(folder.In("site"), Path.Combine(folder.In("site"), Path.GetDirectoryName(page)!, parts[0]));
         if (parts.Length == 1)
-            return File.Exists(folder[$"site/{path}"]);
+            return File.Exists(folder.In($"site/{path}"));
         return documents.Any(other => other.Path == path && other.Document.GetElementById(parts[1]) is not null);
     }
 }

@@ -27,7 +27,7 @@ internal sealed class TableSite : IDisposable
 
     public ILanguage Language { get; }
 
-    public string Root => folder["site"];
+    public string Root => folder.In("site");
 
     public static TableSite Of(Release release) => new(release);
 

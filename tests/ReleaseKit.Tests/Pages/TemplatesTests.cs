@@ -9,7 +9,7 @@ public sealed class TemplatesTests : IDisposable
 {
     private readonly TemporaryFolder folder = new();
 
-    public TemplatesTests() => Directory.CreateDirectory(folder["pages"]);
+    public TemplatesTests() => Directory.CreateDirectory(folder.In("pages"));
 
     public void Dispose() => folder.Dispose();
 
@@ -22,14 +22,14 @@ public sealed class TemplatesTests : IDisposable
     [Fact]
     public void Include_is_escaped_once()
     {
-        File.WriteAllText(folder["pages/inner.html"], "[{{ text }}|{{ $1 }}]");
+        File.WriteAllText(folder.In("pages/inner.html"), "[{{ text }}|{{ $1 }}]");
         Assert.Equal("[&lt;b&gt;|a &amp; b]", Render("{{ include 'inner.html' 'a & b' }}", "<b>"));
     }
 
     [Fact]
     public void Include_cannot_leave_the_folder()
     {
-        File.WriteAllText(folder["outside.html"], "outside");
+        File.WriteAllText(folder.In("outside.html"), "outside");
         Assert.Throws<ScriptRuntimeException>(() => Render("{{ include '../outside.html' }}", ""));
     }
 
@@ -57,13 +57,13 @@ public sealed class TemplatesTests : IDisposable
     [Fact]
     public void Template_with_a_fault_is_refused_with_its_place()
     {
-        File.WriteAllText(folder["pages/page.html"], "<p>\n{{ for }}");
+        File.WriteAllText(folder.In("pages/page.html"), "<p>\n{{ for }}");
         Assert.Contains("page.html(2,", Assert.Throws<InvalidDataException>(() => Templates.Load(folder.Path)).Message, StringComparison.Ordinal);
     }
 
     private string Render(string template, string text)
     {
-        File.WriteAllText(folder["pages/page.html"], template);
+        File.WriteAllText(folder.In("pages/page.html"), template);
         return Templates.Load(folder.Path).Render("page.html", new ScriptObject { ["text"] = text, ["model"] = new ScriptObject() });
     }
 }

@@ -8,7 +8,7 @@ namespace ReleaseKit.Tests.Reading;
 /// <summary>The example folder of the format's description (tests/reference/example), and the small folder that other tests start from.</summary>
 public sealed class ExampleTests
 {
-    private static readonly Lazy<ReadOutcome> Example = new(() => ReleaseFolder.Read(ReferenceFiles.Example));
+    private static readonly Lazy<ReadOutcome> Example = new(() => ReleaseFolder.Read(Repository.Example));
 
     [Fact]
     public void Example_reads_without_a_finding() => Assert.Empty(Example.Value.Findings.Select(finding => $"{finding.Slug} {finding.At} {finding.Found}"));
@@ -22,7 +22,7 @@ public sealed class ExampleTests
 
     [Fact]
     public void Sample_reads_without_a_stop() =>
-        Assert.Empty(ReleaseFolder.Read(ReferenceFiles.Sample).Findings.Where(finding => finding.Level == ReleaseKit.Review.FindingLevel.Stop).Select(finding => $"{finding.Slug} {finding.At} {finding.Found}"));
+        Assert.Empty(ReleaseFolder.Read(Repository.Sample).Findings.Where(finding => finding.Level == ReleaseKit.Review.FindingLevel.Stop).Select(finding => $"{finding.Slug} {finding.At} {finding.Found}"));
 
     [Fact]
     public void Example_table_holds_the_digits_of_its_file()

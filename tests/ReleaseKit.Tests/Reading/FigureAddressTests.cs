@@ -1,6 +1,5 @@
 using ReleaseKit.Reading;
 using ReleaseKit.Releases;
-using ReleaseKit.Tests.Folders;
 using Xunit;
 
 namespace ReleaseKit.Tests.Reading;
@@ -8,7 +7,7 @@ namespace ReleaseKit.Tests.Reading;
 /// <summary>Figure addresses: RFC 3986 relative references, section 2.1 for percent-encoding.</summary>
 public sealed class FigureAddressTests
 {
-    private static readonly Lazy<Release> Example = new(() => ReleaseFolder.Read(ReferenceFiles.Example).Release!);
+    private static readonly Lazy<Release> Example = new(() => ReleaseFolder.Read(Repository.Example).Release!);
 
     [Fact]
     public void Percent_signs_are_decoded_as_utf8() =>

@@ -46,13 +46,13 @@ public sealed class SchemaTests
     [Theory]
     [InlineData("release")]
     [InlineData("mechanisms")]
-    public void Example_is_valid(string file) => AssertValid(file, Path.Combine(ReferenceFiles.Example, $"{file}.json"));
+    public void Example_is_valid(string file) => AssertValid(file, Path.Combine(Repository.Example, $"{file}.json"));
 
     [Theory]
     [InlineData("release")]
     [InlineData("mechanisms")]
     [InlineData("signoff")]
-    public void Sample_is_valid(string file) => AssertValid(file, Path.Combine(ReferenceFiles.Sample, $"{file}.json"));
+    public void Sample_is_valid(string file) => AssertValid(file, Path.Combine(Repository.Sample, $"{file}.json"));
 
     [Fact]
     public void Small_folder_is_valid()

@@ -33,7 +33,7 @@ public sealed class TotalRowTests
 
     [Fact]
     public void Declared_totals_of_the_example_and_the_sample_are_no_finding() => Assert.DoesNotContain(
-        new[] { ReferenceFiles.Example, ReferenceFiles.Sample }.SelectMany(folder => ReleaseFolder.Read(folder).Findings), finding => finding.Slug == "looks-like-total");
+        new[] { Repository.Example, Repository.Sample }.SelectMany(folder => ReleaseFolder.Read(folder).Findings), finding => finding.Slug == "looks-like-total");
 
     private static void Named(TestFolder folder, string label, int lit) => folder
         .Edit(Release, ", \"all\": \"All\"", "").Edit(Release, "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }, ", "")

@@ -2,7 +2,6 @@ using ReleaseKit.Appraisal;
 using ReleaseKit.Noise.Laws;
 using ReleaseKit.Reading;
 using ReleaseKit.SampleMaker.Tables;
-using ReleaseKit.Tests.Pages;
 using Xunit;
 
 namespace ReleaseKit.Tests.Sample;

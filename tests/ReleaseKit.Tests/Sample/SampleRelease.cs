@@ -8,7 +8,7 @@ internal static class SampleRelease
     /// <summary>The households are invented once for all tests.</summary>
     public static SampleMaker.Sample Maker { get; } = new();
 
-    public static string Folder { get; } = Path.Combine(RepositoryRoot(AppContext.BaseDirectory), "sample-release");
+    public static string Folder => Repository.Sample;
 
     public static IEnumerable<string> Files => Directory.EnumerateFiles(Folder, "*", SearchOption.AllDirectories).Order(StringComparer.Ordinal);
 
@@ -24,9 +24,4 @@ internal static class SampleRelease
         SampleMaker.Sample.Write(tables, target);
         return target;
     }
-
-    private static string RepositoryRoot(string folder) => File.Exists(Path.Combine(folder, "ReleaseKit.sln"))
-        ? folder
-        : RepositoryRoot(Path.GetDirectoryName(folder.TrimEnd(Path.DirectorySeparatorChar))
-            ?? throw new InvalidOperationException("The tests do not stand in the repository."));
 }

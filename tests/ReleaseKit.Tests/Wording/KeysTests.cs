@@ -1,5 +1,4 @@
 using System.Text.RegularExpressions;
-using ReleaseKit.Tests.Folders;
 using Xunit;
 
 namespace ReleaseKit.Tests.Wording;
@@ -10,7 +9,7 @@ public sealed partial class KeysTests
     [Fact]
     public void Every_key_named_in_the_code_has_a_text()
     {
-        var missing = Directory.EnumerateFiles(Path.Combine(ReferenceFiles.Root, "src"), "*.cs", SearchOption.AllDirectories)
+        var missing = Directory.EnumerateFiles(Path.Combine(Repository.Root, "src"), "*.cs", SearchOption.AllDirectories)
             .Where(file => !file.Contains($"{Path.DirectorySeparatorChar}obj{Path.DirectorySeparatorChar}", StringComparison.Ordinal))
             .SelectMany(file => NamedKey().Matches(File.ReadAllText(file)).Select(match => match.Groups["key"].Value))
             .Where(key => !English.Texts.Has(key));

@@ -1,7 +1,6 @@
 using System.Text;
 using System.Text.RegularExpressions;
 using ReleaseKit.Appraisal;
-using ReleaseKit.Tests.Folders;
 using ReleaseKit.Wording;
 using Xunit;
 
@@ -143,5 +142,5 @@ public sealed class ReadingsTests
     private static Regex AsPattern(string template) =>
         new($"^{Regex.Replace(Regex.Escape(template).Replace("}", "\\}", StringComparison.Ordinal), @"\\\{[a-z]+\\\}", ".+")}$", RegexOptions.CultureInvariant);
 
-    private static string SourceFolder() => Path.Combine(ReferenceFiles.Root, "tests", "ReleaseKit.Tests", "Wording");
+    private static string SourceFolder() => Path.Combine(Repository.Root, "tests", "ReleaseKit.Tests", "Wording");
 }

@@ -1,6 +1,5 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Reading;
-using ReleaseKit.Tests.Folders;
 using Xunit;
 
 namespace ReleaseKit.Tests.Wording;
@@ -8,7 +7,7 @@ namespace ReleaseKit.Tests.Wording;
 /// <summary>Every figure of the sample release and of the example in the format's description, read aloud and read back.</summary>
 public sealed class SampleReadingsTests
 {
-    private static readonly IReadOnlyList<IAppraisedRelease> Releases = [Appraise(ReferenceFiles.Sample), Appraise(ReferenceFiles.Example)];
+    private static readonly IReadOnlyList<IAppraisedRelease> Releases = [Appraise(Repository.Sample), Appraise(Repository.Example)];
 
     private static IEnumerable<AppraisedFigure> Figures =>
         from release in Releases

@@ -11,12 +11,12 @@ public sealed class BudgetCheckTests
     {
         using var folder = new TestFolder();
         Assert.Empty(folder.Review().Select(finding => $"{finding.Slug} {finding.Found}"));
-        Assert.Empty(ReleaseReview.Of(ReleaseKit.Reading.ReleaseFolder.Read(ReferenceFiles.Example), null).Select(finding => $"{finding.Slug} {finding.Found}"));
+        Assert.Empty(ReleaseReview.Of(ReleaseKit.Reading.ReleaseFolder.Read(Repository.Example), null).Select(finding => $"{finding.Slug} {finding.Found}"));
     }
 
     [Fact]
     public void Sample_has_no_stop() =>
-        Assert.Empty(ReleaseReview.Of(ReleaseKit.Reading.ReleaseFolder.Read(ReferenceFiles.Sample), null)
+        Assert.Empty(ReleaseReview.Of(ReleaseKit.Reading.ReleaseFolder.Read(Repository.Sample), null)
             .Where(finding => finding.Level == FindingLevel.Stop).Select(finding => $"{finding.Slug} {finding.Found}"));
 
     [Fact]
