@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using Microsoft.Playwright;
 using ReleaseKit.Site.Tests.Fixtures;
 
@@ -13,6 +14,10 @@ public sealed class Chromium : IAsyncLifetime
 
     // Browsers wait long on a machine that also runs simulations; the default of 30 s would turn load into failures.
     private const float PatienceInMilliseconds = 180_000;
+
+    // Idle pages by (script, policy bypassed): a page is opened in one of them, since starting a browser's process for each takes longer than
+    // most of what is looked at.
+    private readonly ConcurrentDictionary<(bool Script, bool BypassPolicy), ConcurrentBag<OpenPage>> pages = new();
     private IPlaywright? playwright;
     private IBrowser? browser;
 
@@ -27,20 +32,14 @@ public sealed class Chromium : IAsyncLifetime
         });
     }
 
-    /// <summary>A fresh page at a size and theme; everything it asks for is answered from the site or recorded as foreign.</summary>
-    public async Task<OpenPage> OpenAsync(ComposedSample sample, string path, int width = 1280, int height = 900, ColorScheme theme = ColorScheme.Light, bool script = true, bool bypassPolicy = false)
+    /// <summary>A page at a size, in the light theme; everything it asks for is answered from the site or recorded as foreign.</summary>
+    public async Task<OpenPage> OpenAsync(ComposedSample sample, string path, int width = 1280, int height = 900, bool script = true, bool bypassPolicy = false)
     {
-        var context = await browser!.NewContextAsync(new()
-        {
-            ViewportSize = new() { Width = width, Height = height },
-            ColorScheme = theme,
-            JavaScriptEnabled = script,
-            ReducedMotion = ReducedMotion.Reduce,
-            BypassCSP = bypassPolicy,
-        });
-        context.SetDefaultTimeout(PatienceInMilliseconds);
-        var opened = new OpenPage(context, await context.NewPageAsync());
-        await context.RouteAsync("**/*", route => AnswerAsync(route, sample, opened));
+        var idle = pages.GetOrAdd((script, bypassPolicy), _ => []);
+        if (!idle.TryTake(out var opened))
+            opened = await StartAsync(sample, script, bypassPolicy, idle);
+        await opened.Page.SetViewportSizeAsync(width, height);
+        await opened.Page.EmulateMediaAsync(new() { ColorScheme = ColorScheme.Light });
         await opened.Page.GotoAsync($"{Origin}/{path}");
         return opened;
     }
@@ -50,6 +49,15 @@ public sealed class Chromium : IAsyncLifetime
         if (browser is not null)
             await browser.DisposeAsync();
         playwright?.Dispose();
+    }
+
+    private async Task<OpenPage> StartAsync(ComposedSample sample, bool script, bool bypassPolicy, ConcurrentBag<OpenPage> idle)
+    {
+        var context = await browser!.NewContextAsync(new() { JavaScriptEnabled = script, ReducedMotion = ReducedMotion.Reduce, BypassCSP = bypassPolicy });
+        context.SetDefaultTimeout(PatienceInMilliseconds);
+        var opened = new OpenPage(await context.NewPageAsync(), idle.Add);
+        await context.RouteAsync("**/*", route => AnswerAsync(route, sample, opened));
+        return opened;
     }
 
     private static Task AnswerAsync(IRoute route, ComposedSample sample, OpenPage opened)
