@@ -25,16 +25,17 @@ install_tools() {
   (cd tests/checkers && npm ci --ignore-scripts --no-audit --no-fund --silent)
 }
 
-run_tests() {
-  local log; log=$(mktemp)
-  dotnet test --solution ReleaseKit.sln --configuration Release --no-build --no-progress --no-ansi >"$log" 2>&1
-  local code=$?
-  cat "$log"
-  passed=$((passed + $(awk '/^ *succeeded:/{n+=$2} END{print n+0}' "$log")))
-  local red; red=$(awk '/^ *failed:/{n+=$2} END{print n+0}' "$log")
+test_project() { # test_project FOLDER: a line for a test project, and all it said if anything failed
+  local log code green red start=$SECONDS; log=$(mktemp)
+  dotnet test --project "$1" --configuration Release --no-build --no-progress --no-ansi >"$log" 2>&1
+  code=$?
+  green=$(awk '/^ *succeeded:/{n+=$2} END{print n+0}' "$log")
+  red=$(awk '/^ *failed:/{n+=$2} END{print n+0}' "$log")
   # A test program that dies without a summary must not look green.
   [ "$code" -ne 0 ] && [ "$red" -eq 0 ] && red=1
-  failed=$((failed + red)); rm -f "$log"
+  [ "$red" -eq 0 ] || cat "$log"
+  printf '   %-28s %5d ok, %d not ok, %d s\n' "$(basename "$1")" "$green" "$red" "$((SECONDS - start))"
+  passed=$((passed + green)) failed=$((failed + red)); rm -f "$log"
 }
 
 step "tools" install_tools || finish
@@ -44,5 +45,5 @@ step "formatting" dotnet format --no-restore --verify-no-changes
 step "publish" dotnet publish src/ReleaseKit.Cli --no-restore --configuration Release --output .tests/program --verbosity quiet
 step "compose the sample" dotnet .tests/program/releasekit.dll compose sample-release --to .tests/site
 echo "== tests"
-run_tests
+for project in tests/*.Tests; do test_project "$project"; done
 finish
