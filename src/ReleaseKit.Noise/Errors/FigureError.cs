@@ -126,7 +126,7 @@ public sealed class FigureError
         var margin = MarginAt(coverage);
         var low = Math.Min(published - margin.Width, BelowHighest(published, coverage, possible));
         var high = Math.Max(published + margin.Width, BeyondLowest(published, coverage, possible));
-        return possible.Cut(low, high, margin.Attained);
+        return possible.Cut(low, high, margin.Attained) with { UncutLow = published - margin.Width, UncutHigh = published + margin.Width };
     }
 
     // The upper end that a value below the lowest possible one needs at least: above that bound, so that a range of one value is never

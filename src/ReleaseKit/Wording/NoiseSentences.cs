@@ -47,7 +47,9 @@ internal sealed class NoiseSentences(Voice voice)
             yield break;
         }
         var (low, high) = (main.Printed.Low, main.Printed.High);
-        var key = IsBeyondMargin(figure, main) || figure.Case.Threshold ? "reading.range.alone" : "reading.range";
+        if (IsMadeWider(main))
+            yield return voice.Say("reading.range.wider");
+        var key = IsMadeWider(main) || IsBeyondMargin(figure, main) || figure.Case.Threshold ? "reading.range.alone" : "reading.range";
         yield return low == high
             ? voice.Say($"{key}.single", ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("cases", voice.SuchCases(figure, main)))
             : voice.Say(key, ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("high", Number(high)), ("cases", voice.SuchCases(figure, main)));
@@ -55,6 +57,9 @@ internal sealed class NoiseSentences(Voice voice)
             foreach (var cut in Cut(figure, main.Printed))
                 yield return cut;
     }
+
+    /// <summary>The figure lies outside what is possible, and its range reaches further than its margin.</summary>
+    private static bool IsMadeWider(FigureRange main) => main.High > main.UncutHigh || main.Low < main.UncutLow;
 
     /// <summary>The half-width as printed does not even reach what is possible: here the noise was certainly larger.</summary>
     private static bool IsBeyondMargin(AppraisedFigure figure, FigureRange main)

@@ -20,7 +20,7 @@ internal static partial class Readability
         "about above added adds after allows alone amount amounts answers before below between cannot carried cases column counted "
         + "covers downward either event exist figure figures filled forecast further given hidden index instead larger level "
         + "fewer limits margin margins minus misses normal number numbers office only other outside pages people protect public published ranges "
-        + "reaches records rounded rounding rules series special table total totals upward valid within without zero",
+        + "reaches records rounded rounding rules series special table total totals upward valid wider within without zero",
         "another certainty exactly general collected estimate expected holiday median multiple possible quality together usual",
         "available definition provisional publication",
         "experimental",

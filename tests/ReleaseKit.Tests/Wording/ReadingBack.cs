@@ -34,6 +34,9 @@ internal static class ReadingBack
         Sentence($@"Here it was more, for the {Kind} cannot be (below|above) {N}\.", (figure, g) => g[2].Value == "below"
             ? Bound(g[3], figure.Possible.Lowest) && figure.Value.ToDouble() + figure.Main!.Margin < figure.Possible.Lowest
             : Bound(g[3], figure.Possible.Highest) && figure.Value.ToDouble() - figure.Main!.Margin > figure.Possible.Highest),
+        Sentence("For such a figure the range is made wider.", (figure, _) => figure.Value.ToDouble() < figure.Possible.Lowest
+            ? figure.Main!.High > figure.Value.ToDouble() + figure.Main.Margin
+            : figure.Value.ToDouble() > figure.Possible.Highest && figure.Main!.Low < figure.Value.ToDouble() - figure.Main.Margin),
         Sentence($@"(?:So t|T)he {Kind} before noise is between {N} and {N} in {Cases}\.",
             (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.Low) && Is(g[3], figure.Main.Printed.High)
                 && Number(g[2]) < Number(g[3]) && Contains(figure, g[2], g[3]) && Holds(figure, g, 4)),
