@@ -16,7 +16,7 @@ internal sealed class BudgetSample
 {
     private static readonly string[] Titles =
     [
-        "Households behind on heating bills and without heating, by district and ward", "What was owed and what was paid, by district",
+        "Households in arrears and households without heating, by district and ward", "What was owed and what was paid, by district",
         "Who is behind, by tenure and age band", "Weeks behind, by district",
     ];
 
