@@ -7,6 +7,9 @@ namespace ReleaseKit.Appraisal;
 /// <summary>A published figure with its error worked out: what every page, chart, download and sentence is made from.</summary>
 public sealed record AppraisedFigure
 {
+    // Above its nominal value by more than this, a coverage is said to be "at least" so large.
+    private const double CoverageSlack = 1e-9;
+
     public required FigureRef Ref { get; init; }
     public required Table Table { get; init; }
     public required Measure Measure { get; init; }
@@ -47,6 +50,11 @@ public sealed record AppraisedFigure
     /// <summary>Ranges at the lower, main and upper coverage, in that order; empty where there is no margin.</summary>
     public required IReadOnlyList<FigureRange> Ranges { get; init; }
     public FigureRange? Main => Ranges.Count == 0 ? null : Ranges[1];
+
+    /// <summary>Whether words say "at least" of a range: it attains more than its nominal coverage, its margin is an upper bound, or a threshold decides.</summary>
+    public bool HoldsAtLeast(FigureRange range) =>
+        range.Attained > range.Coverage.Share + CoverageSlack || Error is { MarginIsUpperBound: true } or { DependsOnPublished: true };
+
     public required Reliability Reliability { get; init; }
 
     /// <summary>Main margin ÷ figure, rounded up at the 12th digit; null where there is no margin or the figure is not above 0 though it cannot be negative.</summary>

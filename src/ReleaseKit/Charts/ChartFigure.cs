@@ -19,8 +19,8 @@ public static class ChartFigure
         var title = context.In(chart.Title);
         return new StringBuilder()
             .Append("<figure class=\"chart-figure\"><p class=\"chart-title\" id=\"chart-").Append(HtmlText.Encode(chart.Id)).Append("\">").Append(HtmlText.Encode(title)).Append("</p>")
-            .Append(SvgPainter.ForPage(OrderedChart.Wide(figures, type).Drawing, $"chart-{chart.Id}-wide", "chart only-wide", title, words.Description))
-            .Append(SvgPainter.ForPage(OrderedChart.Narrow(figures, type).Drawing, $"chart-{chart.Id}-narrow", "chart only-narrow", title, words.Description))
+            .Append(SvgPainter.ForPage(OrderedChart.Wide(figures, type).Drawing, $"chart-{chart.Id}-wide", "chart only-wide", title, words.DescriptionInPage))
+            .Append(SvgPainter.ForPage(OrderedChart.Narrow(figures, type).Drawing, $"chart-{chart.Id}-narrow", "chart only-narrow", title, words.DescriptionInPage))
             .Append("<figcaption>").Append(HtmlText.Encode(string.Join(' ', words.Caption))).Append(Saving(chart, context, page))
             .Append(ChartTable.Html(chart, figures, context, page)).Append("</figcaption></figure>").ToString();
     }

@@ -27,10 +27,10 @@ public static class Marks
             return language.Text("marks.stem-alone", ("figure", value));
         var ranges = figure.Ranges.Select(range => language.Text(
             "marks.range",
-            ("share", language.Share(range.Coverage)),
+            ("cases", language.Cases(range.Coverage, figure.HoldsAtLeast(range))),
             ("low", language.NumberInProse(range.Printed.Low)),
             ("high", language.NumberInProse(range.Printed.High))));
-        return language.Text("marks.bar", ("figure", value), ("ranges", string.Join("; ", ranges)));
+        return language.Text("marks.bar", ("figure", value), ("ranges", string.Join(' ', ranges)));
     }
 
     internal static StringBuilder Open(string kind, double width, double height, string description) => new StringBuilder("<svg class=\"")

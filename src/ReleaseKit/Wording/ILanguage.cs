@@ -35,6 +35,9 @@ public interface ILanguage
     /// <summary>A coverage in words: "95 in 100".</summary>
     string Share(Noise.Coverage coverage);
 
+    /// <summary>A coverage as a promise of the procedure: "95 of 100 cases", "at least 95 of 100 cases".</summary>
+    string Cases(Noise.Coverage coverage, bool atLeast);
+
     /// <summary>A text of the wording file by key, its {names} filled in; a missing key is the stop that names it.</summary>
     string Text(string key, params (string Name, string Value)[] fill);
 

@@ -46,6 +46,9 @@ public sealed class Language : ILanguage
 
     public string Share(Coverage coverage) => voice.Frequency("coverage.share", NaturalFrequency.Of(coverage));
 
+    public string Cases(Coverage coverage, bool atLeast) =>
+        voice.Frequency(atLeast ? "coverage.cases.at-least" : "coverage.cases", NaturalFrequency.Of(coverage));
+
     public string Text(string key, params (string Name, string Value)[] fill) => texts.Fill(key, fill);
 
     public string Date(DateOnly date) => texts.Fill(

@@ -7,9 +7,6 @@ namespace ReleaseKit.Wording;
 /// <summary>The pieces that sentences of one language are put together from.</summary>
 internal sealed class Voice(WordingTexts texts, ILanguage language)
 {
-    /// <summary>Above its nominal value by more than this, a coverage is said to be "at least" so large.</summary>
-    private const double CoverageSlack = 1e-9;
-
     public string Tag => texts.Tag;
 
     public Numerals Numerals { get; } = new(texts);
@@ -68,9 +65,6 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
     public string Frequency(string key, NaturalFrequency frequency) =>
         Say(key, ("cases", Numerals.Whole(frequency.Cases)), ("all", Numerals.Whole(frequency.All)));
 
-    private string CasesAs(string which, AppraisedFigure figure, FigureRange range)
-    {
-        var more = range.Attained > range.Coverage.Share + CoverageSlack || figure.Error is { MarginIsUpperBound: true } or { DependsOnPublished: true };
-        return Frequency(more ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));
-    }
+    private string CasesAs(string which, AppraisedFigure figure, FigureRange range) =>
+        Frequency(figure.HoldsAtLeast(range) ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));
 }

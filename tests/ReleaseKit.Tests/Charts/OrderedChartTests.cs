@@ -140,6 +140,34 @@ public sealed class OrderedChartTests
     }
 
     [Fact]
+    public void Chart_of_rounded_means_says_at_least_as_its_readings_do()
+    {
+        var figures = Means(("18.29", 0.1), ("23.07", 1));
+
+        Assert.All(figures.Rows, row => Assert.Contains("in at least 95 of 100 cases", Words.ReadingOf(row.Figure).Text, StringComparison.Ordinal));
+        Assert.Contains(OrderedWords.Of(figures, Words).Caption, sentence => sentence.Contains("at least 95 in 100 lie between such stops", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Only_a_page_has_the_table_behind_the_picture()
+    {
+        var words = OrderedWords.Of(Figures(Values), Words);
+
+        Assert.DoesNotContain("table", words.Description, StringComparison.Ordinal);
+        Assert.Equal(words.Description + " The table behind the picture gives every figure, its margin and its range.", words.DescriptionInPage);
+    }
+
+    [Fact]
+    public void Mark_alone_says_in_how_many_cases_each_of_its_ranges_holds()
+    {
+        // Discrete Gaussian noise lies on whole steps, so each range attains more than its name (tests/reference/noise-intervals.csv: ± 19 at 0.95 for sigma 9.5).
+        var description = Marks.Description(Figures(["1842"]).Rows[0].Figure, Words);
+
+        Assert.StartsWith("Error bar of 1,842\u00a0households. The range that holds in at least 50 of 100 cases is from ", description, StringComparison.Ordinal);
+        Assert.Contains(" The range that holds in at least 95 of 100 cases is from 1,823 to 1,861. ", description, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Png_shows_something_and_is_the_same_every_time()
     {
         using var type = TextBoxes.Type();

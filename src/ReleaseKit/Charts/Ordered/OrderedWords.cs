@@ -4,13 +4,16 @@ using ReleaseKit.Wording;
 namespace ReleaseKit.Charts.Ordered;
 
 /// <summary>What is said about an ordered chart: its caption, sentence by sentence, and its description for those who do not see it.</summary>
-public sealed record OrderedWords(IReadOnlyList<string> Caption, string Description)
+/// <param name="Caption">The sentences under the picture.</param>
+/// <param name="Description">The description of the picture alone.</param>
+/// <param name="DescriptionInPage">The same where the table of its figures stands beside it.</param>
+public sealed record OrderedWords(IReadOnlyList<string> Caption, string Description, string DescriptionInPage)
 {
     public static OrderedWords Of(OrderedFigures figures, ILanguage language)
     {
         string[] caption = [.. Sentences(figures, language)];
         var description = language.Text("charts.ordered.description", ("count", Count(figures.Rows.Count, language)));
-        return new OrderedWords(caption, description);
+        return new OrderedWords(caption, description, $"{description} {language.Text("charts.ordered.description.table")}");
     }
 
     private static IEnumerable<string> Sentences(OrderedFigures figures, ILanguage language)
@@ -35,12 +38,9 @@ public sealed record OrderedWords(IReadOnlyList<string> Caption, string Descript
                 ("count", Count(figures.WithoutNumber.Count, language)));
     }
 
-    /// <summary>Whether some range attains more than its nominal coverage, so that words say "at least".</summary>
+    /// <summary>Whether the reading of some figure says "at least", so that a sentence about all of them does.</summary>
     public static bool IsMoreThanNominal(OrderedFigures figures) =>
-        figures.Rows.Any(row => row.Figure.Main is { } range && range.Attained > range.Coverage.Share + Tie);
-
-    // The tie rule of the margins.
-    private const double Tie = 1e-12;
+        figures.Rows.Any(row => row.Figure.Main is { } range && row.Figure.HoldsAtLeast(range));
 
     private static string Count(int count, ILanguage language) => language.Number(new Releases.PublishedValue(count, 0));
 }
