@@ -21,7 +21,9 @@ internal sealed record HeroMark(MarkSize Size, double Width, double Height, doub
         var subject = MarkSubject.Of(figure);
         var scale = ScaleOf(subject, figure, language);
         var svg = Marks.Open(IsWide ? "hero-bar only-wide" : "hero-bar only-narrow", Width, subject.IsStemAlone ? Size.Middle * 2 : Height, Marks.Description(figure, language));
-        svg.AppendPath("hair", $"M0 {SvgMark.Number(Size.Middle)}H{SvgMark.Number(Width)}");
+        // Without noise there is no scale to show.
+        if (!subject.IsStemAlone)
+            svg.AppendPath("hair", $"M0 {SvgMark.Number(Size.Middle)}H{SvgMark.Number(Width)}");
         AppendGuides(svg, figure, scale);
         svg.Append(SvgMark.Paint(SwelledRule.Of(subject, scale, Size).Shapes));
         for (var index = 0; index < figure.Ranges.Count; index++)

@@ -52,7 +52,9 @@ public static class HeadlineCard
         var scale = subject.IsStemAlone
             ? new Scale(subject.Value - 1, subject.Value + 1, Border, Width - Border)
             : new Scale(subject.Tail.Low, subject.Tail.High, Border + 40, Width - Border - 40);
-        yield return new Shape.Line(Inks.AxisTick, new Spot(Border, top + Mark.Middle), new Spot(Width - Border, top + Mark.Middle));
+        // Without noise there is no scale to show.
+        if (!subject.IsStemAlone)
+            yield return new Shape.Line(Inks.AxisTick, new Spot(Border, top + Mark.Middle), new Spot(Width - Border, top + Mark.Middle));
         var rule = SwelledRule.Of(subject, scale, Mark);
         foreach (var shape in rule.Shapes)
             yield return MarkInks.Of(shape, top);
