@@ -35,11 +35,10 @@ internal static class ComposeCommand
 
     private static void Write(IAppraisedRelease appraised, string site, Talk talk)
     {
-        var templates = Path.Combine(AppContext.BaseDirectory, "site-templates");
-        var language = Language.Load(templates, appraised.Release.MainLanguage);
+        var language = Language.Load(SiteTemplates.Folder, appraised.Release.MainLanguage);
         using var target = SiteFolder.Open(site);
         var budget = BudgetStatement.Of(appraised.Release);
-        ProgressReport.Around(talk, FigureCount(appraised), progress => Site.Compose(appraised, language, budget, templates, target, progress));
+        ProgressReport.Around(talk, FigureCount(appraised), progress => Site.Compose(appraised, language, budget, SiteTemplates.Folder, target, progress));
         var changes = target.Finish();
         talk.Result($"Composed {Path.Combine(site, "index.html")}");
         foreach (var line in ChangeText.Of(changes, target))

@@ -15,6 +15,6 @@ internal sealed record ReviewedFolder(IAppraisedRelease? Appraised, IReadOnlyLis
         var read = ReleaseFolder.Read(folder);
         var sound = read.Release is not null && read.Findings.All(finding => finding.Level != FindingLevel.Stop);
         var appraised = sound ? AppraisedRelease.Of(read.Release!) : null;
-        return new ReviewedFolder(appraised, ReleaseReview.Of(read, appraised));
+        return new ReviewedFolder(appraised, ReleaseReview.Of(read, appraised, SiteTemplates.LanguageOf(appraised)));
     }
 }

@@ -57,6 +57,7 @@ public sealed partial class BrokenFolderTests
         { "a figure off the grid", Wards, "Aldermoor,All,3807,618", "Aldermoor,All,3807,618.5", Wards },
         { "a rounded figure off its rounding", Wards, "Aldermoor,Harrow Lane,1599,230", "Aldermoor,Harrow Lane,1599,231", Wards },
         { "a cited figure that does not exist", Summary, "ward=All>) households", "ward=Moon>) households", Summary },
+        { "a citation whose words say another number", Summary, "[value](figure:behind-aldermoor)", "[more than 1,500](figure:behind-aldermoor)", Summary },
         { "a citation that was not closed", Summary, "[value](figure:behind-aldermoor)", "[value] (figure:behind-aldermoor and [x](figure:y z)", Summary },
         { "a script link in prose", Summary, "# Summary", "# Summary\n\n[here](javascript:alert(1))", Summary },
         { "a chart that nobody asked for", Summary, "chart:by-district", "chart:by-ward", Summary },

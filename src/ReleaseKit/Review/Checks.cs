@@ -9,6 +9,7 @@ public static class Checks
     public static IReadOnlyList<IReviewCheck> All { get; } =
     [
         new ProseLinkCheck(),
+        new ProseNumberCheck(),
         new ProseHeadingCheck(),
         new ProseLiteralCheck(),
         new ProseNameCheck(),

@@ -1,15 +1,19 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Reading;
 using ReleaseKit.Reading.Tables;
+using ReleaseKit.Wording;
 
 namespace ReleaseKit.Review;
 
 /// <summary>The whole review: what reading found and what every check finds, by owner, then by place.</summary>
 public static class ReleaseReview
 {
-    public static IReadOnlyList<Finding> Of(ReadOutcome read, IAppraisedRelease? appraised)
+    /// <param name="read">What was read.</param>
+    /// <param name="appraised">Its figures; null where they cannot be appraised.</param>
+    /// <param name="language">That of the pages; without it, numbers in prose are not compared with the figures.</param>
+    public static IReadOnlyList<Finding> Of(ReadOutcome read, IAppraisedRelease? appraised, ILanguage? language = null)
     {
-        var subject = new ReviewSubject(read, appraised);
+        var subject = new ReviewSubject(read, appraised) { Language = language };
         var findings = read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject))).Distinct().ToList();
         var placed = read.Files is { } files ? CellPlaces.Fill(findings, files) : findings;
         return [.. Waivers.Apply(placed, read.Release).Order(ByOwnerThenPlace)];

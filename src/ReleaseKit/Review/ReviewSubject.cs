@@ -2,12 +2,16 @@ using ReleaseKit.Appraisal;
 using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Reading;
 using ReleaseKit.Releases;
+using ReleaseKit.Wording;
 
 namespace ReleaseKit.Review;
 
 /// <summary>What a check can look at. Any part is null if it could not be formed; a check says nothing about what is not there.</summary>
 public sealed record ReviewSubject(ReadOutcome Read, IAppraisedRelease? Appraised)
 {
+    /// <summary>The language of the pages, as prose is read in it.</summary>
+    public ILanguage? Language { get; init; }
+
     public Release? Release => Read.Release;
 
     public NoiseAccount? Noise => Read.Noise;

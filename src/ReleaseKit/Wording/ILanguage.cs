@@ -23,6 +23,9 @@ public interface ILanguage
     /// <summary>A number as the language writes it in running text: "minus 7".</summary>
     string NumberInProse(PublishedValue value);
 
+    /// <summary>The numbers that stand in a text, read as the language writes them; in the order of the text.</summary>
+    IReadOnlyList<WrittenNumber> NumbersIn(string text);
+
     /// <summary>"1,240 households", "51.3 in each 100": number, non-breaking space, unit in the right form.</summary>
     string WithUnit(PublishedValue value, Measure measure);
 

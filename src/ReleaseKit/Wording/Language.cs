@@ -11,6 +11,7 @@ public sealed class Language : ILanguage
     private readonly Voice voice;
     private readonly ReadingWriter readings;
     private readonly FactSentences factSentences;
+    private readonly NumberReader numbers;
 
     private Language(WordingTexts texts)
     {
@@ -18,6 +19,7 @@ public sealed class Language : ILanguage
         voice = new Voice(texts, this);
         readings = new ReadingWriter(voice);
         factSentences = new FactSentences(voice);
+        numbers = new NumberReader(texts);
     }
 
     public string Tag => texts.Tag;
@@ -35,6 +37,8 @@ public sealed class Language : ILanguage
     public string Number(PublishedValue value) => voice.Numerals.InTable(value);
 
     public string NumberInProse(PublishedValue value) => voice.Numerals.InProse(value);
+
+    public IReadOnlyList<WrittenNumber> NumbersIn(string text) => numbers.In(text);
 
     public string WithUnit(PublishedValue value, Measure measure) => voice.WithUnit(value, measure);
 

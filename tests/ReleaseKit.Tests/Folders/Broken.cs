@@ -1,6 +1,7 @@
 using System.Text;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Review;
+using ReleaseKit.Tests.Wording;
 using Xunit;
 
 namespace ReleaseKit.Tests.Folders;
@@ -33,7 +34,7 @@ internal sealed class Broken : IDisposable
     {
         var read = folder.Read();
         var appraised = read.Release is { } release && !read.HasStops ? AppraisedRelease.Of(release) : null;
-        return ReleaseReview.Of(read, appraised);
+        return ReleaseReview.Of(read, appraised, English.Language);
     }
 
     public void Dispose() => folder.Dispose();

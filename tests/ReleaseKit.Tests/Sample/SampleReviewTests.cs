@@ -12,7 +12,7 @@ public sealed class SampleReviewTests
     public void Sample_has_neither_stops_nor_cautions()
     {
         var outcome = ReleaseFolder.Read(SampleRelease.Folder);
-        var findings = ReleaseReview.Of(outcome, outcome.Release is { } release ? AppraisedRelease.Of(release) : null);
+        var findings = ReleaseReview.Of(outcome, outcome.Release is { } release ? AppraisedRelease.Of(release) : null, Wording.English.Language);
         Assert.DoesNotContain(findings, finding => finding.Level != FindingLevel.Note);
     }
 

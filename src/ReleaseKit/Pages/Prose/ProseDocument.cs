@@ -18,6 +18,7 @@ public static class ProseDocument
         {
             LiteralInline literal => literal.Content.ToString(),
             CodeInline code => code.Content,
+            HtmlEntityInline entity => entity.Transcoded.ToString(),
             LineBreakInline => " ",
             _ => "",
         }));

@@ -54,6 +54,17 @@ internal static class ProseProblems
         "it is not clear what is to be printed.",
         "write one of value, margin, value and margin, range, reading between the brackets, or words of your own.");
 
+    public static Finding Disagrees(Place at, IReadOnlyList<string> written, FigureWords figure, string destination, FindingOwner owner) => new(
+        FindingLevel.Stop, "prose-disagrees", owner, at,
+        $"The words of this citation say {string.Join(" and ", written.Select(number => $"\"{KeyProblems.Cut(number)}\""))}, but {KeyProblems.Cut(figure.Figure.Address)} {figure.Is}.",
+        "the words would be printed as they stand, with the margin of another number behind them.",
+        $"write [value and margin]({(NeedsBrackets(destination) ? $"<{destination}>" : destination)}){(figure.Figure.HasNumber ? $", or {figure.Number} in the words" : "")}; a number that is not meant for this figure, such as a year, goes before or behind the link.")
+    {
+        Address = figure.Figure.Address,
+    };
+
+    private static bool NeedsBrackets(string destination) => destination.Any(letter => char.IsWhiteSpace(letter) || letter is '(' or ')');
+
     public static Finding UnknownChart(Place at, string id, IReadOnlyList<string> known, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-chart", owner, at,
         $"There is no chart \"{KeyProblems.Cut(id)}\" in release.json.",

@@ -1,0 +1,86 @@
+using ReleaseKit.Review;
+using ReleaseKit.Tests.Folders;
+using Xunit;
+
+namespace ReleaseKit.Tests.Review;
+
+/// <summary>Numbers in the words of a citation: they are the figure, its margin or an end of its range, or a stop. Lamps lit are 60 (± 14) in all; broken ones −1 in Weir Lane.</summary>
+public sealed class ProseNumberTests
+{
+    private const string Prose = "narrative/summary.md";
+    private const string Citation = "[value and margin](figure:lamps/lit?street=All)";
+
+    [Theory]
+    [InlineData("60 lamps")]
+    [InlineData("all the lamps")]
+    [InlineData("60")]
+    [InlineData("60 ± 14")]
+    [InlineData("**60**, with a margin of 14,")]
+    [InlineData("46 to 74")]
+    [InlineData("from 46&nbsp;lamps to 74.")]
+    [InlineData("60.0")]
+    public void Number_of_the_figure_passes(string words) => Passes($"[{words}](figure:lamps/lit?street=All)");
+
+    [Theory]
+    [InlineData("minus 1")]
+    [InlineData("minus&nbsp;1 lamp")]
+    [InlineData("−1")]
+    [InlineData("-1")]
+    public void Figure_below_zero_is_written_with_its_sign(string words) => Passes($"[{words}](figure:lamps/broken?street=Weir%20Lane)");
+
+    [Theory]
+    [InlineData("more than 65", "65")]
+    [InlineData("65 lamps", "65")]
+    [InlineData("*6*5 lamps", "65")]
+    [InlineData("6&#48;0 lamps", "600")]
+    [InlineData("minus 60", "minus 60")]
+    [InlineData("−60", "−60")]
+    [InlineData("± 60", "± 60")]
+    [InlineData("60,0", "60,0")]
+    [InlineData("6,000", "6,000")]
+    [InlineData("1.060,5", "1.060,5")]
+    [InlineData("60 lamps in 2031", "2031")]
+    [InlineData("60 ± 12", "± 12")]
+    [InlineData("45-74", "45")]
+    public void Another_number_is_a_stop_that_says_both(string words, string written)
+    {
+        using var broken = new Broken(folder => folder.Edit(Prose, Citation, $"[{words}](figure:lamps/lit?street=All)"));
+        var stop = Assert.Single(broken.Review());
+        Assert.Equal(("prose-disagrees", FindingLevel.Stop, FindingOwner.Writer, $"{Prose}:3:9"), (stop.Slug, stop.Level, stop.For, stop.At.ToString()));
+        Assert.Contains($"say \"{written}\", but lamps/lit?street=All is 60 (± 14); its range is 46 to 74", stop.Found.Replace('\u00A0', ' '), StringComparison.Ordinal);
+        Assert.StartsWith($"write {Citation}, or 60 in the words", stop.Do, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Every_number_that_disagrees_is_named() => Broken.Stops("prose-disagrees", Prose, "[65", "figure:total",
+        folder => folder.Edit("release.json", "\"headlines\"", "\"short\": { \"total\": \"lamps/lit?street=All\" }, \"headlines\"")
+            .Edit(Prose, Citation, "[65 of 2031 and 60](figure:total)"));
+
+    [Theory]
+    [InlineData("1")]
+    [InlineData("4")]
+    public void Sign_that_is_missing_is_a_stop(string words) => Broken.Stops("prose-disagrees", Prose, $"[{words}]", "or minus 1 in the words",
+        folder => folder.Edit(Prose, Citation, $"[{words}](<figure:lamps/broken?street=Weir Lane>)"));
+
+    [Fact]
+    public void Address_with_a_space_is_pasted_between_brackets() => Broken.Stops("prose-disagrees", Prose, "[32", "[value and margin](<figure:lamps/lit?street=Kiln Row>)",
+        folder => folder.Edit(Prose, Citation, "[32 lamps](<figure:lamps/lit?street=Kiln Row>)"));
+
+    [Fact]
+    public void Number_for_a_hidden_figure_is_a_stop() => Broken.Stops("prose-disagrees", Prose, "[20 lamps]", "write [value and margin](figure:lamps/lit?street=Quay); a number",
+        folder => folder.With("tables/lamps.csv", "street,lit,broken,lit_status\nAll,40,9,\nKiln Row,31,4,\nQuay,,5,Q\nWeir Lane,9,-1,\n")
+            .Edit("release.json", "\"figures\": [\n", "\"hidden\": { \"by\": \"public-rule\", \"inTotals\": false }, \"statuses\": { \"column\": \"*_status\" }, \"figures\": [\n")
+            .Edit(Prose, Citation, "[20 lamps](figure:lamps/lit?street=Quay)"));
+
+    [Theory]
+    [InlineData("In 2031, after 12 years, [so many](figure:lamps/lit?street=All)")]
+    [InlineData("See [table 3](https://office.example/3)")]
+    [InlineData("`[65](figure:lamps/lit?street=All)`")]
+    public void Number_outside_a_citation_is_not_compared(string text) => Passes(text);
+
+    private static void Passes(string text)
+    {
+        using var broken = new Broken(folder => folder.Edit(Prose, Citation, text));
+        Assert.Empty(broken.Review().Select(finding => $"{finding.Slug} {finding.Found}"));
+    }
+}
