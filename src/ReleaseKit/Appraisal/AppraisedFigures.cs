@@ -8,7 +8,7 @@ internal sealed class AppraisedFigures(Release release)
 {
     private readonly FigureOrigins origins = new(release);
     private readonly ConcurrentDictionary<int, WholeFinder> wholes = new();
-    private readonly ConcurrentDictionary<FigureRef, Reliability> ofWholes = new();
+    private readonly ConcurrentDictionary<FigureRef, double?> ofWholes = new();
 
     public FigureOrigins Origins => origins;
 
@@ -64,19 +64,26 @@ internal sealed class AppraisedFigures(Release release)
         };
     }
 
+    /// <summary>Of the nearest wholes that are not weak the one with the smallest margin for its size; a figure without noise has none.</summary>
     private FigureRef? UseInstead(AppraisedFigure figure)
     {
         if (figure.Reliability != Reliability.Weak)
             return null;
         var at = figure.Ref;
-        foreach (var row in wholes.GetOrAdd(at.Table, table => new WholeFinder(release.Tables[table])).Of(at.Row))
-            if (IsUsable(at with { Row = row }))
-                return at with { Row = row };
+        foreach (var rows in wholes.GetOrAdd(at.Table, table => new WholeFinder(release.Tables[table])).Of(at.Row))
+        {
+            var usable = rows.Select(row => at with { Row = row }).Where(whole => MarginOfWhole(whole) is not null).ToList();
+            if (usable.Count > 0)
+                return usable.MinBy(whole => MarginOfWhole(whole));
+        }
+
         return null;
     }
 
-    private bool IsUsable(FigureRef whole) =>
-        ofWholes.GetOrAdd(whole, at => WithoutCase(at, out _).Reliability) is not (Reliability.Weak or Reliability.NotStated);
+    /// <summary>Margin ÷ figure of a whole, null where it cannot be used alone.</summary>
+    private double? MarginOfWhole(FigureRef whole) => ofWholes.GetOrAdd(whole, at => WithoutCase(at, out _) is { Reliability: not (Reliability.Weak or Reliability.NotStated) } figure
+        ? figure.MarginToFigure ?? 0
+        : null);
 
     private static bool CanBeNegative(Measure measure) => !(PossibleOf.Measure(measure).Lowest >= 0);
 

@@ -44,6 +44,9 @@ public sealed record MeasureFacts
     /// <summary>Whether some of its totals have noise of their own; never for a measure that does not add up, as a mean.</summary>
     public required bool HasTotalsOfOwnNoise { get; init; }
 
+    /// <summary>Why its parts may not add up.</summary>
+    public TotalFacts Totals { get; init; } = TotalFacts.None;
+
     /// <summary>Whether the margins of some figures hold a rounding after the noise: one on purpose, or that of continuous noise to the decimals of the file.</summary>
     public required bool IsRounded { get; init; }
     public required Noise.Coverage Coverage { get; init; }

@@ -13,6 +13,7 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
     {
         var table = release.Tables[tableIndex];
         var errors = table.Measures.Select((measure, index) => ErrorsOf(tableIndex, index, measure)).ToList();
+        var measures = errors.Select((error, index) => FactsOf(error, TotalsOf(tableIndex, index))).ToList();
         var shown = errors.Where(error => error.Measure.Shown).ToList();
         return new TableFacts
         {
@@ -21,8 +22,8 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
             ExpectedMisses = shown.Sum(error => error.ExpectedMisses),
             SharesDraws = shown.Any(error => error.HasSums),
             HasSums = shown.Any(error => error.HasSums),
-            HasTotalsOfOwnNoise = shown.Any(error => HasTotalOfOwnNoise(table, error.Measure)),
-            Measures = [.. errors.Select(error => FactsOf(table, error))],
+            HasTotalsOfOwnNoise = measures.Any(measure => measure.Measure.Shown && measure.HasTotalsOfOwnNoise),
+            Measures = measures,
         };
     }
 
@@ -35,17 +36,10 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
         return found;
     }
 
-    private static bool HasTotalOfOwnNoise(Table table, Measure measure)
-    {
-        if (!AddsUp(measure))
-            return false;
-        for (var row = 0; row < table.RowCount; row++)
-            if (measure.RuleAt(row) is NoiseRule.FromMechanism && table.Stub.Any(column => column.IsAll(row)))
-                return true;
-        return false;
-    }
+    private TotalFacts TotalsOf(int table, int measure) => new TotalFactsMaker(release.Tables[table], release.Tables[table].Measures[measure])
+        .Of(row => origins.Of(new(table, measure, row)).Error is not null);
 
-    private MeasureFacts FactsOf(Table table, MeasureErrors found)
+    private MeasureFacts FactsOf(MeasureErrors found, TotalFacts totals)
     {
         var margins = found.Errors.Where(error => !error.Error.DependsOnPublished).Select(error => Margin(found.Measure, error)).ToList();
         return new MeasureFacts
@@ -53,7 +47,8 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
             Measure = found.Measure,
             Coverage = release.Coverages.Main,
             HasSums = found.HasSums,
-            HasTotalsOfOwnNoise = HasTotalOfOwnNoise(table, found.Measure),
+            HasTotalsOfOwnNoise = totals.OwnNoise.Count > 0,
+            Totals = totals,
             IsRounded = found.Errors.Any(error => error.Error.Steps.OfType<AfterStep.RoundTo>().Any()),
             HasThreshold = margins.Count < found.Errors.Count,
             SmallestMargin = margins.Count == 0 ? null : margins.MinBy(margin => margin.ToDecimal()),
@@ -77,6 +72,4 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
         var printing = Printing.Of(found.Measure, largest.IsOnWholeGrid);
         return printing.Outward(largest.HalfWidthAt(Of999).Width, printing.UnitFor(largest.MainHalfWidth.Width));
     }
-
-    private static bool AddsUp(Measure measure) => measure.Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount;
 }

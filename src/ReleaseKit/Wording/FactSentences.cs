@@ -5,11 +5,13 @@ namespace ReleaseKit.Wording;
 /// <summary>What is said once for a table, and once for a column.</summary>
 internal sealed class FactSentences(Voice voice)
 {
+    private readonly AddingSentences adding = new(voice);
+
     /// <summary>How many ranges may miss, and why parts may not add up.</summary>
-    public IReadOnlyList<string> Of(TableFacts facts, bool onSeveralPages) => [.. Misses(facts, onSeveralPages), .. Adding(facts)];
+    public IReadOnlyList<string> Of(TableFacts facts, bool onSeveralPages) => [.. Misses(facts, onSeveralPages), .. adding.Of(facts)];
 
     /// <summary>How far the noise of a column reaches: at the main coverage, and in 999 of 1,000 cases.</summary>
-    public IReadOnlyList<string> Of(MeasureFacts facts) => [.. Reach(facts), .. Distance(facts)];
+    public IReadOnlyList<string> Of(MeasureFacts facts, bool onSeveralPages) => [.. Reach(facts, onSeveralPages), .. Distance(facts, onSeveralPages)];
 
     private IEnumerable<string> Misses(TableFacts facts, bool onSeveralPages)
     {
@@ -28,27 +30,7 @@ internal sealed class FactSentences(Voice voice)
             yield return voice.Say("facts.shared");
     }
 
-    /// <summary>Where the measures shown differ in it, each kind of total is said of the measures it is true of.</summary>
-    private IEnumerable<string> Adding(TableFacts facts)
-    {
-        var groups = facts.Measures.Where(measure => measure.Measure.Shown).GroupBy(measure => (measure.HasTotalsOfOwnNoise, measure.HasSums)).ToList();
-        return groups.Count == 1
-            ? Adding(groups[0].Key.HasTotalsOfOwnNoise, groups[0].Key.HasSums, "")
-            : groups.SelectMany(group => Adding(group.Key.HasTotalsOfOwnNoise, group.Key.HasSums, ".of", ("measures", Named(group))));
-    }
-
-    private IEnumerable<string> Adding(bool ownNoise, bool sums, string of, params (string, string)[] measures)
-    {
-        if (ownNoise)
-            yield return voice.Say((sums ? "facts.own-noise.some" : "facts.own-noise") + of, measures);
-        if (sums)
-            yield return voice.Say((ownNoise ? "facts.sums.other" : "facts.sums") + of, measures);
-    }
-
-    private string Named(IEnumerable<MeasureFacts> measures) =>
-        voice.List([.. measures.Select(measure => voice.Say("list.quoted", ("name", measure.Measure.Title.In(voice.Tag))))]);
-
-    private IEnumerable<string> Reach(MeasureFacts facts)
+    private IEnumerable<string> Reach(MeasureFacts facts, bool onSeveralPages)
     {
         var kind = ("kind", voice.Kind(facts.Measure));
         var cases = ("cases", voice.Frequency("coverage.cases.at-least", NaturalFrequency.Of(facts.Coverage)));
@@ -59,14 +41,14 @@ internal sealed class FactSentences(Voice voice)
         var margin = voice.WithUnit(largest, facts.Measure);
         return smallest == largest
             ? [voice.Say("facts.column", kind, cases, ("margin", margin))]
-            : [voice.Say("facts.column.several", kind, cases), voice.Say("facts.column.margins", ("smallest", voice.Numerals.InProse(smallest)), ("largest", margin))];
+            : [voice.Say("facts.column.several", kind, cases), voice.Say(onSeveralPages ? "facts.column.margins.pages" : "facts.column.margins", ("smallest", voice.Numerals.InProse(smallest)), ("largest", margin))];
     }
 
-    private IEnumerable<string> Distance(MeasureFacts facts)
+    private IEnumerable<string> Distance(MeasureFacts facts, bool onSeveralPages)
     {
         if (facts.Distance999 is { } distance)
             yield return voice.Say(
-                facts.IsRounded ? "facts.distance.rounded" : "facts.distance",
+                (facts.IsRounded ? "facts.distance.rounded" : "facts.distance") + (onSeveralPages ? ".pages" : ""),
                 ("cases", voice.Frequency("coverage.cases.at-least", new NaturalFrequency(999, 1000))),
                 ("distance", voice.WithUnit(distance, facts.Measure)));
     }

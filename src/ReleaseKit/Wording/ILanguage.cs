@@ -14,8 +14,8 @@ public interface ILanguage
     /// <summary>What is said once under a table: how many ranges may miss (on all its pages, where it is cut into several), why parts may not add up.</summary>
     IReadOnlyList<string> NotesOf(TableFacts facts, bool onSeveralPages = false);
 
-    /// <summary>What is said once for a column: how far its noise reaches, and the distance that 999 of 1,000 hold; empty without margins.</summary>
-    IReadOnlyList<string> NotesOf(MeasureFacts facts);
+    /// <summary>What is said once for a column (on all pages of its table): how far its noise reaches, and the distance that 999 of 1,000 hold; empty without margins.</summary>
+    IReadOnlyList<string> NotesOf(MeasureFacts facts, bool onSeveralPages = false);
 
     /// <summary>A number as the language writes it in tables: "1,842", "−7" (U+2212).</summary>
     string Number(PublishedValue value);

@@ -32,7 +32,7 @@ public sealed class Language : ILanguage
 
     public IReadOnlyList<string> NotesOf(TableFacts facts, bool onSeveralPages = false) => factSentences.Of(facts, onSeveralPages);
 
-    public IReadOnlyList<string> NotesOf(MeasureFacts facts) => factSentences.Of(facts);
+    public IReadOnlyList<string> NotesOf(MeasureFacts facts, bool onSeveralPages = false) => factSentences.Of(facts, onSeveralPages);
 
     public string Number(PublishedValue value) => voice.Numerals.InTable(value);
 

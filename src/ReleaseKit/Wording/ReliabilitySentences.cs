@@ -57,10 +57,10 @@ internal sealed class ReliabilitySentences(Voice voice)
         return voice.Say(key, ("place", string.Join(voice.Say("list.names"), NameOf(figure.Table, row))));
     }
 
-    /// <summary>The headings a row stands under, down to the last one that is not "all": "All tenures, 60 to 74".</summary>
+    /// <summary>The headings a row stands under, down to the last one that is not "all": "All tenures, 60 to 74"; all of them for the total of everything.</summary>
     private IEnumerable<string> NameOf(Table table, int row)
     {
-        var last = Enumerable.Range(0, table.Stub.Count).LastOrDefault(at => !table.Stub[at].IsAll(row));
+        var last = Enumerable.Range(0, table.Stub.Count).LastOrDefault(at => !table.Stub[at].IsAll(row), table.Stub.Count - 1);
         return table.Stub.Take(last + 1).Select(column => voice.Label(column, row));
     }
 }

@@ -1,5 +1,6 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Releases;
+using ReleaseKit.Tests.Wording;
 using Xunit;
 
 namespace ReleaseKit.Tests.Appraisal;
@@ -82,6 +83,35 @@ public sealed class ReliabilityTests
         var release = TwoLevels("500", "600", "900");
         Assert.Null(release.Figure(new FigureRef(0, 0, 3)).UseInstead);
     }
+
+    [Theory]
+    [InlineData("200", "100", 1)]
+    [InlineData("100", "200", 2)]
+    [InlineData("19", "100", 2)]
+    [InlineData("100", "19", 1)]
+    [InlineData("19", "19", 0)]
+    public void Of_the_totals_as_near_the_one_with_the_smallest_margin_for_its_size_is_named(string ofAge, string ofTenure, int row)
+    {
+        var figure = Crossed("900", ofAge, ofTenure, "19").Figure(new FigureRef(0, 0, 3));
+
+        Assert.Equal(row, figure.UseInstead!.Value.Row);
+    }
+
+    [Fact]
+    public void Total_of_everything_is_named_by_all_its_headings_and_another_by_its_own()
+    {
+        string Advice(string ofAge) => English.Language.ReadingOf(Crossed("900", ofAge, "19", "19").Figure(new FigureRef(0, 0, 3))).Text;
+
+        Assert.Contains("Use the published total “All, All” instead.", Advice("19"), StringComparison.Ordinal);
+        Assert.Contains("Use the published total “All, 60 to 74” instead.", Advice("100"), StringComparison.Ordinal);
+    }
+
+    /// <summary>A table of two ways, each figure with a margin of 10: everything, the total of an age band, that of a tenure, and their cell.</summary>
+    private static IAppraisedRelease Crossed(string all, string ofAge, string ofTenure, string cell) => new SmallRelease()
+        .Stub("tenure", "All", "All", "All", "Rented", "Rented")
+        .Stub("age", "All", "All", "60 to 74", "All", "60 to 74")
+        .Figures(MeasureKind.Count, SmallRelease.Mechanism("m", LawName.DiscreteUniform, ("halfWidth", 10)), all, ofAge, ofTenure, cell)
+        .Appraise();
 
     /// <summary>All of all, a ward and its district, each with a margin of 10.</summary>
     private static IAppraisedRelease TwoLevels(string ward, string district, string all) => new SmallRelease()

@@ -117,14 +117,14 @@ public sealed class LanguageTests
     }
 
     [Fact]
-    public void Table_in_which_less_than_one_range_may_miss_says_fewer_than_one()
+    public void Table_in_which_less_than_one_range_may_miss_says_less_than_one()
     {
         var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
-        Assert.Equal("Of the 3 ranges in this table, fewer than 1 is expected to miss.", En.NotesOf(facts)[0]);
+        Assert.Equal("Of the 3 ranges in this table, on average less than 1 misses.", En.NotesOf(facts)[0]);
     }
 
     [Theory]
-    [InlineData(0.29, "Of the 6 ranges in this table, fewer than 1 is expected to miss.")]
+    [InlineData(0.29, "Of the 6 ranges in this table, on average less than 1 misses.")]
     [InlineData(1, "Of the 6 ranges in this table, at most about 1 is expected to miss.")]
     [InlineData(1.2, "Of the 6 ranges in this table, at most about 2 are expected to miss.")]
     public void Expected_misses_are_never_said_to_be_more_than_they_round_up_to(double expected, string sentence)
@@ -137,7 +137,7 @@ public sealed class LanguageTests
     public void Table_cut_into_pages_counts_the_ranges_of_all_pages()
     {
         var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
-        Assert.Equal("Of the 3 ranges in this table, on all its pages, fewer than 1 is expected to miss.", En.NotesOf(facts, onSeveralPages: true)[0]);
+        Assert.Equal("Of the 3 ranges in this table, on all its pages, on average less than 1 misses.", En.NotesOf(facts, onSeveralPages: true)[0]);
     }
 
     [Fact]
@@ -165,8 +165,78 @@ public sealed class LanguageTests
             .Figures(SmallRelease.Measure(MeasureKind.Mean, "mean use"), [draw], [0, 0, 0, 0], "31", "31", "10", "21")
             .Appraise().FactsOf(0);
         Assert.Equal(
+            ["For “cut off”, noise was added to the total of all, so parts may not add up there.", "For “cut off”, published parts were added up to get the totals by “district”."],
+            En.NotesOf(facts).TakeLast(2));
+    }
+
+    [Fact]
+    public void Totals_of_two_kinds_at_one_level_are_called_some_and_others()
+    {
+        var draw = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5));
+        var facts = new SmallRelease().Stub("district", null, "A", "A", "B", "B").Stub("ward", "All", "All", "w1", "All", "w2")
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), [draw, new NoiseRule.SumOver(1)], [0, 0, 1, 0], "31", "30", "10", "10")
+            .Appraise().FactsOf(0);
+        Assert.Equal(
             ["Some totals of “cut off” got noise of their own, so parts may not add up to them.", "Other totals of “cut off” are sums of the published parts."],
             En.NotesOf(facts).TakeLast(2));
+    }
+
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void Total_without_noise_over_parts_with_noise_is_said_where_parts_are_said_to_add_up(bool adds)
+    {
+        var rules = new NoiseRule[] { new NoiseRule.Exact(SmallRelease.Words("the law")), new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5)) };
+        var table = new SmallRelease().Stub("district", "All", "All", "A", "B").Figures(SmallRelease.Measure(MeasureKind.Amount, "credits"), rules, [0, 1, 1], "31", "10", "20");
+        var facts = (adds ? table.Adds("credits", "district", "All") : table).Appraise().FactsOf(0);
+
+        const string Words = "Totals of “credits” are published without noise and their parts with noise, so parts may not add up to them.";
+        Assert.Equal(adds, En.NotesOf(facts).Contains(Words));
+    }
+
+    [Fact]
+    public void Exact_total_over_exact_parts_needs_no_word()
+    {
+        var facts = new SmallRelease().Stub("district", "All", "All", "A", "B").Adds("credits", "district", "All")
+            .Figures(SmallRelease.Measure(MeasureKind.Amount, "credits"), [new NoiseRule.Exact(SmallRelease.Words("the law"))], [0, 0, 0], "30", "10", "20")
+            .Appraise().FactsOf(0);
+
+        Assert.Empty(En.NotesOf(facts));
+    }
+
+    [Theory]
+    [InlineData(true, "For “cut off”, numbers below 0 were in some rows published as 0, so sums of such figures tend to be too high.")]
+    [InlineData(false, "For “cut off”, numbers below 0 were published as 0, so sums of such figures tend to be too high.")]
+    public void Numbers_lifted_to_a_bound_are_said_to_make_sums_too_high(bool onlyParts, string words)
+    {
+        var lifted = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(0)));
+        var plain = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(4));
+        var facts = new SmallRelease().Stub("ward", "All", "All", "w1", "w2")
+            .Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), [onlyParts ? plain : lifted, lifted], [0, 1, 1], "31", "0", "21").Appraise().FactsOf(0);
+
+        Assert.Equal(words, En.NotesOf(facts)[^1]);
+    }
+
+    [Fact]
+    public void Numbers_lowered_to_a_bound_are_said_to_make_sums_too_low()
+    {
+        var mechanism = SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotAbove(500));
+        var facts = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), mechanism, "31", "500").Appraise().FactsOf(0);
+
+        Assert.Equal("For “cut off”, numbers above 500 were published as 500, so sums of such figures tend to be too low.", En.NotesOf(facts)[^1]);
+    }
+
+    [Fact]
+    public void Column_of_a_table_on_several_pages_speaks_of_all_its_pages()
+    {
+        var rules = new NoiseRule[] { new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5)), new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(4)) };
+        var column = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count), rules, [0, 1], "100", "200").Appraise().FactsOf(0).Measures[0];
+        Assert.Equal(
+            [
+                "The margins of this column, on all its pages, run from 8 to 19\u00a0households.",
+                "In at least 999 of 1,000 cases the noise reaches no further than 31\u00a0households on all pages.",
+            ],
+            En.NotesOf(column, onSeveralPages: true).Skip(1));
     }
 
     [Fact]

@@ -17,7 +17,7 @@ internal static class MeasureFootModel
             ["id"] = Sheet.AboutId(measure),
             ["title"] = measure.Title.In(sheet.Language.Tag),
             ["unit"] = MeasureUnit.Of(measure, sheet.Language),
-            ["sentences"] = new ScriptArray(sheet.Language.NotesOf(sheet.Facts.Measures[index])),
+            ["sentences"] = new ScriptArray(sheet.Language.NotesOf(sheet.Facts.Measures[index], sheet.IsCut)),
             ["rules"] = new ScriptArray(measure.Rules.Where((_, rule) => measure.RuleOf.AsSpan().Contains((byte)rule)).Select(rule => RuleOf(sheet, page, rule))),
             ["cite"] = Cite(sheet, page, measure),
         };

@@ -22,6 +22,9 @@ internal sealed record Sheet
     public required IReadOnlyList<string> Widths { get; init; }
     public ILanguage Language => Site.Language;
 
+    /// <summary>Whether the table stands on several pages.</summary>
+    public bool IsCut => Site.Pages.CutOf(Index).Pages.Count > 1;
+
     /// <summary>The table's number in the release, from 1.</summary>
     public int Number => Index + 1;
 

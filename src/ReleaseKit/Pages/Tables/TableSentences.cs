@@ -6,7 +6,7 @@ internal static class TableSentences
     public static IEnumerable<string> Of(Sheet sheet) =>
     [
         sheet.Text("tables.rows"),
-        .. sheet.Language.NotesOf(sheet.Facts, sheet.Site.Pages.CutOf(sheet.Index).Pages.Count > 1),
+        .. sheet.Language.NotesOf(sheet.Facts, sheet.IsCut),
         .. sheet.Table.Hidden is { } hidden ? [sheet.Text(hidden.InTotals ? "tables.hidden.in-totals" : "tables.hidden.not-in-totals")] : Array.Empty<string>(),
     ];
 }
