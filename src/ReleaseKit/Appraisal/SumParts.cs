@@ -66,7 +66,7 @@ internal sealed class SumParts(Table table)
     /// <summary>Every row but those of wholes without a parent, under the key of the row it is a part of.</summary>
     private Dictionary<UInt128, List<int>> Group(int column)
     {
-        var parents = ParentCodes(table.Stub[column]);
+        var parents = StubParents.Of(table.Stub[column]);
         var groups = new Dictionary<UInt128, List<int>>();
         for (var row = 0; row < table.RowCount; row++)
             if (parents[table.Stub[column].Codes[row]] is >= 0 and var whole)
@@ -79,13 +79,5 @@ internal sealed class SumParts(Table table)
         if (!groups.TryGetValue(whole, out var parts))
             groups[whole] = parts = [];
         parts.Add(row);
-    }
-
-    /// <summary>For each label the code of its parent in the same column: the one it names, else "all", else −1.</summary>
-    private static int[] ParentCodes(StubColumn column)
-    {
-        var codes = column.Labels.Select((label, code) => (label.Value, code)).ToDictionary(pair => pair.Value, pair => pair.code);
-        return [.. column.Labels.Select((label, code) =>
-            label.Parent is { } parent && codes.TryGetValue(parent, out var named) ? named : code == column.AllCode ? -1 : column.AllCode)];
     }
 }

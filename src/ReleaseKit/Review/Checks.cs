@@ -21,6 +21,7 @@ public static class Checks
         new UnusedMechanismCheck(),
         new LevelsCheck(),
         new SensitivityFormsCheck(),
+        new MeanSensitivityCheck(),
         new ExactCountCheck(),
         new UniformNoiseCheck(),
         new OffGridCheck(),

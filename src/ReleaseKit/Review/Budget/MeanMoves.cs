@@ -1,0 +1,79 @@
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Budget;
+
+/// <summary>
+/// How far one unit can move the means of one measure at least: what it can put into a sum (its contribution is clipped), divided by the public
+/// denominator. Only what is certain counts: one cell; a cell with the totals above it; the smallest move on every level and in every period.
+/// </summary>
+internal sealed class MeanMoves
+{
+    private readonly List<double[]> together;
+
+    private MeanMoves(IReadOnlyDictionary<int, double> moves, double smallest, Table table)
+    {
+        SmallestDenominator = smallest;
+        One = moves.Values.Max();
+        together = [.. WithTotals(moves, table), SmallestOnEachLevel(moves, table)];
+    }
+
+    public double SmallestDenominator { get; }
+
+    /// <summary>In one cell.</summary>
+    public double One { get; }
+
+    /// <summary>Over all its cells, as an absolute sum.</summary>
+    public double Sum => together.Max(moves => moves.Sum());
+
+    /// <summary>Over all its cells, as a length.</summary>
+    public double Length => together.Max(moves => Math.Sqrt(moves.Sum(move => move * move)));
+
+    /// <summary>Null where the mechanism does not say enough, or no mean of the measure carries it.</summary>
+    public static MeanMoves? Of(Table table, Measure measure, Mechanism mechanism, Neighbouring neighbouring)
+    {
+        if (measure.Kind != MeasureKind.Mean || mechanism is not { Clipped: { } clipped, DenominatorColumn: { } column } || NumbersOf(table, column) is not { } numbers)
+            return null;
+        var most = neighbouring == Neighbouring.Replace ? clipped.To - clipped.From : Math.Max(Math.Abs(clipped.From), Math.Abs(clipped.To));
+        var rows = Enumerable.Range(0, table.RowCount).Where(row => measure.HasNumber(row) && numbers(row) > 0
+            && measure.RuleAt(row) is NoiseRule.FromMechanism from && from.Mechanism.Id == mechanism.Id).ToList();
+        return rows.Count == 0 ? null : new(rows.ToDictionary(row => row, row => most / numbers(row)), rows.Min(numbers), table);
+    }
+
+    /// <summary>The denominators stand in a column that is declared as public, or that is a measure itself.</summary>
+    private static Func<int, double>? NumbersOf(Table table, string column)
+    {
+        if (table.SideColumns.FirstOrDefault(side => side.Column == column) is { } found)
+            return row => found.Numbers[row];
+        return table.Measures.FirstOrDefault(measure => measure.Column == column) is { } figure
+            ? row => figure.HasNumber(row) ? figure.ValueAt(row).ToDouble() * figure.Multiplier : double.NaN
+            : null;
+    }
+
+    /// <summary>For each cell its move and those of the totals that hold it: whoever is counted in the cell is counted in them.</summary>
+    private static IEnumerable<double[]> WithTotals(IReadOnlyDictionary<int, double> moves, Table table)
+    {
+        var keys = new RowKeys(table);
+        var byKey = new Dictionary<UInt128, double>();
+        foreach (var (row, move) in moves)
+            byKey[keys.Of(row)] = move;
+        var parents = table.Stub.Select(StubParents.Of).ToList();
+        return moves.Keys.Select(row => Upwards(keys, table, parents, row).Where(byKey.ContainsKey).Select(key => byKey[key]).ToArray());
+    }
+
+    private static IEnumerable<UInt128> Upwards(RowKeys keys, Table table, List<int[]> parents, int row)
+    {
+        IEnumerable<UInt128> found = [keys.Of(row)];
+        for (var column = 0; column < parents.Count; column++)
+        {
+            var (at, above) = (column, StubParents.Upwards(parents[column], table.Stub[column].Codes[row]).ToList());
+            found = found.SelectMany(key => above.Select(code => keys.With(key, row, at, code)));
+        }
+        return found;
+    }
+
+    private static double[] SmallestOnEachLevel(IReadOnlyDictionary<int, double> moves, Table table)
+    {
+        var levelOf = Levels.LevelOf(table);
+        return [.. moves.GroupBy(pair => levelOf(pair.Key)).Select(level => level.Min(pair => pair.Value))];
+    }
+}

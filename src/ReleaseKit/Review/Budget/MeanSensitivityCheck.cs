@@ -1,0 +1,67 @@
+using ReleaseKit.Appraisal.Budget;
+using ReleaseKit.Releases;
+
+namespace ReleaseKit.Review.Budget;
+
+/// <summary>
+/// The declared sensitivity of means against what the folder itself says: a contribution that is clipped, over a denominator that is public, moves
+/// a mean by a known distance. A norm for means without a public denominator is not bounded by anything that was said.
+/// </summary>
+internal sealed class MeanSensitivityCheck : IReviewCheck
+{
+    // Numbers that are equal but for the last digits of the arithmetic.
+    private const double Slack = 1e-9;
+
+    public IEnumerable<Finding> Check(ReviewSubject subject) => subject is { Release: { } release, Noise: { } account }
+        ? subject.Spendings.Select(spending => CheckMechanism(spending, release, account)).OfType<Finding>()
+        : [];
+
+    private static Finding? CheckMechanism(MechanismSpending spending, Release release, NoiseAccount account)
+    {
+        var measures = spending.Cells.Measures.Select(at => (Table: release.Tables[at.Table], Measure: release.Tables[at.Table].Measures[at.Measure])).ToList();
+        if (measures.Find(pair => pair.Measure.Kind == MeasureKind.Mean) is { Table: { } table, Measure: { } mean } && LacksDenominator(spending.Mechanism))
+            return NoDenominator(spending.Mechanism, table, mean);
+        return measures.Select(pair => CheckMeasure(spending.Mechanism, pair.Table, pair.Measure, account)).FirstOrDefault(finding => finding is not null);
+    }
+
+    // A denominator that is there and wrong has been reported.
+    private static bool LacksDenominator(Mechanism mechanism) => mechanism is { DenominatorColumn: null, Sensitivity: { PerCell: null } and ({ L1: not null } or { L2: not null }) }
+        && !mechanism.KeyPlaces.ContainsKey("denominator");
+
+    private static Finding? CheckMeasure(Mechanism mechanism, Table table, Measure measure, NoiseAccount account)
+    {
+        if (MeanMoves.Of(table, measure, mechanism, account.Neighbouring) is not { } moves)
+            return null;
+        var needed = Needed(mechanism.Sensitivity, moves, account.Neighbouring).FirstOrDefault(norm => norm.Declared < norm.Least * (1 - Slack));
+        return needed is null ? null : TooSmall(mechanism, measure, moves, needed, account);
+    }
+
+    private static IEnumerable<Norm> Needed(Sensitivity sensitivity, MeanMoves moves, Neighbouring neighbouring)
+    {
+        // Contributions of either sign lie up to twice "perCell" apart.
+        if (sensitivity is { CellsPerUnit: not null, PerCell: { } most })
+            yield return new("perCell", most, sensitivity.Signed && neighbouring == Neighbouring.Replace ? moves.One / 2 : moves.One, moves.One);
+        if (sensitivity.L1 is { } sum)
+            yield return new("l1", sum, moves.Sum, moves.Sum);
+        if (sensitivity.L2 is { } length)
+            yield return new("l2", length, moves.Length, moves.Length);
+    }
+
+    private static Finding TooSmall(Mechanism mechanism, Measure measure, MeanMoves moves, Norm norm, NoiseAccount account) => new(
+        FindingLevel.Stop, "sensitivity-too-small", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
+        $"\"{mechanism.Id}\" declares \"{norm.Key}\": {BudgetText.Plain(norm.Declared)}, but {BudgetText.Relation(account.Neighbouring, account)} can move the means of column \"{measure.Column}\" by {BudgetText.Paste(norm.Move)}.\nThat follows from \"clipped\" {BudgetText.Plain(mechanism.Clipped!.From)} to {BudgetText.Plain(mechanism.Clipped.To)} and \"{mechanism.DenominatorColumn}\", at the smallest {BudgetText.Plain(moves.SmallestDenominator)}.",
+        "the budget page would promise more protection than there is.",
+        $"write \"{norm.Key}\": {BudgetText.Paste(norm.Least)} or more, or correct \"clipped\" or the denominators if they are not those that were used.");
+
+    private static Finding NoDenominator(Mechanism mechanism, Table table, Measure mean)
+    {
+        var column = table.SideColumns.FirstOrDefault(side => side.From == SideColumnOrigin.Public && mechanism.Parameters.Values.All(parameter => parameter.Column != side.Column))?.Column;
+        return new(
+            FindingLevel.Stop, "denominator-missing", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
+            $"\"{mechanism.Id}\" gives an {(mechanism.Sensitivity.L1 is null ? "l2" : "l1")} for the means of column \"{mean.Column}\" in table \"{table.Id}\" and does not say where their denominator is known from.",
+            "without a public denominator a mean is a noised sum over a noised count: both spend, and no number bounds what one unit moves.",
+            $"if the denominators are public, add \"denominator\": {{ \"public\": \"{column ?? "COLUMN"}\" }}{(column is null ? $" and declare the column in table \"{table.Id}\": \"columns\": {{ \"COLUMN\": {{ \"from\": \"public\" }} }}" : "")}; else publish the sum and the count, each with a mechanism of its own.");
+    }
+
+    private sealed record Norm(string Key, double Declared, double Least, double Move);
+}

@@ -1,0 +1,111 @@
+using ReleaseKit.Tests.Folders;
+using Xunit;
+
+namespace ReleaseKit.Tests.Review.Budget;
+
+/// <summary>A declared sensitivity of means that the folder's own clipping and public denominators disprove; the numbers are worked out by hand beside each.</summary>
+public sealed class MeanSensitivityTests
+{
+    private const string Count = "\"title\": \"Lamps lit\", \"unit\": \"lamp\", \"kind\": \"count\",";
+    private const string Mean = "\"title\": \"Mean hours lit\", \"unit\": \"hour\", \"kind\": \"mean\", \"decimals\": 2,";
+    private const string Replace = "\"neighbouring\": \"replace\"";
+
+    /// <summary>Means over 50, 200 and 400 lamps, and over 650 in all; each from a draw of its own.</summary>
+    private static TestFolder Folder(string sensitivity, string clipped = "\"from\": 0, \"to\": 20", string rest = "\"denominator\": { \"public\": \"lamps\" }, ", string all = "{ \"public\": \"List of lamps\" }") => new TestFolder()
+        .With("tables/lamps.csv", "street,lit,broken,lamps\nAll,6.00,9,650\nKiln Row,3.10,4,50\nQuay,2.00,5,200\nWeir Lane,9.00,-1,400\n")
+        .Edit("release.json", Count, Mean)
+        .Edit("release.json", "\"units\": {", "\"units\": { \"hour\": { \"en\": { \"one\": \"hour\", \"other\": \"hours\" } }, ")
+        .Edit("release.json", "\"figures\": [\n", "\"columns\": { \"lamps\": { \"from\": \"public\" } }, \"figures\": [\n")
+        .Edit("release.json", "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }", $"{{ \"where\": {{ \"street\": \"All\" }},{all[1..^1]}}}")
+        .WithLit($$"""{ "id": "lamps-lit", "law": "laplace", "scale": 4.0, {{rest}}"clipped": { {{clipped}} }, "sensitivity": { {{sensitivity}} } }""");
+
+    // One cell: 20 ÷ 50 = 0.4; of either sign −30 to 20, 30 ÷ 50 = 0.6; 5 to 20, 20 ÷ 50 = 0.4.
+    [Theory]
+    [InlineData("\"l1\": 0.39", "\"from\": 0, \"to\": 20", "\"l1\": 0.4 or more")]
+    [InlineData("\"l2\": 0.05", "\"from\": 0, \"to\": 20", "\"l2\": 0.4 or more")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.1", "\"from\": 0, \"to\": 20", "\"perCell\": 0.4 or more")]
+    [InlineData("\"l1\": 0.4", "\"from\": -30, \"to\": 20", "\"l1\": 0.6 or more")]
+    [InlineData("\"l1\": 0.3", "\"from\": 5, \"to\": 20", "\"l1\": 0.4 or more")]
+    [InlineData("\"l1\": 0.13", "\"from\": 0, \"to\": 6.666666666", "\"l1\": 0.1333334 or more")]
+    public void Norm_below_what_one_cell_moves_is_a_stop_with_the_number(string sensitivity, string clipped, string write)
+    {
+        using var folder = Folder(sensitivity, clipped);
+        var text = folder.Text("sensitivity-too-small");
+        Assert.Contains("Stop mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains("one keeper more or less can move the means of column \"lit\" by", text, StringComparison.Ordinal);
+        Assert.Contains("\"lamps\", at the smallest 50.", text, StringComparison.Ordinal);
+        Assert.Contains($"Do: write {write}", text, StringComparison.Ordinal);
+    }
+
+    // Replaced: 5 to 20, 15 ÷ 50 = 0.3; −30 to 20, 50 ÷ 50 = 1, of either sign ±0.5.
+    [Theory]
+    [InlineData("\"l1\": 0.29", "\"from\": 5, \"to\": 20", "\"l1\": 0.3 or more")]
+    [InlineData("\"l1\": 0.6", "\"from\": -30, \"to\": 20", "\"l1\": 1 or more")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.4, \"signed\": true", "\"from\": -30, \"to\": 20", "\"perCell\": 0.5 or more")]
+    public void Unit_in_place_of_another_moves_a_mean_from_end_to_end(string sensitivity, string clipped, string write)
+    {
+        using var folder = Folder(sensitivity, clipped).Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace);
+        Assert.Contains($"Do: write {write}", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("\"l1\": 0.4")]
+    [InlineData("\"l2\": 0.4")]
+    [InlineData("\"l1\": 0.5")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.4")]
+    public void Norm_that_holds_passes(string sensitivity)
+    {
+        using var folder = Folder(sensitivity);
+        Assert.Empty(folder.Review().Select(finding => $"{finding.Slug} {finding.Found}"));
+    }
+
+    // The total has a draw of the same mechanism: 20 ÷ 50 + 20 ÷ 650 = 0.4307693 rounded up, and √(0.4² + 0.0307692…²) = 0.4011817 rounded up.
+    [Theory]
+    [InlineData("\"l1\": 0.43, \"l1Levels\": 2", "\"l1\": 0.4307693 or more")]
+    [InlineData("\"l2\": 0.401, \"l1Levels\": 2", "\"l2\": 0.4011817 or more")]
+    public void Total_of_the_same_mechanism_is_moved_too(string sensitivity, string write)
+    {
+        using var folder = Folder(sensitivity, all: "{ \"mechanism\": \"lamps-lit\" }");
+        Assert.Contains($"Do: write {write}", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
+
+    // Two years, of one street each: 20 ÷ 200 + 20 ÷ 400 = 0.15, and √(0.1² + 0.05²) = 0.1118034 rounded up. It need not be one unit that is in the smallest cells.
+    [Theory]
+    [InlineData("\"l1\": 0.14, \"l1Levels\": 2", "\"l1\": 0.15 or more")]
+    [InlineData("\"l2\": 0.11, \"l1Levels\": 2", "\"l2\": 0.1118034 or more")]
+    public void Unit_is_moved_in_every_period(string sensitivity, string write)
+    {
+        using var folder = Periods(sensitivity);
+        Assert.Contains($"Do: write {write}", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Norm_over_the_smallest_moves_of_every_period_passes()
+    {
+        using var folder = Periods("\"l1\": 0.15, \"l1Levels\": 2");
+        folder.HasNo("sensitivity-too-small");
+    }
+
+    [Theory]
+    [InlineData("\"l1\": 0.4", "gives an l1 for the means of column \"lit\" in table \"lamps\"")]
+    [InlineData("\"l2\": 0.4", "gives an l2 for the means")]
+    public void Norm_of_a_mean_without_a_denominator_is_a_stop_with_what_to_paste(string sensitivity, string found)
+    {
+        using var folder = Folder(sensitivity, rest: "");
+        var text = folder.Text("denominator-missing");
+        Assert.Contains(found, text, StringComparison.Ordinal);
+        Assert.Contains("Do: if the denominators are public, add \"denominator\": { \"public\": \"lamps\" };", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Mean_with_a_denominator_that_is_wrong_is_not_said_to_have_none()
+    {
+        using var folder = Folder("\"l1\": 0.4", rest: "\"denominator\": { }, ");
+        folder.HasNo("denominator-missing");
+    }
+
+    private static TestFolder Periods(string sensitivity) => Folder(sensitivity)
+        .With("tables/lamps.csv", "street,lit,broken,lamps\n2031,2.00,5,200\n2032,9.00,-1,400\n")
+        .Edit("release.json", "\"title\": \"Street\", \"all\": \"All\"", "\"title\": \"Year\", \"period\": true")
+        .Edit("release.json", "{ \"where\": { \"street\": \"All\" }, \"public\": \"List of lamps\" }, ", "");
+}
