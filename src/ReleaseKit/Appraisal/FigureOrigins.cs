@@ -42,18 +42,11 @@ internal sealed class FigureOrigins(Release release)
     private static List<AfterStep> Steps(Mechanism mechanism, Measure measure, byte decimals, NoiseLaw law)
     {
         List<AfterStep> steps = [.. mechanism.Afterwards];
-        if (law is ContinuousLaw && !steps.OfType<AfterStep.RoundTo>().Any(step => IsMultiple(step.Unit, decimals, measure.Multiplier)))
-            steps.Add(new AfterStep.RoundTo(measure.Multiplier / PublishedValue.PowerOfTen(decimals)));
+        if (law is ContinuousLaw && FileRounding.Step(mechanism, measure, decimals) is { } unit)
+            steps.Add(new AfterStep.RoundTo(unit));
         if (measure.PublishedFrom is { } from)
             steps.Add(new AfterStep.PublishedFrom(from));
         return steps;
-    }
-
-    /// <summary>A value rounded to such a unit is written in so many decimals without loss.</summary>
-    private static bool IsMultiple(double unit, byte decimals, double multiplier)
-    {
-        var last = (decimal)unit / (decimal)multiplier * (decimal)PublishedValue.PowerOfTen(decimals);
-        return decimal.Floor(last) == last;
     }
 
     private DistinctError? Shared(NoiseLaw law, IReadOnlyList<AfterStep> steps) =>

@@ -81,7 +81,7 @@ public sealed class BudgetPageTests
 
         var tables = page.QuerySelectorAll(".odds");
         // e^4.5 = 90.017…, rounded up to three digits.
-        Assert.Contains("to at most 90.1 times what they were", Text(page), StringComparison.Ordinal);
+        Assert.Contains("to at most 90.1 times what they were. It can lower them to no less than 1 part in 90.1 of what they were.", Text(page), StringComparison.Ordinal);
         Assert.Contains("at most 1 in 100,000,000 of all outcomes", Text(page), StringComparison.Ordinal);
         foreach (var (belief, row) in meaning.Beliefs.Zip(tables[0].QuerySelectorAll("tbody tr")))
         {
@@ -138,7 +138,7 @@ public sealed class BudgetPageTests
     {
         var rows = Read(new BudgetSample()).QuerySelectorAll(".totals tbody tr").Select(row => row.Children.Select(Unlabelled).ToList()).ToList();
 
-        Assert.Equal(["Authorised", "Declared by the Office", "Worked out again here", "The same rho, converted", "The same rho, converted", "Smallest upper bound that this program can prove", "Largest lower bound of any one run of noise, rounded down (runs cannot be added here)"], rows.Select(row => row[0]));
+        Assert.Equal(["Authorised", "Declared by the Office", "Worked out again here", "The same rho, converted", "The same rho, converted", "Smallest upper bound that this program can prove", "Largest lower bound of any one run of noise, before any step after it, rounded down (runs cannot be added here)"], rows.Select(row => row[0]));
         Assert.Equal(["6", "0.000000001", "none"], rows[0][1..4]);
         Assert.Equal(["none", "none", "0.2301"], rows[1][1..4]);
         Assert.Equal(["4.235", "0.000000001", "0.2242"], rows[2][1..4]);
@@ -171,6 +171,10 @@ public sealed class BudgetPageTests
         foreach (var words in new[] { "Households counted in question 1", "Discrete Gaussian noise, sigma 9.5.", "One household counts in at most 1 cell, by at most 1.", "2 published figures carry it. 1 more carries it and is hidden.", "0.0311", "13.9 in 100" })
             Assert.Contains(words, first, StringComparison.Ordinal);
     }
+
+    [Fact]
+    public void Least_loss_is_said_of_the_noise_alone_where_nothing_follows_it() =>
+        Assert.Contains("No less than rho 0.03109 is lost in the worst case.", Read(new BudgetSample()).QuerySelectorAll(".mechanisms li")[0].TextContent, StringComparison.Ordinal);
 
     [Fact]
     public void What_is_only_declared_says_so_and_nothing_else_does()

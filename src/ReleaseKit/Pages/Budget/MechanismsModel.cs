@@ -12,6 +12,7 @@ internal static class MechanismsModel
     private static ScriptObject RowOf(MechanismAccount account, BudgetWords words)
     {
         var mechanism = account.Mechanism;
+        var said = new MechanismWords(mechanism, words);
         return new ScriptObject
         {
             ["id"] = mechanism.Id,
@@ -20,14 +21,15 @@ internal static class MechanismsModel
             ["use"] = mechanism.Use == MechanismUse.Figures ? null : words.Say($"budget.use.{mechanism.Use}"),
             ["cells"] = Cells(account.Published, "budget.cells", words),
             ["hidden"] = account.Hidden == 0 ? null : Cells(account.Hidden, "budget.cells.hidden", words),
-            ["law"] = MechanismWords.Law(mechanism, words),
-            ["sensitivity"] = MechanismWords.Sensitivity(mechanism, words),
-            ["after"] = MechanismWords.Afterwards(mechanism, words),
-            ["clipped"] = mechanism.Clipped is { } clipped ? Clipped(clipped, words) : null,
+            ["law"] = said.Law(),
+            ["sensitivity"] = said.Sensitivity(),
+            ["after"] = said.Afterwards(),
+            ["clipped"] = said.Clipped(),
             ["declared"] = account.Declared is { } declared ? TotalsModel.InWords(declared, words, TotalsModel.AsWritten) : words.Say("budget.not-declared"),
             ["recomputed"] = words.Amount(account.Amount),
             ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.Delta(delta)))) : null,
-            ["lower"] = TotalsModel.InWords(account.Lower, words, LossPrint.DownTo),
+            ["lower"] = words.Say(
+                said.HasSteps ? "budget.mechanisms.lower.before-steps" : "budget.mechanisms.lower", ("lower", TotalsModel.InWords(account.Lower, words, LossPrint.DownTo))),
             ["rule"] = words.Rule(account.Recomputed.Rule),
             ["source"] = account.Recomputed.Rule.Source,
             ["share"] = words.Say("budget.in-100", ("number", words.Language.Number(PrintedShares.Of(account, words.Statement)))),
@@ -37,8 +39,4 @@ internal static class MechanismsModel
 
     private static string Cells(long count, string key, BudgetWords words) =>
         words.Say(count == 1 ? $"{key}.one" : $"{key}.other", ("count", words.Language.Number(new PublishedValue(count, 0))));
-
-    private static string Clipped(ClippedTo clipped, BudgetWords words) => words.Say(
-        "budget.clipped",
-        ("from", words.Language.NumberInProse(LossPrint.AsWritten(clipped.From))), ("to", words.Language.NumberInProse(LossPrint.AsWritten(clipped.To))));
 }

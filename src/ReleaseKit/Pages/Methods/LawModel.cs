@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using ReleaseKit.Appraisal;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 using Scriban.Runtime;
@@ -47,18 +48,14 @@ internal static class LawModel
     };
 
     private static string Margin(SiteContext context, LawName law, string key) =>
-        context.Language.Text(key + ".margin") + (IsContinuous(law) ? " " + context.Language.Text("methods.margin.rounded") : "");
+        context.Language.Text(key + ".margin") + (FileRounding.IsContinuous(law) ? " " + context.Language.Text("methods.margin.rounded") : "");
 
-    /// <summary>The declared steps; continuous noise is at least rounded to the digits printed.</summary>
+    /// <summary>The declared steps; continuous noise is at least rounded to the decimals that its figures are written with.</summary>
     private static IEnumerable<string> Afterwards(SiteContext context, Mechanism mechanism)
     {
         var steps = mechanism.Afterwards.Select(step => StepOf(context, step));
-        return IsContinuous(mechanism.Law) && !mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any()
-            ? steps.Append(context.Language.Text("methods.after.printed"))
-            : steps;
+        return new MechanismNumbers(context, mechanism).FileRounding is { } unit ? steps.Append(Named(context, "methods.after.written", unit)) : steps;
     }
-
-    private static bool IsContinuous(LawName law) => law is LawName.Laplace or LawName.Gaussian or LawName.Uniform or LawName.Staircase;
 
     private static IEnumerable<string> Parameters(SiteContext context, Mechanism mechanism)
     {
