@@ -50,8 +50,8 @@ internal sealed class MechanismNumbers
         }
     }
 
-    /// <summary>Whether some figures with this noise are published only from a level up.</summary>
-    public bool HasThreshold => covered.Any(rows => rows.Measure.PublishedFrom is not null);
+    /// <summary>The levels from which figures with this noise are published, in their unit; none where all are.</summary>
+    public IEnumerable<double> Thresholds => covered.Select(rows => rows.Measure.PublishedFrom).OfType<double>().Distinct();
 
     private string WithUnit(PublishedValue number) => measure is null ? context.Language.NumberInProse(number) : context.Language.WithUnit(number, measure);
 

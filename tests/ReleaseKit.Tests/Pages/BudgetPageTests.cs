@@ -182,7 +182,7 @@ public sealed class BudgetPageTests
         var items = Read(new BudgetSample()).QuerySelectorAll(".mechanisms li").ToList();
 
         Assert.Equal([2], items.Select((item, index) => (Text: item.TextContent, index))
-            .Where(item => item.Text.Contains("The office states this; it could not be worked out again here.", StringComparison.Ordinal)).Select(item => item.index));
+            .Where(item => item.Text.Contains("The Office states this; it could not be worked out again here.", StringComparison.Ordinal)).Select(item => item.index));
     }
 
     [Fact]
@@ -212,6 +212,13 @@ public sealed class BudgetPageTests
         // 10: one law of the sample is outside the program's list.
         Assert.Equal([10, 13, 17, 18], items.Select((text, index) => (text, index)).Where(item => item.text == "not stated").Select(item => item.index + 1));
     }
+
+    [Theory]
+    [InlineData(2, "Population under the title of every table, sources below it, the period on the first page.")]
+    [InlineData(15, "A margin beside each figure that has one; range and attained coverage in the unfolded figure and in the downloads; formulas on the page of methods.")]
+    [InlineData(16, "In the reading of each figure that has a range.")]
+    public void Disclosure_says_where_it_stands_and_no_more(int number, string where) =>
+        Assert.Contains(where, Read(new BudgetSample()).QuerySelectorAll(".disclosures li")[number - 1].TextContent, StringComparison.Ordinal);
 
     [Theory]
     [InlineData(Neighbouring.AddOrRemove)]

@@ -93,6 +93,16 @@ public sealed class MechanismWordsTests
         Assert.True(Say(whole, bare).HasSteps);
     }
 
+    [Fact]
+    public void Level_from_which_figures_are_published_is_a_step_on_both_pages()
+    {
+        var bare = SmallRelease.DiscreteGaussian(9.5);
+        var context = PagesRelease.ContextOf(new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count) with { PublishedFrom = 30 }, bare, "45").Build());
+
+        Assert.Equal("After the noise: published only from 30 up.", new MechanismWords(bare, new BudgetWords(context)).Afterwards());
+        Assert.Equal("published from 30 up", MethodsRow(context, bare));
+    }
+
     private static string MethodsRow(ReleaseKit.Pages.SiteContext context, Mechanism mechanism)
     {
         var rows = (Scriban.Runtime.ScriptArray)LawModel.Of(context, mechanism.Law, [mechanism])["mechanisms"]!;

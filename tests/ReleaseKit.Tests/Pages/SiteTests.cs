@@ -38,6 +38,7 @@ public sealed class SiteTests : IDisposable
         Assert.Contains("at a coverage of 50 in 100", page, StringComparison.Ordinal);
         Assert.Contains("at a coverage of 99 in 100", page, StringComparison.Ordinal);
         Assert.Contains("A headline with its figure, as picture (PNG)", page, StringComparison.Ordinal);
+        Assert.Contains("The checksum (SHA-256) of each other file in this folder; pages and pictures have none", page, StringComparison.Ordinal);
     }
 
     [Fact]

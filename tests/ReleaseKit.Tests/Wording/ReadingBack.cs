@@ -74,7 +74,7 @@ internal static class ReadingBack
         Sentence("Its margin is (as large as|larger than) the figure.", IsThatLarge),
         Sentence($@"After the noise it was rounded to a multiple of {N}\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1])))),
         Sentence($@"Of its {N} parts, {N} (?:is|are) not published and not in this sum\.", LeavesOut),
-        Sentence("The office marks it as provisional.", (figure, _) => figure.Status == 'P'),
+        Sentence("The Office marks it as provisional.", (figure, _) => figure.Status == 'P'),
         Sentence("This figure is (close|rough|weak): its margin is (about |less than )?([0-9]+) in 100 of it.", Ratio),
         Sentence("This figure is weak: its margin is (as large as|larger than) the figure.", (figure, g) => Is(figure, Reliability.Weak) && IsThatLarge(figure, g)),
         Sentence("This figure is weak: it is not above zero.", (figure, _) => Is(figure, Reliability.Weak) && figure.Value.ToDouble() <= 0),

@@ -26,6 +26,7 @@ internal sealed class MechanismWords(Mechanism mechanism, BudgetWords words)
             .. mechanism.Afterwards.Select(After),
             .. mechanism.Adjusted ? [words.Say("budget.after.adjusted")] : Array.Empty<string>(),
             .. numbers.FileRounding is { } unit ? [words.Say("budget.after.written", ("unit", unit))] : Array.Empty<string>(),
+            .. numbers.Thresholds.Select(from => After(new AfterStep.PublishedFrom(from))),
         ];
         return steps.Length == 0 ? null : words.Say("budget.after", ("steps", words.Language.List(steps)));
     }
@@ -35,7 +36,7 @@ internal sealed class MechanismWords(Mechanism mechanism, BudgetWords words)
         : null;
 
     /// <summary>Whether what is published is made from the noised value by further steps: then a loss proven for the noise alone is one before them.</summary>
-    public bool HasSteps => mechanism.Afterwards.Count > 0 || mechanism.Adjusted || numbers.HasThreshold || numbers.FileRounding is not null;
+    public bool HasSteps => mechanism.Afterwards.Count > 0 || mechanism.Adjusted || numbers.Thresholds.Any() || numbers.FileRounding is not null;
 
     private string Parameter(string key, NumberOrColumn value)
     {

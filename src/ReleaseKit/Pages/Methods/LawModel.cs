@@ -53,8 +53,13 @@ internal static class LawModel
     /// <summary>The declared steps; continuous noise is at least rounded to the decimals that its figures are written with.</summary>
     private static IEnumerable<string> Afterwards(SiteContext context, Mechanism mechanism)
     {
-        var steps = mechanism.Afterwards.Select(step => StepOf(context, step));
-        return new MechanismNumbers(context, mechanism).FileRounding is { } unit ? steps.Append(Named(context, "methods.after.written", unit)) : steps;
+        var numbers = new MechanismNumbers(context, mechanism);
+        return
+        [
+            .. mechanism.Afterwards.Select(step => StepOf(context, step)),
+            .. numbers.FileRounding is { } unit ? [Named(context, "methods.after.written", unit)] : Array.Empty<string>(),
+            .. numbers.Thresholds.Select(from => StepOf(context, new AfterStep.PublishedFrom(from))),
+        ];
     }
 
     private static IEnumerable<string> Parameters(SiteContext context, Mechanism mechanism)
