@@ -74,6 +74,7 @@ public sealed partial class BrokenFolderTests
         var stops = Stop().Matches(call.Error).Select(match => match.Value).ToList();
         Assert.True(stops.Any(stop => stop.Contains($"\n{named}", StringComparison.Ordinal)), $"{fault}: no stop names {named}\n{call.Error}");
         Assert.All(stops, stop => Assert.Contains("Do: ", stop));
+        Assert.DoesNotMatch("(Why|Do): [A-Z]", call.Error);
         Assert.DoesNotContain("   at ReleaseKit", call.Error);
         Assert.Equal("", call.Output);
         Assert.False(Directory.Exists(folder.In("site")), $"{fault}: something was written");

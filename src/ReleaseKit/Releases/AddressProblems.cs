@@ -6,18 +6,18 @@ internal static class AddressProblems
     private const int Listed = 3;
 
     public static AddressException NotAnAddress(string text) => new(
-        $"\"{text}\" is no figure address", "Write table/figure?column=value, for example arrears/in_arrears?ward=All.");
+        $"\"{text}\" is no figure address", "write table/figure?column=value, for example arrears/in_arrears?ward=All.");
 
     public static AddressException UnknownName(string text, IEnumerable<string> names) => new(
         $"\"{text}\" is neither an address nor a short name", Nearest.Of(text, names) is { } near
-            ? $"Write {near}, or a full address: table/figure?column=value."
-            : "Write a full address, table/figure?column=value, or add the name to \"short\" in release.json.");
+            ? $"write {near}, or a full address: table/figure?column=value."
+            : "write a full address, table/figure?column=value, or add the name to \"short\" in release.json.");
 
     public static AddressException NotAPair(string pair, string whole) => new(
-        $"\"{pair}\" in \"{whole}\" is no column=value", "Write column=value, joined by &: ?district=Aldermoor&ward=All.");
+        $"\"{pair}\" in \"{whole}\" is no column=value", "write column=value, joined by &: ?district=Aldermoor&ward=All.");
 
     public static AddressException BadPercent(string part, string whole) => new(
-        $"\"{part}\" in \"{whole}\" is not properly percent-encoded", "Write % as %25, # as %23, & as %26, a space as %20.");
+        $"\"{part}\" in \"{whole}\" is not properly percent-encoded", "write % as %25, # as %23, & as %26, a space as %20.");
 
     public static AddressException UnknownTable(FigureAddress address, IReadOnlyList<Table> tables) => new(
         $"{Quoted(address)} names a table \"{address.Table}\" that is not in the release", Suggest(address.Table, tables.Select(table => table.Id)));
@@ -33,11 +33,11 @@ internal static class AddressProblems
         $"{Quoted(address)}: column \"{column.Column}\" has no value \"{value}\"", Suggest(value, column.Labels.Select(label => label.Value)));
 
     public static AddressException NamedTwice(FigureAddress address, string column) => new(
-        $"{Quoted(address)} names the column \"{column}\" twice", "Name each column once.");
+        $"{Quoted(address)} names the column \"{column}\" twice", "name each column once.");
 
     public static AddressException NothingMatches(FigureAddress address, Table table) => new(
         $"{Quoted(address)} matches no row of \"{table.Id}\"",
-        "Check the values against the CSV; rows for all are left out of a column that the address does not name.");
+        "check the values against the CSV; rows for all are left out of a column that the address does not name.");
 
     public static AddressException Several(FigureAddress address, FigureSelection selection, Release release) =>
         Several(address, selection, release.Tables);
@@ -48,7 +48,7 @@ internal static class AddressProblems
         var first = selection.Rows.Take(Listed).Select(row => FigureAddress.Canonical(table, table.Measures[selection.Measure], row));
         return new AddressException(
             $"{Quoted(address)} means {selection.Rows.Count} figures, but one is needed here",
-            $"Name every stub column. The first are: {string.Join(", ", first)}.");
+            $"name every stub column. The first are: {string.Join(", ", first)}.");
     }
 
     private static string Quoted(FigureAddress address) => address.Written is { } written ? $"\"{written}\"" : address.ToString();
@@ -57,7 +57,7 @@ internal static class AddressProblems
     {
         var names = known.ToList();
         if (Nearest.Of(given, names) is { } near)
-            return $"Write {near}.";
-        return names.Count == 0 ? "There is none yet." : $"Use one of these: {string.Join(", ", names.Take(Listed))}{(names.Count > Listed ? ", …" : "")}.";
+            return $"write {near}.";
+        return names.Count == 0 ? "there is none yet." : $"use one of these: {string.Join(", ", names.Take(Listed))}{(names.Count > Listed ? ", …" : "")}.";
     }
 }

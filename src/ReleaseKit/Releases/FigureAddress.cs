@@ -44,7 +44,10 @@ public sealed record FigureAddress(string Table, string Figure, IReadOnlyList<St
     public FigureSelection ResolveOne(Release release)
     {
         var selection = Resolve(release);
-        return selection.Rows.Count == 1 ? selection : throw AddressProblems.Several(this, selection, release);
+        // Where every stub column is named, several rows are one row that stands there again: a finding of its own.
+        return selection.Rows.Count == 1 || Query.Count == release.Tables[selection.Table].Stub.Count
+            ? selection with { Rows = [selection.Rows[0]] }
+            : throw AddressProblems.Several(this, selection, release);
     }
 
     /// <summary>The canonical address of one figure: all stub columns named, in stub order.</summary>

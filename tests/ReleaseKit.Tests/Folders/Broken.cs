@@ -50,6 +50,7 @@ internal sealed class Broken : IDisposable
         Assert.Contains(remedy, found[0].Do, StringComparison.Ordinal);
         Assert.True(findings.Count(finding => finding.Level == FindingLevel.Stop) == (level == FindingLevel.Stop ? 1 : 0), $"Other stops:\n{all}");
         Assert.DoesNotContain("Exception", all, StringComparison.Ordinal);
+        Assert.All(findings, finding => Assert.False(char.IsUpper(finding.Why[0]) || char.IsUpper(finding.Do[0]), $"\"Why\" and \"Do\" go on in small letters:\n{all}"));
     }
 
     /// <summary>Line and column, from 1, of the first place where a text stands in a file.</summary>

@@ -49,16 +49,16 @@ public sealed class FigureAddressTests
     {
         var problem = Assert.Throws<AddressException>(() => FigureAddress.Parse("arrears/in_arrears?ward=All").ResolveOne(Example.Value));
         Assert.Equal(
-            "Name every stub column. The first are: arrears/in_arrears?district=Aldermoor&ward=All, arrears/in_arrears?district=Brackwater&ward=All, "
+            "name every stub column. The first are: arrears/in_arrears?district=Aldermoor&ward=All, arrears/in_arrears?district=Brackwater&ward=All, "
             + "arrears/in_arrears?district=Cindry&ward=All.", problem.Do);
     }
 
     [Theory]
-    [InlineData("arears/in_arrears", "Write arrears.")]
-    [InlineData("arrears/in_arears", "Write in_arrears.")]
-    [InlineData("arrears/in_arrears?wrd=All", "Write ward.")]
-    [InlineData("arrears/in_arrears?district=Cindri", "Write Cindry.")]
-    [InlineData("arrears/in_arrears?ward=All&ward=All", "Name each column once.")]
+    [InlineData("arears/in_arrears", "write arrears.")]
+    [InlineData("arrears/in_arears", "write in_arrears.")]
+    [InlineData("arrears/in_arrears?wrd=All", "write ward.")]
+    [InlineData("arrears/in_arrears?district=Cindri", "write Cindry.")]
+    [InlineData("arrears/in_arrears?ward=All&ward=All", "name each column once.")]
     public void What_is_misspelt_is_told_the_nearest(string address, string remedy) =>
         Assert.Equal(remedy, Assert.Throws<AddressException>(() => FigureAddress.Parse(address).Resolve(Example.Value)).Do);
 

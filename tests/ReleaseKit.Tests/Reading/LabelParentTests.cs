@@ -21,7 +21,8 @@ public sealed class LabelParentTests
     [Fact]
     public void Circle_is_reported_once_with_all_who_are_in_it()
     {
-        using var folder = new TestFolder().With(Labels, "column,value,parent\nstreet,Kiln Row,Quay\nstreet,Quay,Weir Lane\nstreet,Weir Lane,All\nstreet,All,Quay\n");
+        using var folder = new TestFolder().With(Labels, "column,value,parent\nstreet,Kiln Row,Quay\nstreet,Quay,Weir Lane\nstreet,Weir Lane,All\nstreet,All,Quay\n")
+            .Edit("tables/lamps.csv", "All,60,", "All,29,");
         var found = folder.OnlyStop("parent-cycle");
         Assert.Contains("the first: \"Quay\", \"Weir Lane\", \"All\".", found.Found, StringComparison.Ordinal);
         Assert.Equal("labels.csv:3:13", found.At.ToString());

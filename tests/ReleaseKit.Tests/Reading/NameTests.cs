@@ -31,11 +31,11 @@ public sealed class NameTests
         folder => folder.Edit(Release, "\"id\": \"by-street\"", "\"id\": \"Str\u00E4\u00DFen 1\"").Edit("narrative/summary.md", "(chart:by-street)", "(<chart:Str\u00E4\u00DFen 1>)"));
 
     [Fact]
-    public void Headline_that_leads_nowhere_is_told_the_nearest() => Broken.Stops("unknown-figure", Release, "\"lamps/lit?street=Al\"", "Write All.",
+    public void Headline_that_leads_nowhere_is_told_the_nearest() => Broken.Stops("unknown-figure", Release, "\"lamps/lit?street=Al\"", "write All.",
         folder => folder.Edit(Release, "\"lamps/lit?street=All\"", "\"lamps/lit?street=Al\""));
 
     [Fact]
-    public void Note_for_rows_that_are_not_there_is_a_stop() => Broken.Stops("unknown-figure", Release, "\"?street=Quai\"", "Write Quay.",
+    public void Note_for_rows_that_are_not_there_is_a_stop() => Broken.Stops("unknown-figure", Release, "\"?street=Quai\"", "write Quay.",
         folder => folder.Edit(Release, "\"figures\": [\n", "\"notes\": [ { \"at\": \"?street=Quai\", \"text\": \"New.\" } ], \"figures\": [\n"));
 
     [Fact]

@@ -65,7 +65,8 @@ public sealed class TableReadingTests
     [Fact]
     public void Labels_are_put_in_order_and_named()
     {
-        using var folder = new TestFolder().With("labels.csv", "column,value,order,parent,name_en\nstreet,Weir Lane,1,,The Lane by the Weir\nstreet,Quay,2,Weir Lane,\n");
+        using var folder = new TestFolder().With("labels.csv", "column,value,order,parent,name_en\nstreet,Weir Lane,1,,The Lane by the Weir\nstreet,Quay,2,Weir Lane,\n")
+            .Edit(Csv, "All,60,", "All,40,");
         var stub = Table(folder).Stub[0];
         Assert.Equal(["The Lane by the Weir", "Quay", "All", "Kiln Row"], stub.Labels.Select(label => label.In("en")));
         Assert.Equal(["All", "Kiln Row", "Quay", "Weir Lane"], Enumerable.Range(0, 4).Select(row => stub.LabelOf(row).Value));

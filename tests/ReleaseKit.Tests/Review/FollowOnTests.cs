@@ -49,6 +49,26 @@ public sealed class FollowOnTests
         Assert.Equal(found, folder.OnlyStop("unknown-figure").Found);
     }
 
+    [Theory]
+    [InlineData("All,60,9\n")]
+    [InlineData("Kiln Row,0,4\n")]
+    [InlineData("Quay,21,5\nQuay,22,5\n", 2)]
+    public void Row_that_stands_there_twice_is_no_second_figure_and_no_part_of_a_sum(string rows, int doubled = 1)
+    {
+        using var broken = new Broken(folder => folder.Edit("tables/lamps.csv", "Weir Lane,9,-1\n", "Weir Lane,9,-1\n" + rows)
+            .With("narrative/summary.md", TestFolder.Prose + "\n[value](<figure:lamps/lit?street=Kiln Row>), [value](figure:lamps/lit?street=Quay)\n"));
+        var stops = broken.Review().Where(finding => finding.Level == FindingLevel.Stop).Select(finding => finding.Slug).ToList();
+        Assert.Equal(Enumerable.Repeat("doubled-row", doubled), stops);
+    }
+
+    [Fact]
+    public void Address_of_several_figures_is_still_told_where_a_row_stands_there_twice()
+    {
+        using var broken = new Broken(folder => folder.Edit("tables/lamps.csv", "Weir Lane,9,-1\n", "Weir Lane,9,-1\nQuay,20,5\n")
+            .With("narrative/summary.md", TestFolder.Prose + "\n[value](figure:lamps/lit)\n"));
+        Assert.Equal(["prose-citation", "doubled-row"], broken.Review().Where(finding => finding.Level == FindingLevel.Stop).Select(finding => finding.Slug));
+    }
+
     [Fact]
     public void Headline_that_stands_there_already_is_a_caution() => Broken.Cautions(
         "headline-twice", Release, "\"total\", \"title\"", "name another figure",

@@ -10,7 +10,7 @@ public sealed class ProseCheckTests
     private const string Citation = "[value and margin](figure:lamps/lit?street=All)";
 
     [Fact]
-    public void Unknown_figure_is_told_the_nearest() => Broken.Stops("prose-citation", Prose, "[value and margin]", "Write lit.",
+    public void Unknown_figure_is_told_the_nearest() => Broken.Stops("prose-citation", Prose, "[value and margin]", "write lit.",
         folder => folder.Edit(Prose, "lamps/lit", "lamps/litt"));
 
     [Fact]

@@ -5,7 +5,7 @@ namespace ReleaseKit.Reading.Tables;
 
 /// <summary>
 /// A "sumOver" total is, digit for digit, the sum of its parts' published values, and its parts are draws whose sum has a law that is worked out:
-/// lattice laws of one grid without after-steps.
+/// lattice laws of one grid without after-steps. The parts of "all" are the values without a parent, those of another value are the ones that name it.
 /// </summary>
 internal static class SumChecks
 {
@@ -19,17 +19,19 @@ internal static class SumChecks
     private static void CheckOver(ReadTable read, int measure, int column, FindingLog log)
     {
         var figure = read.Table.Measures[measure];
+        var parents = StubParents.Of(read.Table.Stub[column]);
         foreach (var group in new RowGroups(read.Table).GroupsOver(column))
             foreach (var total in group)
                 if (figure.RuleAt(total) is NoiseRule.SumOver { StubColumn: var over } && over == column)
-                    CheckTotal(read, measure, column, total, group, log);
+                    CheckTotal(read, measure, column, total, parents, group, log);
     }
 
-    private static void CheckTotal(ReadTable read, int measure, int column, int total, ArraySegment<int> group, FindingLog log)
+    private static void CheckTotal(ReadTable read, int measure, int column, int total, int[] parents, ArraySegment<int> group, FindingLog log)
     {
         var stub = read.Table.Stub[column];
-        var parts = group.Where(row => row != total && !stub.IsAll(row)).ToList();
-        if (!stub.IsAll(total))
+        // A row that stands there twice has been reported; it is one part.
+        var parts = group.Where(row => parents[stub.Codes[row]] == stub.Codes[total]).DistinctBy(row => stub.Codes[row]).ToList();
+        if (!stub.IsAll(total) && !parents.Contains(stub.Codes[total]))
             log.Add(TotalProblems.NotATotal(read.PlaceOf(total, measure), read.Address(measure, total), stub.Column, FindingOwner.Noise));
         else if (parts.Count == 0)
             log.Add(TotalProblems.NoParts(read.PlaceOf(total, measure), read.Address(measure, total), stub.Column, FindingOwner.Noise));

@@ -22,8 +22,8 @@ internal static class TotalProblems
     public static Finding NotATotal(Place at, string address, string column, FindingOwner owner) => new(
         FindingLevel.Stop, "sum-not-a-total", owner, at,
         $"{address} has the rule \"sumOver\" \"{column}\" but is no total there.",
-        "only a row whose heading in that column is the one for all can be the sum of the others.",
-        $"add \"where\": {{ \"{column}\": \"…\" }} with the heading of totals to this rule, or give \"all\" to the stub column.")
+        "only a row whose heading in that column is the one for all, or the \"parent\" of others in labels.csv, is the sum of other rows.",
+        $"add \"where\": {{ \"{column}\": \"…\" }} with the heading of totals to this rule, or give \"all\" to the stub column, or name it in labels.csv as the \"parent\" of its parts.")
     {
         Address = address,
     };

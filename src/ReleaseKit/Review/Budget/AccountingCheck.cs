@@ -42,14 +42,18 @@ internal sealed class AccountingCheck : IReviewCheck
             FindingLevel.Stop, "no-loss-in-accounting", FindingOwner.Noise, BudgetText.PlaceOf(spending.Mechanism, "law"),
             $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\", whose loss has no limit in {BudgetText.Written(account.Accounting)} accounting.\nIt has one in: {string.Join(", ", finite.Select(BudgetText.Written))}.",
             "the total of the release would have no limit either, and nothing could be promised.",
-            $"write \"accounting\": \"{BudgetText.Written(finite[^1])}\"{(finite[^1] == Accounting.Approximate ? $" and {SpentOf(spending, account)} for it" : "")}, or noise its figures with another law.");
+            finite[^1] != Accounting.Approximate ? $"write \"accounting\": \"{BudgetText.Written(finite[^1])}\", or noise its figures with another law."
+                : IsBeyondAuthorised(spending, account) ? $"{AnotherLaw(spending, account)}."
+                : $"write \"accounting\": \"approximate\" and {SpentOf(spending, account)} for it, or noise its figures with another law.");
     }
 
     private static Finding SpentNeeded(MechanismSpending spending, NoiseAccount account) => new(
         FindingLevel.Stop, "spent-needed", FindingOwner.Noise, BudgetText.PlaceOf(spending.Mechanism, "spent"),
         $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\" and {(spending.Mechanism.Spent is null ? "does not say what it spent" : "declares a \"spent\" that it never meets, whatever the epsilon, at that delta")}.",
         "this law has no epsilon without a delta; the office chooses the pair, and it is checked against the law.",
-        $"{(spending.Mechanism.Spent is null ? "add" : "write")} {SpentOf(spending, account)}, or another pair of its curve.");
+        IsBeyondAuthorised(spending, account)
+            ? $"{AnotherLaw(spending, account)}."
+            : $"{(spending.Mechanism.Spent is null ? "add" : "write")} {SpentOf(spending, account)}, or another pair of its curve.");
 
     private static Finding Unknown(Mechanism mechanism) => new(
         FindingLevel.Stop, "loss-unknown", FindingOwner.Noise, mechanism.At,
@@ -77,12 +81,25 @@ internal sealed class AccountingCheck : IReviewCheck
             yield return Accounting.Concentrated;
     }
 
+    /// <summary>Whether no pair of its curve has a delta as small as the authorised one, so that none is worth pasting.</summary>
+    private static bool IsBeyondAuthorised(MechanismSpending spending, NoiseAccount account) => FloorOf(spending) > (account.Authorised.Delta ?? 0);
+
+    private static string AnotherLaw(MechanismSpending spending, NoiseAccount account)
+    {
+        var wider = spending.Mechanism.Law == LawName.TruncatedDiscreteLaplace ? ", or give this one a larger \"cutoff\"" : "";
+        var authorised = account.Authorised.Delta is > 0 and var delta ? $"{BudgetText.Plain(delta)} is authorised" : "no delta is authorised";
+        return $"noise its figures with a law that has no end, such as discrete-laplace{wider}: the delta of this one is at least {BudgetText.Paste(FloorOf(spending))} at every epsilon, and {authorised}";
+    }
+
+    /// <summary>What δ does not fall below at any ε; 0 where it falls to 0.</summary>
+    private static double FloorOf(MechanismSpending spending) => spending.Loss!.DeltaAt(Farthest).Upper.Value;
+
     // Where δ never falls to 0, its floor; else the authorised δ.
     private static string SpentOf(MechanismSpending spending, NoiseAccount account)
     {
-        var floor = spending.Loss!.DeltaAt(Farthest).Upper.Value;
+        var floor = FloorOf(spending);
         var delta = floor > 0 ? floor * (1 + 1e-6) : account.Authorised.Delta is > 0 and var authorised ? authorised : 1e-9;
-        var epsilon = spending.Loss.EpsilonAt(Delta.AtMost(delta)).Upper.Value;
+        var epsilon = spending.Loss!.EpsilonAt(Delta.AtMost(delta)).Upper.Value;
         return $"\"spent\": {{ \"epsilon\": {BudgetText.Paste(epsilon)}, \"delta\": {BudgetText.Paste(delta)} }}";
     }
 }

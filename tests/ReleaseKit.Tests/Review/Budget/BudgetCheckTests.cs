@@ -73,7 +73,32 @@ public sealed class BudgetCheckTests
         var text = folder.Text("uniform-noise");
         Assert.Contains("With chance 0.04 its figures show with certainty whether one keeper was counted.", text, StringComparison.Ordinal);
         Assert.Contains("It has one in: approximate.", folder.Text("no-loss-in-accounting"), StringComparison.Ordinal);
+        Assert.Contains(
+            "Do: noise its figures with a law that has no end, such as discrete-laplace: the delta of this one is at least 0.04 at every epsilon, and 0.000000001 is authorised.",
+            folder.Text("no-loss-in-accounting"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Uniform_noise_whose_delta_is_authorised_is_told_the_pair_to_paste()
+    {
+        using var folder = new TestFolder();
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-uniform", "halfWidth": 12, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 } }""")
+            .Edit("mechanisms.json", "\"delta\": 1e-9", "\"delta\": 0.05");
         Assert.Contains("\"spent\": { \"epsilon\": 0, \"delta\": 0.04000004 }", folder.Text("no-loss-in-accounting"), StringComparison.Ordinal);
+    }
+
+    // Truncated discrete Laplace of scale 4 cut at 3, one step: δ is the chance of the outermost step, e^(−3/4) ÷ (1 + 2(e^(−1/4) + e^(−2/4) + e^(−3/4))) = 0.1001….
+    [Theory]
+    [InlineData("concentrated", "no-loss-in-accounting")]
+    [InlineData("approximate", "spent-needed")]
+    public void Delta_far_above_the_authorised_one_is_not_proposed(string accounting, string slug)
+    {
+        using var folder = new TestFolder();
+        folder.WithLit("""{ "id": "lamps-lit", "law": "truncated-discrete-laplace", "scale": 4, "cutoff": 3, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 } }""")
+            .Edit("mechanisms.json", "\"concentrated\"", $"\"{accounting}\"");
+        var text = folder.Text(slug);
+        Assert.Contains("or give this one a larger \"cutoff\": the delta of this one is at least 0.1001", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("\"spent\": {", text, StringComparison.Ordinal);
     }
 
     [Fact]

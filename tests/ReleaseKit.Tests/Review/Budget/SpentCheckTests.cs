@@ -105,7 +105,7 @@ public sealed class SpentCheckTests
     public void Pair_that_a_law_never_meets_is_told_once_with_one_that_it_meets()
     {
         using var folder = new TestFolder();
-        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"");
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"").Edit("mechanisms.json", "\"delta\": 1e-9", "\"delta\": 0.05");
         folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-uniform", "halfWidth": 12, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0, "delta": 0.01 } }""");
         Assert.Contains("Do: write \"spent\": { \"epsilon\": 0, \"delta\": 0.04000004 }", folder.Text("spent-needed"), StringComparison.Ordinal);
         folder.HasNo("spent-too-low");
@@ -116,7 +116,7 @@ public sealed class SpentCheckTests
     public void Pair_that_a_table_meets_exactly_is_enough()
     {
         using var folder = new TestFolder();
-        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"")
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"").Edit("mechanisms.json", "\"delta\": 1e-9", "\"delta\": 0.2")
             .With("tables/noise.csv", "noise,probability\n-2,0.1\n-1,0.2\n0,0.4\n1,0.2\n2,0.1\n");
         folder.WithLit("""{ "id": "lamps-lit", "law": "tabulated", "file": "tables/noise.csv", "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0.7, "delta": 0.1 } }""");
         folder.HasNo("spent-needed");
