@@ -19,16 +19,26 @@ internal sealed class HiddenPartCheck : IReviewCheck
         var column = table.Stub.ToList().FindIndex(stub => stub.Column == addition.Over);
         if (measure is null || column < 0)
             yield break;
+        var (stub, wholeOf) = (table.Stub[column], WholesOf(table.Stub[column], addition.Total));
         foreach (var group in new Reading.Tables.RowGroups(table).GroupsOver(column))
-            if (GivenBack(table, measure, addition, column, group) is { } row)
+            foreach (var row in GivenBack(measure, stub, wholeOf, group))
                 yield return Found(table, measure, row, addition);
     }
 
-    private static int? GivenBack(Table table, Measure measure, Addition addition, int column, ArraySegment<int> group)
+    /// <summary>For each row the heading that it is a part of: by the parents of labels.csv; under a total of another heading, that one for all others.</summary>
+    private static Func<int, int> WholesOf(StubColumn stub, string total)
     {
-        var total = group.Where(row => table.Stub[column].LabelOf(row).Value == addition.Total).ToList();
-        var hidden = group.Where(row => measure.StatusAt(row) == 'Q' && !total.Contains(row)).ToList();
-        return total.Count == 1 && measure.HasNumber(total[0]) && hidden.Count == 1 && group.Count > 2 ? hidden[0] : null;
+        var parents = StubParents.Of(stub);
+        var code = stub.Labels.ToList().FindIndex(label => label.Value == total);
+        return code < 0 || parents.Contains(code) ? row => parents[stub.Codes[row]] : row => stub.Codes[row] == code ? -1 : code;
+    }
+
+    /// <summary>Rows that are hidden alone among the parts of a published one.</summary>
+    private static IEnumerable<int> GivenBack(Measure measure, StubColumn stub, Func<int, int> wholeOf, ArraySegment<int> group)
+    {
+        var published = group.Where(measure.HasNumber).Select(row => stub.Codes[row]).ToHashSet();
+        return group.GroupBy(wholeOf).Where(parts => published.Contains(parts.Key) && parts.Count() > 1)
+            .Select(parts => parts.Where(row => measure.StatusAt(row) == 'Q').ToList()).Where(hidden => hidden.Count == 1).Select(hidden => hidden[0]);
     }
 
     private static Finding Found(Table table, Measure measure, int row, Addition addition)
