@@ -4,6 +4,7 @@ using ReleaseKit.Charts;
 using ReleaseKit.Charts.Ordered;
 using ReleaseKit.Releases;
 using ReleaseKit.Tests.Appraisal;
+using ReleaseKit.Tests.Pages;
 using ReleaseKit.Wording;
 using SkiaSharp;
 using Xunit;
@@ -134,7 +135,7 @@ public sealed class OrderedChartTests
         var caption = string.Join(' ', OrderedWords.Of(Figures(Values), Words).Caption);
 
         Assert.Contains("the bar shows how far noise, and rounding where there is any, may have moved it", caption, StringComparison.Ordinal);
-        Assert.Contains("at least 95 in 100 lie between such stops", caption, StringComparison.Ordinal);
+        Assert.Contains("In at least 95 of 100 cases the value before noise lies between such stops.", caption, StringComparison.Ordinal);
         Assert.Contains("Figures that stand close together may not be separated: noise alone can put them in this order.", caption, StringComparison.Ordinal);
         Assert.Contains("Whether two bars overlap does not show", caption, StringComparison.Ordinal);
     }
@@ -145,7 +146,17 @@ public sealed class OrderedChartTests
         var figures = Means(("18.29", 0.1), ("23.07", 1));
 
         Assert.All(figures.Rows, row => Assert.Contains("in at least 95 of 100 cases", Words.ReadingOf(row.Figure).Text, StringComparison.Ordinal));
-        Assert.Contains(OrderedWords.Of(figures, Words).Caption, sentence => sentence.Contains("at least 95 in 100 lie between such stops", StringComparison.Ordinal));
+        Assert.Contains(OrderedWords.Of(figures, Words).Caption, sentence => sentence.Contains("In at least 95 of 100 cases the value before noise lies between such stops.", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Table_behind_the_picture_says_at_least_as_well()
+    {
+        var release = new SmallRelease().Figures(MeasureKind.Mean, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 0.1)), "18.29", "23.07").Build();
+        var page = ChartFigure.Html(new ChartOrder("chart", SmallRelease.Words("A chart"), "table/figure", "ordered"), PagesRelease.ContextOf(release));
+
+        Assert.Contains("<caption>A chart. In at least 95 of 100 cases the value before noise lies in such a range.</caption>", page, StringComparison.Ordinal);
+        Assert.Contains("The table behind the picture gives", page, StringComparison.Ordinal);
     }
 
     [Fact]

@@ -22,7 +22,7 @@ public sealed record OrderedWords(IReadOnlyList<string> Caption, string Descript
         yield return language.Text("charts.ordered.order");
         if (withMargin.Count > 0)
         {
-            yield return language.Text(IsMoreThanNominal(figures) ? "charts.ordered.bar-at-least" : "charts.ordered.bar", ("share", language.Share(withMargin[0].Coverage)));
+            yield return language.Text("charts.ordered.bar", ("cases", language.Cases(withMargin[0].Coverage, IsMoreThanNominal(figures))));
             yield return language.Text("charts.ordered.neighbours");
             yield return language.Text("charts.ordered.overlap");
         }
