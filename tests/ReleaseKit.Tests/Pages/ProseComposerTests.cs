@@ -38,6 +38,11 @@ public sealed class ProseComposerTests
         Html("[Over a thousand](figure:all-late) and [again](<figure:late/late?district=All&ward=All>)"));
 
     [Fact]
+    public void Citation_that_rounds_the_figure_has_the_figure_and_its_margin_behind_it() => Assert.Contains(
+        "class=\"cite\">more than 1,200</a> <span class=\"cite-margin\">(<data value=\"1240\">1,240</data>&#160;±\u00A019)</span>",
+        Html("[more than 1,200](figure:all-late)"), StringComparison.Ordinal);
+
+    [Fact]
     public void Citation_in_own_words_after_a_generated_one_gives_no_margin_again() =>
         Assert.DoesNotContain("cite-margin", Html("[value and margin](figure:all-late), [so many](figure:all-late)"), StringComparison.Ordinal);
 

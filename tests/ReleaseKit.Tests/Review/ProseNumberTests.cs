@@ -4,7 +4,7 @@ using Xunit;
 
 namespace ReleaseKit.Tests.Review;
 
-/// <summary>Numbers in the words of a citation: they are the figure, its margin or an end of its range, or a stop. Lamps lit are 60 (± 14) in all; broken ones −1 in Weir Lane.</summary>
+/// <summary>Numbers in the words of a citation: they are the figure, its margin or an end of its range, or rounded, or a stop. Lamps lit are 60 (± 14) in all; broken ones −1 in Weir Lane.</summary>
 public sealed class ProseNumberTests
 {
     private const string Prose = "narrative/summary.md";
@@ -28,7 +28,11 @@ public sealed class ProseNumberTests
     [InlineData("-1")]
     public void Figure_below_zero_is_written_with_its_sign(string words) => Passes($"[{words}](figure:lamps/broken?street=Weir%20Lane)");
 
+    [Fact]
+    public void Number_may_be_rounded_as_the_writer_rounds() => Passes("[about 30 lamps](figure:lamps/lit?street=Kiln%20Row)");
+
     [Theory]
+    [InlineData("about 100 lamps", "100")]
     [InlineData("more than 65", "65")]
     [InlineData("65 lamps", "65")]
     [InlineData("*6*5 lamps", "65")]

@@ -120,11 +120,11 @@ public sealed class LanguageTests
     public void Table_in_which_less_than_one_range_may_miss_says_less_than_one()
     {
         var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
-        Assert.Equal("Of the 3 ranges in this table, on average less than 1 misses.", En.NotesOf(facts)[0]);
+        Assert.Equal("Of the 3 ranges in this table, the number expected to miss is less than 1.", En.NotesOf(facts)[0]);
     }
 
     [Theory]
-    [InlineData(0.29, "Of the 6 ranges in this table, on average less than 1 misses.")]
+    [InlineData(0.29, "Of the 6 ranges in this table, the number expected to miss is less than 1.")]
     [InlineData(1, "Of the 6 ranges in this table, at most about 1 is expected to miss.")]
     [InlineData(1.2, "Of the 6 ranges in this table, at most about 2 are expected to miss.")]
     public void Expected_misses_are_never_said_to_be_more_than_they_round_up_to(double expected, string sentence)
@@ -137,7 +137,7 @@ public sealed class LanguageTests
     public void Table_cut_into_pages_counts_the_ranges_of_all_pages()
     {
         var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5), "12", "13", "14").Appraise().FactsOf(0);
-        Assert.Equal("Of the 3 ranges in this table, on all its pages, on average less than 1 misses.", En.NotesOf(facts, onSeveralPages: true)[0]);
+        Assert.Equal("Of the 3 ranges in this table, on all its pages, the number expected to miss is less than 1.", En.NotesOf(facts, onSeveralPages: true)[0]);
     }
 
     [Fact]

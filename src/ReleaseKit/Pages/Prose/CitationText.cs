@@ -16,10 +16,19 @@ internal sealed class CitationText(ILanguage language)
         ? Reading(figure, href)
         : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, place.About)}{InEach(form, figure, place)}</a>";
 
-    /// <summary>What follows the writer's own words: " (± 19)"; nothing for a figure without a margin.</summary>
-    public string MarginAfter(AppraisedFigure figure) => figure.Main is { } range
-        ? $" <span class=\"cite-margin\">({HtmlText.Encode(language.Margin(range.Printed))})</span>"
-        : "";
+    /// <summary>What follows the writer's own words: " (± 19)", or " (1,240 ± 19)" where they round the figure; nothing for a figure that needs neither.</summary>
+    public string After(string words, AppraisedFigure figure)
+    {
+        var isRounded = language.NumbersIn(words).Any(number => SaidNumber.Of(number, figure) is SaidAs.Rounded);
+        var margin = figure.Main is { } range ? HtmlText.Encode(language.Margin(range.Printed)) : "";
+        var text = (isRounded, margin) switch
+        {
+            (true, "") => Value(figure, about: ""),
+            (true, _) => $"{Value(figure, about: "")}&#160;{margin}",
+            (false, _) => margin,
+        };
+        return text.Length == 0 ? "" : $" <span class=\"cite-margin\">({text})</span>";
+    }
 
     private static string InEach(CitationForm form, AppraisedFigure figure, CitationPlace place) =>
         figure is { HasNumber: true, Measure.Kind: MeasureKind.Share } && form != CitationForm.Margin && place.InEach.Length > 0 ? " " + HtmlText.Encode(place.InEach) : "";

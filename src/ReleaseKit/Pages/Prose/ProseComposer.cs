@@ -94,7 +94,8 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
 
     private void Cite(LinkInline link, string address)
     {
-        var form = CitationForms.Of(ProseDocument.PlainText(link), context.Language);
+        var words = ProseDocument.PlainText(link);
+        var form = CitationForms.Of(words, context.Language);
         if (form != CitationForm.OwnWords)
         {
             link.ReplaceBy(Cited(form, address, link), copyChildren: false);
@@ -104,7 +105,7 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
         link.Url = Link.From(page, context.Pages.Of(figure.Ref));
         link.GetAttributes().AddClass("cite");
         if (mentioned.Add(figure.Address))
-            link.InsertAfter(new HtmlInline(citations.MarginAfter(figure)));
+            link.InsertAfter(new HtmlInline(citations.After(words, figure)));
     }
 
     private HtmlInline Cited(CitationForm form, string address, Inline place)

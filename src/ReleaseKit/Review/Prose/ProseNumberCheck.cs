@@ -9,8 +9,8 @@ using ReleaseKit.Wording;
 namespace ReleaseKit.Review.Prose;
 
 /// <summary>
-/// A number in the writer's own words of a citation is a claim about the figure: it must be the figure as printed or as published, its printed
-/// margin, or an end of its printed range.
+/// A number in the writer's own words of a citation is a claim about the figure: it must be the figure as printed or as published, or rounded,
+/// its printed margin, or an end of its printed range.
 /// </summary>
 internal sealed class ProseNumberCheck : IReviewCheck
 {
@@ -32,7 +32,7 @@ internal sealed class ProseNumberCheck : IReviewCheck
         var numbers = language.NumbersIn(words);
         if (numbers.Count == 0 || FigureAt(address, appraised) is not { } figure)
             return null;
-        var wrong = numbers.Where(number => !Agrees(number, figure)).Select(number => number.Text).ToList();
+        var wrong = numbers.Where(number => SaidNumber.Of(number, figure) is SaidAs.Other).Select(number => number.Text).ToList();
         return wrong.Count == 0
             ? null
             : ProseProblems.Disagrees(new(page.File, link.Line + 1, link.Column + 1), wrong, new(figure, language), link.Url!, FindingOwner.Writer);
@@ -50,26 +50,4 @@ internal sealed class ProseNumberCheck : IReviewCheck
             return null;
         }
     }
-
-    private static bool Agrees(WrittenNumber number, AppraisedFigure figure) => number.Value is { } value
-        && (Margins(figure).Contains(value) || (!number.IsMargin && Values(figure).Contains(value)));
-
-    private static IEnumerable<decimal> Values(AppraisedFigure figure)
-    {
-        if (!figure.HasNumber)
-            return [];
-        var published = figure.Value.ToDecimal();
-        return [published, published * figure.Measure.PrintFactor, figure.Printed.ToDecimal(), .. Ends(figure)];
-    }
-
-    private static IEnumerable<decimal> Ends(AppraisedFigure figure) =>
-        figure.Main is { Printed: var range } ? [range.Low.ToDecimal(), range.High.ToDecimal()] : [];
-
-    // An uneven margin is printed with its signs: −12 +17.
-    private static IEnumerable<decimal> Margins(AppraisedFigure figure) => figure.Main switch
-    {
-        null => [],
-        { Printed: { IsUneven: true } range } => [range.MarginDown.ToDecimal(), -range.MarginDown.ToDecimal(), range.MarginUp.ToDecimal()],
-        { Printed: var range } => [range.Margin.ToDecimal()],
-    };
 }
