@@ -12,16 +12,16 @@ internal sealed class DiscreteGaussianLoss(DiscreteGaussianLaw law) : LatticeLos
 
     public override Bounds<Epsilon> Pure(double shift) => InSteps(shift, steps => steps == 0 ? Epsilon.Zero : Epsilon.Infinite);
 
-    public override Bounds<Rho> Concentrated(double shift) => new(Of(StepsDown(shift) * law.Grid), Of(Math.Max(shift, StepsDown(shift) * law.Grid)));
+    public override Bounds<Rho> Concentrated(double shift) => InSteps(shift, steps => Of(steps * law.Grid));
 
     public override Bounds<Delta> DeltaAt(Epsilon epsilon, double shift) =>
         HalfLine(epsilon, shift, steps => Math.Ceiling((steps / 2) - (epsilon.Value * Width * Width / steps)) - 1);
 
     public override string PureArithmetic(double shift) => "∞";
 
-    public override string ConcentratedArithmetic(double shift) => $"{Signs.Of(shift)}² ÷ (2 × {Signs.Of(law.Sigma)}²)";
+    public override string ConcentratedArithmetic(double shift) => $"{Signs.Of(StepsUp(shift) * law.Grid)}² ÷ (2 × {Signs.Of(law.Sigma)}²)";
 
-    internal override ShiftRun RunOfDistance(double distance, long cells) => new(distance, 1);
+    internal override ShiftRun RunOfDistance(double distance, long cells) => RunOfSquaredSteps(distance, cells) ?? new(distance, 1);
 
     private double Width => law.Sigma / law.Grid;
 

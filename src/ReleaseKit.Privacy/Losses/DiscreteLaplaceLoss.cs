@@ -30,14 +30,9 @@ internal sealed class DiscreteLaplaceLoss(DiscreteLaplaceLaw law) : LatticeLoss(
         return StepsUp(shift) <= 1 ? $"{epsilon} × tanh({epsilon} ÷ 2)" : $"sup D_α ÷ α = {Signs.Of(Concentrated(shift).Upper.Value)}";
     }
 
-    internal override ShiftRun RunOfDistance(double distance, long cells) => FewSteps(distance, cells) ?? base.RunOfDistance(distance, cells);
-
-    // ρ of k steps is at most k² that of one (group privacy, Bun & Steinke 2016, Proposition 1.9, from memory), so Σkᵢ² single steps bound every way.
-    internal override ShiftRun RunOfDistanceConcentrated(double distance, long cells) => SingleSteps(distance);
-
-    private ShiftRun? FewSteps(double distance, long cells) => SingleSteps(distance) is var single && single.Cells <= cells ? single : null;
-
-    private ShiftRun SingleSteps(double distance) => new(law.Grid, (long)GridSteps.Down(distance * distance, law.Grid * law.Grid));
+    // Group privacy, Bun & Steinke 2016, Proposition 1.9 (from memory): ρ of k steps is at most k² that of one.
+    internal override ShiftRun RunOfDistanceConcentrated(double distance, long cells) =>
+        RunOfSquaredSteps(distance, cells) ?? base.RunOfDistanceConcentrated(distance, cells);
 
     // The supremum lies at α = 1 as far as is seen; the search over α and the cap do not rest on it.
     private Rho Upper(double steps)

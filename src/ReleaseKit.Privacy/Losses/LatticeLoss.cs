@@ -9,13 +9,31 @@ internal abstract class LatticeLoss(LatticeLaw law) : LawLoss
     private const double RelativeError = 1e-15;
     private const double AbsoluteError = 1e-18;
 
+    // In squared steps: a norm that was rounded up in its fifth digit, 1.4143 for √2, is not taken up to the next one.
+    private const double RoundedNorm = 1e-3;
+
     internal override double Grid => law.Grid;
+
+    // Σ|k| ≤ Σk² for whole steps k, so as many single steps bound every way.
+    internal override ShiftRun RunOfDistance(double distance, long cells) =>
+        cells > 1 && SquaredSteps(distance) is var squares && squares <= cells ? new(law.Grid, (long)squares) : base.RunOfDistance(distance, cells);
 
     /// <summary>Steps of an upper bound.</summary>
     private protected double StepsUp(double shift) => GridSteps.Up(shift, law.Grid);
 
     /// <summary>Steps of a lower bound.</summary>
     private protected double StepsDown(double shift) => GridSteps.Down(shift, law.Grid);
+
+    /// <summary>
+    /// Single steps whose ρ bounds that of every way in which a distance can be spread, where ρ of k steps is at most k² that of one; one cell is
+    /// moved by all of them. Null for more than can be counted.
+    /// </summary>
+    private protected ShiftRun? RunOfSquaredSteps(double distance, long cells) => cells == 1 ? new(StepsUp(distance) * law.Grid, 1)
+        : SquaredSteps(distance) is < long.MaxValue / 2 and var squares ? new(law.Grid, (long)squares)
+        : null;
+
+    /// <summary>Σk² of whole steps: what a distance over several cells is taken up to. Never nothing.</summary>
+    private double SquaredSteps(double distance) => Math.Max(1, Math.Ceiling((distance / law.Grid * (distance / law.Grid)) - RoundedNorm));
 
     private protected Bounds<T> InSteps<T>(double shift, Func<double, T> loss)
         where T : struct => new(loss(StepsDown(shift)), loss(StepsUp(shift)));

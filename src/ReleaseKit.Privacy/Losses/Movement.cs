@@ -7,6 +7,9 @@ namespace ReleaseKit.Privacy.Losses;
 /// </summary>
 internal static class Movement
 {
+    // What binary arithmetic leaves of a bound that is a multiple of the contribution is no contribution.
+    private const double Remainder = 1e-9;
+
     /// <summary>
     /// Arrangements of shifts of which one is the worst. Each is sorted, largest shift first. A bound on a unit's sum counts only if contributions
     /// have one sign and the loss grows with the shift.
@@ -33,7 +36,8 @@ internal static class Movement
     {
         var sum = Math.Min(unit.PerUnit ?? double.PositiveInfinity, touched * unit.Most);
         var full = (long)Math.Min(touched, GridSteps.Down(sum, unit.Most));
-        var rest = full < touched ? Math.Max(0, sum - (full * unit.Most)) : 0;
+        var left = sum - (full * unit.Most);
+        var rest = full < touched && (full == 0 || left > Remainder * unit.Most) ? left : 0;
         return [.. Runs((times * unit.Most, full), (times * rest, 1))];
     }
 

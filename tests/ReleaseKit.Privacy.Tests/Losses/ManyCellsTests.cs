@@ -209,4 +209,47 @@ public sealed class ManyCellsTests
             }
         }
     }
+
+    /// <summary>Noise on a grid of 1 or 5 moves by whole steps: every sensitivity above nothing costs at least what one step costs by enumeration.</summary>
+    [Theory]
+    [InlineData(1, 1e-12)]
+    [InlineData(1, 0.5)]
+    [InlineData(1, 0.99)]
+    [InlineData(5, 4)]
+    public void Sensitivity_below_a_step_costs_a_step_in_every_law_and_form(double grid, double most)
+    {
+        UnitContribution[] units =
+        [
+            new UnitContribution.PerCell(1, most), new UnitContribution.PerCell(1, 3 * grid, PerUnit: most), new UnitContribution.AbsoluteSum(most), new UnitContribution.Euclidean(most),
+        ];
+        foreach (var (law, unit, cells) in Lattice(grid).SelectMany(law => units.SelectMany(unit => new[] { (law, unit, 1L), (law, unit, 8L) })))
+        {
+            var loss = MechanismLoss.Of([new NoisedCells(law, cells)], unit, AddOrRemove);
+            var step = Enumerated.Of(law, 1);
+            foreach (var epsilon in new[] { 0, 0.1, 0.5 })
+                Assert.InRange(loss.DeltaAt(Epsilon.Of(epsilon)).Upper.Value, step.Delta(epsilon) * (1 - 1e-9), 1);
+            if (law is DiscreteLaplaceLaw or DiscreteGaussianLaw)
+                Assert.InRange(loss.Concentrated.Upper.Value, step.Rho() * (1 - 1e-6), step.Rho() * (1 + 1e-3));
+            if (law is DiscreteLaplaceLaw)
+                ReferenceRow.Near(step.LargestLogRatio(), loss.Pure.Upper.Value, law.ToString());
+        }
+    }
+
+    /// <summary>Squares of whole steps add up to whole numbers: 0.99² to 1, 1.2² to 2 (in one cell to 2²), 1.9² to 4; √2 to five digits is √2.</summary>
+    [Theory]
+    [InlineData(0.99, 8, 1)]
+    [InlineData(1.2, 8, 2)]
+    [InlineData(1.2, 1, 4)]
+    [InlineData(1.9, 8, 4)]
+    [InlineData(1.4142, 8, 2)]
+    [InlineData(1.4143, 8, 2)]
+    public void Distance_is_taken_up_to_what_whole_steps_can_give(double distance, int cells, int squares)
+    {
+        double RhoOf(NoiseLaw law) => MechanismLoss.Of([new NoisedCells(law, cells)], new UnitContribution.Euclidean(distance), AddOrRemove).Concentrated.Upper.Value;
+        Assert.Equal(squares / 50.0, RhoOf(DiscreteGaussianLaw.Of(5)), 1e-12);
+        Assert.InRange(RhoOf(DiscreteLaplaceLaw.Of(5)), 0.9 * squares * 0.2 * Math.Tanh(0.1), squares * 0.2 * Math.Tanh(0.1) * (1 + 1e-12));
+    }
+
+    private static IEnumerable<LatticeLaw> Lattice(double grid) =>
+        [DiscreteLaplaceLaw.Of(4 * grid, grid), DiscreteGaussianLaw.Of(5 * grid, grid), TruncatedDiscreteLaplaceLaw.Of(4 * grid, 11 * grid, grid), DiscreteUniformLaw.Of(6 * grid, grid)];
 }

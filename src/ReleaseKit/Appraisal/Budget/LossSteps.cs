@@ -5,6 +5,8 @@ namespace ReleaseKit.Appraisal.Budget;
 /// <summary>How the loss of one mechanism was reached: what one unit moves, then what the law spends on that.</summary>
 internal static class LossSteps
 {
+    private const double Close = 1e-9;
+
     public static IEnumerable<AccountStep> Of(MechanismSpending spending, LossTotal upper, Accountant accountant)
     {
         var amount = accountant.AmountOf(upper);
@@ -17,15 +19,24 @@ internal static class LossSteps
 
     private static AccountStep Moved(MechanismSpending spending, MechanismLoss loss, IReadOnlyList<LossTerm> terms) => spending.Mechanism.Sensitivity switch
     {
-        { CellsPerUnit: >= 1, PerCell: > 0 } => Cells(spending, loss, terms.Sum(term => term.Cells)),
-        { L1: { } sum } => new AccountStep(AccountSteps.AbsoluteSum, $"Δ₁ = {Signs.Of(sum)}", sum, AccountRules.Declared),
-        var other => new AccountStep(AccountSteps.Distance, $"Δ₂ = {Signs.Of(other.L2 ?? 0)}", other.L2 ?? 0, AccountRules.Declared),
+        { CellsPerUnit: >= 1, PerCell: > 0 } => Cells(spending, loss, terms),
+        { L1: { } sum } => new AccountStep(AccountSteps.AbsoluteSum, $"Δ₁ = {Taken(sum, terms.Sum(term => term.Cells * InSteps(term)), terms)}", sum, AccountRules.Declared),
+        { L2: var distance } => new AccountStep(
+            AccountSteps.Distance, $"Δ₂ = {Taken(distance ?? 0, Math.Sqrt(terms.Sum(term => term.Cells * InSteps(term) * InSteps(term))), terms)}", distance ?? 0, AccountRules.Declared),
     };
 
-    private static AccountStep Cells(MechanismSpending spending, MechanismLoss loss, long moved)
+    /// <summary>"0.99 ≤ 1" where noise on a grid moves by whole steps alone; "0.99" elsewhere.</summary>
+    private static string Taken(double declared, double inSteps, IReadOnlyList<LossTerm> terms) =>
+        terms.All(term => term.Loss is { Grid: > 0, GrowsWithShift: true }) && inSteps > declared * (1 + Close) ? $"{Signs.Of(declared)} ≤ {Signs.Of(inSteps)}" : Signs.Of(declared);
+
+    private static double InSteps(LossTerm term) => term.Loss.Grid is > 0 and var grid ? GridSteps.Up(term.Shift, grid) * grid : term.Shift;
+
+    private static AccountStep Cells(MechanismSpending spending, MechanismLoss loss, IReadOnlyList<LossTerm> terms)
     {
+        var moved = terms.Sum(term => term.Cells);
         var key = loss.Relation == NeighbourRelation.Replace ? AccountSteps.MovedByReplacing : AccountSteps.MovedByAdding;
-        var shifts = loss.LargestShift == spending.Mechanism.Sensitivity.PerCell ? $"{moved}" : $"{moved}, by {Signs.Of(loss.LargestShift)}";
+        var largest = Taken(loss.LargestShift, terms.Max(InSteps), terms);
+        var shifts = largest == Signs.Of(spending.Mechanism.Sensitivity.PerCell ?? 0) ? $"{moved}" : $"{moved}, by {largest}";
         return new AccountStep(key, shifts, moved, AccountRules.Declared);
     }
 
