@@ -22,6 +22,7 @@ public static class Checks
         new LevelsCheck(),
         new SensitivityFormsCheck(),
         new MeanSensitivityCheck(),
+        new CountSensitivityCheck(),
         new ExactCountCheck(),
         new UniformNoiseCheck(),
         new OffGridCheck(),

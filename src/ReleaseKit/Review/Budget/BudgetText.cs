@@ -15,7 +15,7 @@ internal static class BudgetText
         if (loss is not (> 1e-12 and < 1e12))
             return Plain(loss);
         var decimals = Math.Clamp(PasteDigits - 1 - (int)Math.Floor(Math.Log10(loss)), 0, 20);
-        var unit = Unit(decimals);
+        var unit = UnitAt(decimals);
         return (Math.Ceiling((decimal)loss / unit) * unit / 1.000000000000000000000000000m).ToString("0.####################", CultureInfo.InvariantCulture);
     }
 
@@ -51,6 +51,9 @@ internal static class BudgetText
     /// <summary>"households".</summary>
     public static string Other(NoiseAccount account) => Forms(account)?.Other ?? account.Who.Key;
 
+    /// <summary>The key, the singular and the plural are one unit, however each of the two files writes it.</summary>
+    public static bool IsUnitOfPrivacy(Unit unit, NoiseAccount account) => unit.Key.Length > 0 && Words(unit).Intersect(Words(account.Who), StringComparer.OrdinalIgnoreCase).Any();
+
     public static Place PlaceOf(Mechanism mechanism, string key) => mechanism.KeyPlaces.TryGetValue(key, out var place) ? place : mechanism.At;
 
     /// <summary>A law as the folder writes it: "discrete-laplace".</summary>
@@ -62,6 +65,8 @@ internal static class BudgetText
     private static string PerUnit(Sensitivity sensitivity, NoiseAccount account) =>
         sensitivity.PerUnit is { } bound ? $", {Plain(bound)} a {One(account)} in all" : "";
 
+    private static IEnumerable<string> Words(Unit unit) => unit.Forms.Values.SelectMany(forms => new[] { forms.One, forms.Other }).Append(unit.Key);
+
     private static UnitForms? Forms(NoiseAccount account) => account.Who.Forms.Values.FirstOrDefault();
 
     private static string Parameter(Mechanism mechanism, string key, string word) => mechanism.Parameters.GetValueOrDefault(key) switch
@@ -71,7 +76,7 @@ internal static class BudgetText
         _ => word,
     };
 
-    private static decimal Unit(int decimals)
+    private static decimal UnitAt(int decimals)
     {
         var unit = 1m;
         for (var i = 0; i < decimals; i++)

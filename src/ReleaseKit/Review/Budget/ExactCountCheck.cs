@@ -12,7 +12,7 @@ internal sealed class ExactCountCheck : IReviewCheck
     private static Finding? Found(Release release, Table table, Measure measure)
     {
         var isNamed = measure.Unit.Key.Length > 0;
-        var isOfUnits = measure.Kind is MeasureKind.Count or MeasureKind.Estimate && isNamed && IsSame(measure.Unit, release.Noise.Who);
+        var isOfUnits = measure.Kind is MeasureKind.Count or MeasureKind.Estimate && isNamed && BudgetText.IsUnitOfPrivacy(measure.Unit, release.Noise);
         if (!isOfUnits && (measure.Kind != MeasureKind.Count || isNamed))
             return null;
         var rows = Enumerable.Range(0, measure.RuleOf.Length).Where(row => measure.RuleAt(row) is NoiseRule.Exact && measure.HasNumber(row)).ToList();
@@ -22,11 +22,6 @@ internal sealed class ExactCountCheck : IReviewCheck
         var at = ((NoiseRule.Exact)measure.RuleAt(rows[0])).At;
         return isOfUnits ? Exact(release, at, address, rows.Count) : WithoutUnit(release, at, measure, address);
     }
-
-    // The key, the singular and the plural are one unit, however each of the two files writes it.
-    private static bool IsSame(Unit one, Unit other) => Words(one).Intersect(Words(other), StringComparer.OrdinalIgnoreCase).Any();
-
-    private static IEnumerable<string> Words(Unit unit) => unit.Forms.Values.SelectMany(forms => new[] { forms.One, forms.Other }).Append(unit.Key);
 
     private static Finding WithoutUnit(Release release, Place at, Measure measure, string address) => new(
         FindingLevel.Caution, "exact-count-without-unit", FindingOwner.Noise, at,

@@ -52,23 +52,8 @@ internal sealed class MeanMoves
     /// <summary>For each cell its move and those of the totals that hold it: whoever is counted in the cell is counted in them.</summary>
     private static IEnumerable<double[]> WithTotals(IReadOnlyDictionary<int, double> moves, Table table)
     {
-        var keys = new RowKeys(table);
-        var byKey = new Dictionary<UInt128, double>();
-        foreach (var (row, move) in moves)
-            byKey[keys.Of(row)] = move;
-        var parents = table.Stub.Select(StubParents.Of).ToList();
-        return moves.Keys.Select(row => Upwards(keys, table, parents, row).Where(byKey.ContainsKey).Select(key => byKey[key]).ToArray());
-    }
-
-    private static IEnumerable<UInt128> Upwards(RowKeys keys, Table table, List<int[]> parents, int row)
-    {
-        IEnumerable<UInt128> found = [keys.Of(row)];
-        for (var column = 0; column < parents.Count; column++)
-        {
-            var (at, above) = (column, StubParents.Upwards(parents[column], table.Stub[column].Codes[row]).ToList());
-            found = found.SelectMany(key => above.Select(code => keys.With(key, row, at, code)));
-        }
-        return found;
+        var wholes = new Wholes(table, moves.Keys);
+        return moves.Keys.Select(row => wholes.Of(row).Select(whole => moves[whole]).ToArray());
     }
 
     private static double[] SmallestOnEachLevel(IReadOnlyDictionary<int, double> moves, Table table)
