@@ -110,16 +110,54 @@ public sealed class FigureError
     /// </summary>
     /// <param name="published">In the unit of the figure.</param>
     /// <param name="possible">What the value before noise can be.</param>
-    public bool CanPublish(double published, PossibleValues possible)
+    public bool CanPublish(double published, PossibleValues possible) =>
+        chain.IsOnSpacing(published) && chain.Reaching(published) < chain.Exceeding(published) && ChanceToReach(published, possible) > 0;
+
+    /// <summary>
+    /// The chance that the noise reaches a published value, or one still farther out, from the nearest possible value before noise: an upper
+    /// bound, in [0, 1]. Near 1 for a published value that is itself possible; 0 where the noise has an end and the value lies beyond it.
+    /// 1 for a value that the steps let no noise lead to (past a bound, under a threshold): that says nothing of the noise.
+    /// </summary>
+    /// <param name="published">In the unit of the figure.</param>
+    /// <param name="possible">What the value before noise can be.</param>
+    public double ChanceToReach(double published, PossibleValues possible)
     {
         var (from, beyond) = (chain.Reaching(published) * chain.Unit, chain.Exceeding(published) * chain.Unit);
-        return chain.IsOnSpacing(published) && from < beyond
-            && Law.AtLeast(from - chain.Blur - possible.Highest) > 0 && Law.AtMost(beyond - chain.HalfStep - possible.Lowest) > 0;
+        return from < beyond
+            ? Math.Min(1, Math.Min(Law.AtLeast(from - chain.Blur - possible.Highest), Law.AtMost(beyond - chain.HalfStep - possible.Lowest)) + Unlisted)
+            : 1;
+    }
+
+    /// <summary>
+    /// The chance that just this value is published, whatever the value before noise: an upper bound, in [0, 1]. 1 at the bound of a floor, a
+    /// ceiling or a threshold, where many noised values are published as one.
+    /// </summary>
+    /// <remarks>
+    /// The noised values that are published so are a run of steps, or an interval. Of all runs as long, one about 0 holds the most of a law
+    /// that falls off to both sides; a tabulated law may not, and there the largest chance of a step counts for each.
+    /// </remarks>
+    /// <param name="published">In the unit of the figure.</param>
+    public double ChanceOfJust(double published)
+    {
+        var width = (chain.Exceeding(published) - chain.Reaching(published)) * chain.Unit + 2 * chain.Blur;
+        if (!double.IsFinite(width))
+            return 1;
+        return Law is TabulatedLaw table
+            ? Math.Min(1, Math.Ceiling(width / chain.Unit) * (double)table.Rows.Max(row => row.Probability) + Unlisted)
+            : Math.Min(1, Law.Within(width / 2) + Unlisted);
     }
 
     /// <summary>The density or pmf of the noise at an offset from 0 ÷ its peak, in [0, 1]: the thickness of the error bar.</summary>
     /// <param name="offset">In the unit of the figure.</param>
     public double RelativeDensity(double offset) => Law.RelativeDensity(offset);
+
+    // What the law does not say where it lies.
+    private double Unlisted => Law switch
+    {
+        TabulatedLaw table => (double)table.MissingMass,
+        IntegerSum sum => sum.LostMass,
+        _ => 0,
+    };
 
     private ErrorRange PlainRange(double published, Coverage coverage, PossibleValues possible)
     {

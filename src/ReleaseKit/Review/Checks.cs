@@ -1,4 +1,5 @@
 using ReleaseKit.Review.Budget;
+using ReleaseKit.Review.Leaks;
 using ReleaseKit.Review.Prose;
 
 namespace ReleaseKit.Review;
@@ -31,5 +32,6 @@ public static class Checks
         new MultiplierCheck(),
         new ConfidentialColumnCheck(),
         new DeltaCheck(),
+        new BeyondNoiseCheck(),
     ];
 }

@@ -18,4 +18,7 @@ public sealed record ReviewSubject(ReadOutcome Read, IAppraisedRelease? Appraise
 
     /// <summary>What each mechanism spends, worked out once for all checks; empty without mechanisms.json.</summary>
     public IReadOnlyList<MechanismSpending> Spendings => field ??= Noise is { } account ? MechanismSpending.Of(account, Release) : [];
+
+    /// <summary>The errors of the figures as declared, for checks that hold the figures against them; null without a release.</summary>
+    internal FigureOrigins? Origins => field ??= Release is { } release ? new FigureOrigins(release) : null;
 }

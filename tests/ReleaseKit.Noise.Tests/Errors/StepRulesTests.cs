@@ -76,6 +76,34 @@ public sealed class StepRulesTests
     public void Value_farther_from_the_possible_than_the_noise_reaches_is_recognised(double published, bool possible) =>
         Assert.Equal(possible, FigureError.Of(DiscreteUniformLaw.Of(10)).CanPublish(published, new PossibleValues(0, 100, true)));
 
+    // P(N <= -k) = q^k / (1 + q) for the two-sided geometric law, q = e^(-1/5): its textbook sum.
+    [Theory]
+    [InlineData(-1)]
+    [InlineData(-40)]
+    [InlineData(-5000)]
+    public void Chance_to_reach_a_value_below_all_possible_ones_is_the_tail(double published)
+    {
+        var q = Math.Exp(-0.2);
+        var expected = Math.Pow(q, -published) / (1 + q);
+        var found = FigureError.Of(DiscreteLaplaceLaw.Of(5)).ChanceToReach(published, PossibleValues.Counts);
+        Assert.InRange(found, expected * (1 - 1e-9), expected * (1 + 1e-9));
+    }
+
+    [Fact]
+    public void Chance_to_reach_counts_what_a_table_does_not_list() => Assert.Equal(
+        1e-7, FigureError.Of(TabulatedLaw.Of([(-1, 0.1m), (0, 0.8m), (1, 0.0999999m)])).ChanceToReach(-2, PossibleValues.Counts), 1e-12);
+
+    // The largest chance is P(|N| <= 2) where 5 steps are rounded to one value, P(N = 0) where none are; at a floor it is 1.
+    [Theory]
+    [InlineData(10, 1, 1)]
+    [InlineData(10, 5, 5)]
+    [InlineData(0, 1, double.PositiveInfinity)]
+    public void Chance_of_just_one_value_is_that_of_the_best_placed_value_before_noise(double published, double unit, double steps)
+    {
+        var law = DiscreteLaplaceLaw.Of(5);
+        Assert.Equal(law.Within((steps - 1) / 2), FigureError.Of(law, new RoundTo(unit), new NotBelow(0)).ChanceOfJust(published), 1e-12);
+    }
+
     [Fact]
     public void Decimals_of_the_file_after_a_coarser_rounding_change_nothing()
     {

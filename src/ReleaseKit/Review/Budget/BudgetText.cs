@@ -62,6 +62,17 @@ internal static class BudgetText
 
     public static string Written(Accounting accounting) => accounting.ToString().ToLowerInvariant();
 
+    public static string Written(MeasureKind kind) => kind.ToString().ToLowerInvariant();
+
+    /// <summary>A chance to two digits, rounded up; what a double cannot hold any more is "below 10^−300".</summary>
+    public static string Chance(double chance)
+    {
+        if (chance < 1e-300)
+            return "below 10^−300";
+        var unit = Math.Pow(10, Math.Floor(Math.Log10(chance)) - 1);
+        return Plain(Math.Min(1, Math.Ceiling(chance / unit) * unit));
+    }
+
     private static string PerUnit(Sensitivity sensitivity, NoiseAccount account) =>
         sensitivity.PerUnit is { } bound ? $", {Plain(bound)} a {One(account)} in all" : "";
 
