@@ -3,10 +3,10 @@ namespace ReleaseKit.Appraisal;
 /// <summary>What a total means for one unit of privacy: a bound on the worst case.</summary>
 public sealed record MeaningForOne
 {
-    /// <summary>ε′: the largest change of the log odds, but for at most Beta of all outcomes.</summary>
+    /// <summary>ε′: the largest change of the log odds, but for at most Beta of all outcomes; infinite where no such limit can be shown.</summary>
     public required double EpsilonPrime { get; init; }
 
-    /// <summary>The share of outcomes that may break the bound; null if none can (delta is 0).</summary>
+    /// <summary>The share of outcomes that may break the bound; null if none can (a guarantee without delta), and without a limit.</summary>
     public double? Beta { get; init; }
 
     /// <summary>e^ε′: by how many times odds can change at most.</summary>

@@ -52,6 +52,16 @@ public sealed class BudgetPageTests
         Assert.Contains("The whole release can raise the odds", Text(Read(new BudgetSample { WithExactFigures = false })), StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void Without_a_limit_on_odds_the_page_says_so_and_names_no_share_of_outcomes()
+    {
+        var page = Read(new BudgetSample { WithExactFigures = false, WithLimit = false });
+
+        Assert.Contains("No limit on the odds of that guess can be shown. A result may show for certain what this reader guesses.", Text(page), StringComparison.Ordinal);
+        Assert.DoesNotContain("of all outcomes", Text(page), StringComparison.Ordinal);
+        Assert.Contains("100.0 in 100", page.QuerySelector(".odds tbody tr .main")!.TextContent, StringComparison.Ordinal);
+    }
+
     [Theory]
     [InlineData(Neighbouring.AddOrRemove, "Found at most, of 100 cases where the record was used")]
     [InlineData(Neighbouring.Replace, "Found at most, of 100 cases where it is the second")]

@@ -1,6 +1,7 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Pages;
+using ReleaseKit.Privacy;
 using ReleaseKit.Releases;
 using ReleaseKit.Review;
 using ReleaseKit.Tests.Appraisal;
@@ -32,6 +33,9 @@ internal sealed class BudgetSample
         ([1], "district", 0.0492113), ([1], "Norrvale", 0.0015681), ([2], "Norrvale", 0.0138889), ([2], "Norrvale", 0.0138697), ([3], "district", 0.0077921),
         ([0, 3], "district", 0.03125), ([], "", 0.0123457),
     ];
+
+    /// <summary>Whether a limit on odds can be shown.</summary>
+    public bool WithLimit { get; init; } = true;
 
     public static string Templates => Path.Combine(AppContext.BaseDirectory, "site-templates");
 
@@ -117,7 +121,7 @@ internal sealed class BudgetSample
             Lower = new LossTotal(null, null, 0.2109876, AccountRules.Pair),
             Delta = 1e-9,
             Conversions = [new LossTotal(4.2345678, 1e-9, null, AccountRules.TightConversion), new LossTotal(4.8765432, 1e-9, null, AccountRules.SimpleConversion)],
-            Meaning = MeaningAt(4.5, 1e-8),
+            Meaning = WithLimit ? MeaningAt(4.5, 1e-8) : Meanings.Of([], Delta.Of(0.5)),
             MeaningOfPromise = MeaningAt(6.2, 1e-8),
             Mechanisms = [.. Amounts.Select(AccountFor)],
             Pieces = [.. Amounts.Select(PieceFor)],

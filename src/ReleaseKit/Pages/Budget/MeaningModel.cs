@@ -30,10 +30,17 @@ internal static class MeaningModel
         };
     }
 
-    /// <summary>The odds in words: at most so many times, up or down, and but for which outcomes.</summary>
+    /// <summary>The odds in words: at most so many times, up or down, and but for which outcomes; or that there is no limit.</summary>
     internal static IEnumerable<string> Sentences(MeaningForOne meaning, BudgetWords words)
     {
         yield return words.Say(Key("budget.meaning.setting", words), ("who", words.One));
+        if (double.IsInfinity(meaning.EpsilonPrime))
+        {
+            yield return words.Say("budget.meaning.odds-none");
+            yield return words.Say("budget.meaning.general");
+            yield break;
+        }
+
         yield return meaning.Odds < MostOdds
             ? words.Say(OddsKey(words), ("odds", words.Language.Number(LossPrint.UpTo(meaning.Odds, DigitsOfOdds))))
             : words.Say("budget.meaning.odds-huge", ("odds", words.Language.Number(new PublishedValue((long)MostOdds, 0))));

@@ -190,6 +190,28 @@ public sealed class BudgetStatementTests
         Assert.Equal(step.Result, epsilon, 1e-9);
     }
 
+    /// <summary>Discrete Laplace of scale 5 has ε = 0.2 (Ghosh, Roughgarden and Sundararajan 2012) whatever δ is: 50 in 100 becomes e^0.2 ÷ (1 + e^0.2) = 54.98… in 100.</summary>
+    [Theory]
+    [InlineData(0.05)]
+    [InlineData(0.2)]
+    [InlineData(0.5)]
+    public void Meaning_under_a_large_delta_is_that_of_the_bound_without_one(double delta)
+    {
+        var meaning = BudgetStatement.Of(Accounts.Of(Accounting.Concentrated, Neighbouring.AddOrRemove, With(delta), Accounts.Laplace(5))).Meaning;
+        Assert.Null(meaning.Beta);
+        Assert.Equal(Math.Exp(0.2), meaning.Odds, 1e-12);
+        Assert.Equal(Math.Exp(0.2) / (1 + Math.Exp(0.2)), meaning.Beliefs[3].Highest, 1e-12);
+    }
+
+    [Fact]
+    public void Meaning_under_a_large_delta_without_another_bound_has_no_limit()
+    {
+        var meaning = BudgetStatement.Of(Accounts.Of(Accounting.Concentrated, Neighbouring.AddOrRemove, With(0.5), Accounts.Gaussian(5))).Meaning;
+        Assert.Null(meaning.Beta);
+        Assert.Equal(double.PositiveInfinity, meaning.EpsilonPrime);
+        Assert.All(meaning.Beliefs, belief => Assert.Equal((1, 0), (belief.Highest, belief.Lowest)));
+    }
+
     [Fact]
     public void Meaning_holds_for_all_but_the_share_that_it_names()
     {
@@ -200,4 +222,6 @@ public sealed class BudgetStatementTests
         Assert.All(meaning.Tests, test => Assert.InRange(test.LargestSuccess, test.FalseAlarms, 1));
         Assert.All(meaning.Beliefs, belief => Assert.True(belief.Lowest < belief.Prior && belief.Prior < belief.Highest));
     }
+
+    private static Authorised With(double delta) => Accounts.SixAtOneInABillion with { Delta = delta };
 }

@@ -301,6 +301,19 @@ public sealed class BudgetCheckTests
         Assert.Contains("is not below 1 divided by the 2,000,000,000 lamps", folder.Text("delta-too-large"), StringComparison.Ordinal);
     }
 
+    // 60 lamps are counted in all: 1 ÷ 60 = 0.0166….
+    [Theory]
+    [InlineData("0.5", "\"lamp\"", "Delta 0.5 is not below 1 divided by the 60 lamps that a figure with noise counts.")]
+    [InlineData("0.5", "\"keeper\"", "Delta 0.5 is above 1 in 1,000.")]
+    [InlineData("0.002", "\"lamp\"", "Delta 0.002 is above 1 in 1,000.")]
+    public void Delta_of_any_size_that_protects_nobody_is_a_caution(string delta, string who, string found)
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"delta\": 1e-9", $"\"delta\": {delta}")
+            .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", $"\"who\": {who}");
+        Assert.Contains(found, folder.Text("delta-too-large"), StringComparison.Ordinal);
+    }
+
     /// <summary>Norms by Dwork, McSherry, Nissim and Smith 2006, definition 3: one unit in four cells by 1 each has an l1 of 4 and an l2 of 2.</summary>
     [Theory]
     [InlineData("\"cellsPerUnit\": 4, \"perCell\": 1, \"l2\": 1.5", "an l2 of 2, and an l2 of 1.5")]
