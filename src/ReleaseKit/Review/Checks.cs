@@ -18,6 +18,7 @@ public static class Checks
         new ChartCheck(),
         new SpentCheck(),
         new AuthorisedCheck(),
+        new DeclaredTotalCheck(),
         new AccountingCheck(),
         new UnusedMechanismCheck(),
         new LevelsCheck(),

@@ -50,7 +50,7 @@ public sealed class ProvenBounds
     public bool Meets(Authorised authorised) => authorised switch
     {
         { Rho: { } allowed } => rho <= allowed * (1 + Tolerance),
-        { Epsilon: { } epsilon } => Curves.Any(curve => curve.EpsilonAt(Delta.AtMost(authorised.Delta ?? 0)).Value <= epsilon * (1 + Tolerance)),
+        { Epsilon: { } epsilon } => Curves.Any(curve => curve.EpsilonAt(Delta.AtMost((authorised.Delta ?? 0) * (1 + Tolerance))).Value <= epsilon * (1 + Tolerance)),
         _ => false,
     };
 

@@ -1,4 +1,5 @@
 using System.Globalization;
+using ReleaseKit.Appraisal;
 using ReleaseKit.Privacy.Losses;
 using ReleaseKit.Releases;
 
@@ -20,6 +21,25 @@ internal static class BudgetText
     }
 
     public static string Plain(double number) => Signs.Of(number);
+
+    /// <summary>"epsilon 6 at delta 0.000000001".</summary>
+    public static string Authorised(Authorised authorised) => authorised switch
+    {
+        { Rho: { } rho } => $"rho {Plain(rho)}",
+        { Delta: > 0 and var delta } => $"epsilon {Plain(authorised.Epsilon!.Value)} at delta {Plain(delta)}",
+        _ => $"epsilon {Plain(authorised.Epsilon!.Value)} without delta",
+    };
+
+    /// <summary>A total as it can be pasted: "rho 0.005540167".</summary>
+    public static string Spent(LossTotal total) => total switch
+    {
+        { Rho: { } rho } => $"rho {Paste(rho)}",
+        { Delta: > 0 and var delta } => $"epsilon {Paste(total.Epsilon!.Value)} and delta {Paste(delta)}",
+        _ => $"epsilon {Paste(total.Epsilon!.Value)}",
+    };
+
+    /// <summary>A limit, rounded down to six decimals.</summary>
+    public static string Down(double allowed) => Plain(Math.Floor(allowed * 1e6) / 1e6);
 
     /// <summary>"Sigma 9.5", "Scale from column \"owed_scale\"".</summary>
     public static string Law(Mechanism mechanism) => mechanism.Law switch

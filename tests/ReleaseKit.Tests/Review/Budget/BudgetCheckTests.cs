@@ -113,6 +113,43 @@ public sealed class BudgetCheckTests
     }
 
     [Fact]
+    public void Mechanism_that_is_not_published_is_carried_by_no_figure()
+    {
+        using var folder = new TestFolder();
+        folder.WithLit(BudgetFolder.Lit.Replace("\"sigma\"", "\"use\": \"not-published\", \"sigma\"", StringComparison.Ordinal));
+        Assert.Contains("but 3 published figures carry it, in column \"lit\" of table \"lamps\".", folder.Text("not-published-used"), StringComparison.Ordinal);
+    }
+
+    // Sigma 4: rho 1 ÷ 32 = 0.03125; scale 3 in two cells: 2 × (1/3)·tanh(1/6) = 0.110…; authorised is rho 0.2.
+    [Theory]
+    [InlineData("\"rho\": 0.2", "\"rho\": 0.5", true)]
+    [InlineData("\"rho\": 0.2", "\"rho\": 0.09", true)]
+    [InlineData("\"rho\": 0.2", "\"rho\": 0.08", false)]
+    [InlineData("\"epsilon\": 4, \"delta\": 1e-9", "\"rho\": 0.5", true)]
+    [InlineData("\"epsilon\": 6, \"delta\": 1e-9", "\"rho\": 0.04", false)]
+    public void Declared_total_above_the_authorised_one_is_a_stop(string authorised, string spent, bool isAbove)
+    {
+        using var folder = new TestFolder();
+        folder.WithLit(BudgetFolder.Lit.Replace("\"sigma\"", $"\"spent\": {{ {spent} }}, \"sigma\"", StringComparison.Ordinal))
+            .Edit("mechanisms.json", "\"epsilon\": 6.0, \"delta\": 1e-9", authorised);
+        if (isAbove)
+            Assert.Contains("The mechanisms declare rho 0.", folder.Text("declared-above-authorised"), StringComparison.Ordinal);
+        else
+            folder.HasNo("declared-above-authorised");
+    }
+
+    // Scale 3 in two cells: epsilon 2 ÷ 3; what is authorised without delta is met by epsilon alone, whatever its rho.
+    [Fact]
+    public void Declared_total_that_another_currency_meets_is_no_finding()
+    {
+        using var folder = new TestFolder();
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-laplace", "scale": 4, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "rho": 0.0311 } }""")
+            .Edit("mechanisms.json", "\"epsilon\": 6.0, \"delta\": 1e-9", "\"epsilon\": 0.95");
+        folder.HasNo("declared-above-authorised");
+        folder.HasNo("authorised-exceeded");
+    }
+
+    [Fact]
     public void Totals_beside_their_parts_move_a_unit_twice()
     {
         using var folder = new TestFolder();
