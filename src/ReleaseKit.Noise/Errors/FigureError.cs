@@ -69,16 +69,16 @@ public sealed class FigureError
     /// one.</summary>
     /// <param name="width">In the unit of the figure; below 0 gives 0.</param>
     public double AttainedAt(double width) => rounded is null
-        ? Law.Within(width - chain.Shift)
+        ? Law.Within(chain.NoiseThatStaysWithin(width))
         : rounded.AttainedAt(Lattice.ToStep(Lattice.Floor(width / chain.Unit)));
 
     /// <summary>
     /// The range of values before noise at a coverage for one published value, cut to the possible values and never empty.
     /// </summary>
     /// <remarks>
-    /// Without thresholds: y ± margin; for a y outside what is possible the far end is the larger one of that and of the likelihood-ratio
-    /// range (Feldman &amp; Cousins 1998). With a threshold: the law given that it was passed, inverted; so among the figures that passed
-    /// it the range holds the value before noise at the coverage, whatever that value is. A 0 under <see cref="AfterStep.ZeroBelow"/> is
+    /// Without thresholds: y ± margin. With a threshold: the law given that it was passed, inverted; so among the figures that passed
+    /// it the range holds the value before noise at the coverage, whatever that value is; an end is infinite where the set has none. For a y
+    /// outside what is possible the far end is the larger one of that and of the likelihood-ratio range (Feldman &amp; Cousins 1998). A 0 under <see cref="AfterStep.ZeroBelow"/> is
     /// answered by
     /// <see cref="RangeWhenNotPublished"/>.
     /// </remarks>
@@ -92,7 +92,12 @@ public sealed class FigureError
         if (published == 0 && Steps.Any(step => step is AfterStep.ZeroBelow))
             return RangeWhenNotPublished(coverage, possible);
         var (low, high) = Kept(passedRanges, published, coverage, threshold.At);
-        return possible.Cut(low, Math.Max(high, BeyondLowest(published, coverage, possible)), coverage.Share);
+        var reached = Math.Min(low, BelowHighest(published, coverage, possible));
+        return possible.Cut(reached, Math.Max(high, BeyondLowest(published, coverage, possible)), coverage.Share) with
+        {
+            UncutLow = low,
+            UncutHigh = high,
+        };
     }
 
     /// <summary>
@@ -103,6 +108,19 @@ public sealed class FigureError
     public ErrorRange RangeWhenNotPublished(Coverage coverage, PossibleValues possible) => threshold is null
         ? throw new InvalidOperationException("No step of this figure keeps small values from being published.")
         : possible.Cut(double.NegativeInfinity, threshold.HighestBelow(coverage), 1 - coverage.Rest / 2);
+
+    /// <summary>
+    /// The largest chance, over all values before noise, that the range of what was published misses the value. Where only some figures are
+    /// published it is the chance among those. Where small values are published as 0 it counts every case: a 0 misses above its end H, where
+    /// at most β = (1 − c)/2 become 0, and the rest misses in at most 2β; up to H a 0 never misses. So it is at most β + (1 − β)·2β.
+    /// </summary>
+    public double MissesAtMost(Coverage coverage)
+    {
+        if (threshold is null)
+            return 1 - MarginAt(coverage).Attained;
+        var beta = coverage.Rest / 2;
+        return Steps.Any(step => step is AfterStep.ZeroBelow) ? beta + (1 - beta) * coverage.Rest : coverage.Rest;
+    }
 
     /// <summary>
     /// Whether the noise and the steps can lead to a published value from some possible value before noise: false for a value off the grid,
@@ -182,7 +200,7 @@ public sealed class FigureError
     private double LikelyReach(double value, Coverage coverage)
     {
         var reach = likelihood is null ? double.NaN : Kept(reaches, value, coverage, (v, c) => (0, likelihood.UpperEnd(v, 0, c))).High;
-        return double.IsNaN(reach) ? MarginAt(coverage).Width : Math.Max(reach, Law is LatticeLaw ? chain.Unit : 0);
+        return Math.Max(double.IsNaN(reach) ? MarginAt(coverage).Width : reach, Law is LatticeLaw ? chain.Unit : 0);
     }
 
     private (double Low, double High) Kept(
@@ -202,6 +220,6 @@ public sealed class FigureError
         }
         // |E| ≤ |N| + shift whatever the value before noise is, so the margin of N and the shift together hold E at least as often.
         var noise = Law.HalfWidthAt(coverage);
-        return noise with { Width = noise.Width + chain.Shift };
+        return noise with { Width = chain.OnSpacing(noise.Width + chain.Shift) };
     }
 }

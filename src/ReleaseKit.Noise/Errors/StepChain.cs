@@ -102,6 +102,19 @@ internal sealed class StepChain
     public bool IsOnSpacing(double published) =>
         Spacing == 0 || Lattice.IsWhole(published / Spacing) || Steps.Any(step => StepRules.BoundOf(step) == published);
 
+    /// <summary>
+    /// The largest half-width that published values can differ by from values on the grid within a given one: a whole number of grid steps
+    /// where a lattice law is rounded to a whole number of them. In the figure's unit.
+    /// </summary>
+    public double OnSpacing(double width) => IsOnGrid ? Lattice.Floor(width / Unit) * Unit : width;
+
+    /// <summary>So far the noise alone can reach, in the figure's unit, if rounding on top of it must keep the error within a
+    /// half-width.</summary>
+    public double NoiseThatStaysWithin(double width) =>
+        IsOnGrid ? (Lattice.Ceiling(Lattice.Floor(width / Unit) + 1 - Shift / Unit) - 1) * Unit : width - Shift;
+
+    private bool IsOnGrid => law is LatticeLaw && roundings.All(rounding => Lattice.IsWhole(rounding.Unit / Unit));
+
     private double Spacing => roundings.Count > 0 ? roundings[^1].Unit : law is LatticeLaw ? Unit : 0;
 
     private double Reaching(double target, int count)

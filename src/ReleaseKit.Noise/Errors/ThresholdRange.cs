@@ -46,13 +46,18 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
 
     private double LowEnd(double reaching, double tail)
     {
-        bool Holds(double x) => IsNotTooHigh(reaching, x, tail);
-        return scan is null ? Search.Farthest(reaching, -stride, lattice is not null, Holds) : scan.Lowest(reaching, tail, Holds);
+        bool Holds(double x) => RatioOfPassed(reaching, x) > tail;
+        if (scan is not null)
+            return scan.Lowest(reaching, tail, Holds);
+        // The ratio falls with x: where its limit still holds, every x below does, and the range has no lower end.
+        return law.TailRatioFarOut(reaching - passing) > tail
+            ? double.NegativeInfinity
+            : Search.Farthest(reaching, -stride, lattice is not null, Holds);
     }
 
     private double HighEnd(double exceeding, double start, double tail)
     {
-        bool Holds(double x) => IsNotTooLow(exceeding, x, tail);
+        bool Holds(double x) => 1 - RatioOfPassed(exceeding, x) > tail;
         if (double.IsPositiveInfinity(exceeding) || exceeding <= passing)
             return exceeding <= passing ? start : exceeding;
         if (scan is not null)
@@ -60,19 +65,15 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
         return Holds(start) ? Search.Farthest(start, stride, lattice is not null, Holds) : start;
     }
 
-    private bool IsNotTooHigh(double reaching, double x, double tail)
+    // P(noised ≥ place | passed; x) for a place from the threshold up; NaN where x never passes. Under random rounding the noise carries a
+    // uniform 0..r − 1 as well; chances are taken relative to the largest one that passes, none of which need be one that a double can hold.
+    private double RatioOfPassed(double place, double x)
     {
-        var passed = ChanceFrom(passing - x);
-        return passed > 0 && ChanceFrom(reaching - x) > tail * passed;
+        var blur = RandomUnit - 1;
+        var from = passing - x - blur;
+        double Tail(double distance) => Mean(shift => law.TailRatio(from, distance + blur - shift));
+        return Tail(place - passing) / Tail(0);
     }
-
-    private bool IsNotTooLow(double exceeding, double x, double tail) =>
-        ChanceFrom(passing - x) is var passed && passed > 0 && passed - ChanceFrom(exceeding - x) > tail * passed;
-
-    // P(N ≥ place); under random rounding the noise carries a uniform 0..r − 1 as well.
-    private double ChanceFrom(double place) => lattice is null
-        ? law.AtLeast(place)
-        : Mean(shift => lattice.AtLeastStep(Lattice.ToStep(place - shift)));
 
     private double ChanceBelow(double place) => lattice is null
         ? law.AtMost(place)
@@ -80,11 +81,11 @@ internal sealed class ThresholdRange(NoiseLaw law, StepChain chain)
 
     private double Mean(Func<long, double> chance)
     {
-        if (chain.ExactRounding is not { How: RoundingHow.AtRandom } random)
-            return chance(0);
         var sum = 0.0;
-        for (var shift = 0L; shift < random.Unit; shift++)
+        for (var shift = 0L; shift < RandomUnit; shift++)
             sum += chance(shift);
-        return sum / random.Unit;
+        return sum / RandomUnit;
     }
+
+    private long RandomUnit => chain.ExactRounding is { How: RoundingHow.AtRandom } random ? random.Unit : 1;
 }

@@ -26,6 +26,10 @@ public abstract record ContinuousLaw : NoiseLaw
     /// <inheritdoc/>
     public override double RelativeDensity(double offset) => Density(offset) / Density(0);
 
+    internal override double TailRatio(double from, double distance) => AtLeast(from) is > 0 and var whole
+        ? AtLeast(from + distance) / whole
+        : double.NaN;
+
     /// <summary>P(N ≥ x) for x ≥ 0, to full relative accuracy.</summary>
     private protected abstract double TailFrom(double x);
 

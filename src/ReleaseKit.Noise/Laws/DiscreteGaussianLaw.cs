@@ -55,6 +55,18 @@ public sealed record DiscreteGaussianLaw : LatticeLaw
     /// <inheritdoc/>
     public override double Probability(long step) => Weight(step) / whole;
 
+    internal override double TailRatio(double from, double distance)
+    {
+        if (from <= GaussianTail.Far * width)
+            return base.TailRatio(from, distance);
+        if (from / width / width < GaussianTail.FlattestSum)
+            return GaussianTail.Ratio((from - 0.5) / width, distance / width);
+        var fall = Math.Exp(-0.5 * (distance / width) * ((from + from + distance) / width));
+        return fall == 0 ? 0 : fall * (SumPast(from + distance) / SumPast(from));
+    }
+
+    internal override double TailRatioFarOut(double distance) => distance > 0 ? 0 : 1;
+
     private protected override double TailFrom(long step) => width >= Wide ? WideTail((step - 0.5) / width) : SumFrom(step, 0) / whole;
 
     private double Weight(double step) => Math.Exp(-0.5 * (step / width) * (step / width));
@@ -68,6 +80,19 @@ public sealed record DiscreteGaussianLaw : LatticeLaw
             var term = (power == 0 ? 1 : power == 1 ? k : k * k) * Weight(k);
             sum += term;
             if (term == 0 || (term < 1e-18 * sum && k > 2 * width))
+                return sum;
+        }
+    }
+
+    // Σ e^(−k²/2s²) over k ≥ from ÷ its first term, for a place far out, where the terms fall as fast as a geometric series.
+    private double SumPast(double from)
+    {
+        var sum = 0.0;
+        for (var i = 0.0; ; i++)
+        {
+            var term = Math.Exp(-0.5 * (i / width) * ((from + from + i) / width));
+            sum += term;
+            if (term < 1e-18 * sum)
                 return sum;
         }
     }

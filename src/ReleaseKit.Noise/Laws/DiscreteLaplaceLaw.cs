@@ -37,6 +37,11 @@ public sealed record DiscreteLaplaceLaw : LatticeLaw
     /// <inheritdoc/>
     public override double Probability(long step) => drop / (1 + ratio) * Power(Math.Abs((double)step));
 
+    internal override double TailRatio(double from, double distance) =>
+        from > 0 ? TailRatioFarOut(distance) : base.TailRatio(from, distance);
+
+    internal override double TailRatioFarOut(double distance) => Power(distance);
+
     private protected override double TailFrom(long step) => Power(step) / (1 + ratio);
 
     private double Power(double exponent) => Math.Exp(-exponent * (Grid / Scale));

@@ -32,6 +32,12 @@ public sealed record GaussianLaw : ContinuousLaw
     /// <inheritdoc/>
     public override double Within(double w) => w < 0 ? 0 : SpecialFunctions.Erf(w / Sigma * Constants.Sqrt1Over2);
 
+    internal override double TailRatio(double from, double distance) => from > GaussianTail.Far * Sigma
+        ? GaussianTail.Ratio(from / Sigma, distance / Sigma)
+        : base.TailRatio(from, distance);
+
+    internal override double TailRatioFarOut(double distance) => distance > 0 ? 0 : 1;
+
     private protected override double TailFrom(double x) => 0.5 * SpecialFunctions.Erfc(x / Sigma * Constants.Sqrt1Over2);
 
     private protected override double Quantile(Coverage coverage) => Sigma * Constants.Sqrt2 * SpecialFunctions.ErfcInv(coverage.Rest);

@@ -30,6 +30,11 @@ public sealed record LaplaceLaw : ContinuousLaw
     /// <inheritdoc/>
     public override double Within(double w) => w < 0 ? 0 : -Elementary.ExpM1(-w / Scale);
 
+    internal override double TailRatio(double from, double distance) =>
+        from > 0 ? TailRatioFarOut(distance) : base.TailRatio(from, distance);
+
+    internal override double TailRatioFarOut(double distance) => Math.Exp(-distance / Scale);
+
     private protected override double TailFrom(double x) => 0.5 * Math.Exp(-x / Scale);
 
     private protected override double Quantile(Coverage coverage) => -Scale * Elementary.Log1P(-coverage.Share);

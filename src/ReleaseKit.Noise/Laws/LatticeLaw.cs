@@ -65,6 +65,10 @@ public abstract record LatticeLaw : NoiseLaw
     /// <inheritdoc/>
     public override double RelativeDensity(double offset) => Probability(Lattice.ToStep(Math.Round(offset / Grid))) / Probability(0);
 
+    internal override double TailRatio(double from, double distance) => AtLeastStep(Lattice.ToStep(from)) is > 0 and var whole
+        ? AtLeastStep(Lattice.ToStep(from + distance)) / whole
+        : double.NaN;
+
     /// <summary>P(K ≥ step) for step ≥ 1, to full relative accuracy.</summary>
     private protected abstract double TailFrom(long step);
 

@@ -46,4 +46,13 @@ public abstract record NoiseLaw
     /// <summary>The density or pmf at an offset ÷ its largest value, in [0, 1]; a lattice law is drawn at the nearest step.</summary>
     /// <param name="offset">In the unit of the figure.</param>
     public abstract double RelativeDensity(double offset);
+
+    /// <summary>
+    /// P(N ≥ from + distance) ÷ P(N ≥ from), also where both chances are too small for a double; NaN where the noise does not reach so far.
+    /// Both in steps for a lattice law, in the unit of the figure for a continuous one.
+    /// </summary>
+    internal abstract double TailRatio(double from, double distance);
+
+    /// <summary>What <see cref="TailRatio"/> tends to as the place goes to ∞; 0 for noise that ends somewhere.</summary>
+    internal virtual double TailRatioFarOut(double distance) => 0;
 }

@@ -47,9 +47,12 @@ public sealed record AppraisedFigure
     public int Parts { get; init; }
     public int PartsLeftOut { get; init; }
 
-    /// <summary>Ranges at the lower, main and upper coverage, in that order; empty where there is no margin.</summary>
+    /// <summary>Ranges at the lower, main and upper coverage, in that order, as far as they are known; empty where there is no margin.</summary>
     public required IReadOnlyList<FigureRange> Ranges { get; init; }
-    public FigureRange? Main => Ranges.Count == 0 ? null : Ranges[1];
+    public FigureRange? Main => Ranges.Count < 2 ? null : Ranges[1];
+
+    /// <summary>What the coverage of its ranges is a promise about.</summary>
+    public RangePromise Promise => Error is null ? RangePromise.Every : RangePromises.Of(Error, Value.Unscaled == 0);
 
     /// <summary>Whether words say "at least" of a range: it attains more than its nominal coverage, its margin is an upper bound, or a threshold decides.</summary>
     public bool HoldsAtLeast(FigureRange range) =>
@@ -78,7 +81,7 @@ public sealed record FigureRange
 {
     public required Coverage Coverage { get; init; }
 
-    /// <summary>Published − uncut low, and uncut high − published; equal unless the range is uneven.</summary>
+    /// <summary>Published − uncut low, and uncut high − published; equal unless the range is uneven. Under a threshold the cut ends count.</summary>
     public required double MarginDown { get; init; }
     public required double MarginUp { get; init; }
     public double Margin => Math.Max(MarginDown, MarginUp);

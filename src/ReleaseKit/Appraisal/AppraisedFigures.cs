@@ -35,7 +35,7 @@ internal sealed class AppraisedFigures(Release release)
             Address = FigureAddress.Canonical(table, measure, at.Row),
             Id = IdOf(table, measure, at.Row),
             Value = value,
-            Printed = ranges.Count > 0 ? ranges[1].Printed.Value : PrintedWithoutMargin(measure, value),
+            Printed = ranges.Count > 0 ? ranges[^1].Printed.Value : PrintedWithoutMargin(measure, value),
             Status = measure.StatusAt(at.Row),
             HasNumber = hasNumber,
             Error = error?.Error,
@@ -45,7 +45,7 @@ internal sealed class AppraisedFigures(Release release)
             PartsLeftOut = origin.PartsLeftOut,
             Ranges = ranges,
             Reliability = ReliabilityOf(measure, value, hasNumber, origin, ranges),
-            MarginToFigure = ranges.Count > 0 ? ReliabilityRule.Share(value.ToDecimal(), ranges[1].Margin, CanBeNegative(measure)) : null,
+            MarginToFigure = ranges.Count > 1 ? ReliabilityRule.Share(value.ToDecimal(), ranges[1].Margin, CanBeNegative(measure)) : null,
             Possible = PossibleOf.Measure(measure),
             LeftAsItWas = error?.LeftAsItWas,
             Case = new(SpecialCase.None, false, false, false, false),
@@ -54,7 +54,7 @@ internal sealed class AppraisedFigures(Release release)
 
     private Reliability ReliabilityOf(Measure measure, PublishedValue value, bool hasNumber, FigureOrigin origin, IReadOnlyList<FigureRange> ranges)
     {
-        if (ranges.Count > 0)
+        if (ranges.Count > 1)
             return ReliabilityRule.Of(value.ToDecimal(), ranges[1].Margin, CanBeNegative(measure), release.Reliability);
         return (hasNumber, origin.Rule) switch
         {

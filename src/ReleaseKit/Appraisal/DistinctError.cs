@@ -12,14 +12,16 @@ namespace ReleaseKit.Appraisal;
 internal sealed class DistinctError
 {
     private readonly Coverages coverages;
+
+    // Those that are known: a tabulated law may lack the mass for the larger coverages.
     private readonly HalfWidth[] halfWidths;
 
     public DistinctError(FigureError error, Coverages coverages)
     {
         Error = error;
         this.coverages = coverages;
-        halfWidths = [.. coverages.All.Select(HalfWidthAt)];
-        LeftAsItWas = error.MarginAt(coverages.Main).Width == 0 ? error.Law.Within(0) : null;
+        halfWidths = [.. coverages.All.TakeWhile(Reaches).Select(HalfWidthAt)];
+        LeftAsItWas = HasMain && error.MarginAt(coverages.Main).Width == 0 ? error.Law.Within(0) : null;
     }
 
     public FigureError Error { get; }
@@ -29,6 +31,9 @@ internal sealed class DistinctError
 
     /// <summary>Whether the noise and what is made of it lie on whole numbers.</summary>
     public bool IsOnWholeGrid => Error.Law is LatticeLaw { Grid: var grid } && grid == Math.Floor(grid);
+
+    /// <summary>Whether some half-width reaches the main coverage.</summary>
+    public bool HasMain => halfWidths.Length > 1;
 
     public HalfWidth MainHalfWidth => halfWidths[1];
 
@@ -40,19 +45,27 @@ internal sealed class DistinctError
     }
 
     /// <summary>Whether some half-width reaches the coverage: a tabulated law may lack the mass.</summary>
-    public bool Reaches(Coverage coverage) => Error.Law.Within(double.PositiveInfinity) >= coverage.Share;
+    public bool Reaches(Coverage coverage) => coverage.IsReachedBy(Error.Law.Within(double.PositiveInfinity));
 
-    /// <summary>The ranges of one published value at the lower, main and upper coverage; none where an end is without bound (a zero that stands for all small values).</summary>
+    /// <summary>Whether one published value has a range at the main coverage.</summary>
+    public bool HasMainRange(PublishedValue value, PossibleValues possible) =>
+        HasMain && (!Error.DependsOnPublished || HasEnds(RangeAt(value.ToDouble(), 1, possible)));
+
+    /// <summary>
+    /// The ranges of one published value at the lower, main and upper coverage, as far as there are any: with the coverage a table of noise can run out of mass,
+    /// and an end can come to have no bound (that of a zero that stands for all small values).
+    /// </summary>
     public IReadOnlyList<FigureRange> RangesOf(PublishedValue value, Printing printing)
     {
-        var ranges = new ErrorRange[halfWidths.Length];
-        for (var at = 0; at < ranges.Length; at++)
-            ranges[at] = RangeAt(value.ToDouble(), at, printing.Possible);
-        if (ranges.Any(range => !double.IsFinite(range.Low) || !double.IsFinite(range.High)))
+        var ranges = halfWidths.Select((_, at) => RangeAt(value.ToDouble(), at, printing.Possible)).TakeWhile(HasEnds).ToList();
+        if (ranges.Count == 0)
             return [];
-        var unit = printing.UnitFor(value, Margins(value.ToDouble(), 1, ranges[1]).Larger);
+        var main = Math.Min(1, ranges.Count - 1);
+        var unit = printing.UnitFor(value, Margins(value.ToDouble(), main, ranges[main]).Larger);
         return [.. ranges.Select((range, at) => FigureRangeOf(value, at, range, printing, unit))];
     }
+
+    private static bool HasEnds(ErrorRange range) => double.IsFinite(range.Low) && double.IsFinite(range.High);
 
     private FigureRange FigureRangeOf(PublishedValue value, int at, ErrorRange range, Printing printing, PrintUnit unit)
     {
@@ -71,9 +84,16 @@ internal sealed class DistinctError
         };
     }
 
-    private MarginPair Margins(double value, int at, ErrorRange range) => Error.DependsOnPublished
-        ? new(Math.Max(0, value - (double.IsFinite(range.UncutLow) ? range.UncutLow : range.Low)), Math.Max(0, range.UncutHigh - value))
-        : new(halfWidths[at].Width, halfWidths[at].Width);
+    /// <summary>Under a threshold a range can go on without end, or far beyond the possible: its margins end with the possible, unless the value itself lies outside.</summary>
+    private MarginPair Margins(double value, int at, ErrorRange range)
+    {
+        if (!Error.DependsOnPublished)
+            return new(halfWidths[at].Width, halfWidths[at].Width);
+        var isInside = range.Low <= value && value <= range.High;
+        var low = isInside || !double.IsFinite(range.UncutLow) ? range.Low : range.UncutLow;
+        var high = isInside || !double.IsFinite(range.UncutHigh) ? range.High : range.UncutHigh;
+        return new(Math.Max(0, value - low), Math.Max(0, high - value));
+    }
 
     private ErrorRange RangeAt(double value, int at, PossibleValues possible)
     {

@@ -1,4 +1,5 @@
 using ReleaseKit.Noise;
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Appraisal;
@@ -7,6 +8,7 @@ namespace ReleaseKit.Appraisal;
 internal sealed class MeasureErrors(Measure measure, Coverage main)
 {
     private readonly HashSet<DistinctError> errors = [];
+    private readonly PossibleValues possible = PossibleOf.Measure(measure);
 
     public Measure Measure { get; } = measure;
 
@@ -18,12 +20,19 @@ internal sealed class MeasureErrors(Measure measure, Coverage main)
 
     public bool HasSums { get; private set; }
 
-    public void Add(DistinctError error, bool isSum)
+    /// <summary>Adds a figure, if its error reaches the main coverage.</summary>
+    public void Add(DistinctError error, PublishedValue value, bool isSum)
     {
+        if (!error.HasMain)
+            return;
         errors.Add(error);
-        Ranges++;
-        // Under a threshold the range is worked out for each figure: it misses at most as often as it says.
-        ExpectedMisses += error.Error.DependsOnPublished ? main.Rest : 1 - error.MainHalfWidth.Attained;
+        Ranges += error.HasMainRange(value, possible) ? 1 : 0;
+        ExpectedMisses += Misses(error);
         HasSums |= isSum;
     }
+
+    /// <summary>Under a threshold the range is worked out for each figure, and whether it became 0 is chance too: it counts with all that can come of it.</summary>
+    private double Misses(DistinctError error) => error.Error.DependsOnPublished
+        ? error.Error.MissesAtMost(main)
+        : 1 - error.MainHalfWidth.Attained;
 }

@@ -18,13 +18,20 @@ internal readonly record struct PrintUnit(int Exponent)
     /// <summary>The unit that leaves a margin two digits, but no finer than so many decimals.</summary>
     public static PrintUnit OfTwoDigits(decimal margin, int? decimals)
     {
-        var leading = LeadingPlace(margin);
+        var leading = margin == 0 ? 0 : LeadingPlace(margin);
         return new(Math.Max(leading - 1, decimals is { } finest ? -finest : int.MinValue));
     }
 
     /// <summary>A number of the arithmetic as a decimal of 12 significant digits.</summary>
     /// <exception cref="OverflowException">It is infinite or beyond what can be printed.</exception>
     public static decimal Rounded(double number) => Rounded(number, Digits);
+
+    /// <summary>A number other than 0 to two significant digits.</summary>
+    public static decimal InTwoDigits(decimal number)
+    {
+        var unit = OfTwoDigits(Math.Abs(number), null);
+        return unit.Value(unit.Nearest(number));
+    }
 
     /// <summary>The end of a range, times a factor, with enough digits to tell on which side of a unit it lies.</summary>
     public decimal Rounded(double end, decimal factor)

@@ -47,13 +47,13 @@ internal sealed record Printing(bool Whole, int? Decimals, decimal Factor, Possi
     private (decimal Steps, bool IsCut) LowEnd(decimal uncut, ErrorRange range, PrintUnit unit)
     {
         var low = unit.Down(unit.Rounded(range.Low, Factor));
-        return IsBelow(unit.Value(uncut), Possible.Lowest) || low < uncut ? (low, true) : (uncut, false);
+        return range.UncutLow < Possible.Lowest || IsBelow(unit.Value(uncut), Possible.Lowest) || low < uncut ? (low, true) : (uncut, false);
     }
 
     private (decimal Steps, bool IsCut) HighEnd(decimal uncut, ErrorRange range, PrintUnit unit)
     {
         var high = unit.Up(unit.Rounded(range.High, Factor));
-        return IsBelow(-unit.Value(uncut), -Possible.Highest) || high > uncut ? (high, true) : (uncut, false);
+        return range.UncutHigh > Possible.Highest || IsBelow(-unit.Value(uncut), -Possible.Highest) || high > uncut ? (high, true) : (uncut, false);
     }
 
     private bool IsBelow(decimal end, double bound) => double.IsFinite(bound) && end < Scaled(bound);

@@ -38,6 +38,9 @@ public sealed record MeasureFacts
     /// <summary>Whether some figures have ranges whose reach depends on the figure.</summary>
     public required bool HasThreshold { get; init; }
 
+    /// <summary>What the coverage of its ranges is a promise about, zeros that stand for small values apart.</summary>
+    public RangePromise Promise { get; init; }
+
     /// <summary>Whether some totals of this measure are the sums of the published parts.</summary>
     public required bool HasSums { get; init; }
 

@@ -32,7 +32,7 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
         var found = new MeasureErrors(measure, release.Coverages.Main);
         for (var row = 0; row < release.Tables[table].RowCount; row++)
             if (measure.HasNumber(row) && origins.Of(new(table, index, row)).Error is { } error)
-                found.Add(error, measure.RuleAt(row) is NoiseRule.SumOver);
+                found.Add(error, measure.ValueAt(row).Times(measure.Multiplier), measure.RuleAt(row) is NoiseRule.SumOver);
         return found;
     }
 
@@ -51,6 +51,7 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
             Totals = totals,
             IsRounded = found.Errors.Any(error => error.Error.Steps.OfType<AfterStep.RoundTo>().Any()),
             HasThreshold = margins.Count < found.Errors.Count,
+            Promise = found.Errors.Select(error => RangePromises.Of(error.Error, isZero: false)).DefaultIfEmpty().Max(),
             SmallestMargin = margins.Count == 0 ? null : margins.MinBy(margin => margin.ToDecimal()),
             LargestMargin = margins.Count == 0 ? null : margins.MaxBy(margin => margin.ToDecimal()),
             Distance999 = Distance(found),

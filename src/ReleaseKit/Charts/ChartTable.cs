@@ -30,7 +30,7 @@ internal static class ChartTable
         var title = ("title", context.In(chart.Title));
         if (figures.Rows.Select(row => row.Figure.Main).FirstOrDefault(range => range is not null) is not { } first)
             return context.Language.Text("charts.table.caption-plain", title);
-        return context.Language.Text("charts.table.caption", title, ("cases", context.Language.Cases(first.Coverage, OrderedWords.IsMoreThanNominal(figures))));
+        return context.Language.Text("charts.table.caption" + OrderedWords.PromiseOf(figures), title, ("cases", context.Language.Cases(first.Coverage, OrderedWords.IsMoreThanNominal(figures))));
     }
 
     private static void AppendRow(StringBuilder html, OrderedRow row, SiteContext context, string page)

@@ -26,7 +26,7 @@ internal sealed record HeroMark(MarkSize Size, double Width, double Height, doub
             svg.AppendPath("hair", $"M0 {SvgMark.Number(Size.Middle)}H{SvgMark.Number(Width)}");
         AppendGuides(svg, figure, scale);
         svg.Append(SvgMark.Paint(SwelledRule.Of(subject, scale, Size).Shapes));
-        for (var index = 0; index < figure.Ranges.Count; index++)
+        for (var index = 0; index < subject.Ranges.Count; index++)
             AppendMeasure(svg, figure.Ranges[index], scale, language, index);
         return svg.Append("</svg>").ToString();
     }

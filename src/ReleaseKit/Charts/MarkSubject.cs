@@ -11,7 +11,7 @@ public sealed record MarkSubject
 {
     public required double Value { get; init; }
 
-    /// <summary>Ranges at the lower, main and upper coverage; empty for a figure without a margin, which is a stem alone.</summary>
+    /// <summary>Ranges at the lower, main and upper coverage, the last left out where it is not known; empty for a figure without a margin, which is a stem alone.</summary>
     public required IReadOnlyList<MarkRange> Ranges { get; init; }
 
     /// <summary>The thickness of the body, 0 to 1, at an offset of the noise (published − before noise); null: a line with stops.</summary>
@@ -31,7 +31,7 @@ public sealed record MarkSubject
     public bool IsStemAlone => Ranges.Count == 0;
     public MarkRange Core => Ranges[0];
     public MarkRange Body => Ranges[1];
-    public MarkRange Tail => Ranges[2];
+    public MarkRange Tail => Ranges[^1];
 
     /// <summary>The figure in the unit in which it is printed: shares that the files hold in ones count to 100.</summary>
     public static MarkSubject Of(AppraisedFigure figure)
@@ -42,7 +42,7 @@ public sealed record MarkSubject
         return new()
         {
             Value = factor * figure.Value.ToDouble(),
-            Ranges = [.. figure.Ranges.Select(range => RangeOf(range, factor))],
+            Ranges = figure.Main is null ? [] : [.. figure.Ranges.Select(range => RangeOf(figure, range, factor))],
             Density = error is null ? null : offset => error.RelativeDensity(offset / factor),
             Law = error,
             Grid = error?.Law is LatticeLaw law ? law.Grid * factor : 0,
@@ -64,9 +64,9 @@ public sealed record MarkSubject
         return share < 1e-9 ? here : here + (share * (Density((step + 1) * Grid) - here));
     }
 
-    // A range of a figure below the possible ends higher than the law alone would have it, so the larger of both ends is drawn. An end without a limit of its own is
-    // drawn at the limit of the possible.
-    private static MarkRange RangeOf(FigureRange range, double factor) => new(
-        factor * (double.IsFinite(range.UncutLow) ? Math.Min(range.UncutLow, range.Low) : range.Low),
-        factor * (double.IsFinite(range.UncutHigh) ? Math.Max(range.UncutHigh, range.High) : range.High));
+    // A range of a figure below the possible ends higher than the law alone would have it, so the larger of both ends is drawn. Under a threshold a range can reach
+    // far beyond the possible, or have no end there: it is drawn up to its limit.
+    private static MarkRange RangeOf(AppraisedFigure figure, FigureRange range, double factor) => figure.Promise is RangePromise.Every
+        ? new(factor * Math.Min(range.UncutLow, range.Low), factor * Math.Max(range.UncutHigh, range.High))
+        : new(factor * range.Low, factor * range.High);
 }

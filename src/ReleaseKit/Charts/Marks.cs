@@ -23,15 +23,19 @@ public static class Marks
     public static string Description(AppraisedFigure figure, ILanguage language)
     {
         var value = language.WithUnit(figure.Printed, figure.Measure);
-        if (figure.Ranges.Count == 0)
+        if (figure.Main is null)
             return language.Text("marks.stem-alone", ("figure", value));
         var ranges = figure.Ranges.Select(range => language.Text(
-            "marks.range",
-            ("cases", language.Cases(range.Coverage, figure.HoldsAtLeast(range))),
+            "marks.range" + PromiseKey.Of(figure.Promise),
+            ("cases", CasesOf(figure, range, language)),
             ("low", language.NumberInProse(range.Printed.Low)),
             ("high", language.NumberInProse(range.Printed.High))));
         return language.Text("marks.bar", ("figure", value), ("ranges", string.Join(' ', ranges)));
     }
+
+    private static string CasesOf(AppraisedFigure figure, FigureRange range, ILanguage language) => figure.Promise is RangePromise.ZeroForSmall
+        ? language.CasesOfZero(range.Coverage)
+        : language.Cases(range.Coverage, figure.HoldsAtLeast(range));
 
     internal static StringBuilder Open(string kind, double width, double height, string description) => new StringBuilder("<svg class=\"")
         .Append(kind).Append("\" viewBox=\"0 0 ").Append(SvgMark.Number(width)).Append(' ').Append(SvgMark.Number(height))

@@ -1,9 +1,11 @@
 using System.Globalization;
 using System.Text.Encodings.Web;
 using System.Text.Json;
+using ReleaseKit.Appraisal;
 using ReleaseKit.Noise;
 using ReleaseKit.Pages;
 using ReleaseKit.Releases;
+using ReleaseKit.Wording;
 
 namespace ReleaseKit.Downloads;
 
@@ -111,10 +113,15 @@ internal sealed class ColumnsJson(Stream stream, SiteContext context) : IDisposa
         {
             ColumnKind.Value when column.Measure is { InOnes: true } => Say("value-in-ones", title),
             ColumnKind.Value => Say(key, title, ("unit", UnitOf(column.Measure))),
-            ColumnKind.Margin or ColumnKind.Low or ColumnKind.High => Say(key, title, ("share", share)),
+            ColumnKind.Margin or ColumnKind.Low or ColumnKind.High => Say(key, title, ("share", share)) + Given(column.Measure),
             _ => Say(key, title),
         };
     }
+
+    /// <summary>Among which figures the coverage holds.</summary>
+    private string Given(Measure? measure) => measure is not null && RangePromises.Of(measure) is var promise and not RangePromise.Every
+        ? " " + Say("given" + PromiseKey.Of(promise))
+        : "";
 
     private string Describe(LongColumn column) => column.Title is { } title ? Say("stub", ("title", context.In(title))) : Say("long." + column.Key);
 

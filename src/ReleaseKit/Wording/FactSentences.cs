@@ -35,7 +35,7 @@ internal sealed class FactSentences(Voice voice)
         var kind = ("kind", voice.Kind(facts.Measure));
         var cases = ("cases", voice.Frequency("coverage.cases.at-least", NaturalFrequency.Of(facts.Coverage)));
         if (facts.HasThreshold)
-            return [voice.Say("facts.column.ranges", kind, cases)];
+            return Ranges(facts, kind, cases);
         if (facts is not { SmallestMargin: { } smallest, LargestMargin: { } largest })
             return [];
         var margin = voice.WithUnit(largest, facts.Measure);
@@ -43,6 +43,11 @@ internal sealed class FactSentences(Voice voice)
             ? [voice.Say("facts.column", kind, cases, ("margin", margin))]
             : [voice.Say("facts.column.several", kind, cases), voice.Say(onSeveralPages ? "facts.column.margins.pages" : "facts.column.margins", ("smallest", voice.Numerals.InProse(smallest)), ("largest", margin))];
     }
+
+    /// <summary>Under a threshold the promise is about the figures that passed it; of a 0 that stands for small values it is said how rarely larger ones become 0.</summary>
+    private IEnumerable<string> Ranges(MeasureFacts facts, (string, string) kind, (string, string) cases) => facts.Promise is RangePromise.AmongNotZero
+        ? [voice.Say("facts.column.ranges.not-zero", kind, cases), voice.Say("facts.column.ranges.zero", ("cases", voice.CasesOfZero(facts.Coverage)))]
+        : [voice.Say("facts.column.ranges.published", kind, cases)];
 
     private IEnumerable<string> Distance(MeasureFacts facts, bool onSeveralPages)
     {

@@ -41,6 +41,9 @@ public interface ILanguage
     /// <summary>A coverage as a promise of the procedure: "95 of 100 cases", "at least 95 of 100 cases".</summary>
     string Cases(Noise.Coverage coverage, bool atLeast);
 
+    /// <summary>In how many cases at most a value above the range of a 0 that stands for small values becomes 0: "25 of 1,000 cases".</summary>
+    string CasesOfZero(Noise.Coverage coverage);
+
     /// <summary>A text of the wording file by key, its {names} filled in; a missing key is the stop that names it.</summary>
     string Text(string key, params (string Name, string Value)[] fill);
 

@@ -53,6 +53,8 @@ public sealed class Language : ILanguage
     public string Cases(Coverage coverage, bool atLeast) =>
         voice.Frequency(atLeast ? "coverage.cases.at-least" : "coverage.cases", NaturalFrequency.Of(coverage));
 
+    public string CasesOfZero(Coverage coverage) => voice.CasesOfZero(coverage);
+
     public string Text(string key, params (string Name, string Value)[] fill) => texts.Fill(key, fill);
 
     public string Date(DateOnly date) => texts.Fill(

@@ -7,7 +7,15 @@ namespace ReleaseKit.Wording;
 /// <summary>Part 2 of a reading: how far the noise reaches, then the range that follows from it.</summary>
 internal sealed class NoiseSentences(Voice voice)
 {
-    public IEnumerable<string> Of(AppraisedFigure figure) => figure.Main is { } main ? [.. Noise(figure, main), .. Range(figure, main)] : [];
+    public IEnumerable<string> Of(AppraisedFigure figure) => figure.Main is { } main ? [.. Noise(figure, main), .. Range(figure, main)] : figure.Ranges.Select(range => Known(figure, range));
+
+    /// <summary>The range that is known where none reaches the main coverage.</summary>
+    private string Known(AppraisedFigure figure, FigureRange range) => figure.Promise switch
+    {
+        RangePromise.Every => Between(figure, range, "reading.range.alone", voice.Cases(figure, range)),
+        RangePromise.ZeroForSmall => ZeroForSmall(figure, range),
+        _ => Among(figure, range),
+    };
 
     private IEnumerable<string> Noise(AppraisedFigure figure, FigureRange main)
     {
@@ -21,7 +29,7 @@ internal sealed class NoiseSentences(Voice voice)
     private string Reach(AppraisedFigure figure, FigureRange main)
     {
         var printed = main.Printed;
-        if (figure.Case.Threshold)
+        if (figure.Promise is not RangePromise.Every)
             return Threshold(figure);
         // A range that reaches further down than up comes from noise that reaches further up than down.
         if (printed.IsUneven)
@@ -41,18 +49,16 @@ internal sealed class NoiseSentences(Voice voice)
 
     private IEnumerable<string> Range(AppraisedFigure figure, FigureRange main)
     {
-        if (IsZeroForSmall(figure))
+        if (figure.Promise is RangePromise.ZeroForSmall)
         {
             yield return ZeroForSmall(figure, main);
             yield break;
         }
-        var (low, high) = (main.Printed.Low, main.Printed.High);
         if (IsMadeWider(main))
             yield return voice.Say("reading.range.wider");
-        var key = IsMadeWider(main) || IsBeyondMargin(figure, main) || figure.Case.Threshold ? "reading.range.alone" : "reading.range";
-        yield return low == high
-            ? voice.Say($"{key}.single", ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("cases", voice.SuchCases(figure, main)))
-            : voice.Say(key, ("kind", voice.Kind(figure.Measure)), ("low", Number(low)), ("high", Number(high)), ("cases", voice.SuchCases(figure, main)));
+        yield return figure.Promise is RangePromise.Every
+            ? Between(figure, main, IsMadeWider(main) || IsBeyondMargin(figure, main) ? "reading.range.alone" : "reading.range", voice.SuchCases(figure, main))
+            : Among(figure, main);
         if (figure.Case.First is not (SpecialCase.BelowZero or SpecialCase.AboveHighest) && !IsBeyondMargin(figure, main))
             foreach (var cut in Cut(figure, main.Printed))
                 yield return cut;
@@ -71,19 +77,27 @@ internal sealed class NoiseSentences(Voice voice)
             || value - main.Printed.MarginDown.ToDouble() > figure.Possible.Highest * factor;
     }
 
-    /// <summary>A zero that stands for every value that failed the threshold.</summary>
-    private static bool IsZeroForSmall(AppraisedFigure figure) =>
-        figure.Case.First is SpecialCase.Zero && figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any();
+    /// <summary>Under a threshold the promise is about the figures that passed it.</summary>
+    private string Among(AppraisedFigure figure, FigureRange range) =>
+        Between(figure, range, "reading.range" + PromiseKey.Of(figure.Promise), voice.Cases(figure, range));
+
+    private string Between(AppraisedFigure figure, FigureRange range, string key, string cases)
+    {
+        var (kind, low, high) = (("kind", voice.Kind(figure.Measure)), range.Printed.Low, range.Printed.High);
+        return low == high
+            ? voice.Say($"{key}.single", kind, ("low", Number(low)), ("cases", cases))
+            : voice.Say(key, kind, ("low", Number(low)), ("high", Number(high)), ("cases", cases));
+    }
 
     /// <summary>
-    /// What such a zero says is not that the value lies in a range in so many cases (above its end it never does), but how rarely larger values become 0:
+    /// What a zero that stands for small values says is not that the value lies in a range in so many cases (above its end it never does), but how rarely larger values become 0:
     /// in at most (1 − c)/2 of the cases.
     /// </summary>
     private string ZeroForSmall(AppraisedFigure figure, FigureRange main) => voice.Say(
         "reading.range.zero-for-small",
         ("kind", voice.Kind(figure.Measure)),
         ("high", Number(main.Printed.High)),
-        ("cases", voice.Frequency("coverage.cases", NaturalFrequency.UpTo(main.Coverage.Rest / 2))));
+        ("cases", voice.CasesOfZero(main.Coverage)));
 
     private string Beyond(AppraisedFigure figure)
     {

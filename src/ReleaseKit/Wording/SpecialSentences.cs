@@ -15,7 +15,7 @@ internal sealed class SpecialSentences(Voice voice)
         SpecialCase.NotPublishedBelow => [voice.Say("reading.below-publication")],
         SpecialCase.Exact => [voice.Say("reading.exact"), voice.Say("reading.exact.promise")],
         SpecialCase.Public => [voice.Say("reading.public")],
-        SpecialCase.NoMargin => [voice.Say("reading.no-margin")],
+        SpecialCase.NoMargin => [voice.Say(figure.Ranges.Count == 0 ? "reading.no-margin" : "reading.no-margin.more")],
         SpecialCase.BelowZero => [Outside(figure, "below", voice.Lowest(figure)), ReadAs(figure)],
         SpecialCase.AboveHighest => [Outside(figure, "above", voice.Highest(figure)), ReadAs(figure)],
         SpecialCase.Zero => [voice.Say("reading.zero"), .. figure.Case.Floored ? SetToBound(figure) : Nothing],

@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Noise;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 
@@ -64,6 +65,9 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
 
     public string Frequency(string key, NaturalFrequency frequency) =>
         Say(key, ("cases", Numerals.Whole(frequency.Cases)), ("all", Numerals.Whole(frequency.All)));
+
+    /// <summary>In how many cases at most a value above the range of a 0 that stands for small values becomes 0: (1 − c)/2 of them.</summary>
+    public string CasesOfZero(Coverage coverage) => Frequency("coverage.cases", NaturalFrequency.UpTo(coverage.Rest / 2));
 
     private string CasesAs(string which, AppraisedFigure figure, FigureRange range) =>
         Frequency(figure.HoldsAtLeast(range) ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));

@@ -92,6 +92,32 @@ public sealed class ExactCoverageTests
         }
     }
 
+    [Theory, MemberData(nameof(Thresholds))]
+    public void Ranges_under_a_threshold_miss_at_most_as_often_as_is_said_zeros_included(string lawName, string stepsName, double share)
+    {
+        var (exact, error, steps) = Of(lawName, stepsName);
+        var (lowest, highest) = Steps.ValuesBeforeNoise(steps);
+        var holds = Holding(error, Coverage.OfShare(share), PossibleValues.Any);
+        var most = error.MissesAtMost(Coverage.OfShare(share));
+        foreach (var x in Enumerable.Range(lowest, highest - lowest + 1))
+        {
+            var published = exact.Chance(x, y => y is not null);
+            if (published > 1e-5)
+                Assert.True(exact.Chance(x, y => y is not null && !holds(y.Value, x)) <= published * most + Rounding, $"{x}");
+        }
+    }
+
+    [Fact]
+    public void Ranges_with_zeros_do_miss_more_often_than_the_rest_of_the_coverage()
+    {
+        // Discrete Gaussian of 9.5, zero below 30: so the promise is one about the figures not set to 0.
+        AfterStep[] steps = [new AfterStep.ZeroBelow(30)];
+        var (exact, error) = (new ExactCoverage(DiscreteGaussianLaw.Of(9.5), steps), FigureError.Of(DiscreteGaussianLaw.Of(9.5), steps));
+        var holds = Holding(error, Coverage.OfShare(0.95), PossibleValues.Counts);
+        var missed = Enumerable.Range(0, 130).Max(x => exact.Chance(x, y => !holds(y!.Value, x)));
+        Assert.InRange(missed, 0.05, error.MissesAtMost(Coverage.OfShare(0.95)));
+    }
+
     private static TheoryData<string, string, double> Cases(string table, IEnumerable<string> chains) =>
         [.. from law in Symmetric.Append(table) from steps in chains from share in Shares select (law, steps, share)];
 

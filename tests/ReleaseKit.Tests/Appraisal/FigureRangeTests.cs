@@ -123,6 +123,48 @@ public sealed class FigureRangeTests
     }
 
     [Fact]
+    public void Table_of_noise_that_lacks_mass_has_the_ranges_that_the_mass_reaches()
+    {
+        // 0.4 + 0.2 + 0.2 = 0.8 within 1, and 0.98 within 2.
+        var mechanism = SmallRelease.Mechanism("m", LawName.Tabulated) with { Tabulated = [(-2, 0.1m), (-1, 0.2m), (0, 0.4m), (1, 0.2m), (2, 0.08m)] };
+        var figure = Figure(MeasureKind.Count, mechanism, "20");
+        Assert.Equal([(1.0, 19.0, 21.0), (2.0, 18.0, 22.0)], figure.Ranges.Select(range => (range.Margin, range.Low, range.High)));
+        Assert.Equal(0.98, figure.Main!.Attained);
+    }
+
+    [Fact]
+    public void Figure_at_its_cap_under_a_threshold_has_a_margin_down_to_its_lower_end_alone()
+    {
+        var mechanism = SmallRelease.DiscreteGaussian(4, new AfterStep.ZeroBelow(6), new AfterStep.NotAbove(40));
+        var main = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count) with { Highest = 40 }, mechanism, "40").Figure().Main!;
+        Assert.Equal((8, 0, 32, 40), (main.MarginDown, main.MarginUp, main.Low, main.High));
+        Assert.True(main.Printed.HighIsCut);
+    }
+
+    [Theory]
+    [InlineData(-50, "12.0", "12", "-50", "20")]
+    [InlineData(0, "12.0", "12", "0", "20")]
+    [InlineData(0, "3.3", "3.3", "0.0", "4.0")]
+    public void Range_without_an_end_of_its_own_is_printed_to_the_digits_of_what_is_possible(double lowest, string value, string printed, string low, string high)
+    {
+        // Laplace noise of scale 2.5 has no lower end so near a threshold; the true upper ends are 19.466 and 3.937.
+        var mechanism = SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 2.5)) with { Afterwards = [new AfterStep.ZeroBelow(3.25)] };
+        var main = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Mean) with { Lowest = lowest }, mechanism, value).Figure().Main!;
+        Assert.Equal((printed, low, high), (main.Printed.Value.ToString(), main.Printed.Low.ToString(), main.Printed.High.ToString()));
+        Assert.True(main.Printed.LowIsCut);
+        Assert.Equal(double.NegativeInfinity, main.UncutLow);
+    }
+
+    [Fact]
+    public void Figure_whose_range_has_no_end_at_the_main_coverage_has_no_main_range()
+    {
+        var mechanism = SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 2.5)) with { Afterwards = [new AfterStep.ZeroBelow(3.25)] };
+        var figure = Figure(MeasureKind.Mean, mechanism, "12.0");
+        Assert.Equal((SpecialCase.NoMargin, Reliability.NotStated, 1), (figure.Case.First, figure.Reliability, figure.Ranges.Count));
+        Assert.Null(figure.Main);
+    }
+
+    [Fact]
     public void Zero_that_stands_for_every_small_amount_has_no_margin()
     {
         // Without a least value the range would be without end.

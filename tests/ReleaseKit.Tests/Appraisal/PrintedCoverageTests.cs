@@ -62,6 +62,20 @@ public sealed class PrintedCoverageTests
         }
     }
 
+    [Fact]
+    public void Printed_ranges_and_zeros_together_miss_a_count_as_rarely_as_the_table_says()
+    {
+        var law = DiscreteGaussianLaw.Of(9.5);
+        AfterStep[] steps = [new AfterStep.ZeroBelow(30)];
+        var figures = Figures(steps);
+        var most = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, steps), "45").Appraise().FactsOf(0).ExpectedMisses;
+        for (var count = 0; count <= LargestCount; count++)
+        {
+            var missed = Noises().Where(noise => !Holds(figures[After(steps, count + noise)].Main!, count)).Sum(noise => law.Probability(noise));
+            Assert.True(missed <= most, $"{count} is missed {missed:0.0000} of the time");
+        }
+    }
+
     private static IEnumerable<int> Noises() => Enumerable.Range(-Reach, 2 * Reach + 1);
 
     private static Dictionary<int, AppraisedFigure> Figures(AfterStep[] steps)

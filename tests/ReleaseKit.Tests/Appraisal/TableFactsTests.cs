@@ -57,6 +57,22 @@ public sealed class TableFactsTests
     }
 
     [Fact]
+    public void Ranges_with_zeros_for_small_values_count_what_can_come_of_the_zeros_too()
+    {
+        // At most (1 − c)/2 = 0.025 of the figures above the range of a 0 become 0, and of the rest at most 0.05 miss: 0.025 + 0.975 · 0.05.
+        var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "45", "0", "30").Appraise().FactsOf(0);
+        Assert.Equal(3, facts.Ranges);
+        Assert.Equal(3 * 0.07375, facts.ExpectedMisses, 1e-12);
+    }
+
+    [Fact]
+    public void Figures_without_a_main_range_are_not_counted_among_the_ranges()
+    {
+        var mechanism = SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30));
+        Assert.Equal(1, new SmallRelease().Figures(MeasureKind.Amount, mechanism, "0", "30", "90").Appraise().FactsOf(0).Ranges);
+    }
+
+    [Fact]
     public void Column_with_a_threshold_has_no_one_margin()
     {
         var column = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "45").Appraise().FactsOf(0).Measures[0];

@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Xml.Linq;
 using ReleaseKit.Charts;
 using ReleaseKit.Charts.Ordered;
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 using ReleaseKit.Tests.Appraisal;
 using ReleaseKit.Tests.Pages;
@@ -138,6 +139,16 @@ public sealed class OrderedChartTests
         Assert.Contains("In at least 95 of 100 cases the value before noise lies between such stops.", caption, StringComparison.Ordinal);
         Assert.Contains("Figures that stand close together may not be separated: noise alone can put them in this order.", caption, StringComparison.Ordinal);
         Assert.Contains("Whether two bars overlap does not show", caption, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Chart_of_counts_under_a_threshold_promises_for_those_that_passed_it()
+    {
+        var caption = OrderedWords.Of(Select(new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(5, new AfterStep.ZeroBelow(10)), "100", "0")), Words).Caption;
+
+        Assert.Contains(caption, sentence => sentence.EndsWith("For figures not set to 0, the value before noise lies between such stops in at least 95 of 100 cases.", StringComparison.Ordinal));
+        Assert.Contains("A value above the upper stop of a 0 becomes 0 in at most 25 of 1,000 cases.", caption);
+        Assert.DoesNotContain(caption, sentence => sentence.Contains("In at least 95", StringComparison.Ordinal));
     }
 
     [Fact]

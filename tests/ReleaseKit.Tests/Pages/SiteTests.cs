@@ -1,6 +1,8 @@
 using AngleSharp.Dom;
 using AngleSharp.Html.Parser;
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
+using ReleaseKit.Tests.Appraisal;
 using Xunit;
 
 namespace ReleaseKit.Tests.Pages;
@@ -39,6 +41,22 @@ public sealed class SiteTests : IDisposable
         Assert.Contains("at a coverage of 99 in 100", page, StringComparison.Ordinal);
         Assert.Contains("A headline with its figure, as picture (PNG)", page, StringComparison.Ordinal);
         Assert.Contains("The checksum (SHA-256) of each other file in this folder; pages and pictures have none", page, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Where_small_counts_become_zero_no_page_and_no_download_promises_their_ranges_without_condition()
+    {
+        var gauss = SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30));
+        var zeroed = new SmallRelease().Figures(MeasureKind.Count, gauss, "45", "0", "1240").Build().Tables[0] with { Id = "zeroed" };
+        var release = PagesRelease.Make();
+        PagesRelease.Compose(release with { Tables = [zeroed, release.Tables[1]], Headlines = [], Narrative = [], Short = new Dictionary<string, string>() }, folder.In("site"));
+        string Main(string page) => new HtmlParser().ParseDocument(File.ReadAllText(folder.In("site/" + page))).QuerySelector("main")!.TextContent;
+
+        Assert.Contains("this holds among the figures not set to 0", Main("reading.html"), StringComparison.Ordinal);
+        Assert.Contains("For those not set to 0, the count before noise is between 1,221 and 1,259 in at least 95 of 100 cases.", Main("tables/zeroed/index.html"), StringComparison.Ordinal);
+        Assert.DoesNotContain("In at least 95", Main("tables/zeroed/index.html"), StringComparison.Ordinal);
+        var columns = Directory.GetFiles(folder.In("site/downloads"), "*.json").Single(path => Path.GetFileName(path).StartsWith("zeroed", StringComparison.Ordinal));
+        Assert.Contains("The coverage holds among the figures not set to 0.", File.ReadAllText(columns), StringComparison.Ordinal);
     }
 
     [Fact]

@@ -2,6 +2,7 @@ using System.Globalization;
 using System.IO.Compression;
 using AngleSharp.Dom;
 using ReleaseKit.Appraisal;
+using ReleaseKit.Noise;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Pages;
 using ReleaseKit.Releases;
@@ -241,6 +242,40 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         Assert.All(bars, bar => Assert.Matches("^[#a-z0-9]+$", bar.GetAttribute("href")!));
         Assert.DoesNotContain("NaN", zeros.Html("tables/table/index.html"), StringComparison.Ordinal);
         Assert.DoesNotContain("∞", zeros.Html("tables/table/index.html"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Ranges_under_a_threshold_say_among_which_figures_they_hold()
+    {
+        using var zeros = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South")
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(5, new AfterStep.ZeroBelow(10)), "100", "0").Build());
+
+        var headings = zeros.Page().QuerySelectorAll(".unfold .panel").Select(panel => panel.QuerySelectorAll(".ranges th").Select(cell => cell.TextContent).ToList()).ToList();
+
+        Assert.Contains("Holds in, of 100 not set to 0", headings[0]);
+        Assert.Contains("Larger ones not set to 0, of 100", headings[1]);
+    }
+
+    [Fact]
+    public void Attained_coverage_has_the_digits_it_takes_not_to_fall_below_the_one_named()
+    {
+        var coverages = new Coverages(Coverage.OfShare(0.95), Coverage.OfShare(0.5), Coverage.OfShare(0.99999));
+        using var fine = TableSite.Of(new SmallRelease { Coverages = coverages }.Stub("area", null, "North").Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(5), "100").Build());
+
+        var cells = fine.Page().QuerySelectorAll(".ranges tr")[2].QuerySelectorAll("td").Select(cell => decimal.Parse(cell.TextContent, CultureInfo.InvariantCulture)).ToList();
+
+        Assert.Equal(3, cells.Count);
+        Assert.InRange(cells[2], 99.999m, 100);
+        Assert.Equal(1, cells[1].Scale);
+    }
+
+    [Fact]
+    public void Figure_whose_noise_is_known_in_part_shows_the_ranges_there_are()
+    {
+        var table = SmallRelease.Mechanism("m", LawName.Tabulated) with { Tabulated = [(-1, 0.2m), (0, 0.5m), (1, 0.2m)] };
+        using var part = TableSite.Of(new SmallRelease().Stub("area", null, "North").Figures(MeasureKind.Count, table, "100").Build());
+
+        Assert.Equal(["Of such cases", "50 in 100"], part.Page().QuerySelectorAll(".ranges tr").First().QuerySelectorAll("th").Select(cell => cell.TextContent));
     }
 
     [Fact]

@@ -282,7 +282,12 @@ public sealed class LanguageTests
     public void Column_with_a_threshold_speaks_of_the_range()
     {
         var column = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "45").Appraise().FactsOf(0).Measures[0];
-        Assert.Equal(["In at least 95 of 100 cases the count before noise lies in the range of the figure."], En.NotesOf(column));
+        Assert.Equal(
+            [
+                "For figures not set to 0, the count before noise lies in the range in at least 95 of 100 cases.",
+                "When it is above the range of a 0, 0 is published in at most 25 of 1,000 cases.",
+            ],
+            En.NotesOf(column));
     }
 
     [Fact]

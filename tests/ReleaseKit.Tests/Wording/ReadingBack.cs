@@ -20,7 +20,7 @@ internal static class ReadingBack
 
     private static readonly (Regex Pattern, Func<AppraisedFigure, GroupCollection, bool> Agrees)[] Patterns =
     [
-        Sentence($@"The published figure is (about )?{N} [^.]+?( per [0-9,]+)?\.", (figure, g) => Is(g[2], figure.Printed) && figure.HasNumber && g[3].Success == figure.Measure.Per.HasValue
+        Sentence($@"The published figure is (about )?{N} [^.]+?( per [0-9,]+)?\.", (figure, g) => IsValue(figure, g[2]) && figure.HasNumber && g[3].Success == figure.Measure.Per.HasValue
             && g[1].Success == (Number(g[2]) != figure.Value.ToDecimal() * figure.Measure.PrintFactor)),
         Sentence($@"Noise( and rounding together moved it by| of) up to {N} either way (?:was added )?in {Cases}\.",
             (figure, g) => Is(g[2], figure.Main!.Printed.MarginUp) && Is(g[2], figure.Main.Printed.MarginDown)
@@ -29,17 +29,17 @@ internal static class ReadingBack
         Sentence($@"It rests on {N} figures, each with noise of its own\.", (figure, g) => Number(g[1]) == figure.Draws && figure.Draws > 1),
         Sentence($@"Noise (?:and rounding together )?moved it by up to {N} upward or {N} downward in {Cases}\.",
             (figure, g) => Is(g[1], figure.Main!.Printed.MarginDown) && Is(g[2], figure.Main.Printed.MarginUp) && Holds(figure, g, 3)),
-        Sentence($@"Noise was added, and what then lay below {N} was published as 0\.", (figure, g) => figure.Case.Threshold && figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
-        Sentence($@"Noise was added, and what then lay below {N} was not published\.", (figure, g) => figure.Case.Threshold && figure.Measure.PublishedFrom == (double)Number(g[1])),
+        Sentence($@"Noise was added, and what then lay below {N} was published as 0\.", (figure, g) => figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
+        Sentence($@"Noise was added, and what then lay below {N} was not published\.", (figure, g) => figure.Measure.PublishedFrom == (double)Number(g[1])),
         Sentence($@"Here it was more, for the {Kind} cannot be (below|above) {N}\.", (figure, g) => g[2].Value == "below"
             ? Bound(g[3], figure.Possible.Lowest) && figure.Value.ToDouble() + figure.Main!.Margin < figure.Possible.Lowest
             : Bound(g[3], figure.Possible.Highest) && figure.Value.ToDouble() - figure.Main!.Margin > figure.Possible.Highest),
         Sentence("For such a figure the range is made wider.", (figure, _) => figure.Value.ToDouble() < figure.Possible.Lowest
             ? figure.Main!.High > figure.Value.ToDouble() + figure.Main.Margin
             : figure.Value.ToDouble() > figure.Possible.Highest && figure.Main!.Low < figure.Value.ToDouble() - figure.Main.Margin),
-        Sentence($@"(?:So t|T)he {Kind} before noise is between {N} and {N} in {Cases}\.",
-            (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.Low) && Is(g[3], figure.Main.Printed.High)
-                && Number(g[2]) < Number(g[3]) && Contains(figure, g[2], g[3]) && Holds(figure, g, 4)),
+        Sentence($@"(So the|The|For those not set to 0, the|For those published, the) {Kind} before noise is between {N} and {N} in {Cases}\.",
+            (figure, g) => IsAbout(figure, g[1]) && IsKind(figure, g[2]) && Is(g[3], Best(figure).Printed.Low) && Is(g[4], Best(figure).Printed.High)
+                && Number(g[3]) < Number(g[4]) && Contains(figure, g[3], g[4]) && Holds(figure, g, 5)),
         Sentence($@"When the {Kind} before noise is above {N}, 0 is published in at most {N} of {N} cases\.", (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.High)
             && figure.Value.Unscaled == 0 && Number(g[3]) / Number(g[4]) == 0.025m && figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any()),
         Sentence($@"(?:So t|T)he {Kind} before noise is {N} in {Cases}\.",
@@ -58,6 +58,7 @@ internal static class ReadingBack
         Sentence("Late records or wrong answers can still make it wrong.", (figure, _) => figure.Reliability == Reliability.Exact),
         Sentence("It is known from a public source, so no noise was added.", (figure, _) => figure.Reliability == Reliability.Public),
         Sentence("No valid margin is known for it, so none is given.", (figure, _) => figure is { HasNumber: true, Main: null, Reliability: Reliability.NotStated }),
+        Sentence("No margin is known that holds in more cases.", (figure, _) => figure is { Main: null, Ranges.Count: 1, Reliability: Reliability.NotStated }),
         Sentence("Noise carried it below zero.", (figure, _) => figure.Value.IsNegative && figure.Possible.Lowest == 0),
         Sentence($@"Noise carried it (below|above) {N}, the (least|most) that the {Kind} can be\.",
             (figure, g) => g[1].Value == "below" ? figure.Value.ToDouble() < figure.Possible.Lowest && Bound(g[2], figure.Possible.Lowest) : figure.Value.ToDouble() > figure.Possible.Highest && Bound(g[2], figure.Possible.Highest)),
@@ -117,6 +118,26 @@ internal static class ReadingBack
     private static decimal Number(Group group) =>
         decimal.Parse(group.Value.Replace("minus ", "-", StringComparison.Ordinal), NumberStyles.Number, CultureInfo.InvariantCulture);
 
+    /// <summary>The main range, or the only one that is known.</summary>
+    private static FigureRange Best(AppraisedFigure figure) => figure.Main ?? figure.Ranges[0];
+
+    /// <summary>A threshold makes the promise one about the figures that passed it, and nothing else does.</summary>
+    private static bool IsAbout(AppraisedFigure figure, Group group) => group.Value switch
+    {
+        "For those not set to 0, the" => figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any() && figure.Value.Unscaled != 0,
+        "For those published, the" => figure.Measure.PublishedFrom is not null,
+        _ => !figure.Error!.DependsOnPublished,
+    };
+
+    /// <summary>The figure as it stands in print; one that print leaves nothing of, to two digits of its own.</summary>
+    private static bool IsValue(AppraisedFigure figure, Group group)
+    {
+        if (figure.Printed.Unscaled != 0 || figure.Value.Unscaled == 0)
+            return Is(group, figure.Printed);
+        var (said, value) = (Number(group), figure.Value.ToDecimal() * figure.Measure.PrintFactor);
+        return said != 0 && Math.Abs(said - value) <= Math.Abs(value) / 20;
+    }
+
     private static bool Is(Group group, PublishedValue value) =>
         Number(group) == value.ToDecimal() && group.Value.Contains('.', StringComparison.Ordinal) == (value.Decimals > 0);
 
@@ -128,13 +149,13 @@ internal static class ReadingBack
 
     /// <summary>What is said holds all that the range holds.</summary>
     private static bool Contains(AppraisedFigure figure, Group low, Group high) =>
-        (double)Number(low) <= figure.Main!.Low + 1e-9 && figure.Main.High <= (double)Number(high) + 1e-9;
+        (double)Number(low) <= Best(figure).Low + 1e-9 && Best(figure).High <= (double)Number(high) + 1e-9;
 
     private static bool Holds(AppraisedFigure figure, GroupCollection groups, int at)
     {
         var said = (double)Number(groups[at + 1]) / (double)Number(groups[at + 2]);
-        var isMore = figure.Main!.Attained > 0.95 + 1e-9;
-        return said == 0.95 && said <= figure.Main.Attained + 1e-12 && (groups[at].Success || !isMore);
+        var (range, nominal) = (Best(figure), figure.Main is null ? 0.5 : 0.95);
+        return said == nominal && said <= range.Attained + 1e-12 && (groups[at].Success || range.Attained <= nominal + 1e-9);
     }
 
     /// <summary>The parts are all rows but the first, which is the total.</summary>

@@ -45,6 +45,12 @@ internal static class ReadingCases
         ("A count near a threshold", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "45")),
         ("A count near the level for publication", PublishedFrom("45")),
         ("A zero that stands for small counts", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "0")),
+        ("A count far above a threshold", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "1240")),
+        ("A count at a threshold, published as a bound", Bounded(new AfterStep.ZeroBelow(30), "1200", new AfterStep.NotAbove(1200))),
+        ("A mean whose range under a threshold has no end", Of(MeasureKind.Mean, Laplace with { Afterwards = [new AfterStep.ZeroBelow(3)] }, "4.25", Crowns)),
+        ("A mean whose range under a threshold has an end at the lower coverage alone", Of(MeasureKind.Mean, Laplace with { Afterwards = [new AfterStep.ZeroBelow(3)] }, "7.25", Crowns)),
+        ("A count of whose noise a tenth is not known", Count(SmallRelease.Mechanism("m", LawName.Tabulated) with { Tabulated = [(-1, 0.2m), (0, 0.5m), (1, 0.2m)] }, "45")),
+        ("A mean that print leaves nothing of", Of(MeasureKind.Mean, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 400)), "3.38", Crowns)),
         ("A sum of twelve counts", SumOf(12, Gauss)),
         ("A share", Of(MeasureKind.Share, Laplace, "51.63")),
         ("A share without a unit", Of(MeasureKind.Share, Laplace, "51.63", SmallRelease.UnitOf("", ""))),
@@ -126,8 +132,8 @@ internal static class ReadingCases
             [0, .. Enumerable.Repeat((byte)1, parts.Length)], ["3680", .. parts])
         .Figure();
 
-    private static AppraisedFigure Bounded(AfterStep step, string value) => new SmallRelease()
-        .Figures(SmallRelease.Measure(MeasureKind.Count) with { Highest = 1200 }, SmallRelease.DiscreteGaussian(9.5, step), value).Figure();
+    private static AppraisedFigure Bounded(AfterStep step, string value, params AfterStep[] more) => new SmallRelease()
+        .Figures(SmallRelease.Measure(MeasureKind.Count) with { Highest = 1200 }, SmallRelease.DiscreteGaussian(9.5, [step, .. more]), value).Figure();
 
     private static AppraisedFigure Lowest(double lowest, string value) => new SmallRelease()
         .Figures(SmallRelease.Measure(MeasureKind.Mean) with { Lowest = lowest, Unit = Crowns }, Laplace, value).Figure();

@@ -22,7 +22,9 @@ public sealed record OrderedWords(IReadOnlyList<string> Caption, string Descript
         yield return language.Text("charts.ordered.order");
         if (withMargin.Count > 0)
         {
-            yield return language.Text("charts.ordered.bar", ("cases", language.Cases(withMargin[0].Coverage, IsMoreThanNominal(figures))));
+            yield return language.Text("charts.ordered.bar" + PromiseOf(figures), ("cases", language.Cases(withMargin[0].Coverage, IsMoreThanNominal(figures))));
+            if (figures.Rows.Any(row => row.Figure is { Main: not null, Promise: RangePromise.ZeroForSmall }))
+                yield return language.Text("charts.ordered.zero", ("cases", language.CasesOfZero(withMargin[0].Coverage)));
             yield return language.Text("charts.ordered.neighbours");
             yield return language.Text("charts.ordered.overlap");
         }
@@ -41,6 +43,9 @@ public sealed record OrderedWords(IReadOnlyList<string> Caption, string Descript
     /// <summary>Whether the reading of some figure says "at least", so that a sentence about all of them does.</summary>
     public static bool IsMoreThanNominal(OrderedFigures figures) =>
         figures.Rows.Any(row => row.Figure.Main is { } range && row.Figure.HoldsAtLeast(range));
+
+    /// <summary>What is put behind the key of a sentence about all of them: among which figures it holds.</summary>
+    public static string PromiseOf(OrderedFigures figures) => PromiseKey.OfAll(figures.Rows.Select(row => row.Figure));
 
     private static string Count(int count, ILanguage language) => language.Number(new Releases.PublishedValue(count, 0));
 }

@@ -1,3 +1,4 @@
+using ReleaseKit.Appraisal;
 using ReleaseKit.Charts;
 using ReleaseKit.Noise;
 using ReleaseKit.Wording;
@@ -31,6 +32,9 @@ internal static class ReadingPage
         model["cases"] = Number(context, main.Cases);
         model["all"] = Number(context, main.All);
         model["miss"] = Number(context, main.All - main.Cases);
+        var promises = context.Release.Tables.SelectMany(table => table.Measures).Where(measure => measure.Shown).Select(RangePromises.Of).ToHashSet();
+        model["zeroed"] = promises.Contains(RangePromise.AmongNotZero);
+        model["published_from"] = promises.Contains(RangePromise.AmongPublished);
     }
 
     private static void AddThresholds(ScriptObject model, SiteContext context)

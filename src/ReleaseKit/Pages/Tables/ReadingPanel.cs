@@ -11,7 +11,7 @@ namespace ReleaseKit.Pages.Tables;
 /// </summary>
 internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter html)
 {
-    private const int AttainedDecimals = 1;
+    private const int MostDecimals = 8;
 
     // What figures alike have in common stands together and what differs last, so that a page of readings stays small on its way to the reader.
     public void Write(AppraisedFigure figure, SheetRow row)
@@ -20,7 +20,7 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
             .Raw("</span></summary><div class=\"panel\" id=\""u8).Raw(figure.Id).Raw("\"><p class=\"panel-links\"><a href=\"#"u8).Raw(figure.Id).Raw("\">"u8)
             .Text(sheet.Text("tables.permalink")).Raw("</a> <a href=\"#"u8).Raw(Sheet.AboutId(figure.Measure)).Raw("\">"u8).Text(sheet.Text("tables.about")).Raw("</a></p>"u8);
         WriteSentences(sheet.Language.ReadingOf(figure));
-        if (figure.Main is not null)
+        if (figure.Ranges.Count > 0)
             WriteRanges(figure);
         if (figure.Main is not null && MarkSubject.Of(figure) is { Density: not null } subject)
             html.Raw("<figure><figcaption>"u8).Text(sheet.Text("tables.curve")).Raw("</figcaption>"u8).Raw(curves.Draw(figure, subject, sheet.Language)).Raw("</figure>"u8);
@@ -45,11 +45,11 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
     // What HTML lets one leave out is left out here, where it would stand a thousand times a page: end tags, and scopes that follow from the table's form.
     private void WriteRanges(AppraisedFigure figure)
     {
-        html.Raw("<table class=\"ranges\"><tr><th>"u8).Text(sheet.Text("tables.ranges"));
+        html.Raw("<table class=\"ranges\"><tr><th>"u8).Text(sheet.Text(figure.Promise is RangePromise.ZeroForSmall ? "tables.ranges.zero" : "tables.ranges"));
         foreach (var range in figure.Ranges)
             html.Raw("<th>"u8).Text(sheet.Language.Share(range.Coverage));
         WriteRangeRow(figure, "tables.margin", range => sheet.Language.Margin(range.Printed));
-        WriteRangeRow(figure, "tables.ranges.attained", range => sheet.Language.Number(AttainedInHundred(range)));
+        WriteRangeRow(figure, "tables.ranges.attained" + PromiseKey.Of(figure.Promise), range => sheet.Language.Number(AttainedInHundred(range)));
         WriteRangeRow(figure, "tables.ranges.from", range => sheet.Language.Number(range.Printed.Low));
         WriteRangeRow(figure, "tables.ranges.to", range => sheet.Language.Number(range.Printed.High));
         html.Raw("</table>"u8);
@@ -62,7 +62,15 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
             html.Raw("<td>"u8).Text(text(range));
     }
 
-    /// <summary>The attained coverage of 100 cases, rounded down.</summary>
-    private static PublishedValue AttainedInHundred(FigureRange range) =>
-        new((long)Math.Floor(Math.Round(range.Attained * 1000, 9)), AttainedDecimals);
+    /// <summary>The attained coverage of 100 cases, rounded down, with as many decimals as it takes not to fall below the one that is named.</summary>
+    private static PublishedValue AttainedInHundred(FigureRange range)
+    {
+        var named = Math.Min((decimal)range.Coverage.Share, (decimal)range.Attained);
+        for (byte decimals = 1; ; decimals++)
+        {
+            var attained = new PublishedValue((long)Math.Floor(Math.Round(range.Attained * 100 * PublishedValue.PowerOfTen(decimals), 9 - decimals)), decimals);
+            if (decimals == MostDecimals || attained.ToDecimal() >= named * 100)
+                return attained;
+        }
+    }
 }
