@@ -34,5 +34,6 @@ public static class Checks
         new ConfidentialColumnCheck(),
         new DeltaCheck(),
         new BeyondNoiseCheck(),
+        new TotalGapCheck(),
     ];
 }

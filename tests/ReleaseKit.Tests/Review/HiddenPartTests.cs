@@ -31,14 +31,18 @@ public sealed class HiddenPartTests
         Assert.Equal(given is null ? [] : [$"lamps/lit?street={given}"], GivenBack(table, Nests));
     }
 
+    [Fact]
+    public void Published_sum_gives_it_back_without_adds_too() => Assert.Equal(["lamps/lit?street=Quay"], GivenBack(Flat, adds: ""));
+
     private static string Cell(string number, int broken) => number.Length == 0 ? $",{broken},Q" : $"{number},{broken},";
 
-    private static IEnumerable<string?> GivenBack(string table, string? labels = null)
+    private static IEnumerable<string?> GivenBack(
+        string table, string? labels = null, string adds = "\"adds\": [ { \"figure\": \"lit\", \"over\": \"street\" } ], ")
     {
         using var broken = new Broken(folder =>
         {
             folder.With("tables/lamps.csv", table).Edit("release.json", "\"figures\": [\n",
-                "\"hidden\": { \"by\": \"public-rule\", \"inTotals\": true }, \"statuses\": { \"column\": \"*_status\" }, \"adds\": [ { \"figure\": \"lit\", \"over\": \"street\" } ], \"figures\": [\n");
+                $"\"hidden\": {{ \"by\": \"public-rule\", \"inTotals\": true }}, \"statuses\": {{ \"column\": \"*_status\" }}, {adds}\"figures\": [\n");
             if (labels is not null)
                 folder.With("labels.csv", labels).Edit("release.json", "{ \"mechanism\": \"lamps-lit\" }", "{ \"where\": { \"street\": \"North\" }, \"sumOver\": \"street\" }, { \"mechanism\": \"lamps-lit\" }");
         });

@@ -90,7 +90,7 @@ internal static class BudgetText
         if (chance < 1e-300)
             return "below 10^−300";
         var unit = Math.Pow(10, Math.Floor(Math.Log10(chance)) - 1);
-        return Plain(Math.Min(1, Math.Ceiling(chance / unit) * unit));
+        return Plain(Math.Min(1, Math.Ceiling(chance / unit - 1e-6) * unit));
     }
 
     private static string PerUnit(Sensitivity sensitivity, NoiseAccount account) =>

@@ -19,7 +19,8 @@ internal sealed class BeyondNoiseCheck : IReviewCheck
         if (subject is not { Release: { } release, Origins: { } origins })
             return [];
         var figures = release.Tables.Sum(table => table.Measures.Sum(CountWithNoise));
-        return release.Tables.SelectMany((table, at) => table.Measures.SelectMany((_, measure) => CheckMeasure(release, origins, at, measure, figures)));
+        var rules = release.Tables.Sum(table => table.Measures.Sum(measure => measure.RuleOf.Distinct().Count()));
+        return release.Tables.SelectMany((table, at) => table.Measures.SelectMany((_, measure) => CheckMeasure(release, origins, at, measure, new(figures, rules))));
     }
 
     private static long CountWithNoise(Measure measure) => Enumerable.Range(0, measure.RuleOf.Length).LongCount(row => HasNoise(measure, row));
@@ -28,39 +29,42 @@ internal sealed class BeyondNoiseCheck : IReviewCheck
         measure.HasNumber(row) && measure.RuleAt(row) is NoiseRule.FromMechanism or NoiseRule.SumOver;
 
     /// <summary>One finding for each rule: the figure that is farthest off, or all together.</summary>
-    private static IEnumerable<Finding> CheckMeasure(Release release, FigureOrigins origins, int tableIndex, int measureIndex, long figures)
+    private static IEnumerable<Finding> CheckMeasure(Release release, FigureOrigins origins, int tableIndex, int measureIndex, Counts counts)
     {
         var (table, measure) = (release.Tables[tableIndex], release.Tables[tableIndex].Measures[measureIndex]);
         var possible = PossibleOf.Measure(measure);
         return Enumerable.Range(0, table.RowCount).Where(row => HasNoise(measure, row) && IsOutside(ValueOf(measure, row), possible))
             .Select(row => Reached(row, ValueOf(measure, row), possible, origins.Of(new(tableIndex, measureIndex, row))))
             .OfType<Outside>().GroupBy(one => measure.RuleOf[one.Row])
-            .Select(rule => CheckRule(table, measure, possible, figures, [.. rule])).OfType<Finding>();
+            .Select(rule => CheckRule(table, measure, possible, counts, [.. rule])).OfType<Finding>();
     }
 
-    private static Finding? CheckRule(Table table, Measure measure, PossibleValues possible, long figures, List<Outside> outside)
+    private static Finding? CheckRule(Table table, Measure measure, PossibleValues possible, Counts counts, List<Outside> outside)
     {
         var worst = outside.MinBy(one => one.Chance)!;
-        var unreached = outside.Count(one => one.Chance * figures < Unlikely);
+        var unreached = outside.Count(one => one.Chance * counts.Figures < Unlikely);
         if (unreached > 0)
-            return Found(table, measure, worst, possible, $"{Alone(worst, figures)}{More(unreached)}");
+            return Found(table, measure, worst, possible, $"{Alone(worst, counts.Figures)}{More(unreached)}");
         if (measure.RuleAt(worst.Row) is not NoiseRule.FromMechanism { Mechanism.Id: var id })
             return null;
-        var together = Together(outside, measure.RuleOf.Count(rule => rule == measure.RuleOf[worst.Row]), possible) * figures;
+        var alike = outside.Where(one => ValueOf(measure, one.Row) < possible.Lowest == ValueOf(measure, worst.Row) < possible.Lowest).ToList();
+        var sides = double.IsFinite(possible.Lowest) && double.IsFinite(possible.Highest) ? 2 : 1;
+        var together = Together(alike, measure.RuleOf.Count(rule => rule == measure.RuleOf[worst.Row])) * sides * counts.Rules;
         return together < Unlikely
-            ? Found(table, measure, worst, possible, $"{outside.Count} figures of its rule lie beyond it. The chance that the noise of \"{id}\" takes so many so far is {BudgetText.Chance(together)}.")
+            ? Found(table, measure, worst, possible, $"{alike.Count} figures of its rule lie beyond it. The chance that the noise of \"{id}\" takes so many so far is {BudgetText.Chance(together)}.")
             : null;
     }
 
     /// <summary>
     /// The chance that the chances of so many independent figures have so small a product: Fisher's combination, the tail of a sum of exponential
-    /// variables, bounded by Chernoff (textbook). A figure that is not outside counts with 1, which makes the product larger.
+    /// variables, P(Poisson(sum) &lt; figures), bounded by its last term and a geometric series, the factorial by Stirling (textbook). A figure that
+    /// is not outside counts with 1, which makes the product larger.
     /// </summary>
-    private static double Together(List<Outside> outside, int figures, PossibleValues possible)
+    private static double Together(List<Outside> outside, int figures)
     {
-        var sides = double.IsFinite(possible.Lowest) && double.IsFinite(possible.Highest) ? 2 : 1;
-        var sum = outside.Sum(one => -Math.Log(Math.Min(1, sides * one.Chance)));
-        return sum > figures ? Math.Exp(figures - sum + figures * Math.Log(sum / figures)) : 1;
+        var sum = outside.Sum(one => -Math.Log(one.Chance));
+        var factorial = (figures - 0.5) * Math.Log(figures) - figures + 0.5 * Math.Log(2 * Math.PI);
+        return sum > figures ? Math.Min(1, Math.Exp((figures - 1) * Math.Log(sum) - sum - factorial) / (1 - (figures - 1) / sum)) : 1;
     }
 
     private static double ValueOf(Measure measure, int row) => measure.ValueAt(row).Times(measure.Multiplier).ToDouble();
@@ -114,6 +118,9 @@ internal sealed class BeyondNoiseCheck : IReviewCheck
         (false, { Highest: not null }) => "correct \"highest\" in release.json",
         _ => $"correct \"kind\" in release.json, which is \"{BudgetText.Written(measure.Kind)}\"",
     };
+
+    /// <summary>How many figures and rules are looked at: a chance counts for all of them together.</summary>
+    private readonly record struct Counts(long Figures, int Rules);
 
     private sealed record Outside(int Row, double Chance, Mechanism? Mechanism, NoiseLaw Law);
 }
