@@ -35,5 +35,6 @@ public static class Checks
         new DeltaCheck(),
         new BeyondNoiseCheck(),
         new TotalGapCheck(),
+        new SameNumbersCheck(),
     ];
 }
