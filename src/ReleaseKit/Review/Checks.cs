@@ -23,7 +23,7 @@ public static class Checks
         new UnusedMechanismCheck(),
         new LevelsCheck(),
         new SensitivityFormsCheck(),
-        new MeanSensitivityCheck(),
+        new ClippedSensitivityCheck(),
         new CountSensitivityCheck(),
         new ExactCountCheck(),
         new UniformNoiseCheck(),

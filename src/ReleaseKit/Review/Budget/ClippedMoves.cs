@@ -3,14 +3,14 @@ using ReleaseKit.Releases;
 namespace ReleaseKit.Review.Budget;
 
 /// <summary>
-/// How far one unit can move the means of one measure at least: what it can put into a sum (its contribution is clipped), divided by the public
-/// denominator. Only what is certain counts: one cell; a cell with the totals above it; the smallest move on every level and in every period.
+/// How far one unit can move the sums or means of one measure at least: what it can put into a sum (its contribution is clipped), divided by the
+/// public denominator of a mean. Only what is certain counts: one cell; a cell with the totals above it; the smallest move on every level and in every period.
 /// </summary>
-internal sealed class MeanMoves
+internal sealed class ClippedMoves
 {
     private readonly List<double[]> together;
 
-    private MeanMoves(IReadOnlyDictionary<int, double> moves, double smallest, Table table)
+    private ClippedMoves(IReadOnlyDictionary<int, double> moves, double smallest, Table table)
     {
         SmallestDenominator = smallest;
         One = moves.Values.Max();
@@ -29,9 +29,9 @@ internal sealed class MeanMoves
     public double Length => together.Max(moves => Math.Sqrt(moves.Sum(move => move * move)));
 
     /// <summary>Null where the mechanism does not say enough, or no mean of the measure carries it.</summary>
-    public static MeanMoves? Of(Table table, Measure measure, Mechanism mechanism, Neighbouring neighbouring)
+    public static ClippedMoves? Of(Table table, Measure measure, Mechanism mechanism, Neighbouring neighbouring)
     {
-        if (measure.Kind != MeasureKind.Mean || mechanism is not { Clipped: { } clipped, DenominatorColumn: { } column } || NumbersOf(table, column) is not { } numbers)
+        if (mechanism.Clipped is not { } clipped || NumbersOf(table, measure, mechanism) is not { } numbers)
             return null;
         var most = neighbouring == Neighbouring.Replace ? clipped.To - clipped.From : Math.Max(Math.Abs(clipped.From), Math.Abs(clipped.To));
         var rows = Enumerable.Range(0, table.RowCount).Where(row => measure.HasNumber(row) && numbers(row) > 0
@@ -39,7 +39,14 @@ internal sealed class MeanMoves
         return rows.Count == 0 ? null : new(rows.ToDictionary(row => row, row => most / numbers(row)), rows.Min(numbers), table);
     }
 
-    /// <summary>The denominators stand in a column that is declared as public, or that is a measure itself.</summary>
+    /// <summary>By what the sum of a row is divided: 1 for an amount; for a mean the denominators, which stand in a column that is declared as public or is a measure itself.</summary>
+    private static Func<int, double>? NumbersOf(Table table, Measure measure, Mechanism mechanism) => (measure.Kind, mechanism.DenominatorColumn) switch
+    {
+        (MeasureKind.Amount, _) => _ => 1,
+        (MeasureKind.Mean, { } column) => NumbersOf(table, column),
+        _ => null,
+    };
+
     private static Func<int, double>? NumbersOf(Table table, string column)
     {
         if (table.SideColumns.FirstOrDefault(side => side.Column == column) is { } found)

@@ -4,10 +4,10 @@ using ReleaseKit.Releases;
 namespace ReleaseKit.Review.Budget;
 
 /// <summary>
-/// The declared sensitivity of means against what the folder itself says: a contribution that is clipped, over a denominator that is public, moves
-/// a mean by a known distance. A norm for means without a public denominator is not bounded by anything that was said.
+/// The declared sensitivity of sums and means against what the folder itself says: a contribution that is clipped moves a sum by a known distance,
+/// and a mean by that over a denominator that is public. A norm for means without a public denominator is not bounded by anything that was said.
 /// </summary>
-internal sealed class MeanSensitivityCheck : IReviewCheck
+internal sealed class ClippedSensitivityCheck : IReviewCheck
 {
     // Numbers that are equal but for the last digits of the arithmetic.
     private const double Slack = 1e-9;
@@ -30,13 +30,13 @@ internal sealed class MeanSensitivityCheck : IReviewCheck
 
     private static Finding? CheckMeasure(Mechanism mechanism, Table table, Measure measure, NoiseAccount account)
     {
-        if (MeanMoves.Of(table, measure, mechanism, account.Neighbouring) is not { } moves)
+        if (ClippedMoves.Of(table, measure, mechanism, account.Neighbouring) is not { } moves)
             return null;
         var needed = Needed(mechanism.Sensitivity, moves, account.Neighbouring).FirstOrDefault(norm => norm.Declared < norm.Least * (1 - Slack));
         return needed is null ? null : TooSmall(mechanism, measure, moves, needed, account);
     }
 
-    private static IEnumerable<Norm> Needed(Sensitivity sensitivity, MeanMoves moves, Neighbouring neighbouring)
+    private static IEnumerable<Norm> Needed(Sensitivity sensitivity, ClippedMoves moves, Neighbouring neighbouring)
     {
         // Contributions of either sign lie up to twice "perCell" apart.
         if (sensitivity is { CellsPerUnit: not null, PerCell: { } most })
@@ -47,11 +47,15 @@ internal sealed class MeanSensitivityCheck : IReviewCheck
             yield return new("l2", length, moves.Length, moves.Length);
     }
 
-    private static Finding TooSmall(Mechanism mechanism, Measure measure, MeanMoves moves, Norm norm, NoiseAccount account) => new(
+    private static Finding TooSmall(Mechanism mechanism, Measure measure, ClippedMoves moves, Norm norm, NoiseAccount account) => new(
         FindingLevel.Stop, "sensitivity-too-small", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
-        $"\"{mechanism.Id}\" declares \"{norm.Key}\": {BudgetText.Plain(norm.Declared)}, but {BudgetText.Relation(account.Neighbouring, account)} can move the means of column \"{measure.Column}\" by {BudgetText.Paste(norm.Move)}.\nThat follows from \"clipped\" {BudgetText.Plain(mechanism.Clipped!.From)} to {BudgetText.Plain(mechanism.Clipped.To)} and \"{mechanism.DenominatorColumn}\", at the smallest {BudgetText.Plain(moves.SmallestDenominator)}.",
+        $"\"{mechanism.Id}\" declares \"{norm.Key}\": {BudgetText.Plain(norm.Declared)}, but {BudgetText.Relation(account.Neighbouring, account)} can move the {(measure.Kind == MeasureKind.Mean ? "means" : "sums")} of column \"{measure.Column}\" by {BudgetText.Paste(norm.Move)}.\nThat follows from \"clipped\" {BudgetText.Plain(mechanism.Clipped!.From)} to {BudgetText.Plain(mechanism.Clipped.To)}{Denominators(measure, mechanism, moves)}.",
         "the budget page would promise more protection than there is.",
-        $"write \"{norm.Key}\": {BudgetText.Paste(norm.Least)} or more, or correct \"clipped\" or the denominators if they are not those that were used.");
+        $"write \"{norm.Key}\": {BudgetText.Paste(norm.Least)} or more, or correct \"clipped\"{(measure.Kind == MeasureKind.Mean ? " or the denominators if they are not those that were" : " if it is not what was")} used.");
+
+    private static string Denominators(Measure measure, Mechanism mechanism, ClippedMoves moves) => measure.Kind == MeasureKind.Mean
+        ? $" and \"{mechanism.DenominatorColumn}\", at the smallest {BudgetText.Plain(moves.SmallestDenominator)}"
+        : "";
 
     private static Finding NoDenominator(Mechanism mechanism, Table table, Measure mean)
     {

@@ -3,8 +3,8 @@ using Xunit;
 
 namespace ReleaseKit.Tests.Review.Budget;
 
-/// <summary>A declared sensitivity of means that the folder's own clipping and public denominators disprove; the numbers are worked out by hand beside each.</summary>
-public sealed class MeanSensitivityTests
+/// <summary>A declared sensitivity of sums and means that the folder's own clipping and public denominators disprove; the numbers are worked out by hand beside each.</summary>
+public sealed class ClippedSensitivityTests
 {
     private const string Count = "\"title\": \"Lamps lit\", \"unit\": \"lamp\", \"kind\": \"count\",";
     private const string Mean = "\"title\": \"Mean hours lit\", \"unit\": \"hour\", \"kind\": \"mean\", \"decimals\": 2,";
@@ -35,6 +35,16 @@ public sealed class MeanSensitivityTests
         Assert.Contains("one keeper more or less can move the means of column \"lit\" by", text, StringComparison.Ordinal);
         Assert.Contains("\"lamps\", at the smallest 50.", text, StringComparison.Ordinal);
         Assert.Contains($"Do: write {write}", text, StringComparison.Ordinal);
+    }
+
+    // A sum has no denominator: one clipped contribution moves it by 20.
+    [Fact]
+    public void Sum_of_clipped_amounts_moves_by_what_one_unit_may_put_in()
+    {
+        using var folder = Folder("\"cellsPerUnit\": 1, \"perCell\": 1", rest: "").Edit("release.json", Mean, Mean.Replace("mean", "amount", StringComparison.Ordinal));
+        var text = folder.Text("sensitivity-too-small");
+        Assert.Contains("can move the sums of column \"lit\" by 20.", text, StringComparison.Ordinal);
+        Assert.Contains("Do: write \"perCell\": 20 or more", text, StringComparison.Ordinal);
     }
 
     // Replaced: 5 to 20, 15 ÷ 50 = 0.3; −30 to 20, 50 ÷ 50 = 1, of either sign ±0.5.
