@@ -16,6 +16,8 @@ internal sealed class CellOrder
 
     public bool GrowsWithShift => laws.All(part => part.Loss.GrowsWithShift);
 
+    public bool IsExactForCells => laws.All(part => part.Loss.IsExactForCells);
+
     public LawLoss First => laws[0].Loss;
 
     public LawLoss Last => laws[^1].Loss;

@@ -21,6 +21,8 @@ internal sealed class GaussianLoss(GaussianLaw law) : LawLoss
 
     public override string ConcentratedArithmetic(double shift) => $"{Signs.Of(shift)}² ÷ (2 × {Signs.Of(law.Sigma)}²)";
 
+    internal override bool IsExactForCells => true;
+
     internal override ShiftRun RunOfDistance(double distance, long cells) => new(distance, 1);
 
     internal override Delta JointDeltaAt(Epsilon epsilon, IReadOnlyList<LossTerm> terms)

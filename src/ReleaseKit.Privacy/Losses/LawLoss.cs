@@ -57,6 +57,12 @@ public abstract class LawLoss
     /// </summary>
     internal virtual bool GrowsWithShift => true;
 
+    /// <summary>Whether <see cref="DeltaAt"/> is exact for one cell that is moved by whole steps.</summary>
+    internal virtual bool IsExactForOneCell => true;
+
+    /// <summary>Whether <see cref="JointDeltaAt"/> is exact too.</summary>
+    internal virtual bool IsExactForCells => false;
+
     /// <summary>Shifts that bound every way in which absolute differences can add up to a sum over a number of cells: all in one cell.</summary>
     internal virtual ShiftRun RunOfAbsoluteSum(double sum, long cells) => new(sum, 1);
 

@@ -42,6 +42,9 @@ public sealed class MechanismLoss
     /// <summary>The parts whose upper bounds add up to <see cref="Concentrated"/>.</summary>
     public IReadOnlyList<LossTerm> ConcentratedTerms { get; }
 
+    /// <summary>Whether the upper bound of <see cref="DeltaAt"/> is the loss itself.</summary>
+    internal bool HasExactCurve => movement.HasExactCurve;
+
     /// <summary>The loss of a mechanism.</summary>
     /// <param name="cells">All its cells, by law; at least one. The laws are of one family.</param>
     /// <param name="unit">What a unit can contribute.</param>

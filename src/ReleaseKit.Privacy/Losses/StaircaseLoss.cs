@@ -16,6 +16,8 @@ internal sealed class StaircaseLoss(StaircaseLaw law) : LawLoss
 
     internal override bool GrowsWithShift => false;
 
+    internal override bool IsExactForOneCell => false;
+
     public override Bounds<Epsilon> Pure(double shift) => Exactly(Epsilon.Of(Crossed(shift) * law.Epsilon));
 
     public override Bounds<Rho> Concentrated(double shift)

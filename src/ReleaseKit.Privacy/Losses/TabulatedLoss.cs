@@ -15,6 +15,8 @@ internal sealed class TabulatedLoss(TabulatedLaw law) : LatticeLoss(law)
 
     internal override bool GrowsWithShift => false;
 
+    internal override bool IsExactForOneCell => Missing == 0;
+
     public override Bounds<Epsilon> Pure(double shift)
     {
         var ratio = Shifts(StepsDown(shift)).SelectMany(LogRatios).Where(IsKnown).DefaultIfEmpty(0).Max();

@@ -20,6 +20,8 @@ internal sealed class UniformLoss(UniformLaw law) : LawLoss
 
     public override string ConcentratedArithmetic(double shift) => "∞";
 
+    internal override bool IsExactForCells => true;
+
     internal override Delta JointDeltaAt(Epsilon epsilon, IReadOnlyList<LossTerm> terms) =>
         AnyOf(terms, term => term.Loss.DeltaAt(epsilon, term.Shift).Upper.Value);
 

@@ -9,6 +9,9 @@ internal abstract class UnitMovement(CellOrder cells)
     /// <summary>One moved cell of a pair of neighbours, at the law it is known to concern.</summary>
     public abstract LossTerm SingleShift { get; }
 
+    /// <summary>Whether <see cref="DeltaAt"/> is the loss of some pair of neighbours that uses its bounds in full.</summary>
+    public abstract bool HasExactCurve { get; }
+
     private protected CellOrder Cells => cells;
 
     /// <exception cref="ArgumentException">A bound on the contribution is not above 0.</exception>
@@ -50,6 +53,8 @@ internal sealed class PerCellMovement(CellOrder cells, UnitContribution.PerCell 
     public override LossTerm SingleShift =>
         new(Cells.WorstFirst(loss => loss.DeltaAt(Epsilon.Zero, LargestShift).Upper.Value).First, attained.Max(runs => runs[0].Shift), 1);
 
+    public override bool HasExactCurve => unit is { PerUnit: null } && (Cells.IsExactForCells || (worst is [[{ Cells: 1 }]] && Cells.First.IsExactForOneCell));
+
     public override IReadOnlyList<IReadOnlyList<LossTerm>> Charged(Func<LawLoss, double> order, bool concentrated = false)
     {
         var ordered = Cells.WorstFirst(order);
@@ -90,6 +95,9 @@ internal sealed class NormMovement(CellOrder cells, double norm, bool isSum) : U
             return new LossTerm(mildest, Spread(mildest).Shift, 1);
         }
     }
+
+    // Only where the length alone counts can one cell take the whole norm and lose the most.
+    public override bool HasExactCurve => Cells.First is GaussianLoss;
 
     public override IReadOnlyList<IReadOnlyList<LossTerm>> Charged(Func<LawLoss, double> order, bool concentrated = false)
     {

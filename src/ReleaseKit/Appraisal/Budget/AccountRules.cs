@@ -1,3 +1,5 @@
+using ReleaseKit.Privacy.Losses;
+
 namespace ReleaseKit.Appraisal.Budget;
 
 /// <summary>Every rule an account can stand on. The wording files have a text for each key ("budget.rule." + key).</summary>
@@ -12,15 +14,19 @@ public static class AccountRules
     public static AccountRule SimpleConversion { get; } = new("conversion-simple", "Bun & Steinke 2016, Proposition 1.3");
     public static AccountRule PureAsConcentrated { get; } = new("pure-as-concentrated", "Bun & Steinke 2016, Proposition 1.4, in its smallest form ε·tanh(ε/2)");
     public static AccountRule ExactCurve { get; } = new("exact-curve", "Balle & Wang 2018 for Gaussian noise; else summed from the law itself");
+    public static AccountRule CurveBound { get; } = new("curve-bound", "the smaller of the curve from ρ, Canonne, Kamath & Steinke 2020, and of the sum over cells, Dwork & Roth 2014, Theorem 3.16");
     public static AccountRule Pair { get; } = new("named-pair", "one unit that uses its declared bounds in full");
     public static AccountRule Odds { get; } = new("odds", "derived; see “Odds for one unit” on the methods page");
+
+    /// <summary>The curve of a mechanism by its own: exact, or a bound where several cells together are not known exactly.</summary>
+    public static AccountRule CurveOf(MechanismLoss loss) => loss.HasExactCurve ? ExactCurve : CurveBound;
 
     /// <summary>The loss of one law, from its literature.</summary>
     public static AccountRule Law(string source) => new("law", source);
 
     public static IReadOnlyList<AccountRule> All { get; } =
     [
-        Authorised, Declared, PureSum, BasicSum, ConcentratedSum, TightConversion, SimpleConversion, PureAsConcentrated, ExactCurve, Pair, Odds, Law(""),
+        Authorised, Declared, PureSum, BasicSum, ConcentratedSum, TightConversion, SimpleConversion, PureAsConcentrated, ExactCurve, CurveBound, Pair, Odds, Law(""),
     ];
 }
 

@@ -19,7 +19,7 @@ public sealed class ApproximateAccountant : Accountant
         if (spending.Loss is not { } loss)
             return AsStated(spending.Mechanism);
         var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
-        var rule = delta == Delta.Zero ? AccountRules.Law(loss.PureTerms[0].Loss.Source) : AccountRules.ExactCurve;
+        var rule = delta == Delta.Zero ? AccountRules.Law(loss.PureTerms[0].Loss.Source) : AccountRules.CurveOf(loss);
         return Of(DeclaredDelta.EpsilonAt(loss, delta.Value).Upper, delta, rule);
     }
 

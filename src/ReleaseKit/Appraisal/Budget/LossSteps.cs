@@ -45,8 +45,8 @@ internal static class LossSteps
         var sign = accountant.Currency == LossCurrency.Rho ? "ρ" : "ε";
         if (double.IsInfinity(amount))
             return new AccountStep(AccountSteps.Unbounded, $"{sign} = ∞", amount, upper.Rule);
-        if (upper.Rule == AccountRules.ExactCurve)
-            return new AccountStep(AccountSteps.Curve, $"δ({Signs.Of(amount)}) = {Signs.Of(upper.Delta ?? 0)}", amount, upper.Rule);
+        if (upper.Rule == AccountRules.ExactCurve || upper.Rule == AccountRules.CurveBound)
+            return new AccountStep(AccountSteps.Curve, $"δ({Signs.Of(amount)}) {(upper.Rule == AccountRules.ExactCurve ? '=' : '≤')} {Signs.Of(upper.Delta ?? 0)}", amount, upper.Rule);
         var parts = terms.Select(term => Part(term, accountant.Currency));
         var key = spending.Mechanism.Parameters.Values.Any(parameter => parameter.Column is not null) ? AccountSteps.LossByRow : AccountSteps.Loss;
         return new AccountStep(key, $"{Divisions(terms, accountant.Currency)}{sign} = {Signs.Plus(parts)} = {Signs.Of(amount)}", amount, upper.Rule);

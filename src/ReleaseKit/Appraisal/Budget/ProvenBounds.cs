@@ -29,7 +29,7 @@ public sealed class ProvenBounds
         }
 
         if (spendings is [{ Loss: { } only }])
-            curves.Add((new MechanismCurve(only), AccountRules.ExactCurve));
+            curves.Add((new MechanismCurve(only), AccountRules.CurveOf(only)));
         return new ProvenBounds(curves, Total(new ConcentratedAccountant(), spendings).Rho!.Value);
     }
 

@@ -8,15 +8,13 @@ namespace ReleaseKit.Review.Budget;
 /// <summary>A mechanism whose law has no loss in the declared accounting: the accountings in which it has one are named.</summary>
 internal sealed class AccountingCheck : IReviewCheck
 {
-    private static readonly Epsilon Farthest = Epsilon.Of(1e5);
-
     public IEnumerable<Finding> Check(ReviewSubject subject)
     {
         if (subject.Noise is not { } account)
             return [];
         var accountant = Accountant.Of(account.Accounting);
         return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))) && !IsToldByColumn(spending, subject.Read))
-            .Select(spending => Found(spending, account));
+            .Select(spending => Found(spending, account, new ProposedPair(subject.Spendings, account)));
     }
 
     // A column that gives a parameter and is not there, not declared or without numbers is told where it stands.
@@ -27,15 +25,15 @@ internal sealed class AccountingCheck : IReviewCheck
             finding.Level == FindingLevel.Stop && columns.Exists(column => finding.Found.Contains($"\"{column}\"", StringComparison.Ordinal))));
     }
 
-    private static Finding Found(MechanismSpending spending, NoiseAccount account) => spending switch
+    private static Finding Found(MechanismSpending spending, NoiseAccount account, ProposedPair pairs) => spending switch
     {
         { Mechanism: { Law: LawName.Declared, Spent: not null } mechanism } => Stated(mechanism, account),
         { Loss: null } => Unknown(spending.Mechanism),
-        _ when account.Accounting == Accounting.Approximate => SpentNeeded(spending, account),
-        _ => NoLoss(spending, account),
+        _ when account.Accounting == Accounting.Approximate => SpentNeeded(spending, pairs),
+        _ => NoLoss(spending, account, pairs),
     };
 
-    private static Finding NoLoss(MechanismSpending spending, NoiseAccount account)
+    private static Finding NoLoss(MechanismSpending spending, NoiseAccount account, ProposedPair pairs)
     {
         var finite = FiniteIn(spending.Loss!).ToList();
         return new Finding(
@@ -43,17 +41,17 @@ internal sealed class AccountingCheck : IReviewCheck
             $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\", whose loss has no limit in {BudgetText.Written(account.Accounting)} accounting.\nIt has one in: {string.Join(", ", finite.Select(BudgetText.Written))}.",
             "the total of the release would have no limit either, and nothing could be promised.",
             finite[^1] != Accounting.Approximate ? $"write \"accounting\": \"{BudgetText.Written(finite[^1])}\", or noise its figures with another law."
-                : IsBeyondAuthorised(spending, account) ? $"{AnotherLaw(spending, account)}."
-                : $"write \"accounting\": \"approximate\" and {SpentOf(spending, account)} for it, or noise its figures with another law.");
+                : pairs.IsBeyondAuthorised(spending) ? $"{pairs.AnotherLaw(spending)}."
+                : $"write \"accounting\": \"approximate\" and {pairs.For(spending)} for it, or noise its figures with another law.");
     }
 
-    private static Finding SpentNeeded(MechanismSpending spending, NoiseAccount account) => new(
+    private static Finding SpentNeeded(MechanismSpending spending, ProposedPair pairs) => new(
         FindingLevel.Stop, "spent-needed", FindingOwner.Noise, BudgetText.PlaceOf(spending.Mechanism, "spent"),
         $"\"{spending.Mechanism.Id}\" has the law \"{BudgetText.Written(spending.Mechanism.Law)}\" and {(spending.Mechanism.Spent is null ? "does not say what it spent" : "declares a \"spent\" that it never meets, whatever the epsilon, at that delta")}.",
         "this law has no epsilon without a delta; the office chooses the pair, and it is checked against the law.",
-        IsBeyondAuthorised(spending, account)
-            ? $"{AnotherLaw(spending, account)}."
-            : $"{(spending.Mechanism.Spent is null ? "add" : "write")} {SpentOf(spending, account)}, or another pair of its curve.");
+        pairs.IsBeyondAuthorised(spending)
+            ? $"{pairs.AnotherLaw(spending)}."
+            : $"{(spending.Mechanism.Spent is null ? "add" : "write")} {pairs.For(spending)}, or another pair of its curve.");
 
     private static Finding Unknown(Mechanism mechanism) => new(
         FindingLevel.Stop, "loss-unknown", FindingOwner.Noise, mechanism.At,
@@ -79,27 +77,5 @@ internal sealed class AccountingCheck : IReviewCheck
         yield return Accounting.Approximate;
         if (loss.Concentrated.Upper.IsFinite)
             yield return Accounting.Concentrated;
-    }
-
-    /// <summary>Whether no pair of its curve has a delta as small as the authorised one, so that none is worth pasting.</summary>
-    private static bool IsBeyondAuthorised(MechanismSpending spending, NoiseAccount account) => FloorOf(spending) > (account.Authorised.Delta ?? 0);
-
-    private static string AnotherLaw(MechanismSpending spending, NoiseAccount account)
-    {
-        var wider = spending.Mechanism.Law == LawName.TruncatedDiscreteLaplace ? ", or give this one a larger \"cutoff\"" : "";
-        var authorised = account.Authorised.Delta is > 0 and var delta ? $"{BudgetText.Plain(delta)} is authorised" : "no delta is authorised";
-        return $"noise its figures with a law that has no end, such as discrete-laplace{wider}: the delta of this one is at least {BudgetText.Paste(FloorOf(spending))} at every epsilon, and {authorised}";
-    }
-
-    /// <summary>What δ does not fall below at any ε; 0 where it falls to 0.</summary>
-    private static double FloorOf(MechanismSpending spending) => spending.Loss!.DeltaAt(Farthest).Upper.Value;
-
-    // Where δ never falls to 0, its floor; else the authorised δ.
-    private static string SpentOf(MechanismSpending spending, NoiseAccount account)
-    {
-        var floor = FloorOf(spending);
-        var delta = floor > 0 ? floor * (1 + 1e-6) : account.Authorised.Delta is > 0 and var authorised ? authorised : 1e-9;
-        var epsilon = spending.Loss!.EpsilonAt(Delta.AtMost(delta)).Upper.Value;
-        return $"\"spent\": {{ \"epsilon\": {BudgetText.Paste(epsilon)}, \"delta\": {BudgetText.Paste(delta)} }}";
     }
 }

@@ -39,10 +39,10 @@ internal sealed class ClippedMoves
         return rows.Count == 0 ? null : new(rows.ToDictionary(row => row, row => most / numbers(row)), rows.Min(numbers), table);
     }
 
-    /// <summary>By what the sum of a row is divided: 1 for an amount; for a mean the denominators, which stand in a column that is declared as public or is a measure itself.</summary>
+    /// <summary>By what the sum of a row is divided: 1 for an amount, or for what else is clipped without a denominator; for a mean the denominators, which stand in a column that is declared as public or is a measure itself.</summary>
     private static Func<int, double>? NumbersOf(Table table, Measure measure, Mechanism mechanism) => (measure.Kind, mechanism.DenominatorColumn) switch
     {
-        (MeasureKind.Amount, _) => _ => 1,
+        (MeasureKind.Amount, _) or (MeasureKind.Count or MeasureKind.Estimate, null) => _ => 1,
         (MeasureKind.Mean, { } column) => NumbersOf(table, column),
         _ => null,
     };

@@ -11,6 +11,12 @@ internal sealed record DeclaredNumber(string Name, double Declared, double Lower
     private const double Tolerance = 1e-9;
     private const double FurthestRounding = 0.05;
 
+    /// <summary>The delta that an epsilon is declared with; null without one.</summary>
+    public double? Delta { get; init; }
+
+    /// <summary>The upper bound as it can be pasted: a number, or the pair that "spent" is to hold.</summary>
+    public string Pasted => Delta is { } delta ? $"\"spent\": {{ \"epsilon\": {BudgetText.Paste(Upper)}, \"delta\": {BudgetText.Plain(delta)} }}" : BudgetText.Paste(Upper);
+
     public bool IsEnough => Declared >= Upper * (1 - Tolerance);
 
     public bool IsBelowLower => Declared < Lower * (1 - Tolerance);
@@ -26,7 +32,7 @@ internal sealed record DeclaredNumber(string Name, double Declared, double Lower
             yield break;
         var bounds = DeclaredDelta.EpsilonAt(loss, declared.Delta);
         var name = declared.Delta is > 0 and var delta ? $"epsilon at delta {BudgetText.Plain(delta)}" : "epsilon";
-        yield return new DeclaredNumber(name, epsilon, bounds.Lower.Value, bounds.Upper.Value);
+        yield return new DeclaredNumber(name, epsilon, bounds.Lower.Value, bounds.Upper.Value) { Delta = declared.Delta is > 0 ? declared.Delta : null };
     }
 
     /// <summary>Whether a number, rounded to the declared digits and not far from it, is the declared one.</summary>

@@ -223,5 +223,22 @@ public sealed class BudgetStatementTests
         Assert.All(meaning.Beliefs, belief => Assert.True(belief.Lowest < belief.Prior && belief.Prior < belief.Highest));
     }
 
+    /// <summary>Of a discrete Gaussian only one cell's curve is summed exactly; of a continuous one the length of the shifts alone counts (Balle and Wang 2018).</summary>
+    [Theory]
+    [InlineData(LawName.DiscreteGaussian, 1, "exact-curve", "=")]
+    [InlineData(LawName.DiscreteGaussian, 2, "curve-bound", "≤")]
+    [InlineData(LawName.Gaussian, 2, "exact-curve", "=")]
+    public void Curve_is_called_exact_only_where_it_is(LawName law, int cells, string rule, string sign)
+    {
+        var mechanism = SmallRelease.Mechanism("a", law, ("sigma", 4)) with
+        {
+            Sensitivity = new Sensitivity { CellsPerUnit = cells, PerCell = 1 },
+            Spent = new DeclaredLoss(0.3, 0.0449, null),
+        };
+        var statement = BudgetStatement.Of(Accounts.Of(Accounting.Approximate, Neighbouring.AddOrRemove, With(0.2), mechanism));
+        Assert.Equal(rule, statement.Mechanisms[0].Recomputed.Rule.Key);
+        Assert.Contains($") {sign} ", statement.Steps.Single(step => step.Key == "curve").Arithmetic, StringComparison.Ordinal);
+    }
+
     private static Authorised With(double delta) => Accounts.SixAtOneInABillion with { Delta = delta };
 }

@@ -72,4 +72,22 @@ public sealed class CountSensitivityTests
         using var folder = Folder("\"l1\": 0.5").Edit("mechanisms.json", "\"who\": \"lamp\"", Keeper);
         folder.HasNo("sensitivity-too-small");
     }
+
+    // A sum of contributions from 0 to 400: one more moves it by 400; −30 to 20 by 30, and in place of another by 50, ±25 each.
+    [Theory]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 1", "\"from\": 0, \"to\": 400", "add-or-remove", "\"perCell\": 400")]
+    [InlineData("\"l1\": 399", "\"from\": 0, \"to\": 400", "add-or-remove", "\"l1\": 400")]
+    [InlineData("\"l2\": 20", "\"from\": -30, \"to\": 20", "add-or-remove", "\"l2\": 30")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 20, \"signed\": true", "\"from\": -30, \"to\": 20", "replace", "\"perCell\": 25")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 400", "\"from\": 0, \"to\": 400", "add-or-remove", null)]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 30, \"signed\": true", "\"from\": -30, \"to\": 20", "replace", null)]
+    public void Sum_moves_by_what_a_unit_can_put_into_it(string sensitivity, string clipped, string neighbouring, string? write)
+    {
+        using var folder = Folder($"{sensitivity} }}, \"clipped\": {{ {clipped}").Edit("mechanisms.json", "\"who\": \"lamp\"", Keeper)
+            .Edit("mechanisms.json", "\"add-or-remove\"", $"\"{neighbouring}\"");
+        if (write is null)
+            folder.HasNo("sensitivity-too-small");
+        else
+            Assert.Contains($"Do: write {write} or more,", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
 }

@@ -96,7 +96,12 @@ public sealed class SpentCheckTests
         using var folder = new TestFolder();
         folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"");
         folder.WithLit("""{ "id": "lamps-lit", "law": "gaussian", "sigma": 5, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0.5, "delta": 1e-6 } }""");
-        Assert.Contains("\"lamps-lit\" declares epsilon 0.5 at delta 0.000001", folder.Text("spent-too-low"), StringComparison.Ordinal);
+        var text = folder.Text("spent-too-low");
+        Assert.Contains("\"lamps-lit\" declares epsilon 0.5 at delta 0.000001", text, StringComparison.Ordinal);
+        Assert.Contains("costs epsilon 0.8", text, StringComparison.Ordinal);
+        Assert.Contains("Do: write \"spent\": { \"epsilon\": 0.8", text, StringComparison.Ordinal);
+        Assert.Contains("\"delta\": 0.000001 }", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("leave \"spent\" out", text, StringComparison.Ordinal);
         folder.Edit("mechanisms.json", "\"epsilon\": 0.5", "\"epsilon\": 0.9");
         folder.HasNo("spent-too-low");
     }
@@ -123,6 +128,22 @@ public sealed class SpentCheckTests
         folder.HasNo("spent-below-proof");
         folder.Edit("mechanisms.json", "\"delta\": 0.1 ", "\"delta\": 0.09 ");
         Assert.Contains("\"delta\": 0.1000002 }", folder.Text("spent-needed"), StringComparison.Ordinal);
+    }
+
+    // 1e-9 in three parts is 3.3e-10 each; with 4e-10 declared by one, the two others share 6e-10.
+    [Theory]
+    [InlineData("", 3, "0.00000000033")]
+    [InlineData(", \"spent\": { \"epsilon\": 9, \"delta\": 4e-10 }", 2, "0.0000000003")]
+    public void Pairs_proposed_share_what_is_authorised(string spent, int times, string share)
+    {
+        using var folder = new TestFolder();
+        const string Noise = "\"law\": \"gaussian\", \"sigma\": 5, \"sensitivity\": { \"cellsPerUnit\": 1, \"perCell\": 1 }";
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"")
+            .Edit("mechanisms.json", "\"mechanisms\": [", $"\"mechanisms\": [ {{ \"id\": \"third\", \"use\": \"not-published\", {Noise}{spent} }},")
+            .Edit("mechanisms.json", "\"law\": \"discrete-laplace\", \"scale\": 3.0", "\"law\": \"discrete-gaussian\", \"sigma\": 5");
+        var found = folder.Review().Where(finding => finding.Slug == "spent-needed").ToList();
+        Assert.Equal(times, found.Count);
+        Assert.All(found, finding => Assert.Contains($"\"delta\": {share} }}", finding.Do, StringComparison.Ordinal));
     }
 
     private static string Spent(string sigma, string cells, string spent) =>
