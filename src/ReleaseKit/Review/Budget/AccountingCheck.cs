@@ -1,5 +1,4 @@
 using ReleaseKit.Appraisal.Budget;
-using ReleaseKit.Privacy;
 using ReleaseKit.Privacy.Losses;
 using ReleaseKit.Releases;
 
