@@ -15,6 +15,7 @@ internal static class FolderChecks
         {
             TableChecks.Run(table, log);
             TotalRowChecks.Run(table, log);
+            PeriodColumnChecks.Run(table, log);
             RuleChecks.Run(table, mechanisms, log);
             SumChecks.Run(table, log);
         }

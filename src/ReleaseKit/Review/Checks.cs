@@ -36,5 +36,6 @@ public static class Checks
         new BeyondNoiseCheck(),
         new TotalGapCheck(),
         new SameNumbersCheck(),
+        new UnnoisedNameCheck(),
     ];
 }

@@ -11,7 +11,7 @@ public static class Waivers
     /// <summary>Slugs of findings that may be waived.</summary>
     public static IReadOnlySet<string> Waivable { get; } = new HashSet<string>
     {
-        "formula-cell", "kind-not-given", "label-unused", "looks-like-total", "no-address", "no-licence", "prose-heading", "prose-html", "undeclared-unit",
+        "formula-cell", "kind-not-given", "label-unused", "looks-like-period", "looks-like-total", "no-address", "no-licence", "prose-heading", "prose-html", "undeclared-unit",
     };
 
     /// <summary>The findings, those that are waived turned into notes that say by whom and why; a waiver without effect is a caution of its own.</summary>

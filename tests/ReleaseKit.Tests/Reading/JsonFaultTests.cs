@@ -34,6 +34,17 @@ public sealed class JsonFaultTests
         Assert.Contains(words, stop.Found, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("{ \"a\": \u201Cb\u201D }", true)]
+    [InlineData("{ \u201Ca\u201D: 1 }", true)]
+    [InlineData("{ 'a': 1 }", true)]
+    [InlineData("{ \"a\": ,", false)]
+    public void Quotes_of_another_kind_are_named(string text, bool isQuote)
+    {
+        using var folder = new TestFolder().With("mechanisms.json", text);
+        Assert.Equal(isQuote, folder.OnlyStop("json-broken").Do.StartsWith("use plain quotes", StringComparison.Ordinal));
+    }
+
     [Fact]
     public void Nesting_that_is_too_deep_is_told_in_plain_words()
     {

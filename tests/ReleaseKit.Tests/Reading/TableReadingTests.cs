@@ -1,5 +1,6 @@
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
+using ReleaseKit.Review;
 using ReleaseKit.Tests.Folders;
 using Xunit;
 
@@ -36,6 +37,45 @@ public sealed class TableReadingTests
         using var folder = new TestFolder().Edit(Release, ", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "")
             .Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": 3.0, \"covers\": [\"lamps/broken\", \"lamps/broken?street=All\", \"lamps/broken?street=Quay\"]");
         Assert.Equal("lamps/broken?street=Quay", folder.OnlyStop("covered-twice").Address);
+    }
+
+    [Fact]
+    public void Figures_covered_twice_by_the_same_two_are_one_stop_with_their_number()
+    {
+        using var folder = new TestFolder().Edit(Release, ", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", "")
+            .Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": 3.0, \"covers\": [\"lamps/broken\", \"lamps/broken?street=All\", \"lamps/broken\"]");
+        var stop = folder.OnlyStop("covered-twice");
+        Assert.StartsWith("lamps/broken?street=Kiln%20Row is covered by", stop.Found, StringComparison.Ordinal);
+        Assert.EndsWith(", and so are 2 more figures.", stop.Found, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("{ \"where\": { \"street\": \"All\" }, \"mechanism\": \"lamps-broken\" }", "tables/lamps.csv:3:13", ", nor have 2 more figures of \"broken\".")]
+    [InlineData("{ \"where\": { \"street\": \"All\" }, \"mechanism\": \"lamps-broken\" }, { \"where\": { \"street\": \"Quay\" }, \"mechanism\": \"lamps-broken\" }", "tables/lamps.csv:3:13", ", nor has one more figure of \"broken\".")]
+    public void Figures_without_a_rule_are_one_stop_with_their_number(string rules, string at, string more)
+    {
+        using var folder = new TestFolder().Edit(Release, "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", $"\"noise\": [ {rules} ]");
+        var stop = folder.OnlyStop("no-rule");
+        Assert.Equal(at, stop.At.ToString());
+        Assert.EndsWith(more, stop.Found, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("{ \"mechanism\": \"lamps-broken\" }, { \"where\": { \"street\": \"Quay\" }, \"exact\": \"audited\" }", "the rules before it take its rows, or none is like it")]
+    [InlineData("{ \"mechanism\": \"lamps-broken\" }, { \"exact\": \"audited\" }", "the rules before it take all rows")]
+    public void Rule_that_no_row_comes_to_is_a_caution(string rules, string why)
+    {
+        using var folder = new TestFolder().Edit(Release, "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", $"\"noise\": [ {rules} ]");
+        var found = Assert.Single(folder.Read().Findings);
+        Assert.Equal(("rule-unused", FindingLevel.Caution), (found.Slug, found.Level));
+        Assert.Contains(why, found.Found, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Column_of_row_headings_is_not_proposed_as_a_scale()
+    {
+        using var folder = new TestFolder().Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": { \"column\": \"streets\" }");
+        Assert.StartsWith("add the column", folder.OnlyStop("missing-column").Do, StringComparison.Ordinal);
     }
 
     [Fact]

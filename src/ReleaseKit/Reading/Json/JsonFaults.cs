@@ -34,6 +34,13 @@ internal static partial class JsonFaults
         return known.Replace("{0}", Character(rest), StringComparison.Ordinal);
     }
 
+    /// <summary>Whether a quote stands there that JSON does not know.</summary>
+    public static bool IsOtherQuote(ReadOnlySpan<byte> rest)
+    {
+        _ = Rune.DecodeFromUtf8(rest, out var rune, out _);
+        return rune.Value is '\'' or '`' or '´' or '«' or '»' or '‘' or '’' or '‚' or '“' or '”' or '„' or '″';
+    }
+
     /// <summary>The innermost bracket that is still open where the text ends; null if it breaks before, or ends outside all brackets.</summary>
     public static (char Bracket, long Offset)? Open(byte[] text, JsonReaderOptions options)
     {

@@ -13,6 +13,12 @@ internal static class JsonProblems
         Why,
         "look at this place and just before it: a comma between two members, a quote at both ends of a text, a bracket for each bracket.");
 
+    public static Finding OtherQuote(Place at, FindingOwner owner, string found) => new(
+        FindingLevel.Stop, "json-broken", owner, at,
+        $"The JSON breaks here. {found}",
+        Why,
+        "use plain quotes, \", at both ends of every key and text of the file: a word processor puts curly ones in their place, a text editor does not.");
+
     public static Finding Unfinished(Place at, FindingOwner owner, char bracket, Place opened) => new(
         FindingLevel.Stop, "json-broken", owner, at,
         $"The file ends here, and the {bracket} of line {opened.Line}, column {opened.Column}, is still open.",

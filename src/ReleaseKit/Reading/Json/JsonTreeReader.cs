@@ -43,9 +43,10 @@ public static class JsonTreeReader
             return JsonProblems.TooDeep(lines.At(offset), owner);
         if (JsonFaults.Open(text, Options) is { } open)
             return JsonProblems.Unfinished(lines.At(text.Length), owner, open.Bracket, lines.At(open.Offset));
-        return offset < text.Length
-            ? JsonProblems.Broken(lines.At(offset), owner, JsonFaults.Words(broken.Message, text.AsSpan(offset)))
-            : JsonProblems.NoValue(lines.At(offset), owner);
+        if (offset >= text.Length)
+            return JsonProblems.NoValue(lines.At(offset), owner);
+        var words = JsonFaults.Words(broken.Message, text.AsSpan(offset));
+        return JsonFaults.IsOtherQuote(text.AsSpan(offset)) ? JsonProblems.OtherQuote(lines.At(offset), owner, words) : JsonProblems.Broken(lines.At(offset), owner, words);
     }
 
     private static byte[] WithoutMark(byte[] bytes) => bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes[3..] : bytes;

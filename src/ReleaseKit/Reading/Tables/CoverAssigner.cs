@@ -58,12 +58,10 @@ internal static class CoverAssigner
     private static void Mark(
         byte[] ruleOf, List<(Covering Cover, IReadOnlyList<int> Rows)> covers, int index, ReadTable table, int measure, FindingLog log)
     {
+        foreach (var twice in covers[index].Rows.Where(row => ruleOf[row] < covers.Count).GroupBy(row => ruleOf[row]))
+            log.Add(TableProblems.CoveredTwice(
+                covers[index].Cover.At, table.Address(measure, twice.First()), twice.Count(), covers[twice.Key].Cover.MechanismId, covers[index].Cover.MechanismId, FindingOwner.Noise));
         foreach (var row in covers[index].Rows)
-        {
-            if (ruleOf[row] < covers.Count)
-                log.Add(TableProblems.CoveredTwice(
-                    covers[index].Cover.At, table.Address(measure, row), covers[ruleOf[row]].Cover.MechanismId, covers[index].Cover.MechanismId, FindingOwner.Noise));
             ruleOf[row] = (byte)index;
-        }
     }
 }

@@ -17,7 +17,7 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
             isWhole = false;
         }
         foreach (var (mechanism, key, column) in ScaleColumns().Where(scale => !headers.Contains(scale.Column)))
-            draft.Context.Add(TableProblems.ScaleColumnMissing(mechanism.KeyPlaces.GetValueOrDefault(key, mechanism.At), column, mechanism.Id, draft.File, headers, FindingOwner.Noise));
+            draft.Context.Add(TableProblems.ScaleColumnMissing(mechanism.KeyPlaces.GetValueOrDefault(key, mechanism.At), column, mechanism.Id, draft.File, Others(), FindingOwner.Noise));
         CheckStatusColumns();
         CheckUndeclared();
         return isWhole;
@@ -33,6 +33,10 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
         .Select(end => mechanisms.Find(end.Id)).OfType<Mechanism>().Distinct()
         .SelectMany(mechanism => mechanism.Parameters.Select(parameter => (parameter.Key, Column: parameter.Value.Column)).Append((Key: "denominator", Column: mechanism.DenominatorColumn))
             .Where(named => named.Column is not null).DistinctBy(named => named.Column).Select(named => (mechanism, named.Key, named.Column!)));
+
+    // Row headings, figures and marks are no scales.
+    private IReadOnlyList<string> Others() => [.. headers.Except(draft.Stub.Select(stub => stub.Column))
+        .Except(draft.Figures.Select(figure => figure.Column)).Except(draft.Figures.Select(figure => draft.Statuses.ColumnOf(figure.Column)).OfType<string>())];
 
     private void CheckStatusColumns()
     {

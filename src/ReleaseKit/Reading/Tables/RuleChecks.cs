@@ -43,9 +43,11 @@ internal static class RuleChecks
             return;
         if (figure.Rules.Count == 1)
             log.Add(TableProblems.NoNoise(draft.At, figure.Column, FindingOwner.Noise));
-        else
-            foreach (var row in RowsWithout(figure, read.Table))
-                log.Add(TableProblems.NoRule(read.PlaceOf(row, measure), read.Address(measure, row), figure.Column, FindingOwner.Noise));
+        else if (RowsWithout(figure, read.Table).ToList() is [var row, ..] rows)
+            log.Add(TableProblems.NoRule(read.PlaceOf(row, measure), read.Address(measure, row), rows.Count, figure.Column, FindingOwner.Noise));
+        foreach (var (rule, given) in (draft.Rules ?? []).Index())
+            if (read.Table.RowCount > 0 && !figure.RuleOf.AsSpan().Contains((byte)rule))
+                log.Add(TableProblems.RuleUnused(given.At, figure.Column, given.Where.Count > 0, FindingOwner.Noise));
     }
 
     /// <summary>Whether a rule could not be read, so that rows without one are no further fault.</summary>

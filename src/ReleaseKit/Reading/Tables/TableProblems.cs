@@ -75,14 +75,20 @@ internal static class TableProblems
         "a condition that nothing meets hides a slip of the pen.",
         Nearest.Of(value, known) is { } near ? $"write \"{near}\"." : $"use a value of the CSV: {string.Join(", ", known.Take(5).Select(KeyProblems.Cut))}.");
 
-    public static Finding NoRule(Place at, string address, string column, FindingOwner owner) => new(
+    public static Finding NoRule(Place at, string address, int count, string column, FindingOwner owner) => new(
         FindingLevel.Stop, "no-rule", owner, at,
-        $"{address} has no noise rule.",
+        $"{address} has no noise rule{More(count, "nor has one more figure", "nor have {0} more figures", $" of \"{column}\"")}.",
         "a figure without one would stand there without a margin.",
         $"add a last rule without \"where\" to \"noise\" of \"{column}\": {{ \"mechanism\": \"…\" }}, or \"exact\" or \"public\" with the reason.")
     {
         Address = address,
     };
+
+    public static Finding RuleUnused(Place at, string column, bool hasWhere, FindingOwner owner) => new(
+        FindingLevel.Caution, "rule-unused", owner, at,
+        $"No row comes to this rule of \"{column}\": {(hasWhere ? "the rules before it take its rows, or none is like it" : "the rules before it take all rows")}.",
+        "the first rule that fits a row decides; what this one says holds for no figure.",
+        "put it before the rule that takes its rows, or take it out.");
 
     public static Finding NoNoise(Place at, string column, FindingOwner owner) => new(
         FindingLevel.Stop, "no-rule", owner, at,
@@ -96,14 +102,18 @@ internal static class TableProblems
         "the two could disagree.",
         "keep one of them for this measure.");
 
-    public static Finding CoveredTwice(Place at, string address, string one, string other, FindingOwner owner) => new(
+    public static Finding CoveredTwice(Place at, string address, int count, string one, string other, FindingOwner owner) => new(
         FindingLevel.Stop, "covered-twice", owner, at,
-        $"{address} is covered by \"{one}\" and by \"{other}\".",
+        $"{address} is covered by \"{one}\" and by \"{other}\"{More(count, "and so is one more figure", "and so are {0} more figures")}.",
         "a figure carries the noise of one of them, and its margin depends on which.",
         "let each selection under \"covers\" name rows of its own.")
     {
         Address = address,
     };
+
+    private static string More(int count, string one, string several, string whose = "") => count < 2
+        ? ""
+        : $", {(count == 2 ? one : several.Replace("{0}", $"{count - 1}", StringComparison.Ordinal))}{whose}";
 
     public static Finding ScaleNotPositive(Place at, string column, string key, FindingOwner owner) => new(
         FindingLevel.Stop, "scale-not-positive", owner, at,

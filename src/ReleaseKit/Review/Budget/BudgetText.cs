@@ -84,6 +84,14 @@ internal static class BudgetText
 
     public static string Written(MeasureKind kind) => kind.ToString().ToLowerInvariant();
 
+    /// <summary>What is said of further figures of so many in all; {0} is how many.</summary>
+    public static string More(int count, string one, string several, string whose) => count switch
+    {
+        < 2 => "",
+        2 => one + whose,
+        _ => several.Replace("{0}", (count - 1).ToString(CultureInfo.InvariantCulture), StringComparison.Ordinal) + whose,
+    };
+
     /// <summary>A chance to two digits, rounded up; what a double cannot hold any more is "below 10^−300".</summary>
     public static string Chance(double chance)
     {

@@ -46,7 +46,7 @@ internal sealed class OffGridCheck : IReviewCheck
         var isRounded = mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any();
         return new Finding(
             FindingLevel.Stop, "off-grid", FindingOwner.Noise, Place.OfCell(table.File, rows[0], measure.Column),
-            FormattableString.Invariant($"{address} is {measure.ValueAt(rows[0])}, which is no multiple of {grid}{(rows.Count > 1 ? $", as are {rows.Count - 1} more figures of \"{mechanism.Id}\"" : "")}."),
+            FormattableString.Invariant($"{address} is {measure.ValueAt(rows[0])}, which is no multiple of {grid}{BudgetText.More(rows.Count, ", as is one more figure", ", as are {0} more figures", $" of \"{mechanism.Id}\"")}."),
             isRounded
                 ? $"\"{mechanism.Id}\" says that its figures are rounded to {BudgetText.Plain((double)grid)}; if they are not, their margins are wrong."
                 : $"the noise of \"{mechanism.Id}\" moves in steps of {BudgetText.Plain((double)grid)}, so what stands between two steps passed through it unprotected.",

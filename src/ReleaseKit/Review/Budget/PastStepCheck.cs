@@ -64,7 +64,7 @@ internal sealed class PastStepCheck : IReviewCheck
         };
         return new Finding(
             FindingLevel.Stop, "past-afterwards", FindingOwner.Noise, Place.OfCell(table.File, rows[0], measure.Column),
-            $"{address} is {measure.ValueAt(rows[0])}, but \"{mechanism.Id}\" says that {says}{(rows.Count > 1 ? $"; {rows.Count - 1} more figures of column \"{measure.Column}\" are against it" : "")}.",
+            $"{address} is {measure.ValueAt(rows[0])}, but \"{mechanism.Id}\" says that {says}{BudgetText.More(rows.Count, "; one more figure is against it", "; {0} more figures are against it", $" in column \"{measure.Column}\"")}.",
             "the margins and the sentences are worked out for what \"afterwards\" says, and are wrong for values that were made otherwise.",
             $"publish the values after that step, or take {declared} out of \"afterwards\" in mechanisms.json.")
         {

@@ -209,12 +209,22 @@ public sealed class BudgetCheckTests
     [InlineData("\"lamps\"", "count")]
     [InlineData("{ \"one\": \"Lamp\", \"other\": \"lamps\" }", "count")]
     [InlineData("\"lamp\"", "estimate")]
+    [InlineData("\"lamp\"", "amount")]
     public void Exact_number_of_units_is_recognised_in_any_form_and_as_an_estimate(string who, string kind)
     {
         using var folder = new TestFolder();
         folder.Edit("release.json", "\"kind\": \"count\", \"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", $"\"kind\": \"{kind}\", \"noise\": [ {{ \"exact\": \"audited\" }} ]")
             .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", $"\"who\": {who}");
         Assert.StartsWith("Stop ", folder.Text("exact-unit-count"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void One_more_exact_number_is_told_in_the_singular()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("release.json", "{ \"mechanism\": \"lamps-broken\" }", "{ \"where\": { \"street\": \"Quay\" }, \"exact\": \"audited\" }, { \"where\": { \"street\": \"Kiln Row\" }, \"exact\": \"audited\" }, { \"mechanism\": \"lamps-broken\" }")
+            .Edit("mechanisms.json", "\"who\": { \"one\": \"keeper\", \"other\": \"keepers\" }", "\"who\": \"lamp\"");
+        Assert.Contains("is an exact number of lamps, as is one more figure of its column.", folder.Text("exact-unit-count"), StringComparison.Ordinal);
     }
 
     [Fact]
@@ -276,7 +286,7 @@ public sealed class BudgetCheckTests
     [Theory]
     [InlineData("{ \"notBelow\": 0 }", "lamps/broken?street=Weir%20Lane is -1, but \"lamps-broken\" says that no figure is below 0.")]
     [InlineData("{ \"notAbove\": 8 }", "lamps/broken?street=All is 9, but \"lamps-broken\" says that no figure is above 8.")]
-    [InlineData("{ \"zeroBelow\": 5 }", "lamps/broken?street=Kiln%20Row is 4, but \"lamps-broken\" says that every figure below 5 is 0; 1 more")]
+    [InlineData("{ \"zeroBelow\": 5 }", "lamps/broken?street=Kiln%20Row is 4, but \"lamps-broken\" says that every figure below 5 is 0; one more figure is against it in column \"broken\".")]
     public void Value_against_its_after_steps_is_a_stop(string step, string found)
     {
         using var folder = new TestFolder();
