@@ -12,8 +12,9 @@ internal sealed class SameNumbersCheck : IReviewCheck
 
     private const double Unlikely = 1e-6;
 
+    // A third column that is like two others is told of once.
     public IEnumerable<Finding> Check(ReviewSubject subject) => subject is { Release: { } release, Origins: { } origins }
-        ? InOneTable(release, origins).Concat(InTwoTables(release, origins)).OfType<Finding>()
+        ? InOneTable(release, origins).Concat(InTwoTables(release, origins)).OfType<Finding>().DistinctBy(finding => finding.Address)
         : [];
 
     private static IEnumerable<Finding?> InOneTable(Release release, FigureOrigins origins) =>
