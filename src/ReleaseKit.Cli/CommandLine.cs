@@ -15,8 +15,8 @@ public static class CommandLine
     {
         var quiet = new Option<bool>("--quiet") { Description = "No progress, only results and stops.", Recursive = true };
         var root = new RootCommand("ReleaseKit publishes noised tables so that nobody misreads them.") { quiet };
-        root.Subcommands.Add(ReviewCommand.Build(parsed => new Talk(output, error, parsed.GetValue(quiet))));
-        root.Subcommands.Add(ComposeCommand.Build(parsed => new Talk(output, error, parsed.GetValue(quiet))));
+        root.Subcommands.Add(ReviewCommand.Build(parsed => new Streams(output, error, parsed.GetValue(quiet))));
+        root.Subcommands.Add(ComposeCommand.Build(parsed => new Streams(output, error, parsed.GetValue(quiet))));
         UseOwnHelp(root);
         return Answer(root.Parse(arguments), output, error);
     }

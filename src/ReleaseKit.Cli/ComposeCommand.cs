@@ -9,40 +9,40 @@ namespace ReleaseKit.Cli;
 /// <summary>`compose FOLDER --to SITE`: writes the publication, or nothing.</summary>
 internal static class ComposeCommand
 {
-    public static Command Build(Func<ParseResult, Talk> talk)
+    public static Command Build(Func<ParseResult, Streams> streams)
     {
         var folder = new Argument<string>("FOLDER") { Description = "The release folder." };
         var site = new Option<string>("--to") { Description = "Where the publication goes.", HelpName = "SITE", Required = true };
         var command = new Command("compose", "The publication: pages, charts, downloads.") { folder, site };
-        command.SetAction(parsed => Run(parsed.GetRequiredValue(folder), parsed.GetRequiredValue(site), talk(parsed)));
+        command.SetAction(parsed => Run(parsed.GetRequiredValue(folder), parsed.GetRequiredValue(site), streams(parsed)));
         return command;
     }
 
-    private static int Run(string folder, string site, Talk talk)
+    private static int Run(string folder, string site, Streams streams)
     {
-        var reviewed = ReviewedFolder.Of(folder, talk);
-        foreach (var finding in talk.Shown(reviewed.Findings))
-            talk.Error.WriteLine(FindingText.Of(finding));
+        var reviewed = ReviewedFolder.Of(folder, streams);
+        foreach (var finding in streams.Shown(reviewed.Findings))
+            streams.Error.WriteLine(FindingText.Of(finding));
         if (reviewed.HasStops || reviewed.Appraised is null)
         {
-            talk.Error.WriteLine(FindingText.LastLine(reviewed.Findings, folder));
+            streams.Error.WriteLine(FindingText.LastLine(reviewed.Findings, folder));
             return ExitCode.Stopped;
         }
 
-        Write(reviewed.Appraised, site, talk);
+        Write(reviewed.Appraised, site, streams);
         return ExitCode.Done;
     }
 
-    private static void Write(IAppraisedRelease appraised, string site, Talk talk)
+    private static void Write(IAppraisedRelease appraised, string site, Streams streams)
     {
         var language = Language.Load(SiteTemplates.Folder, appraised.Release.MainLanguage);
         using var target = SiteFolder.Open(site);
         var budget = BudgetStatement.Of(appraised.Release);
-        ProgressReport.Around(talk, FigureCount(appraised), progress => Site.Compose(appraised, language, budget, SiteTemplates.Folder, target, progress));
+        ProgressReport.Around(streams, FigureCount(appraised), progress => Site.Compose(appraised, language, budget, SiteTemplates.Folder, target, progress));
         var changes = target.Finish();
-        talk.Result($"Composed {Path.Combine(site, "index.html")}");
+        streams.Result($"Composed {Path.Combine(site, "index.html")}");
         foreach (var line in ChangeText.Of(changes, target))
-            talk.Result(line);
+            streams.Result(line);
     }
 
     private static long FigureCount(IAppraisedRelease appraised) =>

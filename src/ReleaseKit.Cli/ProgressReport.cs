@@ -7,12 +7,12 @@ namespace ReleaseKit.Cli;
 internal static class ProgressReport
 {
     /// <summary>Runs the work; it reports figures done out of <paramref name="total"/>.</summary>
-    public static void Around(Talk talk, long total, Action<IProgress<long>> work)
+    public static void Around(Streams streams, long total, Action<IProgress<long>> work)
     {
-        if (talk.IsTerminal)
-            OnTerminal(talk.Error, total, work);
+        if (streams.IsTerminal)
+            OnTerminal(streams.Error, total, work);
         else
-            work(new Lines(talk, total));
+            work(new Lines(streams, total));
     }
 
     private static void OnTerminal(TextWriter error, long total, Action<IProgress<long>> work)
@@ -32,7 +32,7 @@ internal static class ProgressReport
         public void Report(long value) => task.Value = value;
     }
 
-    private sealed class Lines(Talk talk, long total) : IProgress<long>
+    private sealed class Lines(Streams streams, long total) : IProgress<long>
     {
         private static readonly TimeSpan Between = TimeSpan.FromSeconds(10);
         private readonly Stopwatch clock = Stopwatch.StartNew();
@@ -45,7 +45,7 @@ internal static class ProgressReport
             last = clock.Elapsed;
             var rate = value / clock.Elapsed.TotalSeconds;
             var left = rate > 0 ? (total - value) / rate : 0;
-            talk.Message($"{value} of {total} figures, {rate:F0} a second, about {left:F0} s left");
+            streams.Message($"{value} of {total} figures, {rate:F0} a second, about {left:F0} s left");
         }
     }
 }

@@ -9,9 +9,9 @@ internal sealed record ReviewedFolder(IAppraisedRelease? Appraised, IReadOnlyLis
 {
     public bool HasStops => Findings.Any(finding => finding.Level == FindingLevel.Stop);
 
-    public static ReviewedFolder Of(string folder, Talk talk)
+    public static ReviewedFolder Of(string folder, Streams streams)
     {
-        talk.Message($"Reading {folder}");
+        streams.Message($"Reading {folder}");
         var read = ReleaseFolder.Read(folder);
         var sound = read.Release is not null && read.Findings.All(finding => finding.Level != FindingLevel.Stop);
         var appraised = sound ? AppraisedRelease.Of(read.Release!) : null;
