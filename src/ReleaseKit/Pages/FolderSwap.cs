@@ -25,7 +25,10 @@ internal static partial class FolderSwap
         }
     }
 
-    /// <summary>What was replaced takes the place of what was kept before; an empty folder is not worth keeping. Cut off, it can be taken up again.</summary>
+    /// <summary>
+    /// What was replaced takes the place of what was kept before; an empty folder is not worth keeping. What is no longer kept leaves its place whole and
+    /// is removed out of sight, so that nobody goes back to half a site. Cut off, it can be taken up again.
+    /// </summary>
     public static void Keep(SwapPaths paths)
     {
         if (!FolderOwnership.IsComposed(paths.Old))
@@ -33,8 +36,11 @@ internal static partial class FolderSwap
             FolderOwnership.Remove(paths.Old);
             return;
         }
-        FolderOwnership.Remove(paths.Before);
+        FolderOwnership.Remove(paths.Gone);
+        if (Directory.Exists(paths.Before))
+            Directory.Move(paths.Before, paths.Gone);
         Directory.Move(paths.Old, paths.Before);
+        FolderOwnership.Remove(paths.Gone);
     }
 
     /// <summary>Cut off between its renames, it leaves the old site beside the target, from where the next run puts it back.</summary>

@@ -135,6 +135,7 @@ public sealed class SiteFolder : IDisposable
             FolderOwnership.DemandBefore(paths.Before);
             FolderSwap.Keep(paths);
         }
+        FolderOwnership.Remove(paths.Gone);
         FolderOwnership.Remove(paths.New);
     }
 }

@@ -182,6 +182,28 @@ public sealed class SiteFolderTests : IDisposable
     }
 
     [Fact]
+    public void Run_cut_off_while_it_removes_what_is_no_longer_kept_leaves_the_kept_site_whole()
+    {
+        Compose("one");
+        Compose("two");
+        LeaveBehind(".site.releasekit-gone", "half");
+        using (SiteFolder.Open(Target))
+            Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
+        Assert.Equal(["site", "site.before"], Neighbours());
+    }
+
+    [Fact]
+    public void Run_cut_off_with_both_earlier_sites_beside_keeps_the_later_one()
+    {
+        Compose("three");
+        LeaveBehind(".site.releasekit-gone", "one");
+        LeaveBehind(".site.releasekit-old", "two");
+        using (SiteFolder.Open(Target))
+            Assert.Equal("two", File.ReadAllText(folder.In("site.before/index.html")));
+        Assert.Equal(["site", "site.before"], Neighbours());
+    }
+
+    [Fact]
     public void Swap_by_two_renames_replaces_whole()
     {
         Compose("one");
