@@ -13,7 +13,7 @@ public static class CommandLine
     /// <returns>An <see cref="ExitCode"/>.</returns>
     public static int Run(IReadOnlyList<string> arguments, TextWriter output, TextWriter error)
     {
-        var quiet = new Option<bool>("--quiet") { Description = "No progress, only results and stops.", Recursive = true };
+        var quiet = new Option<bool>("--quiet") { Description = "No progress, only results and findings.", Recursive = true };
         var root = new RootCommand("ReleaseKit publishes noised tables so that nobody misreads them.") { quiet };
         root.Subcommands.Add(ReviewCommand.Build(parsed => new Streams(output, error, parsed.GetValue(quiet))));
         root.Subcommands.Add(ComposeCommand.Build(parsed => new Streams(output, error, parsed.GetValue(quiet))));

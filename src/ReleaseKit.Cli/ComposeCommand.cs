@@ -21,7 +21,7 @@ internal static class ComposeCommand
     private static int Run(string folder, string site, Streams streams)
     {
         var reviewed = ReviewedFolder.Of(folder, streams);
-        foreach (var finding in streams.Shown(reviewed.Findings))
+        foreach (var finding in PrintedFindings.Of(reviewed.Findings, folder))
             streams.Error.WriteLine(FindingText.Of(finding));
         if (reviewed.HasStops || reviewed.Appraised is null)
         {

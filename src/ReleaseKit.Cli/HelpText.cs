@@ -13,7 +13,7 @@ public static class HelpText
           releasekit compose FOLDER --to SITE   the publication: pages and files
 
         Everywhere:
-          --quiet      no progress, only results and stops
+          --quiet      no progress, only results and findings
           --help       this page, or a command's own
           --version    the version
 
@@ -36,7 +36,11 @@ public static class HelpText
 
         Prints every finding of the folder in one run, first the writer's, then
         noise, then sign-off. A stop holds publication back; a caution asks for a
-        look; a note tells. The last line counts the stops by owner.
+        look; a note tells. The last line counts the stops by owner. Of a kind in one
+        file the first 12 are printed in full, and how many more there are.
+
+        Options:
+          --all        every finding in full, however many of a kind
 
         Exit codes: 0 no stop; 1 stops; 2 call or folder unusable.
 

@@ -1,5 +1,3 @@
-using ReleaseKit.Review;
-
 namespace ReleaseKit.Cli;
 
 /// <summary>How one call speaks: results on one writer, progress and messages on the other, progress left out if quiet.</summary>
@@ -19,10 +17,6 @@ public sealed class Streams(TextWriter output, TextWriter error, bool quiet)
         if (!quiet)
             error.WriteLine(text);
     }
-
-    /// <summary>The findings that are shown: all, or the stops alone if quiet.</summary>
-    public IReadOnlyList<Finding> Shown(IReadOnlyList<Finding> findings) =>
-        quiet ? [.. findings.Where(finding => finding.Level == FindingLevel.Stop)] : findings;
 
     public TextWriter Output => output;
 }

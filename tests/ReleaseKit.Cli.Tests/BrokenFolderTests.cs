@@ -94,6 +94,28 @@ public sealed partial class BrokenFolderTests
             PlaceInFile().IsMatch(head.Groups["place"].Value) || OfWholeFiles.Contains(head.Groups["slug"].Value), $"{fault}: {head.Value}"));
     }
 
+    [Theory]
+    [InlineData("review")]
+    [InlineData("review", "--quiet")]
+    [InlineData("compose", "--to", "site", "--quiet")]
+    public void Quiet_silences_progress_and_no_finding(string command, params string[] options)
+    {
+        using var folder = new TemporaryFolder();
+        var release = Broken(folder, Summary, "# Summary", "# Summary\n\n<b>Bold</b>");
+        var call = Call.Of([command, release, .. options.Select(option => option == "site" ? folder.In(option) : option)]);
+        Assert.Contains("CAUTION  prose-html", call.Output + call.Error);
+        Assert.Equal(!options.Contains("--quiet"), call.Error.Contains("Reading "));
+    }
+
+    [Fact]
+    public void Review_prints_every_finding_when_asked_for_all()
+    {
+        using var folder = new TemporaryFolder();
+        var release = Broken(folder, Summary, "# Summary", "# Summary\n\n" + string.Concat(Enumerable.Repeat("<i>", 20)));
+        Assert.Contains($"8 more of this kind in {Summary}", Call.Of("review", release).Output);
+        Assert.Equal(20, Call.Of("review", release, "--all").Output.Split("CAUTION  prose-html").Length - 1);
+    }
+
     [Fact]
     public void A_table_in_another_encoding_stops_and_says_how_to_export_it()
     {

@@ -35,4 +35,9 @@ public sealed record Finding(FindingLevel Level, string Slug, FindingOwner For, 
 {
     /// <summary>The address of the figure or selection it concerns, if any.</summary>
     public string? Address { get; init; }
+
+    /// <summary>How many more of its kind were met and only counted, since so many were kept already; on the last that was kept.</summary>
+    public int NotKept { get; init; }
+
+    public FindingKind Kind => new(Level, Slug, For, At.File);
 }

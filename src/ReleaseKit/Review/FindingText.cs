@@ -7,11 +7,15 @@ public static class FindingText
 {
     public const int Width = 80;
 
-    /// <summary>All findings, a blank line between them, and the last line.</summary>
+    /// <summary>The findings, a blank line between them, and the last line, which counts all.</summary>
     /// <param name="findings">In the order in which they are to be read.</param>
     /// <param name="folder">The folder as the caller named it, for the next call.</param>
-    public static string Of(IReadOnlyList<Finding> findings, string folder) =>
-        string.Concat(findings.Select(finding => Of(finding) + "\n")) + LastLine(findings, folder) + "\n";
+    /// <param name="all">Whether each finding is printed, and not only the first few of a kind.</param>
+    public static string Of(IReadOnlyList<Finding> findings, string folder, bool all = false)
+    {
+        var printed = all ? PrintedFindings.All(findings) : PrintedFindings.Of(findings, folder);
+        return string.Concat(printed.Select(finding => Of(finding) + "\n")) + LastLine(findings, folder) + "\n";
+    }
 
     /// <summary>One finding, its lines ended by \n.</summary>
     public static string Of(Finding finding)
@@ -33,10 +37,11 @@ public static class FindingText
     public static string LastLine(IReadOnlyList<Finding> findings, string folder)
     {
         var stops = findings.Where(finding => finding.Level == FindingLevel.Stop).ToList();
-        if (stops.Count == 0)
+        var count = stops.Sum(PrintedFindings.Count);
+        if (count == 0)
             return $"No stops. Next: releasekit compose {folder} --to SITE";
-        var byOwner = stops.GroupBy(stop => stop.For).OrderBy(group => group.Key).Select(group => $"{group.Count()} for {OwnerWord(group.Key)}");
-        return $"{(stops.Count == 1 ? "1 stop" : $"{stops.Count} stops")}: {string.Join(", ", byOwner)}. Next, when mended: releasekit review {folder}";
+        var byOwner = stops.GroupBy(stop => stop.For).OrderBy(group => group.Key).Select(group => $"{group.Sum(PrintedFindings.Count)} for {OwnerWord(group.Key)}");
+        return $"{(count == 1 ? "1 stop" : $"{count} stops")}: {string.Join(", ", byOwner)}. Next, when mended: releasekit review {folder}";
     }
 
     /// <summary>The owner as it stands in messages and in --for.</summary>

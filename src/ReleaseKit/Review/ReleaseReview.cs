@@ -14,9 +14,17 @@ public static class ReleaseReview
     public static IReadOnlyList<Finding> Of(ReadOutcome read, IAppraisedRelease? appraised, ILanguage? language = null)
     {
         var subject = new ReviewSubject(read, appraised) { Language = language };
-        var findings = read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject))).Distinct().ToList();
+        var findings = Found(read.Findings.Concat(Checks.All.SelectMany(check => check.Check(subject))).Distinct());
         var placed = read.Files is { } files ? CellPlaces.Fill(findings, files) : findings;
         return [.. Waivers.Apply(placed, read.Release).Order(ByOwnerThenPlace)];
+    }
+
+    private static IReadOnlyList<Finding> Found(IEnumerable<Finding> findings)
+    {
+        var log = new FindingLog();
+        foreach (var finding in findings)
+            log.Add(finding);
+        return log.ToList();
     }
 
     private static Comparer<Finding> ByOwnerThenPlace { get; } = Comparer<Finding>.Create(Compare);

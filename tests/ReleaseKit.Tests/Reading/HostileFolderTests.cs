@@ -104,11 +104,10 @@ public sealed class HostileFolderTests
     }
 
     [Fact]
-    public void Many_faults_of_a_kind_are_counted_not_listed()
+    public void Many_faults_of_a_kind_are_all_found()
     {
         using var folder = new TestFolder().With("tables/lamps.csv", "street,lit,broken\n" + string.Concat(Enumerable.Range(0, 40).Select(row => $"Street {row},x,1\n")))
             .Edit(Release, ", \"all\": \"All\"", "").Edit(Release, "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }, ", "");
-        var numbers = folder.Read().Findings.Where(finding => finding.Slug == "csv-number").ToList();
-        Assert.Equal((12, "28 more of this kind in tables/lamps.csv are not listed."), (numbers.Count, numbers[^1].Found.Split('\n')[^1]));
+        Assert.Equal(40, folder.Read().Findings.Count(finding => finding.Slug == "csv-number"));
     }
 }

@@ -41,6 +41,30 @@ public sealed class FindingTextTests
         "No stops. Next: releasekit compose ehr-2031 --to SITE", FindingText.LastLine([Example with { Level = FindingLevel.Caution }], "ehr-2031"));
 
     [Fact]
+    public void Of_a_kind_in_one_file_the_first_are_printed_and_all_are_counted()
+    {
+        var findings = Enumerable.Range(1, 40).Select(line => Example with { At = new Place("tables/a.csv", line, 1) }).ToList();
+        var text = FindingText.Of([Example, .. findings], "ehr-2031");
+        Assert.Contains("tables/a.csv:12:1 ", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("tables/a.csv:13:1 ", text, StringComparison.Ordinal);
+        Assert.Contains("  28 more of this kind in tables/a.csv: releasekit review ehr-2031 --all prints\n    them.", text, StringComparison.Ordinal);
+        Assert.Contains("\n41 stops: 41 for noise. ", text, StringComparison.Ordinal);
+        Assert.Contains("tables/a.csv:40:1 ", FindingText.Of(findings, "ehr-2031", all: true), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Of_more_findings_than_are_kept_all_are_counted()
+    {
+        var log = new ReleaseKit.Reading.FindingLog();
+        for (var line = 1; line <= ReleaseKit.Reading.FindingLog.MostKept + 5; line++)
+            log.Add(Example with { At = new Place("tables/a.csv", line, 1) });
+        var text = FindingText.Of(ReleaseReview.Of(new ReleaseKit.Reading.ReadOutcome(null, log.ToList()), null), "ehr-2031");
+        Assert.Contains("  9993 more of this kind in tables/a.csv: ", text, StringComparison.Ordinal);
+        Assert.Contains("\n10005 stops: 10005 for noise. ", text, StringComparison.Ordinal);
+        Assert.Contains("  5 more of this kind in tables/a.csv are counted and not listed", FindingText.Of(log.ToList(), "ehr-2031", all: true), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Review_is_in_the_order_of_owner_file_line_and_column()
     {
         Finding At(FindingOwner owner, string file, int line, int column) => Example with { For = owner, At = new Place(file, line, column) };

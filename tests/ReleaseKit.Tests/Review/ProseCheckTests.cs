@@ -80,6 +80,18 @@ public sealed class ProseCheckTests
     public void Hidden_character_is_a_stop() => Broken.Stops("hidden-character", Prose, "\u202E", "take the character out",
         folder => folder.Edit(Prose, "lamps were lit", "lamps \u202Ewere lit"));
 
+    [Theory]
+    [InlineData("prose-html", "<b>")]
+    [InlineData("prose-link", "[value](figure:lamps/lit?street=Kiln Row) ")]
+    [InlineData("prose-citation", "[value](figure:lamps/unlit) ")]
+    [InlineData("prose-disagrees", "[77 lamps](figure:lamps/lit?street=Quay) ")]
+    [InlineData("hidden-character", "\u202E")]
+    public void However_many_of_a_kind_stand_on_a_page_all_are_found(string slug, string written)
+    {
+        using var broken = new Broken(folder => folder.Edit(Prose, "lamps were lit", string.Concat(Enumerable.Repeat(written, 30))));
+        Assert.Equal(30, broken.Review().Count(finding => finding.Slug == slug));
+    }
+
     [Fact]
     public void Name_of_a_page_of_the_publication_is_taken() => Broken.Stops("prose-name", "release.json", "\"narrative/Budget.md\"", "rename the file",
         folder => folder.With("narrative/Budget.md", "# Budget\n").Edit("release.json", "{ \"file\": \"narrative/summary.md\" }", "{ \"file\": \"narrative/summary.md\" }, { \"file\": \"narrative/Budget.md\" }"));

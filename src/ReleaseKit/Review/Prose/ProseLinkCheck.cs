@@ -1,7 +1,6 @@
 using Markdig.Syntax;
 using Markdig.Syntax.Inlines;
 using ReleaseKit.Pages.Prose;
-using ReleaseKit.Reading;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Review.Prose;
@@ -23,8 +22,7 @@ internal sealed class ProseLinkCheck : IReviewCheck
             _ => null,
         })
         .OfType<Finding>()
-        .Concat(ChartsAgain(page))
-        .Take(FindingLog.MostOfAKind);
+        .Concat(ChartsAgain(page));
 
     private static IEnumerable<Finding> ChartsAgain(ProsePage page) => ProseDocument.Parse(page.Markdown)
         .Descendants<LinkInline>().Where(image => image.IsImage && ProseLink.ChartIn(image.Url) is not null)

@@ -3,7 +3,7 @@ using System.Text.RegularExpressions;
 using Markdig.Syntax;
 using Markdig.Syntax.Inlines;
 using ReleaseKit.Pages.Prose;
-using ReleaseKit.Reading;
+using ReleaseKit.Reading.Keys;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Review.Prose;
@@ -15,19 +15,18 @@ internal sealed partial class ProseLiteralCheck : IReviewCheck
 
     private static IEnumerable<Finding> CheckPage(ProsePage page)
     {
-        var understood = Understood(page.Markdown);
-        var links = LiteralLink.Matches(page.Markdown).Where(match => !understood[match.Index]).Take(FindingLog.MostOfAKind)
-            .Select(match => ProseProblems.LiteralLink(PlaceOf(match.Index, page), FindingOwner.Writer));
-        var html = Tag.Matches(page.Markdown).Where(match => !understood[match.Index]).Take(FindingLog.MostOfAKind)
-            .Select(match => ProseProblems.Html(PlaceOf(match.Index, page), match.Value, FindingOwner.Writer));
-        return links.Concat(html).Concat(Hidden(page));
+        var (understood, lines) = (Understood(page.Markdown), new ProseLines(page));
+        var links = LiteralLink.Matches(page.Markdown).Where(match => !understood[match.Index])
+            .Select(match => ProseProblems.LiteralLink(lines.PlaceOf(match.Index), FindingOwner.Writer));
+        var html = Tag.Matches(page.Markdown).Where(match => !understood[match.Index])
+            .Select(match => ProseProblems.Html(lines.PlaceOf(match.Index), match.Value, FindingOwner.Writer));
+        return links.Concat(html).Concat(Hidden(page, lines));
     }
 
-    private static IEnumerable<Finding> Hidden(ProsePage page) => page.Markdown
+    private static IEnumerable<Finding> Hidden(ProsePage page, ProseLines lines) => page.Markdown
         .Select((letter, index) => (letter, index))
-        .Where(pair => pair.letter is not ('\n' or '\r' or '\t') && ReleaseKit.Reading.Keys.HiddenCharacters.IsOne(pair.letter))
-        .Take(1)
-        .Select(pair => ProseProblems.HiddenCharacter(PlaceOf(pair.index, page), pair.letter, FindingOwner.Writer));
+        .Where(pair => pair.letter is not ('\n' or '\r' or '\t') && HiddenCharacters.IsOne(pair.letter))
+        .Select(pair => ProseProblems.HiddenCharacter(lines.PlaceOf(pair.index), pair.letter, FindingOwner.Writer));
 
     /// <summary>For each character, whether it belongs to a link, an image or code.</summary>
     private static BitArray Understood(string markdown)
@@ -40,12 +39,6 @@ internal sealed partial class ProseLiteralCheck : IReviewCheck
             for (var at = Math.Max(span.Start, 0); at <= span.End && at < markdown.Length; at++)
                 understood[at] = true;
         return understood;
-    }
-
-    private static Place PlaceOf(int index, ProsePage page)
-    {
-        var before = page.Markdown.AsSpan(0, index);
-        return new Place(page.File, before.Count('\n') + 1, index - before.LastIndexOf('\n'));
     }
 
     [GeneratedRegex(@"\]\((figure|chart):")]

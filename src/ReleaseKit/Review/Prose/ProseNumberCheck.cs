@@ -2,7 +2,6 @@ using Markdig.Syntax;
 using Markdig.Syntax.Inlines;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Pages.Prose;
-using ReleaseKit.Reading;
 using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
@@ -21,8 +20,7 @@ internal sealed class ProseNumberCheck : IReviewCheck
     private static IEnumerable<Finding> CheckPage(ProsePage page, IAppraisedRelease appraised, ILanguage language) => ProseDocument.Parse(page.Markdown)
         .Descendants<LinkInline>()
         .Select(link => CheckLink(link, page, appraised, language))
-        .OfType<Finding>()
-        .Take(FindingLog.MostOfAKind);
+        .OfType<Finding>();
 
     private static Finding? CheckLink(LinkInline link, ProsePage page, IAppraisedRelease appraised, ILanguage language)
     {
