@@ -43,8 +43,9 @@ public sealed record AppraisedFigure
     /// <summary>For a sum of parts published as such: how many draws it holds; 1 for a draw of its own.</summary>
     public int Draws { get; init; } = 1;
 
-    /// <summary>For a sum of parts published as such: how many parts there are, and how many of them are not published and not in the sum.</summary>
+    /// <summary>For a sum of parts published as such: how many parts there are, how many of them are hidden but in it, and how many not published and not in it.</summary>
     public int Parts { get; init; }
+    public int PartsHidden { get; init; }
     public int PartsLeftOut { get; init; }
 
     /// <summary>Ranges at the lower, main and upper coverage, in that order, as far as they are known; empty where there is no margin.</summary>

@@ -42,6 +42,7 @@ internal sealed class AppraisedFigures(Release release)
             Mechanism = origin.Mechanism,
             Draws = Math.Max(1, origin.Draws),
             Parts = origin.Parts,
+            PartsHidden = origin.PartsHidden,
             PartsLeftOut = origin.PartsLeftOut,
             Ranges = ranges,
             Reliability = ReliabilityOf(measure, value, hasNumber, origin, ranges),

@@ -12,6 +12,9 @@ internal sealed record FigureOrigin(NoiseRule Rule, DistinctError? Error, Mechan
     /// <summary>For a sum: how many parts it has, down to those that are no sums.</summary>
     public int Parts { get; init; }
 
+    /// <summary>How many of its parts are hidden but in the sum.</summary>
+    public int PartsHidden { get; init; }
+
     /// <summary>How many of its parts have no number and are not in the sum.</summary>
     public int PartsLeftOut { get; init; }
 }

@@ -73,7 +73,7 @@ internal sealed class FigureOrigins(Release release)
         var table = release.Tables[at.Table];
         var content = parts.GetOrAdd(at.Table, index => new SumParts(release.Tables[index])).Below(table.Measures[at.Measure], at.Row);
         var origin = OfSum(content, table, table.Measures[at.Measure].RuleAt(at.Row));
-        return origin with { Parts = content.Draws.Count + content.WithoutNoise.Count + content.LeftOut, PartsLeftOut = content.LeftOut };
+        return origin with { Parts = content.Draws.Count + content.WithoutNoise.Count + content.LeftOut, PartsHidden = content.Hidden, PartsLeftOut = content.LeftOut };
     }
 
     private FigureOrigin OfSum(SumContent content, Table table, NoiseRule rule)

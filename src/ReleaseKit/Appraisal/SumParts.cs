@@ -6,12 +6,14 @@ namespace ReleaseKit.Appraisal;
 /// <summary>One draw of noise below a sum: its mechanism, and the row it was drawn for.</summary>
 internal readonly record struct BaseDraw(Mechanism Mechanism, int Row);
 
-/// <summary>What a sum holds: its draws, the rules of its parts without noise, and how many parts have no number and are left out.</summary>
+/// <summary>What a sum holds: its draws, the rules of its parts without noise, how many of these have no number for readers, and how many parts have none and are left out.</summary>
 internal sealed class SumContent
 {
     public List<BaseDraw> Draws { get; } = [];
 
     public List<NoiseRule> WithoutNoise { get; } = [];
+
+    public int Hidden { get; set; }
 
     public int LeftOut { get; set; }
 }
@@ -40,6 +42,7 @@ internal sealed class SumParts(Table table)
         {
             case NoiseRule.FromMechanism from:
                 content.Draws.Add(new(from.Mechanism, row));
+                content.Hidden += measure.HasNumber(row) ? 0 : 1;
                 break;
             case NoiseRule.SumOver sum:
                 foreach (var part in PartsOf(row, sum.StubColumn))
@@ -50,6 +53,7 @@ internal sealed class SumParts(Table table)
                 break;
             case var rule:
                 content.WithoutNoise.Add(rule);
+                content.Hidden += measure.HasNumber(row) ? 0 : 1;
                 break;
         }
     }

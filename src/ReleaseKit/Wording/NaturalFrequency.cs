@@ -16,14 +16,8 @@ public readonly record struct NaturalFrequency(long Cases, long All)
                 return new((long)decimal.Floor(share * all), all);
     }
 
-    /// <summary>A chance that is a bound from above: of 100 if that is a whole number, else of 1,000 and so on. Never rounded down.</summary>
-    public static NaturalFrequency UpTo(double chance)
-    {
-        var bound = decimal.Round((decimal)chance, 12);
-        for (var all = 100L; ; all *= 10)
-            if (bound * all == decimal.Floor(bound * all) || all == LargestAll)
-                return new((long)decimal.Ceiling(bound * all), all);
-    }
+    /// <summary>A chance that is a bound from above, of so many cases. Never rounded down.</summary>
+    public static NaturalFrequency UpTo(double chance, long all) => new((long)decimal.Ceiling(decimal.Round((decimal)chance, 12) * all), all);
 
     /// <summary>
     /// A chance worked out, rounded down, of the smallest of 100, 1,000, … 1,000,000 at which it looks neither certain nor impossible:

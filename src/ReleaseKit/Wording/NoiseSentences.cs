@@ -7,14 +7,14 @@ namespace ReleaseKit.Wording;
 /// <summary>Part 2 of a reading: how far the noise reaches, then the range that follows from it.</summary>
 internal sealed class NoiseSentences(Voice voice)
 {
-    public IEnumerable<string> Of(AppraisedFigure figure) => figure.Main is { } main ? [.. Noise(figure, main), .. Range(figure, main)] : figure.Ranges.Select(range => Known(figure, range));
+    public IEnumerable<string> Of(AppraisedFigure figure) => figure.Main is { } main ? [.. Noise(figure, main), .. Range(figure, main)] : figure.Ranges.SelectMany(range => Known(figure, range));
 
     /// <summary>The range that is known where none reaches the main coverage.</summary>
-    private string Known(AppraisedFigure figure, FigureRange range) => figure.Promise switch
+    private IEnumerable<string> Known(AppraisedFigure figure, FigureRange range) => figure.Promise switch
     {
-        RangePromise.Every => Between(figure, range, "reading.range.alone", voice.Cases(figure, range)),
-        RangePromise.ZeroForSmall => ZeroForSmall(figure, range),
-        _ => Among(figure, range),
+        RangePromise.Every => [Between(figure, range, "reading.range.alone", voice.Cases(figure, range))],
+        RangePromise.ZeroForSmall => [Threshold(figure), ZeroForSmall(figure, range)],
+        _ => [Threshold(figure), Among(figure, range)],
     };
 
     private IEnumerable<string> Noise(AppraisedFigure figure, FigureRange main)

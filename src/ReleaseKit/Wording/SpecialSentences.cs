@@ -18,7 +18,7 @@ internal sealed class SpecialSentences(Voice voice)
         SpecialCase.NoMargin => [voice.Say(figure.Ranges.Count == 0 ? "reading.no-margin" : "reading.no-margin.more")],
         SpecialCase.BelowZero => [Outside(figure, "below", voice.Lowest(figure)), ReadAs(figure)],
         SpecialCase.AboveHighest => [Outside(figure, "above", voice.Highest(figure)), ReadAs(figure)],
-        SpecialCase.Zero => [voice.Say("reading.zero"), .. figure.Case.Floored ? SetToBound(figure) : Nothing],
+        SpecialCase.Zero => [voice.Say("reading.zero"), .. figure.Promise is RangePromise.ZeroForSmall ? [ReadAs(figure)] : Nothing],
         SpecialCase.FromThreshold => [Threshold(figure)],
         SpecialCase.FlooredSum => [voice.Say("reading.floored-sum")],
         SpecialCase.MostlyUnchanged => [MostlyUnchanged(figure)],
@@ -31,14 +31,14 @@ internal sealed class SpecialSentences(Voice voice)
     {
         var (first, rounded, floored, capped, threshold) = figure.Case;
         if (figure.Main is null)
-            return [.. LeftOut(figure), .. Marked(figure)];
+            return [.. UnseenParts(figure), .. Marked(figure)];
         return
         [
-            .. LeftOut(figure),
+            .. UnseenParts(figure),
             .. threshold && first is not (SpecialCase.FromThreshold or SpecialCase.Zero) ? [Threshold(figure)] : Nothing,
+            .. first is SpecialCase.Zero && figure.LeftAsItWas is not null ? [MostlyUnchanged(figure)] : Nothing,
             .. capped && first is not SpecialCase.Capped ? Capped(figure) : Nothing,
-            .. rounded ? Rounded(figure) : Nothing,
-            .. floored && first is not SpecialCase.Zero ? SetToBound(figure) : Nothing,
+            .. rounded || floored ? Afterwards(figure) : Nothing,
             .. Marked(figure),
         ];
     }
@@ -73,26 +73,33 @@ internal sealed class SpecialSentences(Voice voice)
             yield return voice.Say("reading.capped.below", ("lowest", Amount(figure, clipped.From)), ("counted", InPrint(figure, clipped.From)));
     }
 
-    private IEnumerable<string> SetToBound(AppraisedFigure figure)
+    /// <summary>Rounding on purpose, and the bound that the figure stands at, in the order in which they were done.</summary>
+    private IEnumerable<string> Afterwards(AppraisedFigure figure)
     {
         var value = figure.Value.ToDouble();
-        if (figure.Error!.Steps.OfType<AfterStep.NotBelow>().Any(step => step.Bound == value))
-            yield return voice.Say("reading.set-to-bound.below", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
-        if (figure.Error.Steps.OfType<AfterStep.NotAbove>().Any(step => step.Bound == value))
-            yield return voice.Say("reading.set-to-bound.above", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
+        foreach (var step in figure.Mechanism!.Afterwards)
+            switch (step)
+            {
+                case AfterStep.RoundTo round:
+                    yield return voice.Say("reading.rounded", ("unit", InPrint(figure, round.Unit)));
+                    break;
+                case AfterStep.NotBelow below when below.Bound == value:
+                    yield return voice.Say("reading.set-to-bound.below", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
+                    break;
+                case AfterStep.NotAbove above when above.Bound == value:
+                    yield return voice.Say("reading.set-to-bound.above", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
+                    break;
+            }
     }
 
-    private IEnumerable<string> Rounded(AppraisedFigure figure) => figure.Mechanism!.Afterwards
-        .OfType<AfterStep.RoundTo>()
-        .Select(step => voice.Say("reading.rounded", ("unit", InPrint(figure, step.Unit))));
-
-    /// <summary>A sum says of how many of its parts it is not the sum.</summary>
-    private IEnumerable<string> LeftOut(AppraisedFigure figure)
+    /// <summary>A sum says which of its parts nobody sees, and whether they are in it.</summary>
+    private IEnumerable<string> UnseenParts(AppraisedFigure figure)
     {
+        var parts = ("parts", voice.Numerals.Whole(figure.Parts));
+        if (figure is { HasNumber: true, PartsHidden: > 0 and var hidden })
+            yield return voice.Say(hidden == 1 ? "reading.hidden-in.one" : "reading.hidden-in", parts, ("hidden", voice.Numerals.Whole(hidden)));
         if (figure is { HasNumber: true, PartsLeftOut: > 0 and var leftOut })
-            yield return voice.Say(
-                leftOut == 1 ? "reading.left-out.one" : "reading.left-out",
-                ("parts", voice.Numerals.Whole(figure.Parts)), ("missing", voice.Numerals.Whole(leftOut)));
+            yield return voice.Say(leftOut == 1 ? "reading.left-out.one" : "reading.left-out", parts, ("missing", voice.Numerals.Whole(leftOut)));
     }
 
     /// <summary>A number that the office marks (provisional, estimated …) says so.</summary>

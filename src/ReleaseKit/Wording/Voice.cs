@@ -67,7 +67,7 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
         Say(key, ("cases", Numerals.Whole(frequency.Cases)), ("all", Numerals.Whole(frequency.All)));
 
     /// <summary>In how many cases at most a value above the range of a 0 that stands for small values becomes 0: (1 − c)/2 of them.</summary>
-    public string CasesOfZero(Coverage coverage) => Frequency("coverage.cases", NaturalFrequency.UpTo(coverage.Rest / 2));
+    public string CasesOfZero(Coverage coverage) => Frequency("coverage.cases", NaturalFrequency.UpTo(coverage.Rest / 2, NaturalFrequency.Of(coverage).All));
 
     private string CasesAs(string which, AppraisedFigure figure, FigureRange range) =>
         Frequency(figure.HoldsAtLeast(range) ? $"coverage.{which}.at-least" : $"coverage.{which}", NaturalFrequency.Of(range.Coverage));

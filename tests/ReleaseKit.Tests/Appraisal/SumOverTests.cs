@@ -69,14 +69,16 @@ public sealed class SumOverTests
     public void Hidden_part_that_the_total_holds_is_not_left_out()
     {
         var release = Nested(SmallRelease.DiscreteGaussian(8), new Hiding(HiddenBy.PublicRule, true), "30", "20", "Q", "10", "10", "10").Appraise();
-        Assert.Equal(0, release.Figure(new FigureRef(0, 0, 0)).PartsLeftOut);
+        var total = release.Figure(new FigureRef(0, 0, 0));
+        Assert.Equal((0, 1), (total.PartsLeftOut, total.PartsHidden));
     }
 
     [Fact]
     public void Hidden_part_is_no_draw_of_a_total_that_leaves_it_out()
     {
         var release = Nested(SmallRelease.DiscreteGaussian(8), new Hiding(HiddenBy.PublicRule, false), "20", "10", "Q", "10", "10", "10").Appraise();
-        Assert.Equal(2, release.Figure(new FigureRef(0, 0, 0)).Draws);
+        var total = release.Figure(new FigureRef(0, 0, 0));
+        Assert.Equal((2, 0), (total.Draws, total.PartsHidden));
     }
 
     [Fact]

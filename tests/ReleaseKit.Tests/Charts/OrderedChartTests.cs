@@ -147,7 +147,7 @@ public sealed class OrderedChartTests
         var caption = OrderedWords.Of(Select(new SmallRelease().Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(5, new AfterStep.ZeroBelow(10)), "100", "0")), Words).Caption;
 
         Assert.Contains(caption, sentence => sentence.EndsWith("For figures not set to 0, the value before noise lies between such stops in at least 95 of 100 cases.", StringComparison.Ordinal));
-        Assert.Contains("A value above the upper stop of a 0 becomes 0 in at most 25 of 1,000 cases.", caption);
+        Assert.Contains("A value above the upper stop of a 0 becomes 0 in at most 3 of 100 cases.", caption);
         Assert.DoesNotContain(caption, sentence => sentence.Contains("In at least 95", StringComparison.Ordinal));
     }
 

@@ -69,6 +69,17 @@ public sealed class SiteTests : IDisposable
         Assert.Contains("half a step of that rounding is added", page.QuerySelector("#law-gaussian")!.ParentElement!.TextContent, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void Methods_say_what_publishing_from_a_threshold_does()
+    {
+        var level = SmallRelease.Measure(MeasureKind.Count) with { PublishedFrom = 30 };
+        var from = new SmallRelease().Figures(level, SmallRelease.DiscreteGaussian(9.5), "45", "Q").Build().Tables[0] with { Id = "from" };
+        var release = PagesRelease.Make();
+        PagesRelease.Compose(release with { Tables = [from, release.Tables[1]], Headlines = [], Narrative = [], Short = new Dictionary<string, string>() }, folder.In("site"));
+        var steps = new HtmlParser().ParseDocument(File.ReadAllText(folder.In("site/methods.html"))).QuerySelector("section[aria-labelledby=steps]")!;
+        Assert.Contains("Only noised values from the threshold up are published.", steps.TextContent, StringComparison.Ordinal);
+    }
+
     private List<(string Path, IDocument Document)> ComposedPages()
     {
         PagesRelease.Compose(PagesRelease.Make(), folder.In("site"));

@@ -250,10 +250,23 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         using var zeros = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South")
             .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(5, new AfterStep.ZeroBelow(10)), "100", "0").Build());
 
-        var headings = zeros.Page().QuerySelectorAll(".unfold .panel").Select(panel => panel.QuerySelectorAll(".ranges th").Select(cell => cell.TextContent).ToList()).ToList();
+        var panels = zeros.Page().QuerySelectorAll(".unfold .panel");
 
-        Assert.Contains("Holds in, of 100 not set to 0", headings[0]);
-        Assert.Contains("Larger ones not set to 0, of 100", headings[1]);
+        Assert.Contains("Holds in, of 100 not set to 0", panels[0].QuerySelectorAll(".ranges th").Select(cell => cell.TextContent));
+        // Discrete Gaussian 5, below 10: the largest counts that become 0 in more than 25, 2.5 and 0.5 of 100 cases.
+        Assert.Equal(
+            "At the coverage of|50 in 100|95 in 100|99 in 100 Larger ones set to 0, at most, of 100|25.0|2.5|0.5 Range from|0|0|0 Range to|12|19|22",
+            string.Join(' ', panels[1].QuerySelectorAll(".ranges tr").Select(row => string.Join('|', row.Children.Select(cell => cell.TextContent)))));
+    }
+
+    [Fact]
+    public void Only_run_of_noise_costs_all_of_the_privacy_loss()
+    {
+        var gauss = SmallRelease.DiscreteGaussian(5);
+        var release = new SmallRelease().Figures(MeasureKind.Count, gauss, "100").Build();
+        using var one = TableSite.Of(release with { Noise = release.Noise with { Mechanisms = [gauss] } });
+
+        Assert.Contains("Its cost is all of the privacy loss of this release.", one.Page().QuerySelector(".abouts .facts")!.TextContent, StringComparison.Ordinal);
     }
 
     [Fact]

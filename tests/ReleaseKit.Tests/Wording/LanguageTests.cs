@@ -100,10 +100,10 @@ public sealed class LanguageTests
         Assert.Equal(new NaturalFrequency(cases, all), NaturalFrequency.About(chance));
 
     [Theory]
-    [InlineData(0.025, 25, 1000)]
+    [InlineData(0.025, 3, 100)]
     [InlineData(0.05, 5, 100)]
-    [InlineData(0.0000012, 2, 1000000)]
-    public void Chance_that_is_a_bound_is_rounded_up(double chance, long cases, long all) => Assert.Equal(new NaturalFrequency(cases, all), NaturalFrequency.UpTo(chance));
+    [InlineData(0.0005, 1, 1000)]
+    public void Chance_that_is_a_bound_is_rounded_up(double chance, long cases, long all) => Assert.Equal(new NaturalFrequency(cases, all), NaturalFrequency.UpTo(chance, all));
 
     [Fact]
     public void Table_says_how_many_ranges_may_miss()
@@ -285,7 +285,7 @@ public sealed class LanguageTests
         Assert.Equal(
             [
                 "For figures not set to 0, the count before noise lies in the range in at least 95 of 100 cases.",
-                "When it is above the range of a 0, 0 is published in at most 25 of 1,000 cases.",
+                "When it is above the range of a 0, 0 is published in at most 3 of 100 cases.",
             ],
             En.NotesOf(column));
     }

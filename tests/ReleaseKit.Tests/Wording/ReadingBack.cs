@@ -29,8 +29,8 @@ internal static class ReadingBack
         Sentence($@"It rests on {N} figures, each with noise of its own\.", (figure, g) => Number(g[1]) == figure.Draws && figure.Draws > 1),
         Sentence($@"Noise (?:and rounding together )?moved it by up to {N} upward or {N} downward in {Cases}\.",
             (figure, g) => Is(g[1], figure.Main!.Printed.MarginDown) && Is(g[2], figure.Main.Printed.MarginUp) && Holds(figure, g, 3)),
-        Sentence($@"Noise was added, and what then lay below {N} was published as 0\.", (figure, g) => figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
-        Sentence($@"Noise was added, and what then lay below {N} was not published\.", (figure, g) => figure.Measure.PublishedFrom == (double)Number(g[1])),
+        Sentence($@"Noise was added, and figures below {N} were then set to 0\.", (figure, g) => figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1])))),
+        Sentence($@"Noise was added, and figures below {N} were then not published\.", (figure, g) => figure.Measure.PublishedFrom == (double)Number(g[1])),
         Sentence($@"Here it was more, for the {Kind} cannot be (below|above) {N}\.", (figure, g) => g[2].Value == "below"
             ? Bound(g[3], figure.Possible.Lowest) && figure.Value.ToDouble() + figure.Main!.Margin < figure.Possible.Lowest
             : Bound(g[3], figure.Possible.Highest) && figure.Value.ToDouble() - figure.Main!.Margin > figure.Possible.Highest),
@@ -41,7 +41,7 @@ internal static class ReadingBack
             (figure, g) => IsAbout(figure, g[1]) && IsKind(figure, g[2]) && Is(g[3], Best(figure).Printed.Low) && Is(g[4], Best(figure).Printed.High)
                 && Number(g[3]) < Number(g[4]) && Contains(figure, g[3], g[4]) && Holds(figure, g, 5)),
         Sentence($@"When the {Kind} before noise is above {N}, 0 is published in at most {N} of {N} cases\.", (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.High)
-            && figure.Value.Unscaled == 0 && Number(g[3]) / Number(g[4]) == 0.025m && figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any()),
+            && figure.Value.Unscaled == 0 && (Number(g[3]), Number(g[4])) == (3, 100) && figure.Error!.Steps.OfType<AfterStep.ZeroBelow>().Any()),
         Sentence($@"(?:So t|T)he {Kind} before noise is {N} in {Cases}\.",
             (figure, g) => IsKind(figure, g[1]) && Is(g[2], figure.Main!.Printed.Low) && figure.Main.Low == figure.Main.High && Holds(figure, g, 3)),
         Sentence($@"The {Kind} cannot be below {N}, so the range ends there\.", (figure, g) => Bound(g[2], figure.Possible.Lowest) && figure.Main!.Printed.LowIsCut),
@@ -73,8 +73,9 @@ internal static class ReadingBack
         Sentence($@"Amounts (above|below) {N} [^.]+ were counted as {N}\.", (figure, g) =>
             Number(g[2]) == Number(g[3]) && (double)Number(g[2]) == (g[1].Value == "above" ? figure.Mechanism!.Clipped!.To : figure.Mechanism!.Clipped!.From)),
         Sentence("Its margin is (as large as|larger than) the figure.", IsThatLarge),
-        Sentence($@"After the noise it was rounded to a multiple of {N}\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1])))),
-        Sentence($@"Of its {N} parts, {N} (?:is|are) not published and not in this sum\.", LeavesOut),
+        Sentence($@"The figure was rounded to a multiple of {N} after the noise\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1])))),
+        Sentence($@"Of its {N} parts, {N} (?:is|are) not published and not in this sum\.", HasUnseen),
+        Sentence($@"Of its {N} parts, {N} (?:is|are) hidden but counted in this sum\.", (figure, g) => HasUnseen(figure, g) && figure.Table.Hidden!.InTotals),
         Sentence("The Office marks it as provisional.", (figure, _) => figure.Status == 'P'),
         Sentence("This figure is (close|rough|weak): its margin is (about |less than )?([0-9]+) in 100 of it.", Ratio),
         Sentence("This figure is weak: its margin is (as large as|larger than) the figure.", (figure, g) => Is(figure, Reliability.Weak) && IsThatLarge(figure, g)),
@@ -159,7 +160,7 @@ internal static class ReadingBack
     }
 
     /// <summary>The parts are all rows but the first, which is the total.</summary>
-    private static bool LeavesOut(AppraisedFigure figure, GroupCollection groups)
+    private static bool HasUnseen(AppraisedFigure figure, GroupCollection groups)
     {
         var parts = Enumerable.Range(1, figure.Table.RowCount - 1).Where(row => figure.Measure.StatusAt(row) != 'M').ToList();
         return Number(groups[1]) == parts.Count && Number(groups[2]) == parts.Count(row => !figure.Measure.HasNumber(row));

@@ -38,6 +38,8 @@ internal static class ReadingCases
         ("A count below zero by more than the margin", Count(Gauss, "-25")),
         ("A count that noise leaves as it was", Count(SmallRelease.DiscreteGaussian(0.3), "412")),
         ("A count rounded to fives", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(5)), "1240")),
+        ("A count of zero that noise mostly leaves as it was", Count(SmallRelease.DiscreteGaussian(0.3), "0")),
+        ("A count not below zero and rounded, published as zero", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(0), new AfterStep.RoundTo(5)), "0")),
         ("A count rounded and not below zero, published as zero", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(5), new AfterStep.NotBelow(0)), "0")),
         ("A count not above a bound, published as the bound", Bounded(new AfterStep.NotAbove(1200), "1200")),
         ("An amount not below a bound, published as the bound", Amount(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(-50)), "-50")),
@@ -56,6 +58,8 @@ internal static class ReadingCases
         ("A share without a unit", Of(MeasureKind.Share, Laplace, "51.63", SmallRelease.UnitOf("", ""))),
         ("A share of homes", Of(MeasureKind.Share, Laplace, "51.63", SmallRelease.UnitOf("home", "homes"))),
         ("A sum that leaves out one of its parts", SumOf(Gauss, "1840", "1840", "O")),
+        ("A sum that holds a hidden part", SumOf(new Hiding(HiddenBy.PublicRule, true), Gauss, "1840", "1830", "Q")),
+        ("A sum that holds two hidden parts", SumOf(new Hiding(HiddenBy.PublicRule, true), Gauss, "Q", "1830", "Q")),
         ("A sum that leaves out two of its parts", SumOf(Gauss, "1840", "O", "1840", "L", "M")),
         ("A share near a hundred", Of(MeasureKind.Share, Laplace, "99.21")),
         ("A share above a hundred", Of(MeasureKind.Share, Laplace, "101.24")),
@@ -125,7 +129,9 @@ internal static class ReadingCases
         .Figure();
 
     /// <summary>A total of 3,680 over parts, some of which have no number.</summary>
-    private static AppraisedFigure SumOf(Mechanism mechanism, params string[] parts) => new SmallRelease()
+    private static AppraisedFigure SumOf(Mechanism mechanism, params string[] parts) => SumOf(null, mechanism, parts);
+
+    private static AppraisedFigure SumOf(Hiding? hidden, Mechanism mechanism, params string[] parts) => new SmallRelease { Hidden = hidden }
         .Stub("ward", "All", ["All", .. parts.Select((_, part) => $"w{part}")])
         .Figures(
             SmallRelease.Measure(MeasureKind.Count), [new NoiseRule.SumOver(0), new NoiseRule.FromMechanism(mechanism)],

@@ -9,6 +9,7 @@ namespace ReleaseKit.Pages.Methods;
 internal static class MethodsPage
 {
     private const string LawRule = "law";
+    private const string PublishedFrom = "methods.step.published-from";
 
     public static void Write(SiteContext context, SiteFolder site)
     {
@@ -57,6 +58,7 @@ internal static class MethodsPage
     {
         var mechanisms = context.Release.Noise.Mechanisms;
         var keys = mechanisms.SelectMany(mechanism => mechanism.Afterwards).Select(KeyOf)
+            .Concat(context.Release.Tables.Any(table => table.Measures.Any(measure => measure.PublishedFrom is not null)) ? [PublishedFrom] : [])
             .Concat(mechanisms.Any(mechanism => mechanism.Clipped is not null) ? ["methods.step.clipped"] : []);
         return new ScriptArray(keys.Distinct().Select(key => new ScriptObject
         {
@@ -72,7 +74,7 @@ internal static class MethodsPage
         AfterStep.NotBelow => "methods.step.not-below",
         AfterStep.NotAbove => "methods.step.not-above",
         AfterStep.ZeroBelow => "methods.step.zero-below",
-        _ => "methods.step.published-from",
+        _ => PublishedFrom,
     };
 
     /// <summary>The rules of the account that stand on literature; a law's own are told with the law.</summary>

@@ -44,9 +44,13 @@ internal static class MeasureFootModel
     };
 
     /// <summary>The mechanism's share of what the release spent, in 100, as on the budget page; empty for a mechanism that the account does not know.</summary>
-    private static string Cost(Sheet sheet, Mechanism mechanism) => sheet.Site.Budget.Mechanisms.FirstOrDefault(account => account.Mechanism.Id == mechanism.Id) is { } account
-        ? sheet.Text("tables.rule.cost", ("share", sheet.Language.Number(PrintedShares.Of(account, sheet.Site.Budget))))
-        : "";
+    private static string Cost(Sheet sheet, Mechanism mechanism)
+    {
+        var accounts = sheet.Site.Budget.Mechanisms;
+        return accounts.FirstOrDefault(account => account.Mechanism.Id == mechanism.Id) is not { } account ? ""
+            : accounts.Count == 1 && account.ShareOfSpent == 1 ? sheet.Text("tables.rule.cost.all")
+            : sheet.Text("tables.rule.cost", ("share", sheet.Language.Number(PrintedShares.Of(account, sheet.Site.Budget))));
+    }
 
     private static string Cite(Sheet sheet, TablePage page, Measure measure)
     {

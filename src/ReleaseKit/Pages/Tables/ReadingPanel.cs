@@ -45,11 +45,17 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
     // What HTML lets one leave out is left out here, where it would stand a thousand times a page: end tags, and scopes that follow from the table's form.
     private void WriteRanges(AppraisedFigure figure)
     {
-        html.Raw("<table class=\"ranges\"><tr><th>"u8).Text(sheet.Text(figure.Promise is RangePromise.ZeroForSmall ? "tables.ranges.zero" : "tables.ranges"));
+        var standsForSmall = figure.Promise is RangePromise.ZeroForSmall;
+        html.Raw("<table class=\"ranges\"><tr><th>"u8).Text(sheet.Text(standsForSmall ? "tables.ranges.zero" : "tables.ranges"));
         foreach (var range in figure.Ranges)
             html.Raw("<th>"u8).Text(sheet.Language.Share(range.Coverage));
-        WriteRangeRow(figure, "tables.margin", range => sheet.Language.Margin(range.Printed));
-        WriteRangeRow(figure, "tables.ranges.attained" + PromiseKey.Of(figure.Promise), range => sheet.Language.Number(AttainedInHundred(range)));
+        if (standsForSmall)
+            WriteRangeRow(figure, "tables.ranges.zeroed", range => sheet.Language.Number(RestInHundred(range)));
+        else
+        {
+            WriteRangeRow(figure, "tables.margin", range => sheet.Language.Margin(range.Printed));
+            WriteRangeRow(figure, "tables.ranges.attained" + PromiseKey.Of(figure.Promise), range => sheet.Language.Number(AttainedInHundred(range)));
+        }
         WriteRangeRow(figure, "tables.ranges.from", range => sheet.Language.Number(range.Printed.Low));
         WriteRangeRow(figure, "tables.ranges.to", range => sheet.Language.Number(range.Printed.High));
         html.Raw("</table>"u8);
@@ -61,6 +67,9 @@ internal sealed class ReadingPanel(Sheet sheet, CurveMark curves, HtmlWriter htm
         foreach (var range in figure.Ranges)
             html.Raw("<td>"u8).Text(text(range));
     }
+
+    /// <summary>Of 100 values above the range of a 0, how many at most become 0; rounded up.</summary>
+    private static PublishedValue RestInHundred(FigureRange range) => PublishedValue.Of(100 - AttainedInHundred(range).ToDecimal());
 
     /// <summary>The attained coverage of 100 cases, rounded down, with as many decimals as it takes not to fall below the one that is named.</summary>
     private static PublishedValue AttainedInHundred(FigureRange range)
