@@ -10,6 +10,8 @@ internal static class BudgetText
 {
     private const int PasteDigits = 7;
 
+    private static readonly (double Times, string Word)[] Large = [(1e6, " million"), (1e3, " thousand"), (1, "")];
+
     /// <summary>A loss as it can be pasted: rounded up to seven significant digits, so that it is never too little.</summary>
     public static string Paste(double loss)
     {
@@ -92,13 +94,15 @@ internal static class BudgetText
         _ => several.Replace("{0}", (count - 1).ToString(CultureInfo.InvariantCulture), StringComparison.Ordinal) + whose,
     };
 
-    /// <summary>A chance to two digits, rounded up; what a double cannot hold any more is "below 10^−300".</summary>
+    /// <summary>A bound on a small chance as "at most 1 in 900 million": two digits, rounded so that it is never too little; from 10^10 on the power of ten.</summary>
     public static string Chance(double chance)
     {
-        if (chance < 1e-300)
-            return "below 10^−300";
-        var unit = Math.Pow(10, Math.Floor(Math.Log10(chance)) - 1);
-        return Plain(Math.Min(1, Math.Ceiling(chance / unit - 1e-6) * unit));
+        var places = (int)Math.Floor(-Math.Log10(Math.Max(chance, 1e-300)) + 1e-9);
+        if (places >= 10)
+            return $"at most 1 in 10^{places}";
+        var unit = Math.Pow(10, Math.Max(0, places - 1));
+        var (times, word) = Large.First(large => Math.Pow(10, places) >= large.Times);
+        return $"at most 1 in {Plain(Math.Floor(1 / chance / unit + 1e-9) * unit / times)}{word}";
     }
 
     private static string PerUnit(Sensitivity sensitivity, NoiseAccount account) =>

@@ -66,7 +66,7 @@ internal sealed class SameNumbersCheck : IReviewCheck
         var named = $"{release.Tables[left.Table].Id}/{left.Of(release).Column}";
         return new Finding(
             FindingLevel.Caution, "same-numbers", FindingOwner.Noise, Place.OfCell(table.File, row, measure.Column),
-            $"{table.Id}/{measure.Column} has the numbers of {named} in all {count} rows with noise that both have, and each is said to have noise of its own. The chance of that is {BudgetText.Chance(chance)} at most.",
+            $"{table.Id}/{measure.Column} has the numbers of {named} in all {count} rows with noise that both have, and each is said to have noise of its own. The chance of that is {BudgetText.Chance(chance)}.",
             "if both show one draw, sums and differences of the two have other margins than stated, and the budget counts the draw twice; if they are two runs of one seed, they protect less than stated.",
             $"publish one draw once: take the column out of {(left.Table == right.Table ? "the table" : $"table \"{table.Id}\"")}, and cite {named} where it is needed (\"sameDrawAs\", which says that two columns share a draw, is not read by this version); or else publish the numbers of the second run.")
         {

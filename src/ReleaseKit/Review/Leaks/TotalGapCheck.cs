@@ -68,9 +68,9 @@ internal sealed class TotalGapCheck : IReviewCheck
         var isDeclared = added.Declared.Contains(measure.Column);
         return new Finding(
             isDeclared ? FindingLevel.Caution : FindingLevel.Note, "total-far-from-parts", FindingOwner.Noise, Place.OfCell(added.Table.File, gap.Rows.Total, measure.Column),
-            $"{address} is {measure.ValueAt(gap.Rows.Total)}, and its parts over \"{added.Stub.Column}\" add up to {gap.Sum}. The chance that the noise of all of them makes so wide a gap is below {BudgetText.Chance(gap.ChanceBound)}.{More(count)}",
+            $"{address} is {measure.ValueAt(gap.Rows.Total)}, and its parts over \"{added.Stub.Column}\" add up to {gap.Sum}. The chance that the noise of all of them makes so wide a gap is {BudgetText.Chance(gap.Chance)}.{More(count)}",
             "readers are told that only noise keeps the parts from adding up.",
-            $"correct the total or its parts; {(isDeclared ? "or take \"adds\" out if they do not add up, and" : "or, if parts overlap or some are left out,")} say so in a note under the table.")
+            $"correct the total or its parts; {(isDeclared ? "or, if they do not add up, take \"adds\" out and" : "or, if parts overlap or some are left out,")} say so in a note under the table.")
         {
             Address = address,
         };

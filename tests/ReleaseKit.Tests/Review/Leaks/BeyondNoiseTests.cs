@@ -36,7 +36,7 @@ public sealed class BeyondNoiseTests
     {
         var found = FindingsOf(Scale, $",{value}\n").ToList();
         Assert.Equal(isFound ? 1 : 0, found.Count);
-        Assert.All(found, finding => Assert.Contains("in any of 8 figures, is 0.00000000094.", finding.Found, StringComparison.Ordinal));
+        Assert.All(found, finding => Assert.Contains("in any of 8 figures, is at most 1 in 1000 million.", finding.Found, StringComparison.Ordinal));
     }
 
     [Fact]
