@@ -11,7 +11,8 @@ public static class Waivers
     /// <summary>Slugs of findings that may be waived.</summary>
     public static IReadOnlySet<string> Waivable { get; } = new HashSet<string>
     {
-        "formula-cell", "kind-not-given", "label-unused", "looks-like-period", "looks-like-total", "no-address", "no-licence", "prose-heading", "prose-html", "undeclared-unit",
+        "formula-cell", "kind-not-given", "label-unused", "looks-like-period", "looks-like-total", "no-address", "no-licence", "prose-heading", "prose-html", "total-far-from-parts",
+        "undeclared-unit",
     };
 
     /// <summary>The findings, those that are waived turned into notes that say by whom and why; a waiver without effect is a caution of its own.</summary>
@@ -19,7 +20,7 @@ public static class Waivers
     {
         var waivers = release?.SignOff.Waivers ?? [];
         var inForce = waivers.Where(waiver => !HasEnded(waiver, release!)).ToList();
-        return findings.Select(finding => inForce.FirstOrDefault(waiver => Covers(waiver, finding)) is { } waiver ? Waived(finding, waiver) : finding)
+        return findings.Select(finding => inForce.FirstOrDefault(waiver => Covers(waiver, finding)) is { } waiver ? Waived(finding, waiver) : WithWaiver(finding, release))
             .Concat(waivers.Where(waiver => HasEnded(waiver, release!)).Select(WaiverProblems.HasEnded))
             .Concat(inForce.Where(waiver => !findings.Any(finding => Covers(waiver, finding))).Select(WaiverProblems.CoversNothing));
     }
@@ -35,4 +36,9 @@ public static class Waivers
         Level = FindingLevel.Note,
         Found = FormattableString.Invariant($"{finding.Found}\nWaived by {waiver.By} on {waiver.On:yyyy-MM-dd}: {waiver.Reason}"),
     };
+
+    /// <summary>A caution says with which waiver it may stand, ready to paste; the day is to be put right by whoever signs.</summary>
+    private static Finding WithWaiver(Finding finding, Release? release) => release is not null && finding.Level == FindingLevel.Caution && Waivable.Contains(finding.Slug)
+        ? finding with { Do = FormattableString.Invariant($$"""{{finding.Do}} If it may stand, write in signoff.json: { "waivers": [ { "finding": "{{finding.Slug}}", "at": "{{finding.Address ?? finding.At.ToString()}}", "reason": "…", "by": "…", "on": "{{release.Published.Date:yyyy-MM-dd}}" } ] }""") }
+        : finding;
 }

@@ -34,6 +34,13 @@ public sealed class PeriodColumnTests
     }
 
     [Fact]
+    public void Years_of_birth_that_are_said_to_be_no_periods_are_none()
+    {
+        using var folder = Named("1930", "1931", "1932").Edit("release.json", "\"all\": \"All\" }", "\"all\": \"All\", \"period\": false }");
+        Assert.DoesNotContain(folder.Read().Findings, finding => finding.Slug is "looks-like-period" or "period");
+    }
+
+    [Fact]
     public void Declared_periods_and_those_of_the_example_and_the_sample_are_none()
     {
         using var folder = Named("2029", "2030", "2031").Edit("release.json", "\"all\": \"All\" }", "\"all\": \"All\", \"period\": true }");

@@ -69,7 +69,7 @@ public sealed class ProseCheckTests
     public void Page_without_a_heading_is_a_stop() => Broken.StopsAt("prose-title", Prose, 1, 1, "# Summary", folder => folder.Edit(Prose, "# Summary", "Summary"));
 
     [Fact]
-    public void Skipped_level_is_a_caution() => Broken.Cautions("prose-heading", Prose, "### Lamps", "write ## before it",
+    public void Skipped_level_is_a_caution() => Broken.Cautions("prose-heading", Prose, "### Lamps", "begin it with ##",
         folder => folder.Edit(Prose, "In 2031", "### Lamps\n\nIn 2031"));
 
     [Fact]

@@ -43,6 +43,43 @@ public sealed class WaiverTests
     public void Budget_margin_and_leak_findings_cannot_be_waived(string slug) => Broken.Stops("cannot-be-waived", "signoff.json", $"\"{slug}\"", "mend what the finding names",
         folder => folder.With("signoff.json", $$"""{ "waivers": [ { "finding": "{{slug}}", "reason": "r", "by": "b", "on": "2032-01-01" } ] }"""));
 
+    public static TheoryData<string, string, string, string> Waivable => new()
+    {
+        { "prose-html", Html, "lamps were lit", "lamps <b>were lit" },
+        { "prose-heading", Html, "In 2031", "### Lamps\n\nIn 2031" },
+        { "prose-heading", Html, "In 2031", "# Lamps\n\nIn 2031" },
+        { "label-unused", "labels.csv", "", "column,value,en\nstreet,Moon Street,Moon Street\n" },
+        { "formula-cell", "tables/lamps.csv", "Quay", "-Quay" },
+        { "looks-like-total", "release.json", ", \"all\": \"All\" }", " }" },
+        { "looks-like-period", "tables/lamps.csv", "Kiln Row,31,4\nQuay,20,5\nWeir Lane", "2029,31,4\n2030,20,5\n2031" },
+        { "total-far-from-parts", "release.json", "\"figures\": [\n", "\"adds\": [ { \"figure\": \"broken\", \"over\": \"street\" } ], \"figures\": [\n" },
+    };
+
+    [Theory]
+    [MemberData(nameof(Waivable))]
+    public void Waiver_pasted_from_the_remedy_settles_it(string slug, string file, string from, string to)
+    {
+        void Damage(TestFolder folder)
+        {
+            _ = from.Length == 0 ? folder.With(file, to) : folder.Edit(file, from, to);
+            if (slug == "total-far-from-parts")
+                folder.Edit("tables/lamps.csv", "60,9\n", "60,900\n");
+            if (slug == "looks-like-total")
+                folder.Edit("release.json", "{ \"where\": { \"street\": \"All\" }, \"sumOver\": \"street\" }, ", "");
+        }
+
+        using var broken = new Broken(Damage);
+        var found = Assert.Single(broken.Review(), finding => finding.Slug == slug);
+        Assert.Equal(FindingLevel.Caution, found.Level);
+        foreach (var at in new[] { found.At.ToString(), found.At.File, found.Address }.OfType<string>())
+        {
+            var pasted = found.Do[found.Do.IndexOf("{ \"waivers\"", StringComparison.Ordinal)..].Replace(found.Address ?? found.At.ToString(), at, StringComparison.Ordinal);
+            using var settled = new Broken(folder => { Damage(folder); folder.With("signoff.json", pasted); });
+            Assert.DoesNotContain(settled.Review(), finding => finding.Slug == "waiver-without-effect" || finding is { For: FindingOwner.SignOff, Level: FindingLevel.Stop });
+            Assert.Equal(FindingLevel.Note, Assert.Single(settled.Review(), finding => finding.Slug == slug).Level);
+        }
+    }
+
     private static Finding Single(string slug, string waiver)
     {
         using var broken = new Broken(folder => folder.Edit(Html, "lamps were lit", "lamps <b>were lit").With("signoff.json", $$"""{ "waivers": [ {{waiver}} ] }"""));

@@ -11,7 +11,7 @@ internal static class PeriodColumnChecks
         {
             var stub = read.Table.Stub[column];
             var headings = stub.Labels.Select(label => label.Value).Where(value => value != stub.All).ToList();
-            if (!stub.Period && headings.Count > 1 && headings.TrueForAll(Periods.ReadsLikePeriod))
+            if (read.Draft.Stub[column].Period is null && headings.Count > 1 && headings.TrueForAll(Periods.ReadsLikePeriod))
                 log.Add(TotalProblems.LooksLikePeriod(read.Draft.Stub[column].At, stub.Column, headings[0], headings.TrueForAll(Periods.IsPeriod), FindingOwner.Writer));
         }
     }

@@ -42,7 +42,7 @@ internal sealed class StubBuilder
             Column = draft.Column,
             Title = draft.Title,
             All = draft.All,
-            Period = draft.Period,
+            Period = draft.Period ?? false,
             Labels = labels,
             Codes = Recode(order),
             AllCode = all,
@@ -53,7 +53,7 @@ internal sealed class StubBuilder
     {
         var value = text.ToString();
         LabelChecks.Check(value, draft.Column, at, context.For(FindingOwner.Noise));
-        if (draft.Period && value != draft.All && !Periods.IsPeriod(value))
+        if (draft.Period == true && value != draft.All && !Periods.IsPeriod(value))
             context.Add(CellProblems.BadPeriod(at, draft.Column, value, FindingOwner.Noise));
         values.Add((value, at));
         lookup[value] = values.Count - 1;

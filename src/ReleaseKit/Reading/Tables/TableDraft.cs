@@ -31,7 +31,8 @@ internal sealed record Named<T>(T Value, Place At);
 
 internal sealed record NoteDraft(TableNote Note, Place At);
 
-internal sealed record StubDraft(string Column, ReaderText Title, string? All, bool Period, Place At);
+/// <summary>A stub column as declared; "period" is null where nothing is said.</summary>
+internal sealed record StubDraft(string Column, ReaderText Title, string? All, bool? Period, Place At);
 
 internal sealed record SideDraft(string Column, SideColumnOrigin From, string? Mechanism, Place At);
 

@@ -86,7 +86,7 @@ internal static class TableDraftReader
         if (ObjectReader.Open(value, "stub", ReleaseShapes.Stub, context) is not { } keys || keys.Text("column") is not { } column)
             return null;
         var title = keys.ReaderText("title") ?? ReaderText.Plain(context.Language, column);
-        return new StubDraft(column, title, keys.Text("all"), keys.Flag("period") ?? false, keys.PlaceOf("column"));
+        return new StubDraft(column, title, keys.Text("all"), keys.Flag("period"), keys.PlaceOf("column"));
     }
 
     private static SideDraft? ReadColumn(JsonMember member, ReadContext context) =>

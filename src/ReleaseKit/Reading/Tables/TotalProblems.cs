@@ -17,13 +17,13 @@ internal static class TotalProblems
         FindingLevel.Caution, "looks-like-total", owner, at,
         $"\"{KeyProblems.Cut(label)}\" in column \"{column}\", first at line {line} of the CSV, reads like the heading of totals, and \"all\" does not say so.",
         "the total would be counted among its own parts: in charts, in selections, and in what one unit costs.",
-        $"if it is the total, write {{ \"column\": \"{column}\", …, \"all\": \"{KeyProblems.Cut(label)}\" }}; if it is one row among the others, leave it.");
+        $"if it is the total, write {{ \"column\": \"{column}\", …, \"all\": \"{KeyProblems.Cut(label)}\" }}; if it is one row among the others, it may stand.");
 
     public static Finding LooksLikePeriod(Place at, string column, string first, bool isIso, FindingOwner owner) => new(
         FindingLevel.Caution, "looks-like-period", owner, at,
         $"The headings in column \"{column}\" all read like periods, such as \"{KeyProblems.Cut(first)}\", and \"period\" does not say so.",
         "what is counted in several periods stands in several cells: left unsaid, what one unit costs would come out too small.",
-        $"if one unit can be counted in several of them, {(isIso ? "" : "write them as 2031, 2031-Q1, 2031-03 or 2030-07/2031-06, and ")}write {{ \"column\": \"{column}\", …, \"period\": true }}; if each unit is in one of them only, as by year of birth, leave it.");
+        $"if one unit can be counted in several of them, {(isIso ? "" : "write them as 2031, 2031-Q1, 2031-03 or 2030-07/2031-06, and ")}write {{ \"column\": \"{column}\", …, \"period\": true }}; if each unit is in one of them only, as by year of birth, write {{ \"column\": \"{column}\", …, \"period\": false }}.");
 
     public static Finding NotATotal(Place at, string address, string column, FindingOwner owner) => new(
         FindingLevel.Stop, "sum-not-a-total", owner, at,

@@ -16,13 +16,13 @@ internal static class ProseProblems
         FindingLevel.Caution, "prose-heading", owner, at,
         $"A heading of level {to} follows one of level {from}.",
         "who listens to a page moves by its headings, and looks for the level between.",
-        $"write {new string('#', from + 1)} before it.");
+        $"begin it with {new string('#', from + 1)} instead.");
 
     public static Finding SecondTitle(Place at, FindingOwner owner) => new(
         FindingLevel.Caution, "prose-heading", owner, at,
         "This page has a second heading of the first level.",
         "the first is the title of the page; a page has one.",
-        "write ## before it.");
+        "begin it with ## instead.");
 
     public static Finding StemTaken(Place at, string stem, string by, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-name", owner, at,
