@@ -36,6 +36,9 @@ public sealed record Finding(FindingLevel Level, string Slug, FindingOwner For, 
     /// <summary>The address of the figure or selection it concerns, if any.</summary>
     public string? Address { get; init; }
 
+    /// <summary>The column of a CSV file it concerns, where what is said of it has consequences elsewhere.</summary>
+    public string? Column { get; init; }
+
     /// <summary>How many more of its kind were met and only counted, since so many were kept already; on the last that was kept.</summary>
     public int NotKept { get; init; }
 

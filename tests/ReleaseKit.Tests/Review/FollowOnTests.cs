@@ -30,6 +30,20 @@ public sealed class FollowOnTests
         "missing-column", folder => folder.Edit(Mechanisms, "\"scale\": 3.0", "\"scale\": { \"column\": \"noise_scale\" }"));
 
     [Theory]
+    [InlineData("{ \"street\": [ \"All\", \"Quay\" ] }", "wrong-type")]
+    [InlineData("\"All\"", "wrong-type")]
+    [InlineData("{ \"street\": \"Quai\" }", "unknown-label")]
+    public void Rule_that_cannot_be_read_leaves_the_rules_after_it_unjudged(string where, string slug) => OnlyStop(slug, folder => folder
+        .Edit(Release, "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", $"\"noise\": [ {{ \"where\": {where}, \"mechanism\": \"lamps-broken\" }}, {{ \"mechanism\": \"lamps-lit\" }} ]"));
+
+    [Fact]
+    public void Column_named_in_another_finding_does_not_hide_a_law_without_a_number() => Assert.Contains("loss-unknown", StopsOf(folder => folder
+        .With("tables/lamps.csv", "street,lit,broken,lamps-broken\nAll,60,9,1\nKiln Row,31,4,1\nQuay,20,5,1\nWeir Lane,9,-1,1\n")
+        .Edit(Release, "\"figures\": [\n", "\"columns\": { \"lamps-broken\": { \"from\": \"public\" } }, \"figures\": [\n")
+        .Edit(Mechanisms, "\"mechanisms\": [", "\"mechanisms\": [ { \"id\": \"unused\", \"law\": \"laplace\", \"scale\": { \"column\": \"lamps-broken\" }, \"sensitivity\": { \"cellsPerUnit\": 1, \"perCell\": 1 } },")
+        .Edit(Release, "\"title\": \"Lamps counted\"", "\"lamps-broken\": 1, \"title\": \"Lamps counted\"")));
+
+    [Theory]
     [InlineData("\"practice\": {", "\"composition\": [ \"lamps-lit\" ], \"practice\": {", "write \"composition\": { \"together\": [")]
     [InlineData("\"sensitivity\": { \"cellsPerUnit\": 2, \"perCell\": 1 }", "\"sensitivity\": 1", "write \"sensitivity\": { \"cellsPerUnit\": 1, \"perCell\": 1 }")]
     public void Object_of_the_wrong_kind_is_told_what_to_paste(string from, string to, string paste)
@@ -79,6 +93,12 @@ public sealed class FollowOnTests
     public void Chart_that_stands_on_the_page_already_is_a_stop() => Broken.Stops(
         "prose-chart", "narrative/summary.md", "![Again]", "take one of the two out",
         folder => folder.With("narrative/summary.md", TestFolder.Prose + "\n![Again](chart:by-street)\n"));
+
+    private static IReadOnlyList<string> StopsOf(Action<TestFolder> damage)
+    {
+        using var broken = new Broken(damage);
+        return [.. broken.Review().Where(finding => finding.Level == FindingLevel.Stop).Select(finding => finding.Slug)];
+    }
 
     private static string OnlyStop(string slug, Action<TestFolder> damage)
     {

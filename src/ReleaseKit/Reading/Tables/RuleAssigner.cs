@@ -3,7 +3,7 @@ using ReleaseKit.Releases;
 
 namespace ReleaseKit.Reading.Tables;
 
-/// <summary>Which rule decides each row of a measure: the first whose "where" fits. Rows that no rule fits get <see cref="NoiseRule.NotGiven"/>, added last, and are reported by the checks.</summary>
+/// <summary>Which rule decides each row of a measure: the first whose "where" fits. Rows that no rule fits get <see cref="NoiseRule.NotGiven"/>, added last, and are reported by the checks. Where one rule could not be read, it is not known which rows the others would have: none has a rule.</summary>
 internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> stub, int rowCount, MechanismsDraft mechanisms)
 {
     private readonly Dictionary<int, (List<NoiseRule> Rules, List<int[]> Wanted)> byMeasure = [];
@@ -35,8 +35,7 @@ internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> s
                 rules.Add(resolved);
                 wanted.Add(where);
             }
-        rules.Add(NoiseRule.NotGiven.Instance);
-        return (rules, wanted);
+        return rules.Count == (figure.Rules?.Count ?? 0) ? ([.. rules, NoiseRule.NotGiven.Instance], wanted) : ([NoiseRule.NotGiven.Instance], []);
     }
 
     private NoiseRule? End(RuleEnd end) => end switch

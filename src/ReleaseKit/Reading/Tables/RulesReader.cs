@@ -31,10 +31,10 @@ internal static class RulesReader
     {
         if (ObjectReader.Open(value, "noise", ReleaseShapes.NoiseRule, context) is not { } keys)
             return null;
-        var where = keys.Members("where")
-            .Select(member => (member.Name, Text: Values.Text(member.Value, member.Name, context)))
-            .Where(pair => pair.Text is not null).Select(pair => new StubValue(pair.Name, pair.Text!)).ToList();
-        return new RuleDraft(where, keys.PlaceOf("where"), ReadEnd(keys), keys.At);
+        var where = keys.Members("where").Select(member => (member.Name, Text: Values.Text(member.Value, member.Name, context))).ToList();
+        var isRead = keys.Find("where") is null or JsonObject && where.TrueForAll(pair => pair.Text is not null);
+        var end = ReadEnd(keys);
+        return new RuleDraft([.. where.Where(pair => pair.Text is not null).Select(pair => new StubValue(pair.Name, pair.Text!))], keys.PlaceOf("where"), isRead ? end : null, keys.At);
     }
 
     private static RuleEnd? ReadEnd(ObjectReader keys)

@@ -68,7 +68,7 @@ internal sealed record FigureDraft
     public bool HasLaterRules { get; init; }
 }
 
-/// <summary>One rule of "noise": where it holds, and what it ends in; the end is null if it could not be read.</summary>
+/// <summary>One rule of "noise": where it holds, and what it ends in; the end is null if either could not be read.</summary>
 internal sealed record RuleDraft(IReadOnlyList<StubValue> Where, Place WhereAt, RuleEnd? End, Place At);
 
 internal abstract record RuleEnd

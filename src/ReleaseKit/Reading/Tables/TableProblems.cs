@@ -43,7 +43,10 @@ internal static class TableProblems
         FindingLevel.Stop, "missing-column", owner, at,
         $"{file} has no column \"{KeyProblems.Cut(column)}\".",
         "what stands in it cannot be published.",
-        Nearest.Of(column, headers) is { } near ? $"write \"{near}\"." : $"name one of its columns: {string.Join(", ", headers.Take(8).Select(KeyProblems.Cut))}.");
+        Nearest.Of(column, headers) is { } near ? $"write \"{near}\"." : $"name one of its columns: {string.Join(", ", headers.Take(8).Select(KeyProblems.Cut))}.")
+    {
+        Column = column,
+    };
 
     public static Finding ColumnTwice(Place at, string column, FindingOwner owner) => new(
         FindingLevel.Stop, "column-twice", owner, at,
@@ -55,7 +58,10 @@ internal static class TableProblems
         FindingLevel.Stop, "undeclared-column", owner, at,
         $"Nobody says what column \"{KeyProblems.Cut(column)}\" is.",
         "a column that comes from the confidential records and is not accounted for gives away what the noise protects.",
-        $"remove it from the CSV, or say in the table where it comes from: \"columns\": {{ \"{KeyProblems.Cut(column)}\": {{ \"from\": … }} }}, public, published or confidential.");
+        $"remove it from the CSV, or say in the table where it comes from: \"columns\": {{ \"{KeyProblems.Cut(column)}\": {{ \"from\": … }} }}, public, published or confidential.")
+    {
+        Column = column,
+    };
 
     public static Finding NotAStub(Place at, string key, string column, IEnumerable<string> stub, FindingOwner owner) => new(
         FindingLevel.Stop, "unknown-column", owner, at,
@@ -119,16 +125,19 @@ internal static class TableProblems
         FindingLevel.Stop, "scale-not-positive", owner, at,
         $"Column \"{column}\", which gives \"{key}\", holds no positive number here.",
         "the margin of this row cannot be worked out.",
-        "write the number that the noise of this row was drawn with.");
-
-    public static Finding ScaleOutOfRange(Place at, string column, FindingOwner owner) => Mechanisms.MechanismProblems.ParameterOutOfRange(
-        at, column, "outside", owner);
+        "write the number that the noise of this row was drawn with.")
+    {
+        Column = column,
+    };
 
     public static Finding ScaleColumnMissing(Place at, string column, string mechanism, string file, IReadOnlyList<string> headers, FindingOwner owner) => new(
         FindingLevel.Stop, "missing-column", owner, at,
         $"{file} has no column \"{KeyProblems.Cut(column)}\", which \"{mechanism}\" takes a number from.",
         "without it the margins of this table cannot be worked out.",
-        Nearest.Of(column, headers) is { } near ? $"write \"{near}\" in mechanisms.json." : $"add the column to {file}, and to \"columns\" of the table.");
+        Nearest.Of(column, headers) is { } near ? $"write \"{near}\" in mechanisms.json." : $"add the column to {file}, and to \"columns\" of the table.")
+    {
+        Column = column,
+    };
 
     public static Finding SlugTwins(Place at, string column, string one, string other, string slug, FindingOwner owner) => new(
         FindingLevel.Stop, "slug-twins", owner, at,

@@ -16,12 +16,12 @@ internal sealed class AccountingCheck : IReviewCheck
             .Select(spending => Found(spending, account, new ProposedPair(subject.Spendings, account)));
     }
 
-    // A column that gives a parameter and is not there, not declared or without numbers is told where it stands.
+    // A column that gives a parameter and is not there, not declared or without numbers is told where it stands; so is a rule that could not be read.
     private static bool IsToldByColumn(MechanismSpending spending, Reading.ReadOutcome read)
     {
         var columns = spending.Mechanism.Parameters.Values.Select(value => value.Column).OfType<string>().ToList();
-        return spending.Loss is null && columns.Count > 0 && (!read.TablesAreWhole || read.Findings.Any(finding =>
-            finding.Level == FindingLevel.Stop && columns.Exists(column => finding.Found.Contains($"\"{column}\"", StringComparison.Ordinal))));
+        return spending.Loss is null && columns.Count > 0 && (!read.RulesAreWhole || read.Findings.Any(finding =>
+            finding.Level == FindingLevel.Stop && finding.Column is { } column && columns.Contains(column)));
     }
 
     private static Finding Found(MechanismSpending spending, NoiseAccount account, ProposedPair pairs) => spending switch

@@ -1,3 +1,4 @@
+using ReleaseKit.Appraisal;
 using ReleaseKit.Appraisal.Budget;
 using ReleaseKit.Privacy;
 using ReleaseKit.Releases;
@@ -7,8 +8,6 @@ namespace ReleaseKit.Review.Budget;
 /// <summary>The total against what was authorised: it is met if any bound that can be shown meets it.</summary>
 internal sealed class AuthorisedCheck : IReviewCheck
 {
-    private const double DeltaForWords = 1e-9;
-
     public IEnumerable<Finding> Check(ReviewSubject subject)
     {
         if (subject.Noise is not { Authorised: { } authorised } account || authorised is { Epsilon: null, Rho: null })
@@ -18,18 +17,29 @@ internal sealed class AuthorisedCheck : IReviewCheck
         var bounds = ProvenBounds.Of(subject.Spendings);
         return double.IsInfinity(accountant.AmountOf(total)) || bounds.Meets(authorised)
             ? []
-            : [Exceeded(account, total, bounds.SmallestAt(Delta.AtMost(authorised.Delta ?? (authorised.Rho is null ? 0 : DeltaForWords))), accountant)];
+            : [Exceeded(account, total, AtBest(authorised, account.Accounting, bounds, subject.Spendings), accountant)];
     }
 
-    private static Finding Exceeded(NoiseAccount account, Appraisal.LossTotal total, Appraisal.LossTotal smallest, Accountant accountant) => new(
+    private static Finding Exceeded(NoiseAccount account, LossTotal total, string atBest, Accountant accountant) => new(
         FindingLevel.Stop, "authorised-exceeded", FindingOwner.Noise, account.Authorised.At,
-        $"Authorised is {BudgetText.Authorised(account.Authorised)}.\nThe mechanisms spend {BudgetText.Spent(total)} in {BudgetText.Written(account.Accounting)} accounting{Smallest(smallest)}.",
+        $"Authorised is {BudgetText.Authorised(account.Authorised)}.\nThe mechanisms spend {BudgetText.Spent(total)} in {BudgetText.Written(account.Accounting)} accounting{atBest}.",
         "the release would cost more than the office allowed.",
         accountant.AuthorisedIn(account.Authorised) is > 0 and var allowed
             ? $"add noise until the mechanisms spend at most {BudgetText.Down(allowed)} together, publish less, or have more authorised."
             : "give \"authorised\" in numbers that this accounting can meet: epsilon and delta, or rho.");
 
-    private static string Smallest(Appraisal.LossTotal smallest) => double.IsFinite(smallest.Epsilon!.Value)
-        ? $"; no rule known here brings that below epsilon {BudgetText.Paste(smallest.Epsilon.Value)} at delta {BudgetText.Plain(smallest.Delta!.Value)}"
-        : $"; no rule known here gives an epsilon at delta {BudgetText.Plain(smallest.Delta!.Value)}";
+    // In the terms of what was authorised: no delta is spoken of where none was given.
+    private static string AtBest(Authorised authorised, Accounting accounting, ProvenBounds bounds, IReadOnlyList<MechanismSpending> spendings) => authorised.Rho is null
+        ? Smallest(bounds.SmallestAt(Delta.AtMost(authorised.Delta ?? 0)))
+        : accounting == Accounting.Concentrated ? "" : InRho(ProvenBounds.Total(new ConcentratedAccountant(), spendings));
+
+    private static string Smallest(LossTotal smallest) => double.IsFinite(smallest.Epsilon!.Value)
+        ? $"; no rule known here brings that below epsilon {BudgetText.Paste(smallest.Epsilon.Value)} {AtDelta(smallest)}"
+        : $"; no rule known here gives an epsilon {AtDelta(smallest)}";
+
+    private static string AtDelta(LossTotal total) => total.Delta is > 0 and var delta ? $"at delta {BudgetText.Plain(delta)}" : "without a delta";
+
+    private static string InRho(LossTotal total) => double.IsFinite(total.Rho!.Value)
+        ? $"; no rule known here brings that below {BudgetText.Spent(total)}"
+        : "; no rule known here gives a rho";
 }

@@ -27,6 +27,7 @@ public sealed class BudgetCheckTests
         var text = folder.Text("authorised-exceeded");
         Assert.Contains("mechanisms.json:5:", text, StringComparison.Ordinal);
         Assert.Contains("Authorised is rho 0.05.\nThe mechanisms spend rho 0.14134", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("delta", text, StringComparison.Ordinal);
         Assert.Contains("add noise until the mechanisms spend at most 0.05 together", text, StringComparison.Ordinal);
     }
 
