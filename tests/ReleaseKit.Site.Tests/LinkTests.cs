@@ -19,7 +19,7 @@ public sealed class LinkTests(ComposedSample sample)
                 var target = new Uri(new Uri("http://release.test/" + path), link);
                 if (target.Host != "release.test" || target.Scheme != "http")
                     continue;
-                var file = Uri.UnescapeDataString(target.AbsolutePath).TrimStart('/');
+                var file = ComposedSample.FileAt(target.AbsolutePath);
                 var fragment = Uri.UnescapeDataString(target.Fragment).TrimStart('#');
                 if (!File.Exists(sample.File(file)) || (fragment.Length > 0 && !(ids.TryGetValue(file, out var known) && known.Contains(fragment))))
                     broken.Add($"{path}: {link}");

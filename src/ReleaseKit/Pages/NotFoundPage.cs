@@ -5,9 +5,9 @@ internal static class NotFoundPage
 {
     public static void Write(SiteContext context, SiteFolder site)
     {
-        var head = new PageHead(PageMap.NotFound, context.Language.Text("notfound.title"), SiteSection.Release);
+        var head = new PageHead(PageMap.NotFound, context.Language.Text("notfound.title"), SiteSection.Release) { IsShownAnywhere = true };
         var model = context.Model();
-        model["home"] = Link.From(head.Path, PageMap.Home);
+        model["home"] = head.LinkTo(PageMap.Home, context.Release.Address);
         model["title"] = context.In(context.Release.Title);
         context.Write(site, head, "404.html", model);
     }

@@ -24,9 +24,9 @@ internal static class PageFrame
         model["lang"] = context.Language.Tag;
         model["page_title"] = head.Title is null ? title : $"{head.Title}. {title}";
         model["release_title"] = title;
-        model["home"] = Link.From(head.Path, PageMap.Home);
+        model["home"] = head.LinkTo(PageMap.Home, release.Address);
         model["is_home"] = head.Path == PageMap.Home;
-        model["style"] = Link.From(head.Path, context.Assets.Style);
+        model["style"] = head.LinkTo(context.Assets.Style, release.Address);
         model["canonical"] = WebAddress.Of(release.Address) is { } address ? address + head.Path : null;
         model["latest"] = WebAddress.Above(release.Address);
         model["office"] = release.Publisher.Name;
@@ -41,7 +41,7 @@ internal static class PageFrame
     private static ScriptArray Sections(SiteContext context, PageHead head)
     {
         ScriptObject Item(SiteSection section, string path, string key) =>
-            Entry(context.Language.Text(key), head, path, isCurrent: section == head.Section);
+            Entry(context, context.Language.Text(key), head, path, isCurrent: section == head.Section);
         return
         [
             Item(SiteSection.Budget, PageMap.Budget, "frame.budget"),
@@ -53,13 +53,13 @@ internal static class PageFrame
 
     private static ScriptArray Tables(SiteContext context, PageHead head) =>
         [.. context.Release.Tables.Select((table, index) =>
-            Entry(context.In(table.Title), head, context.Pages.FirstPageOf(index), isCurrent: head.Table == index))];
+            Entry(context, context.In(table.Title), head, context.Pages.FirstPageOf(index), isCurrent: head.Table == index))];
 
     /// <summary>An entry of the navigation; "page" marks the very page, "true" the part that the page belongs to.</summary>
-    private static ScriptObject Entry(string text, PageHead head, string path, bool isCurrent) => new()
+    private static ScriptObject Entry(SiteContext context, string text, PageHead head, string path, bool isCurrent) => new()
     {
         ["text"] = text,
-        ["href"] = Link.From(head.Path, path),
+        ["href"] = head.LinkTo(path, context.Release.Address),
         ["current"] = path == head.Path ? "page" : isCurrent ? "true" : null,
     };
 

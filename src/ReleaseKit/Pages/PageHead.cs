@@ -19,4 +19,14 @@ public sealed record PageHead(string Path, string? Title, SiteSection Section)
 {
     /// <summary>Index of the table that the page belongs to, or null.</summary>
     public int? Table { get; init; }
+
+    /// <summary>Whether a server shows it under addresses of any depth, where relative links lead nowhere.</summary>
+    public bool IsShownAnywhere { get; init; }
+
+    /// <summary>The link to another page or file of the site; null on a page that is shown anywhere, if it is not known where the site stands.</summary>
+    /// <param name="target">Its path in the site.</param>
+    /// <param name="address">Where the site stands, if that is said.</param>
+    public string? LinkTo(string target, string? address) => !IsShownAnywhere ? Link.From(Path, target)
+        : WebAddress.PathOf(address) is { } root ? root + target
+        : null;
 }

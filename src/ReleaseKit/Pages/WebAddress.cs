@@ -11,6 +11,10 @@ internal static class WebAddress
     public static string? Of(string? address) =>
         Uri.TryCreate(address, UriKind.Absolute, out var uri) && uri.Scheme is "http" or "https" ? address : null;
 
+    /// <summary>The path of an address without its host, between slashes; null if it is no http or https one.</summary>
+    public static string? PathOf(string? address) =>
+        Of(address) is { } web ? $"/{new Uri(web).AbsolutePath.Trim('/')}/".Replace("//", "/", StringComparison.Ordinal) : null;
+
     /// <summary>Where to write to: a web address, or mailto: for a mail address; null if it is neither.</summary>
     public static string? OfContact(string contact) =>
         Of(contact) ?? (contact.Contains('@') && !contact.AsSpan().ContainsAny(NotInMail) ? "mailto:" + contact : null);

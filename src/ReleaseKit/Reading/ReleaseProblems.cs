@@ -22,7 +22,7 @@ internal static class ReleaseProblems
     public static Finding NoAddress(Place at, FindingOwner owner) => new(
         FindingLevel.Note, "no-address", owner, at,
         "It is not said where the release will stand.",
-        "canonical links, the feed, the sitemap and the link to the latest edition are left out.",
+        "canonical links, the feed, the sitemap, the link to the latest edition, and the links and the style of 404.html are left out.",
         "add \"address\": \"https://office.example/release/1/\"");
 
     public static Finding HeadlineTwice(Place at, string address, Place first, FindingOwner owner) => new(

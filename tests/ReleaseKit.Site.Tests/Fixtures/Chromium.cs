@@ -69,7 +69,7 @@ public sealed class Chromium : IAsyncLifetime
             return route.AbortAsync();
         }
 
-        var file = sample.File(Uri.UnescapeDataString(address.AbsolutePath).TrimStart('/'));
+        var file = sample.File(ComposedSample.FileAt(address.AbsolutePath));
         if (!File.Exists(file))
         {
             opened.Missing.Add(address.AbsolutePath);

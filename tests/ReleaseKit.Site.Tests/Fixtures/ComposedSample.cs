@@ -24,5 +24,13 @@ public sealed class ComposedSample : IDisposable
 
     public string File(string relative) => Path.Combine(Site, relative);
 
+    /// <summary>The file, relative to the site, that the path of an address names: from the top, or below the path of the sample's own address.</summary>
+    public static string FileAt(string path)
+    {
+        const string own = "/ehr-2031/1/";
+        var file = Uri.UnescapeDataString(path);
+        return (file.StartsWith(own, StringComparison.Ordinal) ? file[own.Length..] : file).TrimStart('/');
+    }
+
     public void Dispose() => folder.Dispose();
 }

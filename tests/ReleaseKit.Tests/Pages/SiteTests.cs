@@ -19,10 +19,35 @@ public sealed class SiteTests : IDisposable
         var documents = ComposedPages();
         var dead = from page in documents
                    from address in page.Document.QuerySelectorAll("[href]").Select(element => element.GetAttribute("href")!)
-                   where !address.Contains(':', StringComparison.Ordinal) && !Leads(page.Path, address, documents)
+                   where page.Path != "404.html" && !address.Contains(':', StringComparison.Ordinal) && !Leads(page.Path, address, documents)
                    select $"{page.Path} -> {address}";
         Assert.Empty(dead);
     }
+
+    // A server shows the page under whatever address was asked for, however deep.
+    [Theory]
+    [InlineData("https://nopf.example/ehr-2031/1/", "/ehr-2031/1/")]
+    [InlineData("https://nopf.example/", "/")]
+    [InlineData("https://nopf.example//other.example/", "/other.example/")]
+    public void Page_of_what_is_not_there_has_links_that_hold_at_any_depth(string address, string root)
+    {
+        PagesRelease.Compose(PagesRelease.Make() with { Address = address }, folder.In("site"));
+        var links = NotFoundLinks();
+        Assert.Contains(root + "index.html", links);
+        Assert.All(links, link => Assert.StartsWith(root, link, StringComparison.Ordinal));
+        Assert.All(links, link => Assert.True(File.Exists(folder.In("site/" + link[root.Length..])), link));
+    }
+
+    [Fact]
+    public void Page_of_what_is_not_there_has_no_links_and_no_style_where_no_address_is_given()
+    {
+        PagesRelease.Compose(PagesRelease.Make() with { Address = null }, folder.In("site"));
+        Assert.Empty(NotFoundLinks());
+    }
+
+    // But for links to other places and to the page itself.
+    private List<string> NotFoundLinks() => [.. new HtmlParser().ParseDocument(File.ReadAllText(folder.In("site/404.html"))).QuerySelectorAll("[href], [src]")
+        .Select(element => element.GetAttribute("href") ?? element.GetAttribute("src")!).Where(link => !link.Contains(':', StringComparison.Ordinal) && !link.StartsWith('#'))];
 
     [Fact]
     public void Beside_exact_figures_methods_and_home_say_what_the_guarantee_and_the_loss_do_not_cover()
