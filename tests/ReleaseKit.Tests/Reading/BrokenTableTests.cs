@@ -125,6 +125,17 @@ public sealed class BrokenTableTests
     public void Ragged_row_is_found_at_its_line() => Broken.StopsAt("csv-ragged", Csv, 3, 1, "between double quotes",
         folder => folder.Edit(Csv, "Kiln Row,31,4", "Kiln Row, Upper,31,4"));
 
+    [Theory]
+    [InlineData("Kiln \"Old\" Row,31,4", 3, 6)]
+    [InlineData("\"Kiln\" Row,31,4", 3, 8)]
+    [InlineData("\"Kiln\nRow\"s,31,4", 4, 5)]
+    [InlineData("\"Kiln \"\"Old\"\"\nRow\", 3\"1,4", 4, 8)]
+    public void Quote_is_found_where_it_goes_wrong(string row, int line, int column)
+    {
+        using var folder = new TestFolder().Edit(Csv, "Kiln Row,31,4", row);
+        Assert.Equal(new ReleaseKit.Review.Place(Csv, line, column), Assert.Single(folder.Read().Findings, finding => finding.Slug == "csv-quotes").At);
+    }
+
     [Fact]
     public void Quote_that_never_closes_is_found() => Broken.StopsAt("csv-quotes", Csv, 5, 1, "twice",
         folder => folder.Edit(Csv, "Weir Lane,9,-1", "\"Weir Lane,9,-1"));
@@ -150,9 +161,26 @@ public sealed class BrokenTableTests
     public void Undeclared_column_is_a_stop() => Broken.Stops("undeclared-column", Csv, "raw", "remove it from the CSV",
         folder => folder.With(Csv, "street,lit,broken,raw\nAll,60,9,61\nKiln Row,31,4,30\nQuay,20,5,21\nWeir Lane,9,-1,10\n"));
 
+    [Theory]
+    [InlineData("\"street\",lit,broken,raw", 1, 21)]
+    [InlineData("street,lit,broken,\"in, out\",raw", 1, 29)]
+    [InlineData("street,lit,broken,\"\u00E5 \"\"in\"\"\",raw", 1, 30)]
+    public void Undeclared_column_after_quoted_names_is_found_where_it_stands(string names, int line, int column)
+    {
+        using var folder = new TestFolder().With(Csv, names + "\nAll,60,9,6,6\n");
+        Assert.Equal(new ReleaseKit.Review.Place(Csv, line, column), folder.Read().Findings.Last(finding => finding.Slug == "undeclared-column").At);
+    }
+
     [Fact]
-    public void Twin_columns_are_a_stop() => Broken.Stops("csv-header", Csv, "street", "rename or remove",
+    public void Twin_columns_are_a_stop() => Broken.StopsAt("csv-header", Csv, 1, 12, "rename or remove",
         folder => folder.Edit(Csv, "street,lit,broken", "street,lit,lit"));
+
+    [Fact]
+    public void All_that_is_wrong_with_names_of_columns_is_found_at_once()
+    {
+        using var folder = new TestFolder().Edit(Csv, "street,lit,broken", "street,,broken,,broken");
+        Assert.Equal([8, 16, 17], folder.Read().Findings.Where(finding => finding.Slug == "csv-header").Select(finding => finding.At.Column));
+    }
 
     [Fact]
     public void Doubled_row_is_found_at_the_second() => Broken.StopsAt("doubled-row", Csv, 6, 1, "remove one of them",

@@ -12,23 +12,19 @@ namespace ReleaseKit.Reading.Tables;
 /// </summary>
 internal sealed class CsvFile : IDisposable
 {
+    private static readonly CsvReaderOptions Form = new() { Separator = ',', TrimWhitespace = true, TrackLineNumbers = true, MaxRecordSize = FolderLimits.RecordBytes };
+
+    private readonly FileInfo file;
     private readonly CsvReader reader;
     private readonly string path;
     private readonly ReadContext context;
-    private int lastReported;
+    private long lastReported;
 
     private CsvFile(FileInfo file, string path, ReadContext context)
     {
         (this.path, this.context) = (path, context);
-        reader = CsvReader.FromFile(file.FullName, new CsvReaderOptions
-        {
-            Separator = ',',
-            TrimWhitespace = true,
-            TrackLineNumbers = true,
-            MaxRecordSize = FolderLimits.RecordBytes,
-            FieldCountMismatch = CsvFieldCountHandling.Skip,
-            OnMalformedRecord = Report,
-        });
+        this.file = file;
+        reader = CsvReader.FromFile(file.FullName, Form with { FieldCountMismatch = CsvFieldCountHandling.Skip, OnMalformedRecord = Report });
     }
 
     public IReadOnlyList<string> Headers => reader.Headers;
@@ -79,54 +75,79 @@ internal sealed class CsvFile : IDisposable
     /// <summary>Where a field of the current row begins.</summary>
     public Place PlaceOf(int column)
     {
-        var record = reader.RawRecord;
-        return record.Overlaps(reader.GetRawSpan(column), out var offset) ? PlaceAt(record[..offset]) : new Place(path, Line, 1);
+        var offset = 0;
+        for (var before = 0; before < column; before++)
+            offset += reader.GetRawSpan(before).Length + 1;
+        return PlaceAfter(Encoding.UTF8.GetString(reader.RawRecord[..offset]), Line);
     }
 
-    /// <summary>Where the name of a column begins, as long as no name before it is quoted.</summary>
-    public static Place PlaceOfHeader(string path, IReadOnlyList<string> headers, int index) =>
-        new(path, 1, headers.Take(index).Sum(name => name.Length + 1) + 1);
+    /// <summary>Where the name of a column begins.</summary>
+    public Place PlaceOfHeader(int column) => HeaderPlaces[column];
+
+    /// <summary>The row of names is read once more, since it is not kept as it stands in the file.</summary>
+    private IReadOnlyList<Place> HeaderPlaces
+    {
+        get
+        {
+            if (field is not null)
+                return field;
+            using var names = CsvReader.FromFile(file.FullName, Form with { HasHeader = false });
+            names.Read();
+            return field = FieldPlaces(names);
+        }
+    }
 
     public void Dispose() => reader.Dispose();
 
-    private Place PlaceAt(ReadOnlySpan<byte> before)
+    private List<Place> FieldPlaces(CsvReader row)
     {
-        var breaks = before.Count((byte)'\n');
-        var lineStart = before.LastIndexOf((byte)'\n') + 1;
-        return new Place(path, Line + breaks, Encoding.UTF8.GetCharCount(before[lineStart..]) + 1);
+        var (places, at) = (new List<Place>(), new Place(path, (int)row.LineNumber, 1));
+        for (var column = 0; column < row.FieldCount; column++)
+        {
+            places.Add(at);
+            var step = PlaceAfter(Encoding.UTF8.GetString(row.GetRawSpan(column)), at.Line);
+            at = step with { Column = step.Column + (step.Line == at.Line ? at.Column : 1) };
+        }
+
+        return places;
     }
+
+    private Place PlaceAfter(ReadOnlySpan<char> before, long line) => new(path, (int)line + before.Count('\n'), before.Length - before.LastIndexOf('\n'));
 
     private void Report(CsvMalformedRecord record)
     {
         IsSound = false;
-        var at = new Place(path, (int)record.LineNumber, 1);
-        if (at.Line == lastReported)
+        if (record.LineNumber == lastReported)
             return;
-        lastReported = at.Line;
+        lastReported = record.LineNumber;
         context.Add(record.Reason == CsvMalformedReason.FieldCountMismatch
-            ? CsvProblems.Ragged(at, Headers.Count, record.RawRecord, context.Owner)
-            : CsvProblems.Quotes(at, record.Reason, context.Owner));
+            ? CsvProblems.Ragged(new Place(path, (int)record.LineNumber, 1), Headers.Count, record.RawRecord, context.Owner)
+            : CsvProblems.Quotes(PlaceAfter(record.RawRecord.AsSpan(0, QuoteFault.In(record.RawRecord)), record.LineNumber), record.Reason, context.Owner));
     }
 
     private bool HeaderIsSound()
     {
-        var at = new Place(path, 1, 1);
         if (!TryReadHeader())
             return false;
-        var problem = Headers switch
+        List<Finding> problems = Headers switch
         {
-            [] => CsvProblems.Empty(new Place(path), context.Owner),
-            [var one] when one.IndexOfAny([';', '\t', '|']) is >= 0 and var separator => CsvProblems.Separator(at, one[separator], context.Owner),
-            _ when Headers.FirstOrDefault(string.IsNullOrWhiteSpace) is not null => CsvProblems.UnnamedColumn(at, Headers, context.Owner),
-            _ when Headers.GroupBy(name => name).FirstOrDefault(group => group.Count() > 1) is { } twins => CsvProblems.TwinColumns(at, twins.Key, context.Owner),
-            _ when Headers.FirstOrDefault(name => HiddenCharacters.FirstIn(name) >= 0) is { } name =>
-                KeyProblems.HiddenCharacter(at, "A column name", name[HiddenCharacters.FirstIn(name)], context.Owner),
-            _ => null,
+            [] => [CsvProblems.Empty(new Place(path), context.Owner)],
+            [var one] when one.IndexOfAny([';', '\t', '|']) is >= 0 and var separator => [CsvProblems.Separator(new Place(path, 1, 1), one[separator], context.Owner)],
+            _ => [.. Headers.Select(NameProblem).OfType<Finding>(), .. TwinColumns()],
         };
-        if (problem is not null)
-            context.Add(problem);
-        return problem is null;
+        problems.ForEach(context.Add);
+        return problems.Count == 0;
     }
+
+    private IEnumerable<Finding> TwinColumns() => Headers.Index().Where(name => !string.IsNullOrWhiteSpace(name.Item)).GroupBy(name => name.Item).Where(same => same.Count() > 1)
+        .Select(same => CsvProblems.TwinColumns(PlaceOfHeader(same.Skip(1).First().Index), same.Key, context.Owner));
+
+    private Finding? NameProblem(string name, int column) => name switch
+    {
+        _ when string.IsNullOrWhiteSpace(name) => CsvProblems.UnnamedColumn(PlaceOfHeader(column), column + 1, context.Owner),
+        _ when HiddenCharacters.FirstIn(name) is >= 0 and var hidden => KeyProblems.HiddenCharacter(PlaceOfHeader(column), "A column name", name[hidden], context.Owner),
+        _ => null,
+    };
 
     private bool TryReadHeader()
     {

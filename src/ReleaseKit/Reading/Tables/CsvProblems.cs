@@ -33,9 +33,9 @@ internal static class CsvProblems
         "the whole row would be read as one column.",
         $"{Export} with a point as decimal sign; a spreadsheet set to a language with decimal commas writes semicolons.");
 
-    public static Finding UnnamedColumn(Place at, IReadOnlyList<string> headers, FindingOwner owner) => new(
+    public static Finding UnnamedColumn(Place at, int number, FindingOwner owner) => new(
         FindingLevel.Stop, "csv-header", owner, at,
-        $"Column {headers.ToList().FindIndex(string.IsNullOrWhiteSpace) + 1} has no name in the first row.",
+        $"Column {number} has no name in the first row.",
         "columns are found by their names.",
         "name it, or remove the column; a comma at the end of each line makes an empty one.");
 

@@ -5,8 +5,10 @@ using ReleaseKit.Review;
 namespace ReleaseKit.Reading.Tables;
 
 /// <summary>Holds the columns that release.json and mechanisms.json name against those of the CSV.</summary>
-internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, IReadOnlyList<string> headers)
+internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, CsvFile rows)
 {
+    private readonly IReadOnlyList<string> headers = rows.Headers;
+
     /// <summary>Whether every column that is needed is there; what is not is reported, as is a column that nobody declared.</summary>
     public bool Run()
     {
@@ -50,6 +52,6 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
             .Concat(draft.Figures.Select(figure => draft.Statuses.ColumnOf(figure.Column)).OfType<string>()).ToHashSet();
         for (var index = 0; index < headers.Count; index++)
             if (!declared.Contains(headers[index]))
-                draft.Context.Add(TableProblems.UndeclaredColumn(CsvFile.PlaceOfHeader(draft.File, headers, index), headers[index], FindingOwner.Noise));
+                draft.Context.Add(TableProblems.UndeclaredColumn(rows.PlaceOfHeader(index), headers[index], FindingOwner.Noise));
     }
 }

@@ -52,7 +52,7 @@ internal sealed partial class LabelBook
     private static bool ColumnsAreKnown(CsvFile rows, ReadContext context)
     {
         foreach (var unknown in rows.Headers.Where(name => !Known.Contains(name) && !NameColumn.IsMatch(name)))
-            context.Add(LabelProblems.UnknownColumn(CsvFile.PlaceOfHeader(FileName, rows.Headers, IndexOf(rows, unknown)), unknown, Known, context.Owner));
+            context.Add(LabelProblems.UnknownColumn(rows.PlaceOfHeader(IndexOf(rows, unknown)), unknown, Known, context.Owner));
         var missing = Known.Take(2).FirstOrDefault(name => !rows.Headers.Contains(name));
         if (missing is not null)
             context.Add(LabelProblems.MissingColumn(missing, context.Owner));

@@ -21,7 +21,7 @@ internal sealed class TableReader(TableDraft draft, MechanismsDraft mechanisms, 
         var file = files.Find(draft.File, draft.FileAt, draft.Context);
         using var rows = file is null ? null : CsvFile.Open(file, draft.File, context);
         var headers = rows?.Headers ?? [];
-        var isWhole = rows is not null && new HeaderCheck(draft, mechanisms, headers).Run();
+        var isWhole = rows is not null && new HeaderCheck(draft, mechanisms, rows).Run();
         Prepare(headers);
         if (rows is not null && isWhole)
             isWhole = ReadRows(rows);
