@@ -104,4 +104,8 @@ public sealed record Sensitivity
 /// <summary>Loss as declared: any of epsilon, delta, rho.</summary>
 public sealed record DeclaredLoss(double? Epsilon, double? Delta, double? Rho);
 
-public sealed record ClippedTo(double From, double To);
+public sealed record ClippedTo(double From, double To)
+{
+    /// <summary>How far from 0 a contribution can lie.</summary>
+    public double Outermost => Math.Max(Math.Abs(From), Math.Abs(To));
+}

@@ -4,39 +4,54 @@ namespace ReleaseKit.Review.Budget;
 
 /// <summary>
 /// How far one unit can move the sums or means of one measure at least: what it can put into a sum (its contribution is clipped), divided by the
-/// public denominator of a mean. Only what is certain counts: one cell; a cell with the totals above it; the smallest move on every level and in every period.
+/// public denominator of a mean. Only what is certain counts: one cell; a cell with the totals above it; the smallest moves on every level and in
+/// every period; and the same for a unit that is replaced by one of another cell, so that both cells move.
 /// </summary>
 internal sealed class ClippedMoves
 {
-    private readonly List<double[]> together;
+    private readonly IReadOnlyDictionary<int, double> denominators;
+    private readonly Dictionary<int, int[]> countedIn;
+    private readonly List<List<int>> levels;
 
-    private ClippedMoves(IReadOnlyDictionary<int, double> moves, double smallest, Table table)
+    private ClippedMoves(Table table, IReadOnlyDictionary<int, double> denominators, ClippedTo clipped, Neighbouring neighbouring, bool changesCells)
     {
-        SmallestDenominator = smallest;
-        One = moves.Values.Max();
-        together = [.. WithTotals(moves, table), SmallestOnEachLevel(moves, table)];
+        var wholes = new Wholes(table, denominators.Keys);
+        (this.denominators, countedIn) = (denominators, denominators.Keys.ToDictionary(row => row, row => wholes.Of(row).ToArray()));
+        levels = [.. denominators.Keys.GroupBy(Levels.LevelOf(table)).Select(level => level.ToList())];
+        SmallestDenominator = denominators.Values.Min();
+        var place = neighbouring == Neighbouring.Replace ? new Exchange(clipped.To, clipped.From) : new Exchange(clipped.Outermost, 0);
+        Take(InPlace(place.InBoth));
+        // Contributions of either sign lie up to twice "perCell" apart.
+        SignedPerCell = neighbouring == Neighbouring.Replace ? One / 2 : One;
+        if (neighbouring == Neighbouring.Replace && changesCells)
+            TakeApart(clipped);
     }
 
     public double SmallestDenominator { get; }
 
     /// <summary>In one cell.</summary>
-    public double One { get; }
+    public double One { get; private set; }
+
+    /// <summary>What "perCell" must be at least for contributions of either sign.</summary>
+    public double SignedPerCell { get; private set; }
 
     /// <summary>Over all its cells, as an absolute sum.</summary>
-    public double Sum => together.Max(moves => moves.Sum());
+    public double Sum { get; private set; }
 
     /// <summary>Over all its cells, as a length.</summary>
-    public double Length => together.Max(moves => Math.Sqrt(moves.Sum(move => move * move)));
+    public double Length { get; private set; }
+
+    /// <summary>Whether two cells in which a unit is not counted together move by more than one does.</summary>
+    public bool IsApart { get; private set; }
 
     /// <summary>Null where the mechanism does not say enough, or no mean of the measure carries it.</summary>
     public static ClippedMoves? Of(Table table, Measure measure, Mechanism mechanism, Neighbouring neighbouring)
     {
         if (mechanism.Clipped is not { } clipped || NumbersOf(table, measure, mechanism) is not { } numbers)
             return null;
-        var most = neighbouring == Neighbouring.Replace ? clipped.To - clipped.From : Math.Max(Math.Abs(clipped.From), Math.Abs(clipped.To));
         var rows = Enumerable.Range(0, table.RowCount).Where(row => measure.HasNumber(row) && numbers(row) > 0
             && measure.RuleAt(row) is NoiseRule.FromMechanism from && from.Mechanism.Id == mechanism.Id).ToList();
-        return rows.Count == 0 ? null : new(rows.ToDictionary(row => row, row => most / numbers(row)), rows.Min(numbers), table);
+        return rows.Count == 0 ? null : new(table, rows.ToDictionary(row => row, numbers), clipped, neighbouring, mechanism.Sensitivity.Moves);
     }
 
     /// <summary>By what the sum of a row is divided: 1 for an amount, or for what else is clipped without a denominator; for a mean the denominators, which stand in a column that is declared as public or is a measure itself.</summary>
@@ -56,16 +71,44 @@ internal sealed class ClippedMoves
             : null;
     }
 
-    /// <summary>For each cell its move and those of the totals that hold it: whoever is counted in the cell is counted in them.</summary>
-    private static IEnumerable<double[]> WithTotals(IReadOnlyDictionary<int, double> moves, Table table)
+    private void Take(IEnumerable<double[]> together)
     {
-        var wholes = new Wholes(table, moves.Keys);
-        return moves.Keys.Select(row => wholes.Of(row).Select(whole => moves[whole]).ToArray());
+        foreach (var moves in together)
+        {
+            One = Math.Max(One, moves.Max());
+            Sum = Math.Max(Sum, moves.Sum());
+            Length = Math.Max(Length, Math.Sqrt(moves.Sum(move => move * move)));
+        }
     }
 
-    private static double[] SmallestOnEachLevel(IReadOnlyDictionary<int, double> moves, Table table)
+    /// <summary>For each cell its move and those of the totals that hold it: whoever is counted in the cell is counted in them. Then the smallest on each level.</summary>
+    private IEnumerable<double[]> InPlace(double by) => countedIn.Values.Select(cells => cells.Select(cell => by / denominators[cell]).ToArray())
+        .Append([.. levels.Select(level => by / level.Max(row => denominators[row]))]);
+
+    private void TakeApart(ClippedTo clipped)
     {
-        var levelOf = Levels.LevelOf(table);
-        return [.. moves.GroupBy(pair => levelOf(pair.Key)).Select(level => level.Min(pair => pair.Value))];
+        var (inPlace, several) = (Sum, levels.Where(level => level.Count > 1).ToList());
+        foreach (var exchange in new Exchange[] { new(clipped.Outermost, clipped.Outermost), new(clipped.To, clipped.From), new(clipped.From, clipped.To) })
+            Take([.. several.SelectMany(level => FromOneToEachOther(level, exchange)), [.. levels.SelectMany(level => SmallestApart(level, exchange))]]);
+        if (several.Count > 0)
+            SignedPerCell = Math.Max(SignedPerCell, clipped.Outermost / several.Min(level => level.Min(row => denominators[row])));
+        IsApart = Sum > inPlace;
+    }
+
+    // The cell that moves most with its totals, and every other: not all pairs, of which a long table has too many.
+    private IEnumerable<double[]> FromOneToEachOther(List<int> level, Exchange exchange)
+    {
+        var left = level.MaxBy(row => countedIn[row].Sum(cell => 1 / denominators[cell]));
+        var leaving = countedIn[left];
+        return level.Where(row => row != left).Select(row => countedIn[row])
+            .Select(entered => leaving.Union(entered).Select(cell => exchange.In(leaving.Contains(cell), entered.Contains(cell)) / denominators[cell]).ToArray());
+    }
+
+    private IEnumerable<double> SmallestApart(List<int> level, Exchange exchange)
+    {
+        if (level.Count == 1)
+            return [exchange.InBoth / denominators[level[0]]];
+        var largest = level.Select(row => denominators[row]).OrderDescending().Take(2).ToList();
+        return [exchange.Smaller / largest[1], exchange.Larger / largest[0]];
     }
 }

@@ -24,34 +24,33 @@ internal sealed class ClippedSensitivityCheck : IReviewCheck
         return measures.Select(pair => CheckMeasure(spending.Mechanism, pair.Table, pair.Measure, account)).FirstOrDefault(finding => finding is not null);
     }
 
-    // A denominator that is there and wrong has been reported.
-    private static bool LacksDenominator(Mechanism mechanism) => mechanism is { DenominatorColumn: null, Sensitivity: { PerCell: null } and ({ L1: not null } or { L2: not null }) }
-        && !mechanism.KeyPlaces.ContainsKey("denominator");
+    // A denominator that is there and wrong has been reported. In one cell no mean moves farther than its contributions lie apart.
+    private static bool LacksDenominator(Mechanism mechanism) => mechanism is { DenominatorColumn: null, Law: not LawName.Declared } && !mechanism.KeyPlaces.ContainsKey("denominator")
+        && !(mechanism is { Clipped: { } clipped, Sensitivity: { CellsPerUnit: not null, PerCell: { } most } } && most >= Math.Max(clipped.Outermost, clipped.To - clipped.From) * (1 - Slack));
 
     private static Finding? CheckMeasure(Mechanism mechanism, Table table, Measure measure, NoiseAccount account)
     {
         if (ClippedMoves.Of(table, measure, mechanism, account.Neighbouring) is not { } moves)
             return null;
-        var needed = Needed(mechanism.Sensitivity, moves, account.Neighbouring).FirstOrDefault(norm => norm.Declared < norm.Least * (1 - Slack));
+        var needed = Needed(mechanism.Sensitivity, moves).FirstOrDefault(norm => norm.Declared < norm.Least * (1 - Slack));
         return needed is null ? null : TooSmall(mechanism, measure, moves, needed, account);
     }
 
-    private static IEnumerable<Norm> Needed(Sensitivity sensitivity, ClippedMoves moves, Neighbouring neighbouring)
+    private static IEnumerable<Norm> Needed(Sensitivity sensitivity, ClippedMoves moves)
     {
-        // Contributions of either sign lie up to twice "perCell" apart.
         if (sensitivity is { CellsPerUnit: not null, PerCell: { } most })
-            yield return new("perCell", most, sensitivity.Signed && neighbouring == Neighbouring.Replace ? moves.One / 2 : moves.One, moves.One);
+            yield return new("perCell", most, sensitivity.Signed ? moves.SignedPerCell : moves.One, moves.One, false);
         if (sensitivity.L1 is { } sum)
-            yield return new("l1", sum, moves.Sum, moves.Sum);
+            yield return new("l1", sum, moves.Sum, moves.Sum, moves.IsApart);
         if (sensitivity.L2 is { } length)
-            yield return new("l2", length, moves.Length, moves.Length);
+            yield return new("l2", length, moves.Length, moves.Length, moves.IsApart);
     }
 
     private static Finding TooSmall(Mechanism mechanism, Measure measure, ClippedMoves moves, Norm norm, NoiseAccount account) => new(
         FindingLevel.Stop, "sensitivity-too-small", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
-        $"\"{mechanism.Id}\" declares \"{norm.Key}\": {BudgetText.Plain(norm.Declared)}, but {BudgetText.Relation(account.Neighbouring, account)} can move the {(measure.Kind == MeasureKind.Mean ? "means" : "sums")} of column \"{measure.Column}\" by {BudgetText.Paste(norm.Move)}.\nThat follows from \"clipped\" {BudgetText.Plain(mechanism.Clipped!.From)} to {BudgetText.Plain(mechanism.Clipped.To)}{Denominators(measure, mechanism, moves)}.",
+        $"\"{mechanism.Id}\" declares \"{norm.Key}\": {BudgetText.Plain(norm.Declared)}, but {BudgetText.Relation(account.Neighbouring, account)} can move the {(measure.Kind == MeasureKind.Mean ? "means" : "sums")} of column \"{measure.Column}\" by {BudgetText.Paste(norm.Move)}{(norm.IsApart ? " in all, where the two are in different cells" : "")}.\nThat follows from \"clipped\" {BudgetText.Plain(mechanism.Clipped!.From)} to {BudgetText.Plain(mechanism.Clipped.To)}{Denominators(measure, mechanism, moves)}.",
         "the budget page would promise more protection than there is.",
-        $"write \"{norm.Key}\": {BudgetText.Paste(norm.Least)} or more, or correct \"clipped\"{(measure.Kind == MeasureKind.Mean ? " or the denominators if they are not those that were" : " if it is not what was")} used.");
+        $"write \"{norm.Key}\": {BudgetText.Paste(norm.Least)} or more{(norm.IsApart ? ", or \"moves\": false in \"sensitivity\" if no unit can change cells" : "")}, or correct \"clipped\"{(measure.Kind == MeasureKind.Mean ? " or the denominators if they are not those that were" : " if it is not what was")} used.");
 
     private static string Denominators(Measure measure, Mechanism mechanism, ClippedMoves moves) => measure.Kind == MeasureKind.Mean
         ? $" and \"{mechanism.DenominatorColumn}\", at the smallest {BudgetText.Plain(moves.SmallestDenominator)}"
@@ -62,10 +61,17 @@ internal sealed class ClippedSensitivityCheck : IReviewCheck
         var column = table.SideColumns.FirstOrDefault(side => side.From == SideColumnOrigin.Public && mechanism.Parameters.Values.All(parameter => parameter.Column != side.Column))?.Column;
         return new(
             FindingLevel.Stop, "denominator-missing", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
-            $"\"{mechanism.Id}\" gives an {(mechanism.Sensitivity.L1 is null ? "l2" : "l1")} for the means of column \"{mean.Column}\" in table \"{table.Id}\" and does not say where their denominator is known from.",
+            $"\"{mechanism.Id}\" gives {Given(mechanism.Sensitivity)} for the means of column \"{mean.Column}\" in table \"{table.Id}\" and does not say where their denominator is known from.",
             "without a public denominator a mean is a noised sum over a noised count: both spend, and no number bounds what one unit moves.",
             $"if the denominators are public, add \"denominator\": {{ \"public\": \"{column ?? "COLUMN"}\" }}{(column is null ? $" and declare the column in table \"{table.Id}\": \"columns\": {{ \"COLUMN\": {{ \"from\": \"public\" }} }}" : "")}; else publish the sum and the count, each with a mechanism of its own.");
     }
 
-    private sealed record Norm(string Key, double Declared, double Least, double Move);
+    private static string Given(Sensitivity sensitivity) => sensitivity switch
+    {
+        { CellsPerUnit: not null, PerCell: not null } => "a \"perCell\"",
+        { L1: not null } => "an l1",
+        _ => "an l2",
+    };
+
+    private sealed record Norm(string Key, double Declared, double Least, double Move, bool IsApart);
 }

@@ -20,7 +20,7 @@ internal sealed record CountMoves(int Counted, int Moved)
         var wholes = new Wholes(table, rows);
         var deepest = rows.MaxBy(row => wholes.Of(row).Count());
         var counting = wholes.Of(deepest).ToHashSet();
-        return new(counting.Count, neighbouring == Neighbouring.Replace ? Replaced(table, rows, deepest, counting, wholes) : counting.Count);
+        return new(counting.Count, neighbouring == Neighbouring.Replace && mechanism.Sensitivity.Moves ? Replaced(table, rows, deepest, counting, wholes) : counting.Count);
     }
 
     private static int Replaced(Table table, List<int> rows, int from, HashSet<int> counting, Wholes wholes)

@@ -47,5 +47,5 @@ internal sealed class CountSensitivityCheck : IReviewCheck
         FindingLevel.Stop, "sensitivity-too-small", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
         $"\"{mechanism.Id}\" declares {key}{BudgetText.Plain(declared)}, but column \"{measure.Column}\" of table \"{table.Id}\" counts {BudgetText.Other(account)}: {BudgetText.Relation(account.Neighbouring, account)} moves {(moved == 1 ? "a cell of it" : $"{moved} cells of it")} by 1.",
         "the budget page would promise more protection than there is.",
-        $"write {key}{BudgetText.Paste(least)} or more; or, if the column counts something else, give its figures the \"unit\" that they count in release.json.");
+        $"write {key}{BudgetText.Paste(least)} or more{(account.Neighbouring == Neighbouring.Replace && moved > 1 ? "; or \"moves\": false in \"sensitivity\" if no unit can change cells" : "")}; or, if the column counts something else, give its figures the \"unit\" that they count in release.json.");
 }

@@ -47,15 +47,63 @@ public sealed class ClippedSensitivityTests
         Assert.Contains("Do: write \"perCell\": 20 or more", text, StringComparison.Ordinal);
     }
 
-    // Replaced: 5 to 20, 15 ÷ 50 = 0.3; −30 to 20, 50 ÷ 50 = 1, of either sign ±0.5.
+    // Replaced, in one cell: 5 to 20, 15 ÷ 50 = 0.3; −30 to 20, 50 ÷ 50 = 1, of either sign ±0.5.
     [Theory]
-    [InlineData("\"l1\": 0.29", "\"from\": 5, \"to\": 20", "\"l1\": 0.3 or more")]
-    [InlineData("\"l1\": 0.6", "\"from\": -30, \"to\": 20", "\"l1\": 1 or more")]
-    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.4, \"signed\": true", "\"from\": -30, \"to\": 20", "\"perCell\": 0.5 or more")]
+    [InlineData("\"l1\": 0.29, \"moves\": false", "\"from\": 5, \"to\": 20", "\"l1\": 0.3 or more, or correct")]
+    [InlineData("\"l1\": 0.6", "\"from\": -30, \"to\": 20", "\"l1\": 1 or more, or correct")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.4, \"signed\": true, \"moves\": false", "\"from\": -30, \"to\": 20", "\"perCell\": 0.5 or more, or correct")]
     public void Unit_in_place_of_another_moves_a_mean_from_end_to_end(string sensitivity, string clipped, string write)
     {
-        using var folder = Folder(sensitivity, clipped).Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace);
+        using var folder = Replaced(sensitivity, clipped);
         Assert.Contains($"Do: write {write}", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
+
+    // In place of one of another cell: 20 ÷ 50 + 20 ÷ 200 = 0.5, √(0.4² + 0.1²) = 0.4123106 rounded up; a contribution of −30 ÷ 50 is not within ±0.5.
+    [Theory]
+    [InlineData("\"l1\": 0.4", "\"from\": 0, \"to\": 20", "\"l1\": 0.5 or more, or \"moves\": false in \"sensitivity\" if no unit can change cells, or correct")]
+    [InlineData("\"l2\": 0.4", "\"from\": 0, \"to\": 20", "\"l2\": 0.4123106 or more, or \"moves\": false")]
+    [InlineData("\"l1\": 0.3", "\"from\": 5, \"to\": 20", "\"l1\": 0.5 or more, or \"moves\": false")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.3", "\"from\": 5, \"to\": 20", "\"perCell\": 0.4 or more")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.5, \"signed\": true", "\"from\": -30, \"to\": 20", "\"perCell\": 0.6 or more")]
+    public void Unit_in_place_of_one_of_another_cell_moves_both(string sensitivity, string clipped, string write)
+    {
+        using var folder = Replaced(sensitivity, clipped);
+        Assert.Contains($"Do: write {write}", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("\"l1\": 0.5", "\"from\": 0, \"to\": 20")]
+    [InlineData("\"l1\": 0.4, \"moves\": false", "\"from\": 0, \"to\": 20")]
+    [InlineData("\"l1\": 1", "\"from\": -30, \"to\": 20")]
+    [InlineData("\"l2\": 0.4123106", "\"from\": 0, \"to\": 20")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.4", "\"from\": 0, \"to\": 20")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.6, \"signed\": true", "\"from\": -30, \"to\": 20")]
+    public void Norm_over_both_cells_of_a_unit_that_is_replaced_passes(string sensitivity, string clipped)
+    {
+        using var folder = Replaced(sensitivity, clipped);
+        folder.HasNo("sensitivity-too-small");
+    }
+
+    // 15 to 20: two streets by 20 each, the total by nothing; −10 to 20: a street and the total by 30 each.
+    [Theory]
+    [InlineData("\"l1\": 39", "\"from\": 15, \"to\": 20", "\"l1\": 40 or more")]
+    [InlineData("\"l1\": 59", "\"from\": -10, \"to\": 20", "\"l1\": 60 or more")]
+    public void Sums_with_their_total_move_for_a_unit_that_is_replaced(string sensitivity, string clipped, string write)
+    {
+        using var folder = Folder($"{sensitivity}, \"l1Levels\": 2", clipped, rest: "", all: "{ \"mechanism\": \"lamps-lit\" }").Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace)
+            .Edit("release.json", Mean, Mean.Replace("mean", "amount", StringComparison.Ordinal));
+        Assert.Contains($"Do: write {write}", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
+    }
+
+    // In every year one of two streets in place of the other: 20 ÷ 200 + 20 ÷ 400 in each of the two years.
+    [Fact]
+    public void Unit_that_is_replaced_moves_two_cells_in_every_period()
+    {
+        using var folder = Replaced("\"l1\": 0.29, \"l1Levels\": 2", "\"from\": 0, \"to\": 20")
+            .With("tables/lamps.csv", "street,year,lit,broken,lamps\nQuay,2031,2.00,5,200\nWeir Lane,2031,9.00,-1,400\nQuay,2032,2.20,5,200\nWeir Lane,2032,9.10,-1,400\n")
+            .Edit("release.json", "\"title\": \"Street\", \"all\": \"All\" }", "\"title\": \"Street\" }, { \"column\": \"year\", \"title\": \"Year\", \"period\": true }")
+            .Edit("release.json", "{ \"where\": { \"street\": \"All\" }, \"public\": \"List of lamps\" }, ", "");
+        Assert.Contains("Do: write \"l1\": 0.3 or more", folder.Text("sensitivity-too-small"), StringComparison.Ordinal);
     }
 
     [Theory]
@@ -108,11 +156,27 @@ public sealed class ClippedSensitivityTests
     }
 
     [Fact]
+    public void Cells_of_a_mean_without_a_denominator_are_a_stop()
+    {
+        using var folder = Folder("\"cellsPerUnit\": 1, \"perCell\": 0.4", rest: "");
+        Assert.Contains("gives a \"perCell\" for the means of column \"lit\"", folder.Text("denominator-missing"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Cells_of_a_mean_that_move_as_far_as_a_contribution_need_no_denominator()
+    {
+        using var folder = Folder("\"cellsPerUnit\": 1, \"perCell\": 20", rest: "");
+        folder.HasNo("denominator-missing");
+    }
+
+    [Fact]
     public void Mean_with_a_denominator_that_is_wrong_is_not_said_to_have_none()
     {
         using var folder = Folder("\"l1\": 0.4", rest: "\"denominator\": { }, ");
         folder.HasNo("denominator-missing");
     }
+
+    private static TestFolder Replaced(string sensitivity, string clipped) => Folder(sensitivity, clipped).Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace);
 
     private static TestFolder Periods(string sensitivity) => Folder(sensitivity)
         .With("tables/lamps.csv", "street,lit,broken,lamps\n2031,2.00,5,200\n2032,9.00,-1,400\n")

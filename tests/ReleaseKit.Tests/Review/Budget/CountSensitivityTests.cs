@@ -40,7 +40,7 @@ public sealed class CountSensitivityTests
         using var folder = Folder(sensitivity, law).Edit("mechanisms.json", "\"add-or-remove\"", "\"replace\"");
         var text = folder.Text("sensitivity-too-small");
         Assert.Contains("one lamp in place of another moves 2 cells of it by 1.", text, StringComparison.Ordinal);
-        Assert.Contains($"Do: write {write} or more;", text, StringComparison.Ordinal);
+        Assert.Contains($"Do: write {write} or more; or \"moves\": false in \"sensitivity\" if no unit can change cells;", text, StringComparison.Ordinal);
     }
 
     // The total has a draw of the same mechanism: a lamp moves its street and the total; replaced, two streets, and not the total.
@@ -60,6 +60,7 @@ public sealed class CountSensitivityTests
     [InlineData("\"l1\": 1", "add-or-remove")]
     [InlineData("\"l1\": 2", "replace")]
     [InlineData("\"l2\": 1.414214", "replace")]
+    [InlineData("\"l1\": 1, \"moves\": false", "replace")]
     public void Sensitivity_that_holds_passes(string sensitivity, string neighbouring)
     {
         using var folder = Folder(sensitivity).Edit("mechanisms.json", "\"add-or-remove\"", $"\"{neighbouring}\"");
@@ -73,12 +74,13 @@ public sealed class CountSensitivityTests
         folder.HasNo("sensitivity-too-small");
     }
 
-    // A sum of contributions from 0 to 400: one more moves it by 400; −30 to 20 by 30, and in place of another by 50, ±25 each.
+    // A sum of contributions from 0 to 400: one more moves it by 400; −30 to 20 by 30, and in place of another by 50, ±25 each; of another cell, by 30 in one.
     [Theory]
     [InlineData("\"cellsPerUnit\": 1, \"perCell\": 1", "\"from\": 0, \"to\": 400", "add-or-remove", "\"perCell\": 400")]
     [InlineData("\"l1\": 399", "\"from\": 0, \"to\": 400", "add-or-remove", "\"l1\": 400")]
     [InlineData("\"l2\": 20", "\"from\": -30, \"to\": 20", "add-or-remove", "\"l2\": 30")]
-    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 20, \"signed\": true", "\"from\": -30, \"to\": 20", "replace", "\"perCell\": 25")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 20, \"signed\": true, \"moves\": false", "\"from\": -30, \"to\": 20", "replace", "\"perCell\": 25")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 25, \"signed\": true", "\"from\": -30, \"to\": 20", "replace", "\"perCell\": 30")]
     [InlineData("\"cellsPerUnit\": 1, \"perCell\": 400", "\"from\": 0, \"to\": 400", "add-or-remove", null)]
     [InlineData("\"cellsPerUnit\": 1, \"perCell\": 30, \"signed\": true", "\"from\": -30, \"to\": 20", "replace", null)]
     public void Sum_moves_by_what_a_unit_can_put_into_it(string sensitivity, string clipped, string neighbouring, string? write)
