@@ -16,6 +16,8 @@ internal sealed class FigureOrigins(Release release)
     private readonly ConcurrentDictionary<FigureRef, FigureOrigin> sums = new();
     private readonly ConcurrentDictionary<SumKey, LatticeLaw?> sumLaws = new();
     private readonly ConcurrentDictionary<int, SumParts> parts = new();
+    private readonly Lazy<IReadOnlyList<byte?>>[][] decimals =
+        [.. release.Tables.Select(table => table.Measures.Select(measure => new Lazy<IReadOnlyList<byte?>>(() => FileRounding.DecimalsByRule(measure))).ToArray())];
 
     public FigureOrigin Of(FigureRef at)
     {
@@ -33,9 +35,8 @@ internal sealed class FigureOrigins(Release release)
     {
         if (from.Mechanism.Adjusted || laws.TryLawOf(from.Mechanism, table, at.Row) is not { } law)
             return new FigureOrigin(from, null, from.Mechanism, 1);
-        var decimals = law is ContinuousLaw ? measure.DecimalsOf[at.Row] : (byte)0;
-        return draws.GetOrAdd(new(at.Table, at.Measure, measure.RuleOf[at.Row], law, decimals), key =>
-            new FigureOrigin(from, Shared(law, Steps(from.Mechanism, measure, key.Decimals, law)), from.Mechanism, 1));
+        return draws.GetOrAdd(new(at.Table, at.Measure, measure.RuleOf[at.Row], law), key =>
+            new FigureOrigin(from, Shared(law, Steps(from.Mechanism, measure, decimals[key.Table][key.Measure].Value[key.Rule] ?? 0, law)), from.Mechanism, 1));
     }
 
     /// <summary>The steps of the mechanism, the threshold of publication, and for a continuous law the rounding to the CSV's own decimals.</summary>
@@ -104,6 +105,6 @@ internal sealed class FigureOrigins(Release release)
 
     private readonly record struct ErrorKey(NoiseLaw Law, string Steps);
 
-    /// <summary>Figures that share an origin: one rule of one measure, one law, written with so many decimals.</summary>
-    private readonly record struct DrawKey(int Table, int Measure, byte Rule, NoiseLaw Law, byte Decimals);
+    /// <summary>Figures that share an origin: one rule of one measure, one law.</summary>
+    private readonly record struct DrawKey(int Table, int Measure, byte Rule, NoiseLaw Law);
 }

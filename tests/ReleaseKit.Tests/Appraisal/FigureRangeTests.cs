@@ -61,6 +61,25 @@ public sealed class FigureRangeTests
         Assert.True(figure.Case.Rounded);
     }
 
+    // A program that drops zeros at the end writes 0 for 0.00.
+    [Theory]
+    [InlineData("0.00", "412.34", "0.00")]
+    [InlineData("0", "412.34", "12.5")]
+    [InlineData("0", "0.00", "12 D")]
+    public void Decimals_of_the_file_are_the_finest_of_the_rule(string one, string other, string third)
+    {
+        var release = new SmallRelease().Figures(MeasureKind.Mean, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 0.4)), one, other, third);
+        Assert.All(Enumerable.Range(0, 3), row => Assert.Equal(0.4 * Math.Log(20) + 0.005, release.Figure(row).Main!.Margin, 1e-9));
+    }
+
+    [Fact]
+    public void Decimals_of_the_file_are_those_of_each_rule()
+    {
+        NoiseRule[] rules = [new NoiseRule.FromMechanism(SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 0.4))), new NoiseRule.Public(SmallRelease.Words("survey"))];
+        var release = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Mean), rules, [0, 0, 1], "0", "12.5", "7.125");
+        Assert.All(Enumerable.Range(0, 2), row => Assert.Equal(0.4 * Math.Log(20) + 0.05, release.Figure(row).Main!.Margin, 1e-9));
+    }
+
     [Fact]
     public void Decimals_of_the_file_add_nothing_to_rounding_by_the_mechanism()
     {
