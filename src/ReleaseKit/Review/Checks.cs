@@ -31,6 +31,7 @@ public static class Checks
         new BoundCheck(),
         new PastStepCheck(),
         new MultiplierCheck(),
+        new LawUnitCheck(),
         new ConfidentialColumnCheck(),
         new DeltaCheck(),
         new BeyondNoiseCheck(),

@@ -1,3 +1,4 @@
+using ReleaseKit.Appraisal;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 
@@ -14,20 +15,16 @@ internal sealed class MultiplierCheck : IReviewCheck
 
     private static IEnumerable<Finding> CheckMeasure(Table table, Measure measure)
     {
+        var decimals = FileRounding.DecimalsByRule(measure);
         for (var rule = 0; rule < measure.Rules.Count; rule++)
         {
-            if (measure.Rules[rule] is NoiseRule.FromMechanism { Mechanism: { Adjusted: false } mechanism } && UnitOf(measure, rule) is { } unit && IsFiner(mechanism, unit))
+            if (measure.Rules[rule] is NoiseRule.FromMechanism { Mechanism: { Adjusted: false } mechanism } && UnitOf(measure, decimals[rule]) is { } unit && IsFiner(mechanism, unit))
                 yield return Finer(table, measure, mechanism, unit);
         }
     }
 
     /// <summary>The finest step that the CSV's digits of a rule's figures can show, in the figure's unit; null if it has none.</summary>
-    private static decimal? UnitOf(Measure measure, int rule)
-    {
-        var decimals = Enumerable.Range(0, measure.RuleOf.Length).Where(row => measure.RuleOf[row] == rule && measure.HasNumber(row))
-            .Select(row => (int?)measure.DecimalsOf[row]).Max();
-        return decimals is { } most ? (decimal)measure.Multiplier / (decimal)PublishedValue.PowerOfTen(most) : null;
-    }
+    private static decimal? UnitOf(Measure measure, byte? decimals) => decimals is { } most ? (decimal)measure.Multiplier / (decimal)PublishedValue.PowerOfTen(most) : null;
 
     private static bool IsFiner(Mechanism mechanism, decimal unit) => StepGrid.OfLaw(mechanism) is { } grid && grid < unit
         && !mechanism.Afterwards.OfType<AfterStep.RoundTo>().Any(rounding => StepGrid.Exactly(rounding.Unit) % unit == 0);
