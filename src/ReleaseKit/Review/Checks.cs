@@ -37,6 +37,7 @@ public static class Checks
         new BeyondNoiseCheck(),
         new TotalGapCheck(),
         new SameNumbersCheck(),
+        new UndeclaredGridCheck(),
         new UnnoisedNameCheck(),
     ];
 }

@@ -15,21 +15,17 @@ internal sealed class LawUnitCheck : IReviewCheck
     private const double Unlikely = 1e-9;
 
     public IEnumerable<Finding> Check(ReviewSubject subject) => subject is { Release: { } release, Origins: { } origins }
-        ? release.Tables.SelectMany((table, at) => table.Measures.SelectMany((measure, index) => measure.Multiplier == 1 ? [] : CheckMeasure(new(table, at, measure, index), origins)))
+        ? NoisedColumn.Of(release).Where(column => column.Measure.Multiplier != 1).SelectMany(column => CheckColumn(column, origins))
         : [];
 
-    private static IEnumerable<Finding> CheckMeasure(Column column, FigureOrigins origins)
+    private static IEnumerable<Finding> CheckColumn(NoisedColumn column, FigureOrigins origins)
     {
         var decimals = FileRounding.DecimalsByRule(column.Measure);
-        for (var rule = 0; rule < column.Measure.Rules.Count; rule++)
-        {
-            if (column.Measure.Rules[rule] is NoiseRule.FromMechanism { Mechanism: { Adjusted: false } mechanism } && decimals[rule] is { } most
-                && (FarOutside(column, rule, mechanism, origins) ?? BelowUnit(column, rule, mechanism, most, origins)) is { } finding)
-                yield return finding;
-        }
+        return column.OwnNoise.Select(own => decimals[own.Rule] is { } most ? FarOutside(column, own.Rule, own.Mechanism, origins) ?? BelowUnit(column, own.Rule, own.Mechanism, most, origins) : null)
+            .OfType<Finding>();
     }
 
-    private static Finding? BelowUnit(Column column, int rule, Mechanism mechanism, byte decimals, FigureOrigins origins)
+    private static Finding? BelowUnit(NoisedColumn column, int rule, Mechanism mechanism, byte decimals, FigureOrigins origins)
     {
         if (!FileRounding.IsContinuous(mechanism.Law) || FileRounding.Step(mechanism, column.Measure, decimals) is not { } step)
             return null;
@@ -38,7 +34,7 @@ internal sealed class LawUnitCheck : IReviewCheck
     }
 
     /// <summary>The denominators need not be those of the records: means are given room for as much again on both sides.</summary>
-    private static Finding? FarOutside(Column column, int rule, Mechanism mechanism, FigureOrigins origins)
+    private static Finding? FarOutside(NoisedColumn column, int rule, Mechanism mechanism, FigureOrigins origins)
     {
         if (column.Measure.Kind != MeasureKind.Mean || mechanism.Clipped is not { } clipped)
             return null;
@@ -47,19 +43,19 @@ internal sealed class LawUnitCheck : IReviewCheck
         return chance < Unlikely ? FarOutside(column, column.Rows(rule).First(), mechanism, clipped) : null;
     }
 
-    private static double ChanceToReach(Column column, int row, PossibleValues room, FigureOrigins origins)
+    private static double ChanceToReach(NoisedColumn column, int row, PossibleValues room, FigureOrigins origins)
     {
         var value = column.ValueAt(row);
         return value >= room.Lowest && value <= room.Highest ? 1 : origins.Of(column.At(row)).Error?.Error.ChanceToReach(value, room) ?? 1;
     }
 
-    private static Finding BelowUnit(Column column, Mechanism mechanism, double step) => new(
+    private static Finding BelowUnit(NoisedColumn column, Mechanism mechanism, double step) => new(
         FindingLevel.Caution, "noise-below-unit", FindingOwner.Noise, mechanism.At,
         $"The noise of \"{mechanism.Id}\" is smaller than {BudgetText.Plain(step)} for the most part, but column \"{column.Measure.Column}\" of table \"{column.Table.Id}\" has \"multiplier\": {BudgetText.Plain(column.Measure.Multiplier)} and its digits move in steps of {BudgetText.Plain(step)}.",
         "if the law is given in the CSV's unit, the margins are too small by that factor.",
         $"a law is given in the figure's unit, after the multiplier: if the noise was added to the CSV's numbers, {LargerBy(column.Measure)}; if the values were rounded after the noise, write \"afterwards\": [ {{ \"roundTo\": {BudgetText.Plain(step)} }} ].");
 
-    private static Finding FarOutside(Column column, int row, Mechanism mechanism, ClippedTo clipped)
+    private static Finding FarOutside(NoisedColumn column, int row, Mechanism mechanism, ClippedTo clipped)
     {
         var (measure, address) = (column.Measure, FigureAddress.Canonical(column.Table, column.Measure, row));
         return new Finding(
@@ -73,13 +69,4 @@ internal sealed class LawUnitCheck : IReviewCheck
     }
 
     private static string LargerBy(Measure measure) => $"write the numbers of the law, of \"sensitivity\" and of \"clipped\" {BudgetText.Plain(measure.Multiplier)} times as large";
-
-    private sealed record Column(Table Table, int TableIndex, Measure Measure, int Index)
-    {
-        public IEnumerable<int> Rows(int rule) => Enumerable.Range(0, Measure.RuleOf.Length).Where(row => Measure.RuleOf[row] == rule && Measure.HasNumber(row));
-
-        public FigureRef At(int row) => new(TableIndex, Index, row);
-
-        public double ValueAt(int row) => Measure.ValueAt(row).Times(Measure.Multiplier).ToDouble();
-    }
 }
