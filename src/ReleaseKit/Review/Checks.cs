@@ -33,6 +33,8 @@ public static class Checks
         new MultiplierCheck(),
         new LawUnitCheck(),
         new ConfidentialColumnCheck(),
+        new DenominatorCheck(),
+        new ConfidentialCountCheck(),
         new DeltaCheck(),
         new BeyondNoiseCheck(),
         new TotalGapCheck(),

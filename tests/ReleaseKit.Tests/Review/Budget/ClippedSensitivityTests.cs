@@ -176,6 +176,24 @@ public sealed class ClippedSensitivityTests
         folder.HasNo("denominator-missing");
     }
 
+    [Fact]
+    public void Denominator_from_the_records_that_is_called_public_is_a_stop()
+    {
+        using var folder = Folder("\"l1\": 0.4").Edit("release.json", "\"lamps\": { \"from\": \"public\" }", "\"lamps\": { \"from\": \"confidential\" }");
+        var text = folder.Text("denominator-not-public");
+        Assert.StartsWith("Stop mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains("\"lamps-lit\" calls the denominator \"lamps\" public, but table \"lamps\" says that this column is \"from\": \"confidential\".", text, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("\"from\": \"published\"")]
+    [InlineData("\"from\": \"confidential\", \"mechanism\": \"lamps-broken\"")]
+    public void Denominator_that_is_noised_itself_passes(string from)
+    {
+        using var folder = Folder("\"l1\": 0.4").Edit("release.json", "\"lamps\": { \"from\": \"public\" }", $"\"lamps\": {{ {from} }}");
+        folder.HasNo("denominator-not-public");
+    }
+
     private static TestFolder Replaced(string sensitivity, string clipped) => Folder(sensitivity, clipped).Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace);
 
     private static TestFolder Periods(string sensitivity) => Folder(sensitivity)
