@@ -19,14 +19,17 @@ internal sealed class ClippedSensitivityCheck : IReviewCheck
     private static Finding? CheckMechanism(MechanismSpending spending, Release release, NoiseAccount account)
     {
         var measures = spending.Cells.Measures.Select(at => (Table: release.Tables[at.Table], Measure: release.Tables[at.Table].Measures[at.Measure])).ToList();
-        if (measures.Find(pair => pair.Measure.Kind == MeasureKind.Mean) is { Table: { } table, Measure: { } mean } && LacksDenominator(spending.Mechanism))
+        if (LacksDenominator(spending.Mechanism) && measures.Find(pair => pair.Measure.Kind == MeasureKind.Mean && !IsBounded(spending.Mechanism, pair.Measure)) is { Table: { } table, Measure: { } mean })
             return NoDenominator(spending.Mechanism, table, mean);
         return measures.Select(pair => CheckMeasure(spending.Mechanism, pair.Table, pair.Measure, account)).FirstOrDefault(finding => finding is not null);
     }
 
-    // A denominator that is there and wrong has been reported. In one cell no mean moves farther than its contributions lie apart.
-    private static bool LacksDenominator(Mechanism mechanism) => mechanism is { DenominatorColumn: null, Law: not LawName.Declared } && !mechanism.KeyPlaces.ContainsKey("denominator")
-        && !(mechanism is { Clipped: { } clipped, Sensitivity: { CellsPerUnit: not null, PerCell: { } most } } && most >= Math.Max(clipped.Outermost, clipped.To - clipped.From) * (1 - Slack));
+    // A denominator that is there and wrong has been reported.
+    private static bool LacksDenominator(Mechanism mechanism) => mechanism is { DenominatorColumn: null, Law: not LawName.Declared } && !mechanism.KeyPlaces.ContainsKey("denominator");
+
+    /// <summary>Whether a cell is said to move as far as a mean of such contributions can, whatever the denominator is.</summary>
+    private static bool IsBounded(Mechanism mechanism, Measure mean) => mechanism.Sensitivity is { CellsPerUnit: not null, PerCell: { } most }
+        && (mechanism.Clipped is { } clipped ? Math.Max(clipped.Outermost, clipped.To - clipped.From) : mean.Highest - mean.Lowest) * (1 - Slack) <= most;
 
     private static Finding? CheckMeasure(Mechanism mechanism, Table table, Measure measure, NoiseAccount account)
     {
@@ -59,11 +62,12 @@ internal sealed class ClippedSensitivityCheck : IReviewCheck
     private static Finding NoDenominator(Mechanism mechanism, Table table, Measure mean)
     {
         var column = table.SideColumns.FirstOrDefault(side => side.From == SideColumnOrigin.Public && mechanism.Parameters.Values.All(parameter => parameter.Column != side.Column))?.Column;
+        var isOpen = mechanism is { Clipped: null, Sensitivity: { CellsPerUnit: not null, PerCell: not null } };
         return new(
-            FindingLevel.Stop, "denominator-missing", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
+            isOpen ? FindingLevel.Caution : FindingLevel.Stop, "denominator-missing", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "sensitivity"),
             $"\"{mechanism.Id}\" gives {Given(mechanism.Sensitivity)} for the means of column \"{mean.Column}\" in table \"{table.Id}\" and does not say where their denominator is known from.",
             "without a public denominator a mean is a noised sum over a noised count: both spend, and no number bounds what one unit moves.",
-            $"if the denominators are public, add \"denominator\": {{ \"public\": \"{column ?? "COLUMN"}\" }}{(column is null ? $" and declare the column in table \"{table.Id}\": \"columns\": {{ \"COLUMN\": {{ \"from\": \"public\" }} }}" : "")}; else publish the sum and the count, each with a mechanism of its own.");
+            $"if the denominators are public, add \"denominator\": {{ \"public\": \"{column ?? "COLUMN"}\" }}{(column is null ? $" and declare the column in table \"{table.Id}\": \"columns\": {{ \"COLUMN\": {{ \"from\": \"public\" }} }}" : "")}; {(isOpen ? $"if no contribution is above {BudgetText.Plain(mechanism.Sensitivity.PerCell!.Value)}, add \"clipped\": {{ \"from\": 0, \"to\": {BudgetText.Plain(mechanism.Sensitivity.PerCell.Value)} }}; " : "")}else publish the sum and the count, each with a mechanism of its own.");
     }
 
     private static string Given(Sensitivity sensitivity) => sensitivity switch

@@ -13,9 +13,9 @@ internal sealed class ConfidentialCountCheck : IReviewCheck
     /// <summary>Fewer rows can be alike for other reasons.</summary>
     private const int LeastRows = 8;
 
-    // Of noise alone the mean square is seldom three times the variance; a column that has it while the figures vary far more goes with them.
+    // Of noise alone the mean square is seldom three times the variance; a column that is so near figures which vary far more goes with them.
     private const double LargestDistance = 3;
-    private const double LeastSpread = 10;
+    private const double LeastSpread = 5;
 
     public IEnumerable<Finding> Check(ReviewSubject subject) => subject is { Release: { Noise: { Neighbouring: Neighbouring.AddOrRemove } account } release, Origins: { } origins }
         ? NoisedColumn.Of(release).Where(column => column.Measure.Kind == MeasureKind.Count && BudgetText.IsUnitOfPrivacy(column.Measure.Unit, account))
@@ -30,8 +30,8 @@ internal sealed class ConfidentialCountCheck : IReviewCheck
         if (cells.Count < LeastRows || !cells.TrueForAll(cell => double.IsInteger(cell.Number) && cell.Variance > 0))
             return false;
         var mean = cells.Average(cell => cell.Value);
-        return cells.Average(cell => Math.Pow(cell.Value - cell.Number, 2) / cell.Variance!.Value) <= LargestDistance
-            && cells.Average(cell => Math.Pow(cell.Value - mean, 2) / cell.Variance!.Value) >= LeastSpread;
+        var distance = cells.Average(cell => Math.Pow(cell.Value - cell.Number, 2) / cell.Variance!.Value);
+        return distance <= LargestDistance && cells.Average(cell => Math.Pow(cell.Value - mean, 2) / cell.Variance!.Value) >= LeastSpread * Math.Max(1, distance);
     }
 
     private static Finding Exact(SideColumn side, NoisedColumn column, NoiseAccount account) => new(

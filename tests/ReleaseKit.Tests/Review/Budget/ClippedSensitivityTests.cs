@@ -159,7 +159,20 @@ public sealed class ClippedSensitivityTests
     public void Cells_of_a_mean_without_a_denominator_are_a_stop()
     {
         using var folder = Folder("\"cellsPerUnit\": 1, \"perCell\": 0.4", rest: "");
+        Assert.StartsWith("Stop mechanisms.json:7:", folder.Text("denominator-missing"), StringComparison.Ordinal);
         Assert.Contains("gives a \"perCell\" for the means of column \"lit\"", folder.Text("denominator-missing"), StringComparison.Ordinal);
+    }
+
+    // Contributions of at most 0.4 hours move no mean farther: that, or bounds of the mean itself, settles it.
+    [Fact]
+    public void Cells_of_a_mean_without_a_denominator_and_without_clipping_are_a_caution()
+    {
+        using var folder = Folder("\"cellsPerUnit\": 1, \"perCell\": 0.4", rest: "").Edit("mechanisms.json", "\"clipped\": { \"from\": 0, \"to\": 20 }, ", "");
+        var text = folder.Text("denominator-missing");
+        Assert.StartsWith("Caution mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains("if no contribution is above 0.4, add \"clipped\": { \"from\": 0, \"to\": 0.4 };", text, StringComparison.Ordinal);
+        folder.Edit("release.json", "\"decimals\": 2,", "\"decimals\": 2, \"lowest\": 0, \"highest\": 0.4,");
+        folder.HasNo("denominator-missing");
     }
 
     [Fact]
