@@ -2,61 +2,43 @@ using ReleaseKit.Appraisal;
 
 namespace ReleaseKit.Wording;
 
-/// <summary>What a number in a writer's words is to the figure that they cite.</summary>
-internal enum SaidAs
+/// <summary>A number in a writer's words, compared with the figure that the words cite.</summary>
+/// <param name="Number">As it stands there.</param>
+/// <param name="As">What it is to the figure.</param>
+/// <param name="IsSure">Whether it can only be meant for the figure: in digits, and none of those that the figure's own table gives it.</param>
+internal sealed record SaidNumber(WrittenNumber Number, SaidAs As, bool IsSure)
 {
-    /// <summary>Another number.</summary>
-    Other,
+    public bool IsRounded => As is SaidAs.Rounded or SaidAs.RoundedFar;
 
-    /// <summary>The figure, rounded by the writer: the figure itself must stand beside it.</summary>
-    Rounded,
+    /// <summary>Whether it says the figure in digits, so that numbers in letters beside it are about something else.</summary>
+    public bool SaysTheFigure => !Number.IsInLetters && !Number.IsMargin && As is SaidAs.Rounded or SaidAs.AsIs;
 
-    /// <summary>The figure as published or printed, its margin, or an end of its range.</summary>
-    AsIs,
-}
+    public static SaidNumber Of(WrittenNumber number, AppraisedFigure figure, FigureScale scale, bool isSure) =>
+        new(number, scale.Readings(number).Select(read => Compare(read, figure)).Max(), isSure);
 
-/// <summary>Compares the numbers of a writer's words with the figure that the words cite.</summary>
-internal static class SaidNumber
-{
-    /// <summary>A rounding that moves a figure further than this share of it says another thing, unless it stays within its range (own rule: common practice, no source).</summary>
-    private const decimal MostRounded = 0.05m;
-
-    public static SaidAs Of(WrittenNumber number, AppraisedFigure figure)
+    private static SaidAs Compare(WrittenNumber number, AppraisedFigure figure)
     {
         if (number.Value is not { } value)
             return SaidAs.Other;
-        if (Margins(figure).Contains(value))
-            return SaidAs.AsIs;
-        if (number.IsMargin || !figure.HasNumber)
-            return SaidAs.Other;
-        return Values(figure).Contains(value) ? SaidAs.AsIs : IsRounded(value, figure) ? SaidAs.Rounded : SaidAs.Other;
+        if (number.IsMargin)
+            return Margins(figure).Contains(value) ? SaidAs.AsIs : IsMarginRoundedUp(value, number.Step, figure) ? SaidAs.Rounded : SaidAs.Other;
+        if (!figure.HasNumber || Values(figure).Contains(value))
+            return figure.HasNumber ? SaidAs.AsIs : SaidAs.Other;
+        var said = figure.Value.IsNegative && value > 0 ? Size(-value, number.Step, figure) : WriterRounding.Of(value, number.Step, figure);
+        return said < SaidAs.Beside && Margins(figure).Concat(Ends(figure)).Contains(value) ? SaidAs.Beside : said;
     }
 
-    private static bool IsRounded(decimal value, AppraisedFigure figure)
-    {
-        var published = figure.Value.ToDecimal() * figure.Measure.PrintFactor;
-        var moved = Math.Abs(value - published);
-        return moved <= StepOf(value) / 2 && (moved <= MostRounded * Math.Abs(published) || IsWithinRange(value, figure));
-    }
+    /// <summary>"A loss of 4.62" for −4.62: the sign is in the words, and the figure with its sign stands behind them.</summary>
+    private static SaidAs Size(decimal value, decimal step, AppraisedFigure figure) =>
+        Values(figure).Contains(value) ? SaidAs.Rounded : WriterRounding.Of(value, step, figure);
 
-    private static bool IsWithinRange(decimal value, AppraisedFigure figure) =>
-        figure.Main is { Printed: var range } && value >= range.Low.ToDecimal() && value <= range.High.ToDecimal();
-
-    /// <summary>To what a number as written is rounded: its last decimal, or the zeros at its end.</summary>
-    private static decimal StepOf(decimal value)
-    {
-        var step = 1m;
-        for (var decimals = value.Scale; decimals > 0; decimals--)
-            step /= 10;
-        while (step >= 1 && value != 0 && value % (step * 10) == 0)
-            step *= 10;
-        return step;
-    }
+    private static bool IsMarginRoundedUp(decimal value, decimal step, AppraisedFigure figure) => figure.Main is { Printed: { IsUneven: false } range }
+        && value - range.Margin.ToDecimal() is var more && more >= 0 && more <= step / 2;
 
     private static IEnumerable<decimal> Values(AppraisedFigure figure)
     {
         var published = figure.Value.ToDecimal();
-        return [published, published * figure.Measure.PrintFactor, figure.Printed.ToDecimal(), .. Ends(figure)];
+        return [published, published * figure.Measure.PrintFactor, figure.Printed.ToDecimal()];
     }
 
     private static IEnumerable<decimal> Ends(AppraisedFigure figure) =>

@@ -25,4 +25,7 @@ public sealed class WordingException : Exception
 
     public static WordingException UnusedFill(string tag, string key, string hole) =>
         new($"wording/{tag}  \"{key}\" leaves out {{{hole}}}, so the sentence would lose it. Do: put {{{hole}}} into the text.");
+
+    public static WordingException NoNumberWord(string tag, string key, string entry) =>
+        new($"wording/{tag}  \"{key}\" holds \"{entry}\", which gives no word a whole number. Do: write word=number, with | between them: ten=10|hundred=100.");
 }

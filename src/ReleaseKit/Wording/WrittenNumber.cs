@@ -1,7 +1,27 @@
 namespace ReleaseKit.Wording;
 
 /// <summary>A number that stands in a text.</summary>
-/// <param name="Text">As it is written, with its sign: "1,500", "minus 7", "± 36".</param>
+/// <param name="Text">As it is written, with its sign and its scale: "1,500", "minus 7", "± 36", "1.2 million", "twenty-five".</param>
 /// <param name="Value">What it says; null if it is not written as the language writes numbers ("1.422,5").</param>
-/// <param name="IsMargin">Whether a ± stands before it.</param>
-public readonly record struct WrittenNumber(string Text, decimal? Value, bool IsMargin);
+/// <param name="IsMargin">Whether a ± stands before it, or the words for it.</param>
+public readonly record struct WrittenNumber(string Text, decimal? Value, bool IsMargin)
+{
+    /// <summary>To what it is rounded: its last decimal, or the zeros at its end; 100,000 for 1.2 million.</summary>
+    public decimal Step { get; init; } = 1;
+
+    /// <summary>The word of scale behind its digits, "million"; empty if there is none.</summary>
+    public string ScaleWord { get; init; } = "";
+
+    /// <summary>What the word of scale multiplies by.</summary>
+    public decimal Scale { get; init; } = 1;
+
+    /// <summary>Whether it is written in letters alone.</summary>
+    public bool IsInLetters { get; init; }
+
+    /// <summary>Where it begins in the text, and where it has ended.</summary>
+    public int Start { get; init; }
+    public int End { get; init; }
+
+    /// <summary>"One", "a": an article as often as a number.</summary>
+    public bool IsArticle => IsInLetters && Value == 1;
+}

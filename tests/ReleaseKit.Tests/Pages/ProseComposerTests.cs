@@ -1,3 +1,4 @@
+using System.Text.RegularExpressions;
 using ReleaseKit.Pages.Prose;
 using ReleaseKit.Releases;
 using Xunit;
@@ -34,13 +35,24 @@ public sealed class ProseComposerTests
 
     [Fact]
     public void Citation_in_own_words_keeps_them_and_gives_the_margin_at_the_first_mention_only() => Assert.Equal(
-        $"<p><a href=\"{HrefOfAll}\" class=\"cite\">Over a thousand</a> <span class=\"cite-margin\">(±\u00A019)</span> and <a href=\"{HrefOfAll}\" class=\"cite\">again</a></p>\n",
-        Html("[Over a thousand](figure:all-late) and [again](<figure:late/late?district=All&ward=All>)"));
+        $"<p><a href=\"{HrefOfAll}\" class=\"cite\">So many</a> <span class=\"cite-margin\">(±\u00A019)</span> and <a href=\"{HrefOfAll}\" class=\"cite\">again</a></p>\n",
+        Html("[So many](figure:all-late) and [again](<figure:late/late?district=All&ward=All>)"));
 
     [Fact]
     public void Citation_that_rounds_the_figure_has_the_figure_and_its_margin_behind_it() => Assert.Contains(
         "class=\"cite\">more than 1,200</a> <span class=\"cite-margin\">(<data value=\"1240\">1,240</data>&#160;±\u00A019)</span>",
         Html("[more than 1,200](figure:all-late)"), StringComparison.Ordinal);
+
+    [Theory]
+    [InlineData("1.2 thousand")]
+    [InlineData("over a thousand")]
+    [InlineData("about 1,000")]
+    public void Citation_that_rounds_the_figure_has_it_behind_at_every_mention(string words) => Assert.Equal(
+        3, Regex.Count(Html($"[{words}](figure:all-late), [{words}](figure:all-late), [value](figure:all-late)"), "<data value=\"1240\">1,240</data>"));
+
+    [Fact]
+    public void Size_of_a_figure_below_zero_has_the_sign_behind_it() =>
+        Assert.Contains("a lack of 4</a> <span class=\"cite-margin\">(<data value=\"-4\">minus\u00A04</data>", Html($"[a lack of 4](<{Mill}>)"), StringComparison.Ordinal);
 
     [Fact]
     public void Citation_in_own_words_after_a_generated_one_gives_no_margin_again() =>

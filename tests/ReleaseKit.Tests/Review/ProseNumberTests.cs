@@ -26,13 +26,17 @@ public sealed class ProseNumberTests
     [InlineData("minus&nbsp;1 lamp")]
     [InlineData("−1")]
     [InlineData("-1")]
+    [InlineData("–1")]
+    [InlineData("1 below zero")]
+    [InlineData("1 lamp below 0")]
+    [InlineData("a lack of 1")]
     public void Figure_below_zero_is_written_with_its_sign(string words) => Passes($"[{words}](figure:lamps/broken?street=Weir%20Lane)");
 
     [Fact]
     public void Number_may_be_rounded_as_the_writer_rounds() => Passes("[about 30 lamps](figure:lamps/lit?street=Kiln%20Row)");
 
     [Theory]
-    [InlineData("about 100 lamps", "100")]
+    [InlineData("about 200 lamps", "200")]
     [InlineData("more than 65", "65")]
     [InlineData("65 lamps", "65")]
     [InlineData("*6*5 lamps", "65")]
@@ -56,13 +60,17 @@ public sealed class ProseNumberTests
     }
 
     [Fact]
+    public void Number_with_marks_of_another_language_is_told_those_of_its_own() => Broken.Stops("prose-disagrees", Prose, "[60,0", "or 60 in the words, with the marks of 1,234.5",
+        folder => folder.Edit(Prose, Citation, "[60,0 lamps](figure:lamps/lit?street=All)"));
+
+    [Fact]
     public void Every_number_that_disagrees_is_named() => Broken.Stops("prose-disagrees", Prose, "[65", "figure:total",
         folder => folder.Edit("release.json", "\"headlines\"", "\"short\": { \"total\": \"lamps/lit?street=All\" }, \"headlines\"")
             .Edit(Prose, Citation, "[65 of 2031 and 60](figure:total)"));
 
     [Theory]
-    [InlineData("1")]
     [InlineData("4")]
+    [InlineData("12")]
     public void Sign_that_is_missing_is_a_stop(string words) => Broken.Stops("prose-disagrees", Prose, $"[{words}]", "or minus 1 in the words",
         folder => folder.Edit(Prose, Citation, $"[{words}](<figure:lamps/broken?street=Weir Lane>)"));
 

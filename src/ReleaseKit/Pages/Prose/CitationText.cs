@@ -5,7 +5,7 @@ using ReleaseKit.Wording;
 namespace ReleaseKit.Pages.Prose;
 
 /// <summary>The generated texts of citations, as HTML. Numbers in running text stand whole, without light digits.</summary>
-internal sealed class CitationText(ILanguage language)
+internal sealed class CitationText(Release release, ILanguage language)
 {
     /// <summary>The text of a form that is generated, linked to the figure.</summary>
     /// <param name="form">What is asked for.</param>
@@ -16,10 +16,15 @@ internal sealed class CitationText(ILanguage language)
         ? Reading(figure, href)
         : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, place.About)}{InEach(form, figure, place)}</a>";
 
-    /// <summary>What follows the writer's own words: " (± 19)", or " (1,240 ± 19)" where they round the figure; nothing for a figure that needs neither.</summary>
-    public string After(string words, AppraisedFigure figure)
+    /// <summary>
+    /// What follows the writer's own words: " (1,240 ± 19)" wherever they round the figure, else " (± 19)" at its first mention; nothing for a figure that
+    /// needs neither.
+    /// </summary>
+    public string After(string words, AppraisedFigure figure, bool isFirst)
     {
-        var isRounded = language.NumbersIn(words).Any(number => SaidNumber.Of(number, figure) is SaidAs.Rounded);
+        var isRounded = SaidNumbers.In(words, figure, release, language).Any(number => number.IsRounded);
+        if (!isRounded && !isFirst)
+            return "";
         var margin = figure.Main is { } range ? HtmlText.Encode(language.Margin(range.Printed)) : "";
         var text = (isRounded, margin) switch
         {

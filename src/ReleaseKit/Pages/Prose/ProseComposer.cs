@@ -16,7 +16,7 @@ namespace ReleaseKit.Pages.Prose;
 /// <param name="deeper">By how many levels headings go down: 0 on a page of its own, 1 where the prose is woven into another.</param>
 public sealed class ProseComposer(SiteContext context, string page, int deeper)
 {
-    private readonly CitationText citations = new(context.Language);
+    private readonly CitationText citations = new(context.Appraised.Release, context.Language);
     private readonly HashSet<string> mentioned = new(StringComparer.Ordinal);
     private readonly HeadingIds ids = new("main");
 
@@ -104,8 +104,8 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
         var figure = context.Appraised.FigureAt(address);
         link.Url = Link.From(page, context.Pages.Of(figure.Ref));
         link.GetAttributes().AddClass("cite");
-        if (mentioned.Add(figure.Address))
-            link.InsertAfter(new HtmlInline(citations.After(words, figure)));
+        if (citations.After(words, figure, mentioned.Add(figure.Address)) is { Length: > 0 } after)
+            link.InsertAfter(new HtmlInline(after));
     }
 
     private HtmlInline Cited(CitationForm form, string address, Inline place)

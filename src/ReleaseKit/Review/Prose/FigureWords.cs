@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Reading.Keys;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Review.Prose;
@@ -6,6 +7,9 @@ namespace ReleaseKit.Review.Prose;
 /// <summary>A figure as messages about prose name it.</summary>
 internal sealed record FigureWords(AppraisedFigure Figure, ILanguage Language)
 {
+    /// <summary>"arrears/in_arrears?ward=All is 1,422 (± 36)", with its range.</summary>
+    public string NameIs => $"{KeyProblems.Cut(Figure.Address)} {Is}";
+
     /// <summary>"is 1,422 (± 36)", with its range.</summary>
     public string Is => Figure switch
     {
@@ -15,6 +19,9 @@ internal sealed record FigureWords(AppraisedFigure Figure, ILanguage Language)
     };
 
     public string Number => Plain(Language.NumberInProse(Figure.Printed));
+
+    /// <summary>A number with every mark that the language writes in numbers: "1,234.5".</summary>
+    public string Marks => Plain(Language.NumberInProse(new(12345, 1)));
 
     private static string Plain(string text) => text.Replace(Numerals.NoBreak, ' ');
 }

@@ -8,8 +8,8 @@ using ReleaseKit.Wording;
 namespace ReleaseKit.Review.Prose;
 
 /// <summary>
-/// A number in the writer's own words of a citation is a claim about the figure: it must be the figure as printed or as published, or rounded,
-/// its printed margin, or an end of its printed range.
+/// A number in the writer's own words of a citation is a claim about the figure, unless the figure's own table has it: it must be the figure as printed
+/// or as published, or rounded as the writer rounds, its printed margin, or an end of its printed range.
 /// </summary>
 internal sealed class ProseNumberCheck : IReviewCheck
 {
@@ -19,22 +19,29 @@ internal sealed class ProseNumberCheck : IReviewCheck
 
     private static IEnumerable<Finding> CheckPage(ProsePage page, IAppraisedRelease appraised, ILanguage language) => ProseDocument.Parse(page.Markdown)
         .Descendants<LinkInline>()
-        .Select(link => CheckLink(link, page, appraised, language))
-        .OfType<Finding>();
+        .SelectMany(link => CheckLink(link, page, appraised, language));
 
-    private static Finding? CheckLink(LinkInline link, ProsePage page, IAppraisedRelease appraised, ILanguage language)
+    private static IEnumerable<Finding> CheckLink(LinkInline link, ProsePage page, IAppraisedRelease appraised, ILanguage language)
     {
         var words = ProseDocument.PlainText(link);
         if (link.IsImage || ProseLink.FigureIn(link.Url) is not { } address || CitationForms.Of(words, language) != CitationForm.OwnWords)
-            return null;
-        var numbers = language.NumbersIn(words);
-        if (numbers.Count == 0 || FigureAt(address, appraised) is not { } figure)
-            return null;
-        var wrong = numbers.Where(number => SaidNumber.Of(number, figure) is SaidAs.Other).Select(number => number.Text).ToList();
-        return wrong.Count == 0
-            ? null
-            : ProseProblems.Disagrees(new(page.File, link.Line + 1, link.Column + 1), wrong, new(figure, language), link.Url!, FindingOwner.Writer);
+            return [];
+        return FigureAt(address, appraised) is { } figure
+            ? Compare(SaidNumbers.In(words, figure, appraised.Release, language), new(page.File, link.Line + 1, link.Column + 1), new(figure, language), link.Url!)
+            : [];
     }
+
+    private static IEnumerable<Finding> Compare(IReadOnlyList<SaidNumber> said, Place at, FigureWords figure, string destination)
+    {
+        if (Written(said, number => number is { As: SaidAs.Other, IsSure: true }) is { Count: > 0 } wrong)
+            yield return ProseProblems.Disagrees(at, wrong, said.Any(number => number.Number.Value is null), figure, destination, FindingOwner.Writer);
+        if (Written(said, number => number is { As: SaidAs.Other, IsSure: false }) is { Count: > 0 } doubtful)
+            yield return ProseProblems.MayDisagree(at, doubtful, figure, destination, FindingOwner.Writer);
+        if (Written(said, number => number.As is SaidAs.RoundedFar) is { Count: > 0 } far)
+            yield return ProseProblems.RoundedFar(at, far, figure, destination, FindingOwner.Writer);
+    }
+
+    private static List<string> Written(IReadOnlyList<SaidNumber> said, Func<SaidNumber, bool> which) => [.. said.Where(which).Select(number => number.Number.Text)];
 
     /// <summary>Null where the address is broken, which has been reported.</summary>
     private static AppraisedFigure? FigureAt(string address, IAppraisedRelease appraised)

@@ -54,14 +54,40 @@ internal static class ProseProblems
         "it is not clear what is to be printed.",
         "write one of value, margin, value and margin, range, reading between the brackets, or words of your own.");
 
-    public static Finding Disagrees(Place at, IReadOnlyList<string> written, FigureWords figure, string destination, FindingOwner owner) => new(
+    public static Finding Disagrees(Place at, IReadOnlyList<string> written, bool isUnread, FigureWords figure, string destination, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-disagrees", owner, at,
-        $"The words of this citation say {string.Join(" and ", written.Select(number => $"\"{KeyProblems.Cut(number)}\""))}, but {KeyProblems.Cut(figure.Figure.Address)} {figure.Is}.",
+        $"The words of this citation say {Quoted(written)}, but {figure.NameIs}.",
         "the words would be printed as they stand, with the margin of another number behind them.",
-        $"write [value and margin]({(NeedsBrackets(destination) ? $"<{destination}>" : destination)}){(figure.Figure.HasNumber ? $", or {figure.Number} in the words" : "")}; a number that is not meant for this figure, such as a year, goes before or behind the link.")
+        $"write {Instead(figure, destination)}{(isUnread ? $", with the marks of {figure.Marks}" : "")}; {NotMeant}.")
     {
         Address = figure.Figure.Address,
     };
+
+    public static Finding MayDisagree(Place at, IReadOnlyList<string> written, FigureWords figure, string destination, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-may-disagree", owner, at,
+        $"The words of this citation hold {Quoted(written)}, and {figure.NameIs}.",
+        "a number within a citation reads as the figure, and cannot be told here from one that means something else.",
+        $"if the figure is meant, write {Instead(figure, destination)}; {NotMeant}, or waive prose-may-disagree in signoff.json and say why.")
+    {
+        Address = figure.Figure.Address,
+    };
+
+    public static Finding RoundedFar(Place at, IReadOnlyList<string> written, FigureWords figure, string destination, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-rounded-far", owner, at,
+        $"The words of this citation round to {Quoted(written)}, and {figure.NameIs}.",
+        "that moves the figure by more than 5 in 100, and out of its range; the figure will stand behind the words.",
+        $"round less: write {Instead(figure, destination)}, or waive prose-rounded-far in signoff.json and say why.")
+    {
+        Address = figure.Figure.Address,
+    };
+
+    private const string NotMeant = "a number that is not meant for this figure, such as a year, goes before or behind the link";
+
+    private static string Quoted(IReadOnlyList<string> written) => string.Join(" and ", written.Select(number => $"\"{KeyProblems.Cut(number)}\""));
+
+    /// <summary>What to paste, and the figure for the writer's own words.</summary>
+    private static string Instead(FigureWords figure, string destination) =>
+        $"[value and margin]({(NeedsBrackets(destination) ? $"<{destination}>" : destination)}){(figure.Figure.HasNumber ? $", or {figure.Number} in the words" : "")}";
 
     private static bool NeedsBrackets(string destination) => destination.Any(letter => char.IsWhiteSpace(letter) || letter is '(' or ')');
 
