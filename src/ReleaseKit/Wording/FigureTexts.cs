@@ -23,7 +23,7 @@ internal sealed partial class FigureTexts
         this.language = language;
         units = Units(figure, language);
         texts = [.. Labels(figure), .. Titles(figure), .. About(release), .. units];
-        named = [.. Named(figure)];
+        named = [.. Named(figure), .. Dates(), .. figure.Main is { } range ? new[] { Typed(language.Cases(range.Coverage, atLeast: false)) } : []];
     }
 
     /// <summary>The unit as the release writes it, in its forms.</summary>
@@ -75,6 +75,24 @@ internal sealed partial class FigureTexts
     /// <summary>A label behind the title of its column, or a form of it: "Ward 7", "aged 12".</summary>
     private IEnumerable<string> Named(AppraisedFigure figure) => figure.Table.Stub.Where(column => Of(column.Title).Length > 0)
         .Select(column => $@"{Typed(Of(column.Title))}\p{{L}}{{0,2}}\s+{Typed(column.LabelOf(figure.Row).In(language.Tag))}");
+
+    /// <summary>Days and months are no claims, whatever table they stand for: "31 December", "December 2031".</summary>
+    private IEnumerable<string> Dates()
+    {
+        const string Day = "#", Year = "##";
+        for (var number = 1; number <= 12; number++)
+        {
+            var month = language.Text($"date.month.{Numerals.Digits(number)}");
+            string[] written =
+            [
+                language.Text("date.day", ("day", Day), ("month", month), ("year", Year)),
+                language.Text("date.day", ("day", Day), ("month", month), ("year", "")).Trim(),
+                language.Text("period.month", ("month", month), ("year", Year)),
+            ];
+            foreach (var date in written)
+                yield return $"(?-i:{Typed(date).Replace(@"\#\#", @"\d{4}", StringComparison.Ordinal).Replace(@"\#", @"\d{1,2}", StringComparison.Ordinal)})";
+        }
+    }
 
     private IEnumerable<string> Titles(AppraisedFigure figure) =>
     [

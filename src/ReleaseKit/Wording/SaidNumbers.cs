@@ -46,8 +46,9 @@ internal static class SaidNumbers
         _ => null,
     };
 
+    /// <summary>"In each", "out of", perhaps behind a word for what is counted.</summary>
     private static bool IsOf(string between, ILanguage language) =>
-        language.Text("number.of").Split('|').Contains(Regex.Replace(between, @"\s+", " ").Trim(), StringComparer.OrdinalIgnoreCase);
+        Regex.IsMatch(between, $@"^(?:\s+\p{{L}}+)?\s+(?:{NumberWords.AnyOf(language.Text("number.of").Split('|'))})\s+$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
 
     private static WrittenNumber Ratio(WrittenNumber part, WrittenNumber whole, decimal inEach, string text) => part with
     {

@@ -52,6 +52,7 @@ public sealed class ProseNumberFormTests
     [InlineData("7%")]
     [InlineData("7 ± 0.61 in 100")]
     [InlineData("1 in 14")]
+    [InlineData("7 lamps in every 100")]
     [InlineData("one in fourteen")]
     public void Hundred_of_a_share_belongs_to_its_form(string words) => Assert.Empty(Found(New, words));
 
@@ -59,6 +60,8 @@ public sealed class ProseNumberFormTests
     [InlineData(Seven, "Ward 7")]
     [InlineData(Seven, "the 1,214 lamps of Ward 7 in 2031")]
     [InlineData(Seven, "1,214 (Table 1)")]
+    [InlineData(Seven, "1,214 on 30 June, and so on 31 December 2030")]
+    [InlineData(Seven, "1,214 ± 8, in 95 of 100 cases")]
     [InlineData(Seven, "1,214 in 12 streets")]
     [InlineData(Seven, "1,214 of 16–24 watts")]
     [InlineData(Seven, "1,214 of 16 to 24 watts")]
@@ -71,6 +74,8 @@ public sealed class ProseNumberFormTests
     [InlineData(Nine, "1.2 billion")]
     [InlineData(Nine, "999,999,999,999,999,999,999,999 billion billion")]
     [InlineData(Seven, "1 215 lamps")]
+    [InlineData(Seven, "13 may be lit")]
+    [InlineData(New, "95 of 100")]
     [InlineData(Seven, "1,214k")]
     [InlineData(Seven, "1,214 plus or minus 7")]
     [InlineData(Seven, "1.214,5")]
