@@ -50,7 +50,7 @@ public sealed class ProseNumberFormTests
     [InlineData("7 of every 100 lamps")]
     [InlineData("seven in a hundred")]
     [InlineData("7%")]
-    [InlineData("7 ± 0.61 in 100")]
+    [InlineData("7 ± 0.6 in 100")]
     [InlineData("1 in 14")]
     [InlineData("7 lamps in every 100")]
     [InlineData("one in fourteen")]
