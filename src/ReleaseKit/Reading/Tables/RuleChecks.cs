@@ -78,7 +78,10 @@ internal static class RuleChecks
                 log.Add(TableProblems.ScaleNotPositive(read.PlaceOf(row, side.Column), side.Column, key, FindingOwner.Noise));
             else if (!LawReader.IsInRange(key, number))
                 log.Add(MechanismProblems.ParameterOutOfRange(
-                    read.PlaceOf(row, side.Column), key, $"{number.ToString("R", System.Globalization.CultureInfo.InvariantCulture)} (column \"{side.Column}\")", FindingOwner.Noise) with { Column = side.Column });
+                    read.PlaceOf(row, side.Column), key, $"{number.ToString("R", System.Globalization.CultureInfo.InvariantCulture)} (column \"{side.Column}\")", FindingOwner.Noise) with
+                {
+                    Column = side.Column,
+                });
         }
     }
 
