@@ -14,15 +14,24 @@ internal static class SaidNumbers
     {
         if (language.NumbersIn(words).All(number => number.IsArticle))
             return [];
-        var own = new FigureTexts(figure, release, language);
         var scale = new FigureScale(figure, language);
-        var text = own.Without(words);
-        var said = Ratios(language.NumbersIn(text), text, figure, language)
-            .Where(number => !number.IsArticle)
-            .Select(number => SaidNumber.Of(number, figure, scale, !number.IsInLetters && !own.MayHold(number, text)))
-            .ToList();
+        var said = Compared(words, figure, scale, language);
+        if (said.Any(number => number.As < SaidAs.Rounded))
+        {
+            // Only now: what the table says itself takes much longer to leave out.
+            var own = new FigureTexts(figure, release, language);
+            var text = own.Without(words);
+            said = [.. Compared(text, figure, scale, language).Select(number => number with { IsSure = number.IsSure && !own.MayHold(number.Number, text) })];
+        }
         return said.Any(number => number.SaysTheFigure) ? [.. said.Where(number => !number.Number.IsInLetters)] : [.. Alone(said, words, language)];
     }
+
+    private static IReadOnlyList<SaidNumber> Compared(string text, AppraisedFigure figure, FigureScale scale, ILanguage language) =>
+    [
+        .. Ratios(language.NumbersIn(text), text, figure, language)
+            .Where(number => !number.IsArticle)
+            .Select(number => SaidNumber.Of(number, figure, scale, !number.IsInLetters)),
+    ];
 
     /// <summary>An end of the range that stands alone, or a margin that is not called so, reads as the figure.</summary>
     private static IEnumerable<SaidNumber> Alone(IReadOnlyList<SaidNumber> said, string words, ILanguage language) =>
