@@ -88,7 +88,7 @@ internal sealed class ClippedMoves
     private void TakeApart(ClippedTo clipped)
     {
         var (inPlace, several) = (Sum, levels.Where(level => level.Count > 1).ToList());
-        foreach (var exchange in new Exchange[] { new(clipped.Outermost, clipped.Outermost), new(clipped.To, clipped.From), new(clipped.From, clipped.To) })
+        foreach (var exchange in Exchange.OfOthers(clipped))
             Take([.. several.SelectMany(level => FromOneToEachOther(level, exchange)), [.. levels.SelectMany(level => SmallestApart(level, exchange))]]);
         if (several.Count > 0)
             SignedPerCell = Math.Max(SignedPerCell, clipped.Outermost / several.Min(level => level.Min(row => denominators[row])));
@@ -101,7 +101,8 @@ internal sealed class ClippedMoves
         var left = level.MaxBy(row => countedIn[row].Sum(cell => 1 / denominators[cell]));
         var leaving = countedIn[left];
         return level.Where(row => row != left).Select(row => countedIn[row])
-            .Select(entered => leaving.Union(entered).Select(cell => exchange.In(leaving.Contains(cell), entered.Contains(cell)) / denominators[cell]).ToArray());
+            .Select(entered => leaving.Concat(entered.Where(cell => !leaving.Contains(cell)))
+                .Select(cell => exchange.In(leaving.Contains(cell), entered.Contains(cell)) / denominators[cell]).ToArray());
     }
 
     private IEnumerable<double> SmallestApart(List<int> level, Exchange exchange)

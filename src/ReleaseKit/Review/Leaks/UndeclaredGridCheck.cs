@@ -83,7 +83,7 @@ internal sealed class UndeclaredGridCheck : IReviewCheck
         var (unit, step) = (BudgetText.Plain((double)(found.Step * found.Factor)), BudgetText.Plain((double)found.Step));
         return new Finding(
             chance < Unlikely ? FindingLevel.Stop : FindingLevel.Caution, "undeclared-rounding", FindingOwner.Noise, Place.OfCell(column.Table.File, found.Rows[0], column.Measure.Column),
-            $"All {found.Rows.Count} figures of {column.Table.Id}/{column.Measure.Column} with noise of \"{mechanism.Id}\"{(mechanism.Afterwards.Count > 0 ? " that no bound holds" : "")} are multiples of {unit}, but that noise moves in steps of {step} and \"afterwards\" names no rounding. The chance of that is {BudgetText.Chance(chance)} at most.",
+            $"All {found.Rows.Count} figures of {column.Table.Id}/{column.Measure.Column} with noise of \"{mechanism.Id}\"{(mechanism.Afterwards.Count > 0 ? " that no bound holds" : "")} are multiples of {unit}, but that noise moves in steps of {step} and \"afterwards\" names no rounding. The chance of that is {BudgetText.Chance(chance)}.",
             "a rounding that is not declared is not in the margins: they would be too small.",
             $"if the figures were rounded after the noise, write \"afterwards\": [ {{ \"roundTo\": {unit} }} ] in \"{mechanism.Id}\", or the smaller unit that was used{(FileRounding.IsContinuous(mechanism.Law) ? "" : $"; if the noise itself moves in such steps, write \"grid\": {unit}")}.")
         {
