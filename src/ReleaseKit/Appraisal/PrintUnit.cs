@@ -26,13 +26,6 @@ internal readonly record struct PrintUnit(int Exponent)
     /// <exception cref="OverflowException">It is infinite or beyond what can be printed.</exception>
     public static decimal Rounded(double number) => Rounded(number, Digits);
 
-    /// <summary>A number other than 0 to two significant digits.</summary>
-    public static decimal InTwoDigits(decimal number)
-    {
-        var unit = OfTwoDigits(Math.Abs(number), null);
-        return unit.Value(unit.Nearest(number));
-    }
-
     /// <summary>The end of a range, times a factor, with enough digits to tell on which side of a unit it lies.</summary>
     public decimal Rounded(double end, decimal factor)
     {

@@ -1,8 +1,9 @@
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Appraisal;
 
-/// <summary>Why the parts of a measure may not add up: what its totals are made of, and which figures were set to a bound. Empty for a measure that does not add up, as a mean.</summary>
+/// <summary>Why the parts of a measure may not add up: what its totals are made of, and which steps after the noise lean to one side. Empty for a measure that does not add up, as a mean.</summary>
 public sealed record TotalFacts
 {
     public static TotalFacts None { get; } = new();
@@ -16,7 +17,7 @@ public sealed record TotalFacts
     /// <summary>Whether some total that the release says is added up from parts is published without noise, and some of its parts with noise.</summary>
     public bool HasTotalsWithoutNoise { get; init; }
 
-    public IReadOnlyList<BoundOfFigures> Bounds { get; init; } = [];
+    public IReadOnlyList<StepOfFigures> Steps { get; init; } = [];
 }
 
 /// <summary>Totals of one level: the columns they are told apart by, as the file has them; none for the total of everything.</summary>
@@ -27,5 +28,5 @@ public sealed record TotalLevel(IReadOnlyList<StubColumn> By)
     public override int GetHashCode() => By.Aggregate(0, (code, column) => HashCode.Combine(code, column.Column));
 }
 
-/// <summary>A bound, in the figure's unit, to which numbers beyond it were set after the noise: below it or above it, in every row with noise or in some.</summary>
-public sealed record BoundOfFigures(double Bound, bool IsLower, bool IsEveryRow);
+/// <summary>A step after the noise whose errors do not cancel in sums: a bound, a threshold, rounding up or down; of every row with noise or of some.</summary>
+public sealed record StepOfFigures(AfterStep Step, bool IsEveryRow);

@@ -13,7 +13,7 @@ internal sealed class TotalFactsMaker(Table table, Measure measure)
             OwnNoise = Levels(rule => rule is NoiseRule.FromMechanism),
             Sums = Levels(rule => rule is NoiseRule.SumOver),
             HasTotalsWithoutNoise = table.Adds.Where(addition => addition.Measure == measure.Column).Any(addition => IsWithoutNoise(addition, hasNoise)),
-            Bounds = [.. Bounds().Distinct()],
+            Steps = [.. Steps()],
         }
         : TotalFacts.None;
 
@@ -39,14 +39,12 @@ internal sealed class TotalFactsMaker(Table table, Measure measure)
 
     private IEnumerable<int> Rows() => Enumerable.Range(0, table.RowCount);
 
-    private IEnumerable<BoundOfFigures> Bounds()
+    private IEnumerable<StepOfFigures> Steps()
     {
         var used = measure.Rules.Where((_, rule) => measure.RuleOf.AsSpan().Contains((byte)rule)).OfType<NoiseRule.FromMechanism>()
             .Select(rule => rule.Mechanism).Distinct().ToList();
-        foreach (var step in used.SelectMany(mechanism => mechanism.Afterwards).Distinct())
-            if (step is AfterStep.NotBelow or AfterStep.NotAbove)
-                yield return new(BoundOf(step), step is AfterStep.NotBelow, used.All(mechanism => mechanism.Afterwards.Contains(step)));
+        return used.SelectMany(mechanism => mechanism.Afterwards).Distinct()
+            .Where(step => step is AfterStep.NotBelow or AfterStep.NotAbove or AfterStep.ZeroBelow or AfterStep.RoundTo { How: RoundingHow.Up or RoundingHow.Down })
+            .Select(step => new StepOfFigures(step, used.All(mechanism => mechanism.Afterwards.Contains(step))));
     }
-
-    private static double BoundOf(AfterStep step) => step is AfterStep.NotBelow below ? below.Bound : ((AfterStep.NotAbove)step).Bound;
 }

@@ -4,7 +4,7 @@ using ReleaseKit.Wording;
 
 namespace ReleaseKit.Charts;
 
-/// <summary>A unit without its number, for axes and for the side of a large figure.</summary>
+/// <summary>A unit without its number, for boxheads and axes and for the side of a large figure.</summary>
 internal static class UnitWords
 {
     public static string Many(Measure measure, ILanguage language) => language.UnitOf(measure, new PublishedValue(2, 0));

@@ -1,4 +1,5 @@
 using ReleaseKit.Appraisal;
+using ReleaseKit.Noise.Errors;
 
 namespace ReleaseKit.Wording;
 
@@ -8,7 +9,7 @@ internal sealed class AddingSentences(Voice voice)
     public IEnumerable<string> Of(TableFacts facts)
     {
         var shown = facts.Measures.Where(measure => measure.Measure.Shown).ToList();
-        return [.. Noised(shown), .. WithoutNoise(shown), .. Bounds(shown)];
+        return [.. Noised(shown), .. WithoutNoise(shown), .. Steps(shown)];
     }
 
     private IEnumerable<string> Noised(List<MeasureFacts> shown)
@@ -50,12 +51,27 @@ internal sealed class AddingSentences(Voice voice)
             yield return voice.Say("facts.totals-without-noise", ("measures", Named(found)));
     }
 
-    private IEnumerable<string> Bounds(List<MeasureFacts> shown) => shown
-        .SelectMany(facts => facts.Totals.Bounds.Select(bound => (Facts: facts, Key: Key(bound), At: voice.Numerals.Plain(bound.Bound * facts.Measure.PrintFactor))))
+    private IEnumerable<string> Steps(List<MeasureFacts> shown) => shown
+        .SelectMany(facts => facts.Totals.Steps.Select(step => (Facts: facts, Key: Key(step), At: voice.Numerals.Plain(NumberOf(step.Step) * facts.Measure.PrintFactor))))
         .GroupBy(found => (found.Key, found.At), found => found.Facts)
         .Select(alike => voice.Say(alike.Key.Key, ("measures", Named(alike)), ("bound", alike.Key.At), ("as", alike.Key.At)));
 
-    private static string Key(BoundOfFigures bound) => (bound.IsLower ? "facts.lifted" : "facts.lowered") + (bound.IsEveryRow ? "" : ".some");
+    private static string Key(StepOfFigures step) => step.Step switch
+    {
+        AfterStep.NotBelow => "facts.lifted",
+        AfterStep.NotAbove => "facts.lowered",
+        AfterStep.ZeroBelow => "facts.zeroed",
+        AfterStep.RoundTo { How: RoundingHow.Up } => "facts.rounded-up",
+        _ => "facts.rounded-down",
+    } + (step.IsEveryRow ? "" : ".some");
+
+    private static double NumberOf(AfterStep step) => step switch
+    {
+        AfterStep.NotBelow below => below.Bound,
+        AfterStep.NotAbove above => above.Bound,
+        AfterStep.ZeroBelow zero => zero.Threshold,
+        _ => ((AfterStep.RoundTo)step).Unit,
+    };
 
     private string Named(IEnumerable<MeasureFacts> measures) => voice.List([.. measures.Select(measure => Quoted(measure.Measure.Title.In(voice.Tag)))]);
 

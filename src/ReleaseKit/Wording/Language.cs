@@ -44,9 +44,17 @@ public sealed class Language : ILanguage
 
     public string UnitOf(Measure measure, PublishedValue value) => voice.UnitOf(measure, value);
 
-    public string Margin(PrintedRange range) => range.IsUneven
-        ? texts.Fill("margin.uneven", ("down", voice.Numerals.InTable(range.MarginDown)), ("up", voice.Numerals.InTable(range.MarginUp)))
-        : texts.Fill("margin.even", ("margin", voice.Numerals.InTable(range.Margin)));
+    public string Margin(PrintedRange range)
+    {
+        var (down, up) = (("down", voice.Numerals.InTable(range.MarginDown)), ("up", voice.Numerals.InTable(range.MarginUp)));
+        return range switch
+        {
+            { IsUneven: false } => texts.Fill("margin.even", ("margin", voice.Numerals.InTable(range.Margin))),
+            { MarginDown.Unscaled: 0 } => texts.Fill("margin.upward", up),
+            { MarginUp.Unscaled: 0 } => texts.Fill("margin.downward", down),
+            _ => texts.Fill("margin.uneven", down, up),
+        };
+    }
 
     public string Share(Coverage coverage) => voice.Frequency("coverage.share", NaturalFrequency.Of(coverage));
 

@@ -24,21 +24,7 @@ internal sealed class ReadingWriter(Voice voice)
     {
         if (!figure.HasNumber)
             yield break;
-        var said = Said(figure);
-        var value = voice.WithUnit(said, figure.Measure);
-        var about = said.ToDecimal() == figure.Value.ToDecimal() * figure.Measure.PrintFactor ? "" : ".about";
-        yield return figure.Measure.Per is { } per
-            ? voice.Say($"reading.value.rate{about}", ("value", value), ("per", voice.Numerals.Plain(per)))
-            : voice.Say($"reading.value{about}", ("value", value));
-    }
-
-    /// <summary>The figure as printed; where the margin is so large that nothing would be left of it, two digits of its own.</summary>
-    private static PublishedValue Said(AppraisedFigure figure)
-    {
-        if (figure.Printed.Unscaled != 0 || figure.Value.Unscaled == 0)
-            return figure.Printed;
-        var value = figure.Value.ToDecimal() * figure.Measure.PrintFactor;
-        return PublishedValue.Shortest(PrintUnit.InTwoDigits(value));
+        yield return voice.Say(figure.IsRoundedForPrint ? "reading.value.about" : "reading.value", ("value", voice.WithUnit(figure.Printed, figure.Measure)));
     }
 
     /// <summary>What the range leaves out; a figure without noise can still be wrong.</summary>

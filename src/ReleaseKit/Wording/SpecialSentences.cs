@@ -35,6 +35,7 @@ internal sealed class SpecialSentences(Voice voice)
         return
         [
             .. UnseenParts(figure),
+            .. figure.Printed.Unscaled == 0 && first is not (SpecialCase.Zero or SpecialCase.BelowZero) ? [voice.Say("reading.zero")] : Nothing,
             .. threshold && first is not (SpecialCase.FromThreshold or SpecialCase.Zero) ? [Threshold(figure)] : Nothing,
             .. first is SpecialCase.Zero && figure.LeftAsItWas is not null ? [MostlyUnchanged(figure)] : Nothing,
             .. capped && first is not SpecialCase.Capped ? Capped(figure) : Nothing,
@@ -81,7 +82,7 @@ internal sealed class SpecialSentences(Voice voice)
             switch (step)
             {
                 case AfterStep.RoundTo round:
-                    yield return voice.Say("reading.rounded", ("unit", InPrint(figure, round.Unit)));
+                    yield return voice.Say("reading.rounded" + Direction(round.How), ("unit", InPrint(figure, round.Unit)));
                     break;
                 case AfterStep.NotBelow below when below.Bound == value:
                     yield return voice.Say("reading.set-to-bound.below", ("bound", InPrint(figure, value)), ("as", InPrint(figure, value)));
@@ -91,6 +92,13 @@ internal sealed class SpecialSentences(Voice voice)
                     break;
             }
     }
+
+    private static string Direction(RoundingHow how) => how switch
+    {
+        RoundingHow.Up => ".up",
+        RoundingHow.Down => ".down",
+        _ => "",
+    };
 
     /// <summary>A sum says which of its parts nobody sees, and whether they are in it.</summary>
     private IEnumerable<string> UnseenParts(AppraisedFigure figure)

@@ -25,14 +25,19 @@ internal sealed class Voice(WordingTexts texts, ILanguage language)
         return form.Length == 0 ? Numerals.InProse(value) : $"{Numerals.InProse(value)}{Numerals.NoBreak}{form}";
     }
 
-    /// <summary>The unit as it goes with a number; of a share its own words may say already that it counts in each 100.</summary>
+    /// <summary>The unit as it goes with a number, with what a rate is for; of a share its own words may say already that it counts in each 100.</summary>
     public string UnitOf(Measure measure, PublishedValue value)
     {
         var form = PluralCategory.Form(measure.Unit, Tag, value);
-        if (measure.Kind != MeasureKind.Share || Say("unit.share.said").Split('|').Any(said => form.Contains(said, StringComparison.OrdinalIgnoreCase)))
-            return form;
-        return form.Length == 0 ? Say("unit.share") : Say("unit.share-of", ("unit", form));
+        return measure switch
+        {
+            { Kind: MeasureKind.Rate, Per: { } per } => OneOf("unit.rate", form, ("per", Numerals.Plain(per))),
+            { Kind: MeasureKind.Share } when !Say("unit.share.said").Split('|').Any(said => form.Contains(said, StringComparison.OrdinalIgnoreCase)) => OneOf("unit.share", form),
+            _ => form,
+        };
     }
+
+    private string OneOf(string key, string unit, params ReadOnlySpan<(string, string)> fill) => unit.Length == 0 ? Say(key, fill) : Say(key + "-of", [("unit", unit), .. fill]);
 
     /// <summary>What a row is called in a stub column: its name for readers, else its period in words, else its value.</summary>
     public string Label(StubColumn column, int row)

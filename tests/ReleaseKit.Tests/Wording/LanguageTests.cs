@@ -205,8 +205,8 @@ public sealed class LanguageTests
     }
 
     [Theory]
-    [InlineData(true, "For “cut off”, numbers below 0 were in some rows published as 0, so sums of such figures tend to be too high.")]
-    [InlineData(false, "For “cut off”, numbers below 0 were published as 0, so sums of such figures tend to be too high.")]
+    [InlineData(true, "For “cut off”, any number below 0 is in some rows published as 0, so sums of such figures tend to be too high.")]
+    [InlineData(false, "For “cut off”, any number below 0 is published as 0, so sums of such figures tend to be too high.")]
     public void Numbers_lifted_to_a_bound_are_said_to_make_sums_too_high(bool onlyParts, string words)
     {
         var lifted = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(0)));

@@ -34,7 +34,7 @@ internal static class ReadingBack
         Sentence($@"Here it was more, for the {Kind} cannot be (below|above) {N}\.", (figure, g) => g[2].Value == "below"
             ? Bound(g[3], figure.Possible.Lowest) && figure.Value.ToDouble() + figure.Main!.Margin < figure.Possible.Lowest
             : Bound(g[3], figure.Possible.Highest) && figure.Value.ToDouble() - figure.Main!.Margin > figure.Possible.Highest),
-        Sentence("For such a figure the range is made wider.", (figure, _) => figure.Value.ToDouble() < figure.Possible.Lowest
+        Sentence("For such a figure the range reaches further than the margin.", (figure, _) => figure.Value.ToDouble() < figure.Possible.Lowest
             ? figure.Main!.High > figure.Value.ToDouble() + figure.Main.Margin
             : figure.Value.ToDouble() > figure.Possible.Highest && figure.Main!.Low < figure.Value.ToDouble() - figure.Main.Margin),
         Sentence($@"(So the|The|For those not set to 0, the|For those published, the) {Kind} before noise is between {N} and {N} in {Cases}\.",
@@ -49,7 +49,7 @@ internal static class ReadingBack
         Sentence($@"The {Kind} cannot be below {N} or above {N}, so the range ends there\.",
             (figure, g) => Bound(g[2], figure.Possible.Lowest) && Bound(g[3], figure.Possible.Highest) && figure.Main!.Printed is { LowIsCut: true, HighIsCut: true }),
         Sentence("This figure was not collected.", (figure, _) => figure.Status == 'L'),
-        Sentence("There can be no such figure here.", (figure, _) => figure.Status == 'M'),
+        Sentence("This figure does not apply here.", (figure, _) => figure.Status == 'M'),
         Sentence("This figure is not available.", (figure, _) => figure.Status == 'O'),
         Sentence("This figure is hidden to protect people.", (figure, _) => figure.Status == 'Q'),
         Sentence("It is below the level for publication.", (figure, _) => !figure.HasNumber && figure.Measure.PublishedFrom is not null),
@@ -63,7 +63,7 @@ internal static class ReadingBack
         Sentence($@"Noise carried it (below|above) {N}, the (least|most) that the {Kind} can be\.",
             (figure, g) => g[1].Value == "below" ? figure.Value.ToDouble() < figure.Possible.Lowest && Bound(g[2], figure.Possible.Lowest) : figure.Value.ToDouble() > figure.Possible.Highest && Bound(g[2], figure.Possible.Highest)),
         Sentence($@"Read it as a (?:small )?number,? from {N} to {N}\.", (figure, g) => Is(g[1], figure.Main!.Printed.Low) && Is(g[2], figure.Main.Printed.High)),
-        Sentence("It need not be 0.", (figure, _) => figure.Value.Unscaled == 0),
+        Sentence("It need not be 0.", (figure, _) => figure.Printed.Unscaled == 0),
         Sentence($@"Numbers (below|above) {N} were published as {N}\.", SetTo),
         Sentence($@"Figures just above {N} tend to be too high; the range allows for that\.", (figure, g) =>
             figure.Error!.Steps.Contains(new AfterStep.ZeroBelow((double)Number(g[1]))) || figure.Measure.PublishedFrom == (double)Number(g[1])),
@@ -74,10 +74,12 @@ internal static class ReadingBack
             Number(g[2]) == Number(g[3]) && (double)Number(g[2]) == (g[1].Value == "above" ? figure.Mechanism!.Clipped!.To : figure.Mechanism!.Clipped!.From)),
         Sentence("Its margin is (as large as|larger than) the figure.", IsThatLarge),
         Sentence($@"The figure was rounded to a multiple of {N} after the noise\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1])))),
+        Sentence($@"The figure was rounded up to a multiple of {N} after the noise, so it tends to be too high\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1]), RoundingHow.Up))),
+        Sentence($@"The figure was rounded down to a multiple of {N} after the noise, so it tends to be too low\.", (figure, g) => figure.Mechanism!.Afterwards.Contains(new AfterStep.RoundTo((double)Number(g[1]), RoundingHow.Down))),
         Sentence($@"Of its {N} parts, {N} (?:is|are) not published and not in this sum\.", HasUnseen),
         Sentence($@"Of its {N} parts, {N} (?:is|are) hidden but counted in this sum\.", (figure, g) => HasUnseen(figure, g) && figure.Table.Hidden!.InTotals),
         Sentence("The Office marks it as provisional.", (figure, _) => figure.Status == 'P'),
-        Sentence("This figure is (close|rough|weak): its margin is (about |less than )?([0-9]+) in 100 of it.", Ratio),
+        Sentence("This figure is (close|rough|weak): its margin is (less than )?([0-9]+) in 100 of it.", Ratio),
         Sentence("This figure is weak: its margin is (as large as|larger than) the figure.", (figure, g) => Is(figure, Reliability.Weak) && IsThatLarge(figure, g)),
         Sentence("This figure is weak: it is not above zero.", (figure, _) => Is(figure, Reliability.Weak) && figure.Value.ToDouble() <= 0),
         Sentence("This figure is weak: do not use it alone.", (figure, _) => Is(figure, Reliability.Weak)),
@@ -181,8 +183,7 @@ internal static class ReadingBack
         return string.Equals(groups[1].Value, figure.Reliability.ToString(), StringComparison.OrdinalIgnoreCase) && groups[2].Value switch
         {
             "" => Math.Abs(said - inHundred) < 1e-9,
-            "about " => inHundred <= said + 1e-9 && said < inHundred + 1,
-            _ => said == 1 && inHundred < 1,
+            _ => inHundred < said && said <= inHundred + 1,
         };
     }
 }

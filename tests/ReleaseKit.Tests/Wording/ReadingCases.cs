@@ -40,6 +40,8 @@ internal static class ReadingCases
         ("A count rounded to fives", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(5)), "1240")),
         ("A count of zero that noise mostly leaves as it was", Count(SmallRelease.DiscreteGaussian(0.3), "0")),
         ("A count not below zero and rounded, published as zero", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(0), new AfterStep.RoundTo(5)), "0")),
+        ("A count rounded up", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(10, RoundingHow.Up)), "1240")),
+        ("A count rounded down", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(10, RoundingHow.Down)), "1240")),
         ("A count rounded and not below zero, published as zero", Count(SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(5), new AfterStep.NotBelow(0)), "0")),
         ("A count not above a bound, published as the bound", Bounded(new AfterStep.NotAbove(1200), "1200")),
         ("An amount not below a bound, published as the bound", Amount(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(-50)), "-50")),

@@ -85,12 +85,22 @@ internal static class LawModel
 
     private static string StepOf(SiteContext context, AfterStep step) => step switch
     {
-        AfterStep.RoundTo round => Named(context, "methods.after.round", Number(context, round.Unit)),
+        AfterStep.RoundTo round => Named(context, "methods.after." + Rounding(round), Number(context, round.Unit)),
         AfterStep.NotBelow bound => Named(context, "methods.after.not-below", Number(context, bound.Bound)),
         AfterStep.NotAbove bound => Named(context, "methods.after.not-above", Number(context, bound.Bound)),
         AfterStep.ZeroBelow threshold => Named(context, "methods.after.zero-below", Number(context, threshold.Threshold)),
         AfterStep.PublishedFrom threshold => Named(context, "methods.after.published-from", Number(context, threshold.Threshold)),
         _ => throw new InvalidOperationException($"No words for {step}."),
+    };
+
+    private static string Rounding(AfterStep.RoundTo round) => round switch
+    {
+        { How: RoundingHow.Up } => "round-up",
+        { How: RoundingHow.Down } => "round-down",
+        { How: RoundingHow.AtRandom } => "round-at-random",
+        { Ties: RoundingTies.Up } => "round.up",
+        { Ties: RoundingTies.Even } => "round.even",
+        _ => "round.away",
     };
 
     private static string Named(SiteContext context, string key, string value) => context.Language.Text(key, ("value", value));

@@ -70,6 +70,8 @@ internal static class MethodsPage
     private static string KeyOf(AfterStep step) => step switch
     {
         AfterStep.RoundTo { How: RoundingHow.AtRandom } => "methods.step.rounded-at-random",
+        AfterStep.RoundTo { How: RoundingHow.Up } => "methods.step.rounded-up",
+        AfterStep.RoundTo { How: RoundingHow.Down } => "methods.step.rounded-down",
         AfterStep.RoundTo => "methods.step.rounded",
         AfterStep.NotBelow => "methods.step.not-below",
         AfterStep.NotAbove => "methods.step.not-above",

@@ -1,27 +1,32 @@
 using System.Text.RegularExpressions;
 using Markdig.Extensions.Tables;
 using Markdig.Syntax.Inlines;
+using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages.Prose;
 
 /// <summary>The words that a citation brings along where it stands; in a table it brings none.</summary>
 /// <param name="About">What goes before a number rounded for print: with a capital at the beginning of a sentence, empty where it is said already.</param>
-/// <param name="InEach">What goes after a share: that it counts in each 100; empty where the paragraph says so in the writer's words.</param>
-internal readonly record struct CitationPlace(string About, string InEach)
+/// <param name="Base">What goes after a share or a rate: that it counts in each 100, or per 1,000; empty where the paragraph says so in the writer's words.</param>
+internal readonly record struct CitationPlace(string About, string Base)
 {
     private const string SentenceEnds = ".!?";
 
-    public static CitationPlace Of(Inline citation, ILanguage language)
+    public static CitationPlace Of(Inline citation, Measure measure, ILanguage language)
     {
         var root = RootOf(citation);
-        return root.ParentBlock?.Parent is TableCell ? new("", "") : new(AboutAt(citation, language), InEachOf(root, language));
+        return root.ParentBlock?.Parent is TableCell ? new("", "") : new(AboutAt(citation, language), BaseOf(measure, ProseDocument.PlainText(root), language));
     }
 
-    private static string InEachOf(ContainerInline paragraph, ILanguage language)
+    private static string BaseOf(Measure measure, string paragraph, ILanguage language)
     {
-        var text = ProseDocument.PlainText(paragraph);
-        return language.Text("unit.share.said").Split('|').Any(said => Says(text, said)) ? "" : language.Text("unit.share");
+        if (measure.Kind == MeasureKind.Share)
+            return language.Text("unit.share.said").Split('|').Any(said => Says(paragraph, said)) ? "" : language.Text("unit.share");
+        if (measure is not { Kind: MeasureKind.Rate, Per: { } per })
+            return "";
+        var written = language.Number(PublishedValue.Shortest((decimal)per));
+        return Says(paragraph, written) ? "" : language.Text("unit.rate", ("per", written));
     }
 
     /// <summary>Whether the words stand there, and not within a larger number: 2,100 does not say 100.</summary>

@@ -14,7 +14,7 @@ internal sealed class CitationText(Release release, ILanguage language)
     /// <param name="place">The words that its place asks for.</param>
     public string Of(CitationForm form, AppraisedFigure figure, string href, CitationPlace place) => form == CitationForm.Reading
         ? Reading(figure, href)
-        : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, place.About)}{InEach(form, figure, place)}</a>";
+        : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, place.About)}{Base(form, figure, place)}</a>";
 
     /// <summary>
     /// What follows the writer's own words: " (1,240 ± 19)" wherever they round the figure, else " (± 19)" at its first mention; nothing for a figure that
@@ -25,18 +25,20 @@ internal sealed class CitationText(Release release, ILanguage language)
         var isRounded = SaidNumbers.In(words, figure, release, language).Any(number => number.IsRounded);
         if (!isRounded && !isFirst)
             return "";
-        var margin = figure.Main is { } range ? HtmlText.Encode(language.Margin(range.Printed)) : "";
-        var text = (isRounded, margin) switch
+        var text = (isRounded, figure.Main) switch
         {
-            (true, "") => Value(figure, about: ""),
-            (true, _) => $"{Value(figure, about: "")}&#160;{margin}",
-            (false, _) => margin,
+            (true, null) => Value(figure, about: ""),
+            (true, { Printed.IsUneven: true }) => $"{Value(figure, about: "")}, {Range(figure, about: "")}",
+            (true, _) => ValueAndMargin(figure, about: ""),
+            (false, null) => "",
+            (false, { Printed.IsUneven: true }) => Range(figure, about: ""),
+            (false, { } range) => HtmlText.Encode(language.Margin(range.Printed)),
         };
         return text.Length == 0 ? "" : $" <span class=\"cite-margin\">({text})</span>";
     }
 
-    private static string InEach(CitationForm form, AppraisedFigure figure, CitationPlace place) =>
-        figure is { HasNumber: true, Measure.Kind: MeasureKind.Share } && form != CitationForm.Margin && place.InEach.Length > 0 ? " " + HtmlText.Encode(place.InEach) : "";
+    private static string Base(CitationForm form, AppraisedFigure figure, CitationPlace place) =>
+        figure.HasNumber && form != CitationForm.Margin && place.Base.Length > 0 ? " " + HtmlText.Encode(place.Base) : "";
 
     private string Generated(CitationForm form, AppraisedFigure figure, string about) => form switch
     {
@@ -53,11 +55,13 @@ internal sealed class CitationText(Release release, ILanguage language)
         return $"{before}<data value=\"{figure.Value}\">{HtmlText.Encode(language.NumberInProse(figure.Printed))}</data>";
     }
 
-    private string ValueAndMargin(AppraisedFigure figure, string about)
+    /// <summary>An uneven margin is said by its range: "31 (0 to 45)".</summary>
+    private string ValueAndMargin(AppraisedFigure figure, string about) => figure.Main switch
     {
-        var margin = HtmlText.Encode(FigureHtml.Margin(figure, language));
-        return figure.Main is null ? $"{Value(figure, about)} ({margin})" : $"{Value(figure, about)}&#160;{margin}";
-    }
+        null => $"{Value(figure, about)} ({HtmlText.Encode(FigureHtml.Margin(figure, language))})",
+        { Printed.IsUneven: true } => $"{Value(figure, about)} ({Range(figure, about)})",
+        _ => $"{Value(figure, about)}&#160;{HtmlText.Encode(FigureHtml.Margin(figure, language))}",
+    };
 
     private string Range(AppraisedFigure figure, string about) => figure.Main is { } range
         ? HtmlText.Encode(language.Text(

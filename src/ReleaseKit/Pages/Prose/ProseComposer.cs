@@ -112,7 +112,7 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
     {
         var figure = context.Appraised.FigureAt(address);
         mentioned.Add(figure.Address);
-        return new HtmlInline(citations.Of(form, figure, Link.From(page, context.Pages.Of(figure.Ref)), CitationPlace.Of(place, context.Language)));
+        return new HtmlInline(citations.Of(form, figure, Link.From(page, context.Pages.Of(figure.Ref)), CitationPlace.Of(place, figure.Measure, context.Language)));
     }
 
     /// <summary>A link to another prose file leads to its page.</summary>

@@ -1,4 +1,5 @@
 using System.Globalization;
+using ReleaseKit.Charts;
 using ReleaseKit.Pages.Budget;
 using ReleaseKit.Pages.Methods;
 using ReleaseKit.Releases;
@@ -16,7 +17,7 @@ internal static class MeasureFootModel
         {
             ["id"] = Sheet.AboutId(measure),
             ["title"] = measure.Title.In(sheet.Language.Tag),
-            ["unit"] = MeasureUnit.Of(measure, sheet.Language),
+            ["unit"] = UnitWords.Many(measure, sheet.Language),
             ["sentences"] = new ScriptArray(sheet.Language.NotesOf(sheet.Facts.Measures[index], sheet.IsCut)),
             ["rules"] = new ScriptArray(measure.Rules.Where((_, rule) => measure.RuleOf.AsSpan().Contains((byte)rule)).Select(rule => RuleOf(sheet, page, rule))),
             ["cite"] = Cite(sheet, page, measure),

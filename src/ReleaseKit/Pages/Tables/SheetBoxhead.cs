@@ -35,7 +35,7 @@ internal static class SheetBoxhead
 
     private static void WriteMeasure(Sheet sheet, HtmlWriter html, Measure measure, int column) => html
         .Raw("<th scope=\"colgroup\" colspan=\"3\" class=\"meas k"u8).Raw(Number(column)).Raw("\"><a href=\"#"u8).Raw(Sheet.AboutId(measure)).Raw("\">"u8)
-        .Text(measure.Title.In(sheet.Language.Tag)).Raw("</a><span class=\"u\">"u8).Text(MeasureUnit.Of(measure, sheet.Language)).Raw("</span></th>"u8);
+        .Text(measure.Title.In(sheet.Language.Tag)).Raw("</a><span class=\"u\">"u8).Text(UnitWords.Many(measure, sheet.Language)).Raw("</span></th>"u8);
 
     private static void WriteParts(Sheet sheet, HtmlWriter html, HeadScale head, int column)
     {
