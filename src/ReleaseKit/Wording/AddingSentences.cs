@@ -54,7 +54,7 @@ internal sealed class AddingSentences(Voice voice)
     private IEnumerable<string> Steps(List<MeasureFacts> shown) => shown
         .SelectMany(facts => facts.Totals.Steps.Select(step => (Facts: facts, Key: Key(step), At: voice.Numerals.Plain(NumberOf(step.Step) * facts.Measure.PrintFactor))))
         .GroupBy(found => (found.Key, found.At), found => found.Facts)
-        .Select(alike => voice.Say(alike.Key.Key, ("measures", Named(alike)), ("bound", alike.Key.At), ("as", alike.Key.At)));
+        .Select(alike => voice.Say(alike.Key.Key, ("measures", Named(alike)), ("bound", alike.Key.At)));
 
     private static string Key(StepOfFigures step) => step.Step switch
     {

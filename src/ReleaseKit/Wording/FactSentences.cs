@@ -46,7 +46,7 @@ internal sealed class FactSentences(Voice voice)
 
     /// <summary>Under a threshold the promise is about the figures that passed it; of a 0 that stands for small values it is said how rarely larger ones become 0.</summary>
     private IEnumerable<string> Ranges(MeasureFacts facts, (string, string) kind, (string, string) cases) => facts.Promise is RangePromise.AmongNotZero
-        ? [voice.Say("facts.column.ranges.not-zero", kind, cases), voice.Say("facts.column.ranges.zero", kind, ("cases", voice.CasesOfZero(facts.Coverage)))]
+        ? [voice.Say("facts.column.ranges.not-zero", kind, cases), voice.Say("facts.column.ranges.zero", ("cases", voice.CasesOfZero(facts.Coverage)))]
         : [voice.Say("facts.column.ranges.published", kind, cases)];
 
     private IEnumerable<string> Distance(MeasureFacts facts, bool onSeveralPages)

@@ -1,5 +1,4 @@
 using ReleaseKit.Appraisal;
-using ReleaseKit.Releases;
 
 namespace ReleaseKit.Wording;
 

@@ -1,3 +1,4 @@
+using ReleaseKit.Noise.Errors;
 using ReleaseKit.Pages;
 using ReleaseKit.Pages.Home;
 using ReleaseKit.Pages.Prose;
@@ -42,6 +43,23 @@ public sealed class CitationPlaceTests
     [InlineData("In each hundred it was [value](figure:A?row=r2).", "In each hundred it was <a><data>51.6</data></a>.")]
     public void Citation_of_a_share_says_in_each_100_unless_the_writer_does(string markdown, string expected) => Assert.Equal($"<p>{expected}</p>\n", Bare(markdown));
 
+    [Theory]
+    [InlineData("It was [value](figure:A?row=r1) here.", "It was <a><data>12.3</data> per 1,000</a> here.")]
+    [InlineData("Of 1,000 it was [value](figure:A?row=r1).", "Of 1,000 it was <a><data>12.3</data></a>.")]
+    [InlineData("It is [margin](figure:A?row=r1) here.", "It is <a>\u00b1\u00a03.1</a> here.")]
+    public void Citation_of_a_rate_says_what_it_is_for_unless_the_writer_does(string markdown, string expected)
+    {
+        var rate = SmallRelease.Measure(MeasureKind.Rate) with { Per = 1000, Decimals = 1 };
+        Assert.Equal($"<p>{expected}</p>\n", Bare(markdown, new SmallRelease().Figures(rate, SmallRelease.Mechanism("m", LawName.Laplace, ("scale", 1)), "12.3")));
+    }
+
+    [Theory]
+    [InlineData("It was [value and margin](figure:A?row=r1) here.", "It was <a><data>30</data> (0 to 40)</a> here.")]
+    [InlineData("It was [30 homes](figure:A?row=r1) here.", "It was <a>30 homes</a> <span class=\"cite-margin\">(0 to 40)</span> here.")]
+    public void Citation_with_an_uneven_margin_gives_the_range(string markdown, string expected) => Assert.Equal(
+        $"<p>{expected}</p>\n",
+        Bare(markdown, new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count), SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30)), "30")));
+
     [Fact]
     public void Citation_in_a_table_is_the_number_alone() =>
         Assert.Contains("<a><data>51.6</data></a>", Bare("| a | b |\n|---|---|\n| c | [value](figure:A?row=r1) |\n"), StringComparison.Ordinal);
@@ -58,6 +76,10 @@ public sealed class CitationPlaceTests
 
     private static string Address(string text) => text.Replace("A?", $"{Context.Release.Tables[0].Id}/figure?", StringComparison.Ordinal);
 
-    private static string Bare(string markdown) => System.Text.RegularExpressions.Regex.Replace(
-        new ProseComposer(Context, "more.html", 0).Compose(new ProsePage("narrative/more.md", "en", Address(markdown))).Html, "<(a|data) [^>]*>", "<$1>");
+    private static string Bare(string markdown, SmallRelease release) => Bare(markdown, PagesRelease.ContextOf(release.Build()));
+
+    private static string Bare(string markdown) => Bare(markdown, Context);
+
+    private static string Bare(string markdown, SiteContext context) => System.Text.RegularExpressions.Regex.Replace(
+        new ProseComposer(context, "more.html", 0).Compose(new ProsePage("narrative/more.md", "en", Address(markdown))).Html, "<(a|data) [^>]*>", "<$1>");
 }

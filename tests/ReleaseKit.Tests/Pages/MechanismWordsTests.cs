@@ -103,6 +103,19 @@ public sealed class MechanismWordsTests
         Assert.Equal("published from 30 up", MethodsRow(context, bare));
     }
 
+    [Theory]
+    [InlineData(RoundingHow.Nearest, RoundingTies.Away, "rounded to the nearest 10, halves away from 0")]
+    [InlineData(RoundingHow.Nearest, RoundingTies.Up, "rounded to the nearest 10, halves up")]
+    [InlineData(RoundingHow.Nearest, RoundingTies.Even, "rounded to the nearest 10, halves to the even multiple")]
+    [InlineData(RoundingHow.Up, RoundingTies.Away, "rounded up to 10")]
+    [InlineData(RoundingHow.Down, RoundingTies.Away, "rounded down to 10")]
+    [InlineData(RoundingHow.AtRandom, RoundingTies.Away, "rounded to 10 at random, without bias")]
+    public void Methods_say_how_figures_were_rounded(RoundingHow how, RoundingTies ties, string words)
+    {
+        var rounded = SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(10, how, ties));
+        Assert.Equal(words, MethodsRow(PagesRelease.ContextOf(new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count), rounded, "40").Build()), rounded));
+    }
+
     private static string MethodsRow(ReleaseKit.Pages.SiteContext context, Mechanism mechanism)
     {
         var rows = (Scriban.Runtime.ScriptArray)LawModel.Of(context, mechanism.Law, [mechanism])["mechanisms"]!;

@@ -112,7 +112,7 @@ public sealed class LanguageTests
         var values = Enumerable.Repeat("1000", 200).ToArray();
         var facts = new SmallRelease().Figures(MeasureKind.Count, SmallRelease.Mechanism("m", LawName.DiscreteUniform, ("halfWidth", 20)), values).Appraise().FactsOf(0);
         Assert.Equal(
-            ["Of the 200 ranges in this table, at most about 10 are expected to miss.", "From outside they cannot be told apart with certainty."],
+            ["Of the 200 ranges in this table, at most about 10 are expected to miss.", "From outside it cannot be told with certainty which ones miss."],
             En.NotesOf(facts));
     }
 
@@ -205,8 +205,8 @@ public sealed class LanguageTests
     }
 
     [Theory]
-    [InlineData(true, "For “cut off”, any number below 0 is in some rows published as 0, so sums of such figures tend to be too high.")]
-    [InlineData(false, "For “cut off”, any number below 0 is published as 0, so sums of such figures tend to be too high.")]
+    [InlineData(true, "For “cut off”, numbers below 0 are in some rows published as 0, so sums of such figures tend to be too high.")]
+    [InlineData(false, "For “cut off”, numbers below 0 are published as 0, so sums of such figures tend to be too high.")]
     public void Numbers_lifted_to_a_bound_are_said_to_make_sums_too_high(bool onlyParts, string words)
     {
         var lifted = new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotBelow(0)));
@@ -223,7 +223,45 @@ public sealed class LanguageTests
         var mechanism = SmallRelease.DiscreteGaussian(9.5, new AfterStep.NotAbove(500));
         var facts = new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), mechanism, "31", "500").Appraise().FactsOf(0);
 
-        Assert.Equal("For “cut off”, numbers above 500 were published as 500, so sums of such figures tend to be too low.", En.NotesOf(facts)[^1]);
+        Assert.Equal("For “cut off”, numbers above 500 are published as 500, so sums of such figures tend to be too low.", En.NotesOf(facts)[^1]);
+    }
+
+    [Theory]
+    [InlineData(RoundingHow.Up, "For “cut off”, figures are rounded up to a multiple of 10, so sums of them tend to be too high.")]
+    [InlineData(RoundingHow.Down, "For “cut off”, figures are rounded down to a multiple of 10, so sums of them tend to be too low.")]
+    public void Rounding_to_one_side_is_said_to_lean(RoundingHow how, string words)
+    {
+        var mechanism = SmallRelease.DiscreteGaussian(9.5, new AfterStep.RoundTo(10, how));
+        Assert.Equal(words, En.NotesOf(new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), mechanism, "30", "500").Appraise().FactsOf(0))[^1]);
+    }
+
+    [Fact]
+    public void Small_figures_set_to_0_are_said_to_put_sums_off()
+    {
+        var mechanism = SmallRelease.DiscreteGaussian(9.5, new AfterStep.ZeroBelow(30));
+        Assert.Equal(
+            "For “cut off”, figures below 30 are set to 0, so sums of small figures can be far off.",
+            En.NotesOf(new SmallRelease().Figures(SmallRelease.Measure(MeasureKind.Count, "cut off"), mechanism, "0", "500").Appraise().FactsOf(0))[^1]);
+    }
+
+    [Fact]
+    public void Rate_says_what_it_is_for_wherever_its_unit_stands()
+    {
+        var measure = SmallRelease.Measure(MeasureKind.Rate) with { Per = 1000, Unit = SmallRelease.UnitOf("birth", "births") };
+        Assert.Equal("births per 1,000", En.UnitOf(measure, new PublishedValue(2, 0)));
+        Assert.Equal("12.3\u00a0births per 1,000", En.WithUnit(new PublishedValue(123, 1), measure));
+        Assert.Equal("per 1,000", En.UnitOf(measure with { Unit = SmallRelease.UnitOf("", "") }, new PublishedValue(2, 0)));
+    }
+
+    [Theory]
+    [InlineData(0, 48, "+48")]
+    [InlineData(31, 0, "\u221231")]
+    [InlineData(31, 14, "\u221231\u00a0+14")]
+    [InlineData(19, 19, "\u00b1\u00a019")]
+    public void Margin_of_one_side_has_no_other(int down, int up, string text)
+    {
+        PublishedValue Whole(int number) => new(number, 0);
+        Assert.Equal(text, En.Margin(new PrintedRange(Whole(31), Whole(down), Whole(up), Whole(31 - down), Whole(31 + up), false, false)));
     }
 
     [Fact]
@@ -285,7 +323,7 @@ public sealed class LanguageTests
         Assert.Equal(
             [
                 "For figures not set to 0, the count before noise lies in the range in at least 95 of 100 cases.",
-                "When it is above the range of a 0, 0 is published in at most 3 of 100 cases.",
+                "Values above the range of a 0 become 0 in at most 3 of 100 cases.",
             ],
             En.NotesOf(column));
     }

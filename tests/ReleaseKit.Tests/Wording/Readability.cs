@@ -16,10 +16,10 @@ internal static partial class Readability
         + "on or own parts per range rate read rest rough same share show small so some source still strike such sum sums tend "
         + "tends than that the their them there they this to told too touched up use was way weak were what with wrong yet add "
         + "are checked come make all think who knows whole raise odds guess times holds worst say says tests test yes find gives false used has sets two one "
-        + "which get rows part set those",
-        "about above added adds after allows alone amount amounts answers before below between cannot carried cases column counted "
+        + "which get rows part set those does down ones far off",
+        "about above added adds after allows alone amount amounts answers before below apply between cannot carried cases column counted "
         + "covers downward either event exist figure figures filled forecast further given hidden index instead larger level "
-        + "fewer limits margin margins minus misses normal number numbers office only other outside pages people protect public published ranges "
+        + "become values fewer limits margin margins minus misses normal number numbers office only other outside pages people protect public published ranges "
         + "reaches records rounded rounding rules series special table total totals upward valid wider within without zero",
         "another average certainty exactly general collected estimate expected holiday median multiple possible quality together usual",
         "available definition provisional publication",

@@ -20,7 +20,7 @@ internal static class ReadingBack
 
     private static readonly (Regex Pattern, Func<AppraisedFigure, GroupCollection, bool> Agrees)[] Patterns =
     [
-        Sentence($@"The published figure is (about )?{N} [^.]+?( per [0-9,]+)?\.", (figure, g) => IsValue(figure, g[2]) && figure.HasNumber && g[3].Success == figure.Measure.Per.HasValue
+        Sentence($@"The published figure is (about )?{N} [^.]+?( per [0-9,]+)?\.", (figure, g) => Is(g[2], figure.Printed) && figure.HasNumber && g[3].Success == figure.Measure.Per.HasValue
             && g[1].Success == (Number(g[2]) != figure.Value.ToDecimal() * figure.Measure.PrintFactor)),
         Sentence($@"Noise( and rounding together moved it by| of) up to {N} either way (?:was added )?in {Cases}\.",
             (figure, g) => Is(g[2], figure.Main!.Printed.MarginUp) && Is(g[2], figure.Main.Printed.MarginDown)
@@ -133,14 +133,6 @@ internal static class ReadingBack
     };
 
     /// <summary>The figure as it stands in print; one that print leaves nothing of, to two digits of its own.</summary>
-    private static bool IsValue(AppraisedFigure figure, Group group)
-    {
-        if (figure.Printed.Unscaled != 0 || figure.Value.Unscaled == 0)
-            return Is(group, figure.Printed);
-        var (said, value) = (Number(group), figure.Value.ToDecimal() * figure.Measure.PrintFactor);
-        return said != 0 && Math.Abs(said - value) <= Math.Abs(value) / 20;
-    }
-
     private static bool Is(Group group, PublishedValue value) =>
         Number(group) == value.ToDecimal() && group.Value.Contains('.', StringComparison.Ordinal) == (value.Decimals > 0);
 
