@@ -21,9 +21,11 @@ internal sealed class NumberReader
         words = new(texts);
         point = texts.Template("number.point");
         var (group, dot) = (Regex.Escape(texts.Template("number.group")), Regex.Escape(point));
+        // One class: a mark that two branches know would be tried both ways, over and over in a long row of them.
+        var marks = string.Concat((texts.Template("number.group") + point).Select(mark => $@"\u{(int)mark:X4}"));
         var margin = NumberWords.AnyOf(["±", .. texts.Template("number.plus-or-minus").Split('|')]);
         var sign = $@"(?<!\w)(?:{Regex.Escape(texts.Template("number.minus-in-tables"))}|[-–])(?=\d)|\b{Regex.Escape(texts.Template("number.minus-in-prose"))}\s+";
-        var digits = $@"(?<digits>\d{{1,3}}(?:{Spaces}\d{{3}})+(?:{dot}\d+)?(?![.,'’]?\d)|\d(?:(?:\d|[.,'’]|{group}|{dot})*\d)?)(?:{words.Scale})*(?<ordinal>(?:{NumberWords.AnyOf(texts.Template("number.ordinal-ends").Split('|'))})(?!\w))?";
+        var digits = $@"(?<digits>\d{{1,3}}(?:{Spaces}\d{{3}})+(?:{dot}\d+)?(?![.,'’]?\d)|\d(?:[\d.,'’{marks}]*\d)?)(?:{words.Scale})*(?<ordinal>(?:{NumberWords.AnyOf(texts.Template("number.ordinal-ends").Split('|'))})(?!\w))?";
         var below = $@"(?<below>(?:\s+\p{{L}}+)?\s+(?:{NumberWords.AnyOf(texts.Template("number.below-zero").Split('|'))})(?!\w|[.,]\d))";
         number = new($@"(?:(?<margin>{margin})\s*|(?<minus>{sign}))?(?:{digits}|(?<run>{words.Run})){below}?", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
         form = new($@"^(?:[0-9]{{1,3}}(?:(?:{group}|{Spaces})[0-9]{{3}})+|[0-9]+)(?:{dot}[0-9]+)?$", RegexOptions.CultureInvariant);

@@ -40,6 +40,17 @@ public sealed class NumberReadingTests : IDisposable
     public void Word_without_its_number_is_named() => Assert.Contains(
         "\"number.words\" holds \"zo\"", Assert.Throws<WordingException>(() => Other("zo=2|zo")).Message, StringComparison.Ordinal);
 
+    /// <summary>With patterns that try a mark in two ways, the first of these would take longer than anyone waits.</summary>
+    [Theory]
+    [InlineData("1", ",")]
+    [InlineData("1", "k ")]
+    [InlineData("1", " 000")]
+    [InlineData("", "one hundred and ")]
+    [InlineData("1", " -")]
+    [InlineData("", "plus or minus ")]
+    public void Long_row_of_marks_is_read_through(string start, string again) =>
+        Assert.InRange(English.Language.NumbersIn(start + string.Concat(Enumerable.Repeat(again, 3000)) + "x").Count, 0, 6000);
+
     private static string Values(ILanguage language, string text) => string.Join(' ', language.NumbersIn(text)
         .Where(number => !number.IsArticle)
         .Select(number => number.Value is { } value ? FormattableString.Invariant($"{value:0.###}") : "?"));
