@@ -102,6 +102,19 @@ public sealed class TableReadingTests
         Assert.Contains("\"inTotals\": true", folder.OnlyStop("sum-differs").Do, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("[c]", "All,0,", true)]
+    [InlineData("[c]", "All,[c],", false)]
+    [InlineData("[c]", "All,,", false)]
+    [InlineData("[x]", "All,0,", false)]
+    public void Total_of_parts_without_a_number_is_a_stop_until_it_has_none_itself(string part, string total, bool stops)
+    {
+        using var folder = new TestFolder().With(Csv, $"street,lit,broken\n{total}9\nKiln Row,{part},4\nQuay,{part},5\n")
+            .Edit(Release, "\"figures\": [\n", "\"statuses\": { \"marks\": { \"[c]\": \"Q\", \"[x]\": \"M\" } }, \"figures\": [\n");
+        var found = folder.Read().Findings.Where(finding => finding.Level == FindingLevel.Stop).Select(finding => (finding.Slug, finding.Found));
+        Assert.Equal(stops ? [("sum-of-nothing", "lamps/lit?street=All is 0, but none of its 2 parts over \"street\" has a number.")] : [], found);
+    }
+
     [Fact]
     public void Labels_are_put_in_order_and_named()
     {

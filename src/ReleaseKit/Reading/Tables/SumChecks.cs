@@ -9,6 +9,8 @@ namespace ReleaseKit.Reading.Tables;
 /// </summary>
 internal static class SumChecks
 {
+    private const char CannotExist = 'M';
+
     public static void Run(ReadTable read, FindingLog log)
     {
         for (var measure = 0; measure < read.Table.Measures.Count; measure++)
@@ -51,7 +53,12 @@ internal static class SumChecks
         var sum = ExactSum.Of(parts.Where(figure.HasNumber).Select(figure.ValueAt));
         var published = ExactSum.Of([figure.ValueAt(total)]);
         if (published.Equals(sum))
+        {
+            if (!parts.Exists(figure.HasNumber) && parts.Exists(part => figure.StatusAt(part) != CannotExist))
+                log.Add(TotalProblems.SumOfNothing(read.PlaceOf(total, measure), read.Address(measure, total), read.Table.Stub[column].Column, parts.Count, FindingOwner.Writer));
             return;
+        }
+
         log.Add(TotalProblems.SumDiffers(
             read.PlaceOf(total, measure), read.Address(measure, total), read.Table.Stub[column].Column,
             published.ToString(), sum.ToString(), published.Less(sum).ToString(), hasHidden ? TotalProblems.SayInTotals : null, FindingOwner.Noise));

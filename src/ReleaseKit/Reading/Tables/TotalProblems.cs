@@ -1,6 +1,7 @@
 using ReleaseKit.Reading.Keys;
 using ReleaseKit.Releases;
 using ReleaseKit.Review;
+using ReleaseKit.Wording;
 
 namespace ReleaseKit.Reading.Tables;
 
@@ -48,6 +49,15 @@ internal static class TotalProblems
         $"{address} is {published}, but its parts over \"{column}\" add up to {sum}: a gap of {gap}.",
         "a sum of published parts has their noise and no other; with a gap, something else was added.",
         hidden ?? "correct the total; or, if it has noise of its own, end its rule in \"mechanism\".")
+    {
+        Address = address,
+    };
+
+    public static Finding SumOfNothing(Place at, string address, string column, int parts, FindingOwner owner) => new(
+        FindingLevel.Stop, "sum-of-nothing", owner, at,
+        $"{address} is 0, but {(parts == 1 ? "its one part" : $"none of its {Numerals.Digits(parts)} parts")} over \"{column}\" has {(parts == 1 ? "no" : "a")} number.",
+        "nothing was added up here, and readers would take the 0 for a count of none.",
+        "leave the cell of the total empty, or write in it what its parts have in place of a number. If the total does hold hidden parts, publish it as it is and say so: \"hidden\": { \"by\": …, \"inTotals\": true }.")
     {
         Address = address,
     };
