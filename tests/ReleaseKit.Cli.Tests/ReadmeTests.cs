@@ -16,6 +16,8 @@ public sealed partial class ReadmeTests
         var call = Call.Of("compose", folder.In("my-release"), "--to", folder.In("my-site"));
         Assert.True(call.ExitCode == ExitCode.Done, call.Error);
         Assert.DoesNotContain("STOP", call.Error);
+        Assert.Contains("1,214\u00a0visitors", File.ReadAllText(folder.In("my-site/tables/visits/index.html")));
+        Assert.Contains("about the visitors behind it", File.ReadAllText(folder.In("my-site/budget.html")));
     }
 
     [Fact]
