@@ -14,16 +14,20 @@ internal sealed class MeasureErrors(Measure measure, Coverage main)
 
     public IReadOnlyCollection<DistinctError> Errors => errors;
 
+    /// <summary>All its published numbers.</summary>
+    public FigureKinds Figures { get; private set; } = FigureKinds.None;
+
     public int Ranges { get; private set; }
 
     public double ExpectedMisses { get; private set; }
 
     public bool HasSums { get; private set; }
 
-    /// <summary>Adds a figure, if its error reaches the main coverage.</summary>
-    public void Add(DistinctError error, PublishedValue value, bool isSum)
+    /// <summary>Adds a figure; its error only if it reaches the main coverage.</summary>
+    public void Add(FigureOrigin origin, PublishedValue value, bool isSum)
     {
-        if (!error.HasMain)
+        Figures = Figures.With(origin.Rule);
+        if (origin.Error is not { HasMain: true } error)
             return;
         errors.Add(error);
         Ranges += error.HasMainRange(value, possible) ? 1 : 0;

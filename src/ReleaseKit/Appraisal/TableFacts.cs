@@ -7,6 +7,9 @@ public sealed record TableFacts
 {
     public required Table Table { get; init; }
 
+    /// <summary>Its published numbers by where they come from.</summary>
+    public required FigureKinds Figures { get; init; }
+
     /// <summary>How many figures have a range.</summary>
     public required int Ranges { get; init; }
 

@@ -18,6 +18,7 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
         return new TableFacts
         {
             Table = table,
+            Figures = shown.Aggregate(FigureKinds.None, (kinds, error) => kinds + error.Figures),
             Ranges = shown.Sum(error => error.Ranges),
             ExpectedMisses = shown.Sum(error => error.ExpectedMisses),
             SharesDraws = shown.Any(error => error.HasSums),
@@ -31,8 +32,8 @@ internal sealed class TableFactsMaker(Release release, FigureOrigins origins)
     {
         var found = new MeasureErrors(measure, release.Coverages.Main);
         for (var row = 0; row < release.Tables[table].RowCount; row++)
-            if (measure.HasNumber(row) && origins.Of(new(table, index, row)).Error is { } error)
-                found.Add(error, measure.ValueAt(row).Times(measure.Multiplier), measure.RuleAt(row) is NoiseRule.SumOver);
+            if (measure.HasNumber(row))
+                found.Add(origins.Of(new(table, index, row)), measure.ValueAt(row).Times(measure.Multiplier), measure.RuleAt(row) is NoiseRule.SumOver);
         return found;
     }
 

@@ -27,6 +27,7 @@ public static class BudgetPage
         model["spent"] = words.Amount(statement.Spent);
         model["authorised"] = statement.Authorised is { } authorised ? words.Allowance(authorised) : null;
         model["beside"] = AuthorityModel.Beside(words);
+        model["has_noise"] = words.Context.HasNoise;
         model["meaning"] = MeaningModel.Of(words);
         model["tally"] = tally;
         model["nothing_spent"] = words.SpentNothing ? words.WithoutSpending : null;

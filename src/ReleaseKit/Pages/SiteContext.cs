@@ -10,6 +10,12 @@ public sealed record SiteContext(IAppraisedRelease Appraised, ILanguage Language
 {
     public Release Release => Appraised.Release;
 
+    /// <summary>The published numbers of the release by where they come from.</summary>
+    public FigureKinds Figures { get; } = Enumerable.Range(0, Appraised.Release.Tables.Count).Aggregate(FigureKinds.None, (kinds, table) => kinds + Appraised.FactsOf(table).Figures);
+
+    /// <summary>Whether there is noise to speak of: in figures, or in runs that none is published of.</summary>
+    public bool HasNoise => Figures.Noised > 0 || Budget.Mechanisms.Count > 0;
+
     /// <summary>Text for readers in the language of these pages.</summary>
     public string In(ReaderText text) => text.In(Language.Tag);
 

@@ -48,11 +48,13 @@ public sealed class BudgetDigitsTests
     [InlineData(0.99961, "99.97 in 100")]
     [InlineData(0.0012, "0.12 in 100")]
     [InlineData(0.4536, "45.4 in 100")]
+    [InlineData(0.9999999999999, "100.0 in 100")]
     public void Largest_chance_has_one_decimal_and_more_only_next_to_0_and_100(double chance, string words) => Assert.Equal(words, Chances.AtMost(chance, English));
 
     [Theory]
     [InlineData(0.000012, "0.0012 in 100")]
     [InlineData(0.0129, "1.2 in 100")]
     [InlineData(0.9999, "99.99 in 100")]
+    [InlineData(1e-20, "0.0 in 100")]
     public void Smallest_chance_likewise(double chance, string words) => Assert.Equal(words, Chances.AtLeast(chance, English));
 }

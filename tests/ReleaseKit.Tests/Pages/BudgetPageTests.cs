@@ -35,7 +35,7 @@ public sealed class BudgetPageTests
         Assert.StartsWith("Published exactly: ", sentences.PreviousElementSibling!.TextContent, StringComparison.Ordinal);
         Assert.Contains("7 figures", sentences.PreviousElementSibling!.TextContent, StringComparison.Ordinal);
         Assert.Equal(
-            "Someone who knows what all other households add to such a figure can work out the part of this household to the last digit. The limits below do not cover that.",
+            "Someone who knows what all other households add to an exact count or sum can work out what this household adds, to the last digit. The limits below do not cover that.",
             sentences.NextElementSibling!.TextContent.Trim());
     }
 
@@ -46,10 +46,10 @@ public sealed class BudgetPageTests
 
         const string Beside = "This holds for all figures with noise. The figures published exactly have no limit.";
         Assert.DoesNotContain("The whole release can", Text(page), StringComparison.Ordinal);
-        Assert.Contains("Apart from the figures published exactly, the release can raise the odds", Text(page), StringComparison.Ordinal);
+        Assert.Contains("The figures with noise can multiply the odds", Text(page), StringComparison.Ordinal);
         Assert.EndsWith(Beside, page.QuerySelector(".promise")!.TextContent.Trim(), StringComparison.Ordinal);
         Assert.EndsWith(Beside, page.QuerySelector("#total")!.NextElementSibling!.TextContent.Trim(), StringComparison.Ordinal);
-        Assert.Contains("The whole release can raise the odds", Text(Read(new BudgetSample { WithExactFigures = false })), StringComparison.Ordinal);
+        Assert.Contains("The whole release can multiply the odds", Text(Read(new BudgetSample { WithExactFigures = false })), StringComparison.Ordinal);
     }
 
     [Fact]
@@ -58,7 +58,7 @@ public sealed class BudgetPageTests
         var page = Read(new BudgetSample { WithExactFigures = false, WithLimit = false });
 
         Assert.Contains("No limit on the odds of that guess can be shown. A result may show for certain what this reader guesses.", Text(page), StringComparison.Ordinal);
-        Assert.DoesNotContain("of all outcomes", Text(page), StringComparison.Ordinal);
+        Assert.DoesNotContain("outcomes", Text(page), StringComparison.Ordinal);
         Assert.Contains("100.0 in 100", page.QuerySelector(".odds tbody tr .main")!.TextContent, StringComparison.Ordinal);
     }
 
@@ -77,9 +77,9 @@ public sealed class BudgetPageTests
     }
 
     [Fact]
-    public void People_in_general_are_always_spoken_of()
+    public void What_is_shown_about_all_units_is_always_spoken_of()
     {
-        Assert.Contains("What the figures show about people in general is not limited by this.", Text(Read(new BudgetSample())), StringComparison.Ordinal);
+        Assert.Contains("What the figures show about households in general is not limited by this.", Text(Read(new BudgetSample())), StringComparison.Ordinal);
     }
 
     [Fact]
@@ -91,8 +91,8 @@ public sealed class BudgetPageTests
 
         var tables = page.QuerySelectorAll(".odds");
         // e^4.5 = 90.017…, rounded up to three digits.
-        Assert.Contains("to at most 90.1 times what they were. It can lower them to no less than 1 part in 90.1 of what they were.", Text(page), StringComparison.Ordinal);
-        Assert.Contains("at most 1 in 100,000,000 of all outcomes", Text(page), StringComparison.Ordinal);
+        Assert.Contains("multiply the odds of that guess by at most 90.1, or divide them by at most 90.1.", Text(page), StringComparison.Ordinal);
+        Assert.Contains("This holds for all but at most 1 in 100,000,000 outcomes.", Text(page), StringComparison.Ordinal);
         foreach (var (belief, row) in meaning.Beliefs.Zip(tables[0].QuerySelectorAll("tbody tr")))
         {
             Assert.InRange(Chance(row.Children[1]), belief.Highest, belief.Highest + 0.001);
@@ -223,7 +223,12 @@ public sealed class BudgetPageTests
         Assert.Equal([10, 13, 17, 18], items.Select((text, index) => (text, index)).Where(item => item.text == "not stated").Select(item => item.index + 1));
     }
 
+    [Fact]
+    public void Words_of_the_office_end_before_the_next_sentence() => Assert.Contains(
+        "The Registrar's office. The Office states this", Read(new BudgetSample()).QuerySelectorAll(".disclosures li")[5].TextContent, StringComparison.Ordinal);
+
     [Theory]
+    [InlineData(1, "At the head and foot of every page; the time on the first page.")]
     [InlineData(2, "Population under the title of every table, sources below it, the period on the first page.")]
     [InlineData(15, "A margin beside each figure that has one; range and attained coverage in the unfolded figure and in the downloads; formulas on the page of methods.")]
     [InlineData(16, "In the reading of each figure that has a range.")]

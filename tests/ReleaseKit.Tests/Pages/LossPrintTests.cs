@@ -12,6 +12,7 @@ public sealed class LossPrintTests
     [InlineData(0.03125, 5, "0.03125")]
     [InlineData(0.1 + 0.2, 4, "0.3000")]
     [InlineData(0, 3, "0.000")]
+    [InlineData(1e-30, 3, "0.001")]
     public void Loss_is_rounded_up(double loss, int decimals, string printed) =>
         Assert.Equal(printed, LossPrint.Up(loss, decimals).ToString());
 
@@ -31,6 +32,21 @@ public sealed class LossPrintTests
 
     [Fact]
     public void Lower_bound_is_rounded_down() => Assert.Equal("0.2109", LossPrint.DownTo(0.2109876, 4).ToString());
+
+    // 1 ÷ 21 = 0.0476190…
+    [Theory]
+    [InlineData(1 / 21.0, "0.047", "0.048")]
+    [InlineData(0.0625, "0.062", "0.063")]
+    [InlineData(0.1, "0.1", "0.1")]
+    public void Delta_of_a_lower_bound_is_rounded_down_that_of_an_upper_one_up(double delta, string down, string up) =>
+        Assert.Equal((down, up), (LossDigits.Down.Delta(delta).ToString(), LossDigits.Up.Delta(delta).ToString()));
+
+    [Theory]
+    [InlineData(0.0477, "0.0477")]
+    [InlineData(0.1000003, "0.1000003")]
+    [InlineData(1e-9, "0.000000001")]
+    [InlineData(1e-30, "0.000000000000000001")]
+    public void Written_delta_keeps_its_digits_and_is_never_nothing(double delta, string printed) => Assert.Equal(printed, LossDigits.AsWritten.Delta(delta).ToString());
 
     [Theory]
     [InlineData(1e-9, "0.000000001")]

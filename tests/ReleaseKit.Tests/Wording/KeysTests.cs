@@ -21,6 +21,9 @@ public sealed partial class KeysTests
     public void Office_is_written_one_way() =>
         Assert.DoesNotContain(English.Texts.Keys, key => Regex.IsMatch(English.Texts.Template(key), @"\b[tT]he office\b"));
 
+    [Fact]
+    public void Apostrophes_are_curly() => Assert.DoesNotContain(English.Texts.Keys, key => English.Texts.Template(key).Contains('\'', StringComparison.Ordinal));
+
     [GeneratedRegex("""\b([lL]anguage|voice|texts)\.(Text|Say|Fill|Template)\("(?<key>[a-z][a-z0-9.-]*)"[,)]""")]
     private static partial Regex NamedKey();
 }

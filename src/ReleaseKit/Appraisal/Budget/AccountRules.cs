@@ -7,6 +7,9 @@ public static class AccountRules
 {
     public static AccountRule Authorised { get; } = new("authorised", "");
     public static AccountRule Declared { get; } = new("declared", "");
+    public static AccountRule BothRecords { get; } = new("both-records", "");
+    public static AccountRule CellsThereAre { get; } = new("cells-there-are", "");
+    public static AccountRule BoundedSum { get; } = new("bounded-sum", "");
     public static AccountRule PureSum { get; } = new("pure-sum", "Dwork & Roth 2014, Corollary 3.15");
     public static AccountRule BasicSum { get; } = new("basic-sum", "Dwork & Roth 2014, Theorem 3.16");
     public static AccountRule ConcentratedSum { get; } = new("concentrated-sum", "Bun & Steinke 2016, Lemma 1.7");
@@ -26,7 +29,7 @@ public static class AccountRules
 
     public static IReadOnlyList<AccountRule> All { get; } =
     [
-        Authorised, Declared, PureSum, BasicSum, ConcentratedSum, TightConversion, SimpleConversion, PureAsConcentrated, ExactCurve, CurveBound, Pair, Odds, Law(""),
+        Authorised, Declared, BothRecords, CellsThereAre, BoundedSum, PureSum, BasicSum, ConcentratedSum, TightConversion, SimpleConversion, PureAsConcentrated, ExactCurve, CurveBound, Pair, Odds, Law(""),
     ];
 }
 

@@ -23,10 +23,14 @@ public sealed class ApproximateAccountant : Accountant
         return Of(DeclaredDelta.EpsilonAt(loss, delta.Value).Upper, delta, rule);
     }
 
+    // At that ε the curve may lie below the declared δ: then no more than the curve is shown.
     public override LossTotal Lower(MechanismSpending spending)
     {
+        if (spending.Loss is not { } loss)
+            return Of(Epsilon.Zero, Delta.Zero, AccountRules.Pair);
         var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
-        return Of(spending.Loss?.EpsilonAt(delta).Lower ?? Epsilon.Zero, delta, AccountRules.Pair);
+        var epsilon = DeclaredDelta.EpsilonAt(loss, delta.Value).Lower;
+        return Of(epsilon, epsilon.IsFinite ? DeclaredDelta.Shown(loss, epsilon, delta) : delta, AccountRules.Pair);
     }
 
     public override LossTotal? Declared(Mechanism mechanism) =>

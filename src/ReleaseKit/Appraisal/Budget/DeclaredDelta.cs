@@ -8,6 +8,10 @@ internal static class DeclaredDelta
 {
     private const double Tolerance = 1e-9;
 
+    /// <summary>The δ that a loss is shown to have at an ε, at most the declared one; that one where the curve meets it to a billionth, as it does where ε was worked out from it.</summary>
+    public static Delta Shown(MechanismLoss loss, Epsilon epsilon, Delta declared) =>
+        loss.DeltaAt(epsilon).Lower is var lower && lower.Value >= declared.Value * (1 - Tolerance) ? declared : lower;
+
     /// <summary>
     /// The smallest ε at a δ. Where the law never comes below a δ by no more than a billionth of it (the sum of a table's tail, worked out in
     /// binary), that δ is met.

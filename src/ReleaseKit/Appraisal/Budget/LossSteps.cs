@@ -1,3 +1,4 @@
+using ReleaseKit.Privacy;
 using ReleaseKit.Privacy.Losses;
 
 namespace ReleaseKit.Appraisal.Budget;
@@ -35,9 +36,14 @@ internal static class LossSteps
     {
         var moved = terms.Sum(term => term.Cells);
         var key = loss.Relation == NeighbourRelation.Replace ? AccountSteps.MovedByReplacing : AccountSteps.MovedByAdding;
+        var (declared, most) = (spending.Mechanism.Sensitivity, spending.Mechanism.Sensitivity.PerCell ?? 0);
+        var (count, rule) = MovedCells.Of(declared, loss.Relation, spending.Cells.Count, moved);
         var largest = Taken(loss.LargestShift, terms.Max(InSteps), terms);
-        var shifts = largest == Signs.Of(spending.Mechanism.Sensitivity.PerCell ?? 0) ? $"{moved}" : $"{moved}, by {largest}";
-        return new AccountStep(key, shifts, moved, AccountRules.Declared);
+        if (largest == Signs.Of(most))
+            return new AccountStep(key, count, moved, rule);
+        // From the lowest signed contribution to the highest.
+        var isTwice = loss.Relation == NeighbourRelation.Replace && loss.LargestShift == 2 * most;
+        return new AccountStep(key, $"{count}, by {(isTwice ? $"2 × {Signs.Of(most)} = " : "")}{largest}", moved, isTwice ? AccountRules.BothRecords : rule);
     }
 
     private static AccountStep Lost(MechanismSpending spending, double amount, LossTotal upper, IReadOnlyList<LossTerm> terms, Accountant accountant)
@@ -46,10 +52,20 @@ internal static class LossSteps
         if (double.IsInfinity(amount))
             return new AccountStep(AccountSteps.Unbounded, $"{sign} = ∞", amount, upper.Rule);
         if (upper.Rule == AccountRules.ExactCurve || upper.Rule == AccountRules.CurveBound)
-            return new AccountStep(AccountSteps.Curve, $"δ({Signs.Of(amount)}) {(upper.Rule == AccountRules.ExactCurve ? '=' : '≤')} {Signs.Of(upper.Delta ?? 0)}", amount, upper.Rule);
+            return new AccountStep(AccountSteps.Curve, $"δ({Signs.Of(amount)}) {OnCurve(spending, amount, upper)}", amount, upper.Rule);
         var parts = terms.Select(term => Part(term, accountant.Currency));
         var key = spending.Mechanism.Parameters.Values.Any(parameter => parameter.Column is not null) ? AccountSteps.LossByRow : AccountSteps.Loss;
         return new AccountStep(key, $"{Divisions(terms, accountant.Currency)}{sign} = {Signs.Plus(parts)} = {Signs.Of(amount)}", amount, upper.Rule);
+    }
+
+    /// <summary>"= 0.047619047619 ≤ 0.0477": what an exact curve gives there, where it lies below the δ that the office declares.</summary>
+    private static string OnCurve(MechanismSpending spending, double epsilon, LossTotal upper)
+    {
+        var declared = Signs.Of(upper.Delta ?? 0);
+        if (upper.Rule != AccountRules.ExactCurve || spending.Loss is not { } loss)
+            return $"≤ {declared}";
+        var exact = loss.DeltaAt(Epsilon.Of(epsilon)).Upper.Value;
+        return exact < upper.Delta * (1 - Close) ? $"= {Signs.Of(exact)} ≤ {declared}" : $"= {declared}";
     }
 
     /// <summary>"ε = 1 ÷ 0.7 = 1.42857142857; " before a calculation in ρ that goes on from the pure loss of a cell.</summary>

@@ -36,7 +36,8 @@ internal static class Meanings
         var beta = OddsBound.UsualBeta(delta);
         var pure = curves.OfType<ApproximateCurve>().Where(IsPure).Select(curve => (new OddsLimit(curve.Loss.Epsilon, curve.Loss.Epsilon, Delta.Zero), (double?)null)).ToList();
         var others = beta.Value <= (pure.Count > 0 ? LargestBesidePure : Largest) ? curves.Where(curve => !IsPure(curve)) : [];
-        return others.Select(curve => (OddsBound.Of(curve, beta), (double?)beta.Value)).Where(pair => pair.Item1.EpsilonPrime.IsFinite).Concat(pure)
+        // Of two that are as small, the one that holds for all outcomes.
+        return pure.Concat(others.Select(curve => (OddsBound.Of(curve, beta), (double?)beta.Value)).Where(pair => pair.Item1.EpsilonPrime.IsFinite))
             .DefaultIfEmpty((new OddsLimit(Epsilon.Infinite, Epsilon.Infinite, Delta.One), null)).MinBy(pair => pair.Item1.EpsilonPrime);
     }
 

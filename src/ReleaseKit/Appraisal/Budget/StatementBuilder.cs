@@ -99,7 +99,7 @@ internal sealed class StatementBuilder
 
     // No unit is known to be counted in full by several mechanisms, so that the largest alone is proven.
     private LossTotal LargestLower() =>
-        spendings.Select(accountant.Lower).MaxBy(accountant.AmountOf) ?? accountant.Sum([]) with { Rule = AccountRules.Pair };
+        spendings.Select(accountant.Lower).MaxBy(lower => (accountant.AmountOf(lower), lower.Delta ?? 0)) ?? accountant.Sum([]) with { Rule = AccountRules.Pair };
 
     private IEnumerable<AccountStep> Conversions() =>
         accountant.Currency == LossCurrency.Rho ? TotalSteps.Conversions(Rho.Of(total.Rho!.Value), delta) : [];

@@ -14,7 +14,8 @@ internal static class TotalSteps
         var parts = Signs.Plus(losses.Select(loss => Signs.Of(accountant.AmountOf(loss))));
         var delta = total.Delta > 0 ? $"; δ = {Signs.Plus(losses.Select(loss => Signs.Of(loss.Delta ?? 0)))} = {Signs.Of(total.Delta.Value)}" : "";
         var amount = accountant.AmountOf(total);
-        return new AccountStep(AccountSteps.Sum, $"{sign} = {parts} = {Signs.Of(amount)}{delta}", amount, total.Rule);
+        var sum = losses.Count == 0 ? "" : $"{parts} = ";
+        return new AccountStep(AccountSteps.Sum, $"{sign} = {sum}{Signs.Of(amount)}{delta}", amount, total.Rule);
     }
 
     /// <summary>ρ to ε at δ by both rules, the tighter first.</summary>

@@ -1,3 +1,4 @@
+using ReleaseKit.Releases;
 using Scriban.Runtime;
 
 namespace ReleaseKit.Pages.Budget;
@@ -13,11 +14,7 @@ internal static class AuthorityModel
     private static IEnumerable<string> Sentences(BudgetWords words)
     {
         var statement = words.Statement;
-        var authorised = statement.Account.Authorised;
-        var promise = TotalsModel.InWords(statement.Promise, words, TotalsModel.AsWritten);
-        yield return authorised is { By: { } by, On: { } on }
-            ? words.Say("budget.spent.by-on", ("by", by), ("date", words.Language.Date(on)), ("promise", promise))
-            : words.Say("budget.spent.by", ("by", authorised.By ?? words.Release.Publisher.Name), ("promise", promise));
+        yield return Authorisation(statement.Account.Authorised, TotalsModel.InWords(statement.Promise, words, LossDigits.AsWritten), words);
         if (statement.Promise.Epsilon is not null && statement.Currency == Appraisal.LossCurrency.Rho && statement.Authorised is { } converted)
             yield return words.Say("budget.spent.converted", ("amount", words.Allowance(converted)));
         yield return words.SpentNothing ? words.WithoutSpending : words.Say("budget.spent.used", ("amount", words.Amount(statement.Spent)));
@@ -25,15 +22,23 @@ internal static class AuthorityModel
             yield return words.Say("budget.spent.left", ("amount", words.Language.Number(left)));
     }
 
+    private static string Authorisation(Authorised authorised, string promise, BudgetWords words) => authorised switch
+    {
+        { By: { } by, On: { } on } => words.Say("budget.spent.by-on", ("by", by), ("date", words.Language.Date(on)), ("promise", promise)),
+        { By: { } by } => words.Say("budget.spent.by", ("by", by), ("promise", promise)),
+        { On: { } on } => words.Say("budget.spent.on", ("date", words.Language.Date(on)), ("promise", promise)),
+        _ => words.Say("budget.spent.by-nobody", ("promise", promise)),
+    };
+
     private static IEnumerable<(string Key, string Text)> Lines(BudgetWords words)
     {
         var account = words.Statement.Account;
         (string Key, string? Text)[] lines =
         [
-            ("budget.authority.unit", account.Over is { } over ? words.Say("budget.authority.unit-over", ("who", words.One), ("over", words.Context.In(over))) : words.One),
+            ("budget.authority.unit", account.Over is { } over ? words.Say("budget.authority.unit-over", ("who", words.One), ("over", words.Context.In(over))) : words.Say("budget.authority.unit-alone", ("who", words.One))),
             ("budget.authority.neighbours", words.Say($"budget.neighbours.{account.Neighbouring}", ("who", words.One))),
             ("budget.authority.accounting", words.Say($"budget.accounting.{account.Accounting}")),
-            ("budget.authority.amount", TotalsModel.InWords(words.Statement.Promise, words, TotalsModel.AsWritten)),
+            ("budget.authority.amount", TotalsModel.InWords(words.Statement.Promise, words, LossDigits.AsWritten)),
             ("budget.authority.by", account.Authorised.By),
             ("budget.authority.on", account.Authorised.On is { } on ? words.Language.Date(on) : null),
             ("budget.authority.paper", account.Authorised.Paper),

@@ -10,11 +10,11 @@ internal static class Chances
 
     /// <summary>A largest chance, rounded up.</summary>
     public static string AtMost(double chance, ILanguage language) =>
-        InHundred(LossPrint.Up(Math.Min(100, 100 * chance), DecimalsFor(chance)), language);
+        InHundred(OrWhole(LossPrint.Up(Math.Min(100, 100 * chance), DecimalsFor(chance))), language);
 
     /// <summary>A smallest chance, rounded down.</summary>
     public static string AtLeast(double chance, ILanguage language) =>
-        InHundred(LossPrint.Down(Math.Max(0, 100 * chance), DecimalsFor(chance)), language);
+        InHundred(OrWhole(LossPrint.Down(Math.Max(0, 100 * chance), DecimalsFor(chance))), language);
 
     /// <summary>A chance that was set, not worked out.</summary>
     public static string Given(double chance, ILanguage language) =>
@@ -30,6 +30,9 @@ internal static class Chances
         var (nearest, digits) = chance < 0.5 ? (100 * chance, 2) : (100 * (1 - chance), 1);
         return nearest <= 0 ? 1 : Math.Clamp(LossPrint.DecimalsFor(nearest, digits), 1, MostDecimals);
     }
+
+    // What no decimals tell from 0 or from 100 is not drawn out to all of them.
+    private static PublishedValue OrWhole(PublishedValue value) => value.ToDecimal() is 0 or 100 ? value.RoundedTo(1) : value;
 
     private static string InHundred(PublishedValue value, ILanguage language) => language.Text("budget.in-100", ("number", language.Number(value)));
 }

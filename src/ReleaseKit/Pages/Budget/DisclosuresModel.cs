@@ -24,6 +24,7 @@ internal static class DisclosuresModel
         ["standing"] = words.Say(stated.Standing == Standing.NotStated ? "budget.not-stated" : "budget.stated"),
         ["is_stated"] = stated.Standing != Standing.NotStated,
         ["text"] = stated.Words ?? (stated.Standing == Standing.Here ? words.Say($"budget.disclosure.{Wording.Numerals.Digits(number)}.here") : null),
+        ["stop"] = stated.Words is [.., '.' or '!' or '?' or '…'] ? "" : ".",
         ["by_office"] = stated.Standing == Standing.Office,
     };
 
@@ -31,24 +32,26 @@ internal static class DisclosuresModel
     {
         var release = words.Release;
         var practice = release.Noise.Practice;
+        (Standing, string?) OfNoise((Standing, string?) stated) => words.Context.HasNoise ? stated : (Standing.Here, words.Say("budget.disclosure.no-noise"));
+        var ofRanges = words.Context.HasNoise ? If(true) : (Standing.Here, words.Say("budget.disclosure.no-range"));
         return
         [
             If(release.Licence is not null),
             If(release.ReferencePeriod is not null && release.Tables.All(table => table.Universe is not null && table.Source is not null)),
             If(release.Noise.Over is not null),
             If(true),
-            If(release.Noise.Mechanisms.All(IsBounded)),
+            OfNoise(If(release.Noise.Mechanisms.All(IsBounded))),
             Said(practice.HeldBy),
             If(true),
             If(true),
             If(true),
-            If(release.Noise.Mechanisms.All(mechanism => mechanism.Law != LawName.Declared)),
-            Said(practice.Sampler),
+            OfNoise(If(release.Noise.Mechanisms.All(mechanism => mechanism.Law != LawName.Declared))),
+            OfNoise(Said(practice.Sampler)),
             If(true),
             Said(practice.Rows),
-            If(true),
-            If(true),
-            If(true),
+            OfNoise(If(true)),
+            ofRanges,
+            ofRanges,
             Said(Joined(practice.Span, practice.Renewal)),
             Said(Joined(practice.Tuned, null)),
             If(true),

@@ -12,8 +12,8 @@ internal static class LossPrint
 {
     private const int MostDecimals = 18;
 
-    /// <summary>So many decimals, rounded up.</summary>
-    public static PublishedValue Up(double number, int decimals) => At(decimal.Ceiling(Scaled(number, decimals)), decimals);
+    /// <summary>So many decimals, rounded up; never to nothing, however small.</summary>
+    public static PublishedValue Up(double number, int decimals) => At(Math.Max(decimal.Ceiling(Scaled(number, decimals)), number > 0 ? 1 : decimal.MinValue), decimals);
 
     /// <summary>So many decimals, rounded down.</summary>
     public static PublishedValue Down(double number, int decimals) => At(decimal.Floor(Scaled(number, decimals)), decimals);
@@ -25,14 +25,18 @@ internal static class LossPrint
     public static PublishedValue DownTo(double number, int digits) => Down(RoundedAbove(number, digits, decimal.Floor), DecimalsFor(number, digits));
 
     /// <summary>A delta: two significant digits rounded up, without idle zeros at the end.</summary>
-    public static PublishedValue Delta(double delta) => PublishedValue.Shortest(UpTo(delta, 2).ToDecimal());
+    public static PublishedValue Delta(double delta) => Shortest(UpTo(delta, 2));
 
     /// <summary>The decimals that show so many significant digits of a number.</summary>
     public static int DecimalsFor(double number, int digits) =>
         number == 0 ? 0 : Math.Clamp(digits - 1 - (int)Math.Floor(Math.Log10(Math.Abs(number)) + 1e-12), 0, MostDecimals);
 
-    /// <summary>A number as it was written: the shortest digits that stand for it.</summary>
-    public static PublishedValue AsWritten(double number) => PublishedValue.Shortest((decimal)number);
+    /// <summary>A number as it was written: the shortest digits that stand for it; rounded up where it is too small for that.</summary>
+    public static PublishedValue AsWritten(double number) =>
+        PublishedValue.Shortest((decimal)number) is var written && number > 0 && written.Unscaled == 0 ? Up(number, MostDecimals) : written;
+
+    /// <summary>Without idle zeros at the end.</summary>
+    public static PublishedValue Shortest(PublishedValue value) => PublishedValue.Shortest(value.ToDecimal());
 
     /// <summary>The number, or the words for a bound that does not exist.</summary>
     public static string OrNoBound(double number, Func<double, PublishedValue> print, ILanguage language) =>

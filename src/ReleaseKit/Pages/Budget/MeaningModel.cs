@@ -16,6 +16,8 @@ internal static class MeaningModel
         var meaning = words.Statement.Meaning;
         return new ScriptObject
         {
+            ["has_limits"] = words.Context.HasNoise,
+            ["no_limits"] = words.Context.HasNoise ? null : WithoutNoise(words),
             ["exact"] = Exact(words),
             ["exact_sums"] = ExactSums(words),
             ["sentences"] = new ScriptArray(Sentences(meaning, words)),
@@ -37,7 +39,7 @@ internal static class MeaningModel
         if (double.IsInfinity(meaning.EpsilonPrime))
         {
             yield return words.Say("budget.meaning.odds-none");
-            yield return words.Say("budget.meaning.general");
+            yield return words.Say("budget.meaning.general", ("others", words.Other));
             yield break;
         }
 
@@ -47,21 +49,33 @@ internal static class MeaningModel
         if (meaning.Beta is { } beta)
             yield return words.Say("budget.meaning.beta", ("beta", Chances.OneIn(beta, words.Language)));
         yield return words.Say("budget.meaning.worst");
-        yield return words.Say("budget.meaning.general");
+        yield return words.Say("budget.meaning.general", ("others", words.Other));
     }
 
     private static ScriptArray Exact(BudgetWords words) => words.Statement.HasExactFigures
-        ? [words.Say("budget.exact.first"), words.Say("budget.exact.second"), words.Say("budget.exact.third")]
+        ? [words.Say("budget.exact.first"), words.Say("budget.exact.second"), .. words.Context.HasNoise ? [words.Say("budget.exact.third")] : Array.Empty<string>()]
         : [];
+
+    /// <summary>What stands in the place of limits where no figure carries noise.</summary>
+    private static string WithoutNoise(BudgetWords words) =>
+        words.Say(words.Statement.HasExactFigures ? "budget.meaning.no-noise.exact" : "budget.meaning.no-noise", ("who", words.One));
 
     /// <summary>What an exact count or sum gives away to someone who knows all other parts of it.</summary>
     private static string? ExactSums(BudgetWords words) => words.Statement.WithoutNoise.Any(figures => IsExactSum(figures, words.Release))
-        ? words.Say("budget.exact.sums", ("who", words.One), ("others", words.Other))
+        ? words.Say("budget.exact.sums", ("who", words.One), ("others", words.Other)) + (words.Context.HasNoise ? " " + words.Say("budget.exact.not-covered") : "")
         : null;
 
     private static bool IsExactSum(FiguresWithoutNoise figures, Release release) =>
-        figures is { Kind: WithoutNoiseKind.Exact, Measure: >= 0 }
-        && release.Tables[figures.Table].Measures[figures.Measure].Kind is MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount;
+        figures is { Kind: WithoutNoiseKind.Exact, Measure: >= 0 } && release.Tables[figures.Table] is var table && table.Measures[figures.Measure].Kind switch
+        {
+            MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Amount => true,
+            MeasureKind.Mean => table.Measures.Any(IsCountWithoutNoise),
+            _ => false,
+        };
+
+    // A mean times the number of those it is taken over is their sum.
+    private static bool IsCountWithoutNoise(Measure measure) =>
+        measure.Kind == MeasureKind.Count && measure.Rules.Any(rule => rule is NoiseRule.Exact or NoiseRule.Public);
 
     private static string OddsKey(BudgetWords words) =>
         words.Statement.HasExactFigures ? "budget.meaning.odds.beside-exact" : "budget.meaning.odds";

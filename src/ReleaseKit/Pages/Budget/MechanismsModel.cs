@@ -25,11 +25,11 @@ internal static class MechanismsModel
             ["sensitivity"] = said.Sensitivity(),
             ["after"] = said.Afterwards(),
             ["clipped"] = said.Clipped(),
-            ["declared"] = account.Declared is { } declared ? TotalsModel.InWords(declared, words, TotalsModel.AsWritten) : words.Say("budget.not-declared"),
+            ["declared"] = account.Declared is { } declared ? TotalsModel.InWords(declared, words, LossDigits.AsWritten) : words.Say("budget.not-declared"),
             ["recomputed"] = words.Amount(account.Amount),
-            ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.Delta(delta)))) : null,
-            ["lower"] = words.Say(
-                said.HasSteps ? "budget.mechanisms.lower.before-steps" : "budget.mechanisms.lower", ("lower", TotalsModel.InWords(account.Lower, words, LossPrint.DownTo))),
+            ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.AsWritten(delta)))) : null,
+            ["lower"] = TotalsModel.IsNothing(account.Lower) ? null : words.Say(
+                said.HasSteps ? "budget.mechanisms.lower.before-steps" : "budget.mechanisms.lower", ("lower", TotalsModel.InWords(account.Lower, words, LossDigits.Down))),
             ["rule"] = words.Rule(account.Recomputed.Rule),
             ["source"] = account.Recomputed.Rule.Source,
             ["share"] = words.Say("budget.in-100", ("number", words.Language.Number(PrintedShares.Of(account, words.Statement)))),

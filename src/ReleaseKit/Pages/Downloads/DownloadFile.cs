@@ -1,4 +1,6 @@
 using System.Text.RegularExpressions;
+using ReleaseKit.Downloads;
+using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Pages.Downloads;
@@ -15,9 +17,15 @@ internal sealed partial record DownloadFile(string Path, int? Table, string Kind
     public int Place => Array.IndexOf(Order, Kind);
 
     /// <summary>What it holds, in words.</summary>
-    public string What(ILanguage language) => Kind == "coverage"
-        ? language.Text("downloads-page.what.coverage", ("number", OtherCoverage().Match(Path).Groups["number"].Value))
-        : language.Text("downloads-page.what." + Kind);
+    public string What(ILanguage language) => Kind switch
+    {
+        "coverage" => language.Text("downloads-page.what.coverage", ("number", OtherCoverage().Match(Path).Groups["number"].Value)),
+        "law" => language.Text("downloads-page.what.law", ("name", Law!)),
+        _ => language.Text("downloads-page.what." + Kind),
+    };
+
+    /// <summary>For a list of chances, the mechanism whose law it is.</summary>
+    public string? Law { get; private init; }
 
     public static DownloadFile Of(SiteContext context, string path)
     {
@@ -26,7 +34,11 @@ internal sealed partial record DownloadFile(string Path, int? Table, string Kind
         // The table with the longest id that fits: "arrears-2" is not "arrears" at a coverage of 2.
         var table = Enumerable.Range(0, tables.Count).Where(index => KindOf(name, tables[index].Id) is not null)
             .OrderByDescending(index => tables[index].Id.Length).Cast<int?>().FirstOrDefault();
-        return new DownloadFile(path, table, table is { } found ? KindOf(name, tables[found].Id)! : KindOfRelease(name));
+        if (table is { } found)
+            return new DownloadFile(path, table, KindOf(name, tables[found].Id)!);
+        return context.Release.Noise.Mechanisms.FirstOrDefault(mechanism => mechanism.Law == LawName.Tabulated && DownloadNames.Law(mechanism) == path) is { } drawn
+            ? new DownloadFile(path, null, "law") { Law = drawn.Id }
+            : new DownloadFile(path, null, KindOfRelease(name));
     }
 
     private static string? KindOf(string name, string table) => !name.StartsWith(table, StringComparison.Ordinal) ? null : name[table.Length..] switch

@@ -16,6 +16,7 @@ internal static class DownloadsPage
         model["home"] = Link.From(head.Path, PageMap.Home);
         model["methods"] = Link.From(head.Path, PageMap.Methods);
         model["release_title"] = context.In(context.Release.Title);
+        model["has_noise"] = context.Figures.Noised > 0;
         model["tables"] = new ScriptArray(context.Release.Tables.Select((table, index) => new ScriptObject
         {
             ["title"] = context.In(table.Title),

@@ -16,9 +16,25 @@ internal static class Contents
             ["tables"] = new ScriptArray(context.Release.Tables.Select((_, index) => Row(context, index, words.Amount(losses.Of(index))))),
             ["shared"] = losses.Shared > 0 ? words.Amount(losses.Shared) : null,
             ["total"] = words.Amount(context.Budget.Spent),
-            ["total_name"] = context.Language.Text(context.Budget.HasExactFigures ? "home.loss.total.beside-exact" : "home.loss.total"),
+            ["total_name"] = context.Language.Text(TotalName(context)),
+            ["notes"] = new ScriptArray(Notes(context)),
             ["currency"] = context.Language.Text("home.loss.in", ("currency", words.Currency)),
         };
+    }
+
+    private static string TotalName(SiteContext context) => context switch
+    {
+        { HasNoise: false, Budget.HasExactFigures: true } => "home.loss.total.no-noise",
+        { Budget.HasExactFigures: true } => "home.loss.total.beside-exact",
+        _ => "home.loss.total",
+    };
+
+    private static IEnumerable<string> Notes(SiteContext context)
+    {
+        if (context.Budget.Spent > 0)
+            yield return context.Language.Text("home.loss.note");
+        if (context.Budget.HasExactFigures)
+            yield return context.Language.Text("home.loss.note.exact");
     }
 
     private static ScriptObject Row(SiteContext context, int index, string loss)

@@ -16,7 +16,7 @@ internal static class HomePage
         model["particulars"] = Particulars.Of(context);
         AddHeadlines(model, context);
         AddProse(model, context);
-        model["key"] = new RawHtml(Marks.Key(context.Release, context.Language));
+        model["key"] = context.Figures.Noised > 0 ? new RawHtml(Marks.Key(context.Release, context.Language)) : null;
         model["contents"] = Contents.Of(context);
         model["budget"] = PageMap.Budget;
         model["unit"] = UnitText.One(context.Release.Noise.Who, context.Language.Tag);

@@ -10,7 +10,7 @@ internal static class Particulars
     public static ScriptArray Of(SiteContext context)
     {
         var release = context.Release;
-        var rows = new ScriptArray { Row(context, "home.published", context.Language.Date(DateOnly.FromDateTime(release.Published.DateTime))) };
+        var rows = new ScriptArray { Row(context, "home.published", MomentText.Of(release.Published, context.Language)) };
         if (release.ReferencePeriod is { } period)
             rows.Add(Row(context, "home.covers", PeriodText.Of(period, context.Language)));
         rows.Add(Row(context, "home.loss", Loss(context), PageMap.Budget));
@@ -32,7 +32,7 @@ internal static class Particulars
         var words = new BudgetWords(context);
         return context.Budget.Authorised is { } authorised
             ? context.Language.Text(
-                context.Budget.HasExactFigures ? "home.loss.of.beside-exact" : "home.loss.of",
+                !context.HasNoise ? "home.loss.of.no-noise" : context.Budget.HasExactFigures ? "home.loss.of.beside-exact" : "home.loss.of",
                 ("spent", words.Amount(context.Budget.Spent)), ("authorised", words.Allowance(authorised)), ("currency", words.Currency))
             : context.Language.Text("home.loss.see");
     }

@@ -17,14 +17,35 @@ internal static class ReadingPage
         model["methods"] = Link.From(head.Path, PageMap.Methods);
         model["downloads"] = Link.From(head.Path, PageMap.Downloads);
         model["release_title"] = context.In(context.Release.Title);
-        model["unit"] = UnitText.One(context.Release.Noise.Who, context.Language.Tag);
+        model["lead"] = Lead(context);
+        model["has_noise"] = context.Figures.Noised > 0;
+        model["words"] = new ScriptArray(Words(context.Figures));
         AddCoverage(model, context);
         AddThresholds(model, context);
         model["example"] = Example(context);
         model["digits"] = DigitExamples.Of(context);
-        model["key"] = new RawHtml(Marks.Key(context.Release, context.Language));
+        model["key"] = context.Figures.Noised > 0 ? new RawHtml(Marks.Key(context.Release, context.Language)) : null;
         context.Write(site, head, "reading.html", model);
     }
+
+    /// <summary>How many of the figures carry noise, in a word, and what noise is for.</summary>
+    private static string Lead(SiteContext context) => context.Language.Text(
+        context.Figures switch
+        {
+            { Noised: 0 } => "reading.lead.none",
+            var figures when figures.Noised == figures.All => "reading.lead.all",
+            var figures when 2 * figures.Noised > figures.All => "reading.lead.most",
+            _ => "reading.lead.some",
+        },
+        context.Figures.Noised == 0 ? [] : [("unit", UnitText.One(context.Release.Noise.Who, context.Language.Tag))]);
+
+    /// <summary>The words that stand beside figures of the release.</summary>
+    private static IEnumerable<string> Words(FigureKinds figures) =>
+    [
+        .. figures.Noised > 0 ? ["close", "rough", "weak"] : Array.Empty<string>(),
+        .. figures.Exact > 0 ? ["exact"] : Array.Empty<string>(),
+        .. figures.Public > 0 ? ["public"] : Array.Empty<string>(),
+    ];
 
     private static void AddCoverage(ScriptObject model, SiteContext context)
     {

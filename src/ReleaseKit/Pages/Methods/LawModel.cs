@@ -1,6 +1,7 @@
 using System.Globalization;
 using System.Text;
 using ReleaseKit.Appraisal;
+using ReleaseKit.Downloads;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 using Scriban.Runtime;
@@ -43,6 +44,7 @@ internal static class LawModel
         ["name"] = mechanism.Id,
         ["answers"] = mechanism.Answers is { } answers ? context.In(answers) : "",
         ["parameters"] = string.Join(", ", Parameters(context, mechanism)),
+        ["list"] = mechanism.Law == LawName.Tabulated ? Link.From(PageMap.Methods, DownloadNames.Law(mechanism)) : null,
         ["sensitivity"] = string.Join(", ", SensitivityOf(context, mechanism.Sensitivity)),
         ["afterwards"] = string.Join(", ", Afterwards(context, mechanism).DefaultIfEmpty(context.Language.Text("methods.no-steps"))),
     };

@@ -37,7 +37,9 @@ internal static class MethodsPage
         var unit = UnitText.One(account.Who, context.Language.Tag);
         model["unit"] = account.Over is { } over ? context.Language.Text("methods.unit.over", ("unit", unit), ("over", context.In(over))) : unit;
         model["one"] = unit;
-        model["has_exact"] = context.Budget.HasExactFigures;
+        model["has_noise"] = context.HasNoise;
+        model["covers"] = Covers(context);
+        model["on_its_word"] = new ScriptArray(OnItsWord(context));
         model["neighbouring"] = account.Neighbouring == Neighbouring.Replace ? "methods.neighbouring.replace" : "methods.neighbouring.add-or-remove";
         model["accounting"] = account.Accounting switch
         {
@@ -46,6 +48,23 @@ internal static class MethodsPage
             _ => "methods.accounting.concentrated",
         };
     }
+
+    /// <summary>Which figures the guarantee covers, where it is not all of them; null where it is.</summary>
+    private static string? Covers(SiteContext context) => context switch
+    {
+        { HasNoise: true, Budget.HasExactFigures: false } => null,
+        { HasNoise: true } => context.Language.Text("methods.unit.beside-exact"),
+        { Budget.HasExactFigures: true } => context.Language.Text("methods.unit.only-exact"),
+        _ => context.Language.Text("methods.unit.only-public"),
+    };
+
+    /// <summary>What must be taken on the word of the office.</summary>
+    private static IEnumerable<string> OnItsWord(SiteContext context) => context switch
+    {
+        { HasNoise: true } => ["drawn", "sensitivity", "rules", "source"],
+        { Figures.Public: > 0 } => ["public", "source"],
+        _ => ["source"],
+    };
 
     private static void AddCoverages(ScriptObject model, SiteContext context)
     {

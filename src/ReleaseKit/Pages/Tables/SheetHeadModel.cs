@@ -20,7 +20,7 @@ internal static class SheetHeadModel
         model["published"] = site.Language.Date(DateOnly.FromDateTime(site.Release.Published.DateTime));
         model["downloads"] = Downloads(sheet, page);
         model["parts"] = Parts(sheet, page);
-        model["key"] = new RawHtml(Marks.Key(site.Release, site.Language));
+        model["key"] = sheet.Facts.Figures.Noised > 0 ? new RawHtml(Marks.Key(site.Release, site.Language)) : null;
         model["measures"] = new ScriptArray(sheet.Shown.Select(measure => sheet.Table.Measures[measure].Title.In(site.Language.Tag)));
         return model;
     }

@@ -172,7 +172,7 @@ public sealed class BudgetStatementTests
         Assert.Equal(
             ["moved-by-replacing", "loss", "sum", "conversion-tight", "conversion-simple", "authorised-in-currency", "odds"],
             statement.Steps.Select(step => step.Key));
-        Assert.Equal("2", statement.Steps[0].Arithmetic);
+        Assert.Equal("2 × 1 = 2", statement.Steps[0].Arithmetic);
         Assert.Equal("ρ = 2 × 1² ÷ (2 × 9.5²) = 0.01108033241", statement.Steps[1].Arithmetic);
         Assert.Equal(2 / (2 * 9.5 * 9.5), statement.Steps[1].Result, 1e-15);
         Assert.All(statement.Steps, step => Assert.Contains(step.Rule.Key, AccountRules.All.Select(rule => rule.Key)));
@@ -241,4 +241,49 @@ public sealed class BudgetStatementTests
     }
 
     private static Authorised With(double delta) => Accounts.SixAtOneInABillion with { Delta = delta };
+
+    // δ(ε) of the uniform law is 1 ÷ 21 at every ε; that of the table 0.7 − 0.3 e^ε up to ln 2, by hand.
+    [Fact]
+    public void Lower_bound_under_a_declared_delta_claims_no_more_than_the_curve_shows()
+    {
+        var uniform = SmallRelease.Mechanism("u", LawName.DiscreteUniform, ("halfWidth", 10)) with { Spent = new DeclaredLoss(0, 0.0477, null) };
+        var table = SmallRelease.Mechanism("t", LawName.Tabulated) with
+        {
+            Tabulated = [(-2, 0.1m), (-1, 0.2m), (0, 0.4m), (1, 0.2m), (2, 0.1m)],
+            Spent = new DeclaredLoss(0.6931472, 0.1000003, null),
+        };
+        var stated = SmallRelease.Mechanism("s", LawName.Declared) with { Spent = new DeclaredLoss(0.1, 0.01, null) };
+        var lower = BudgetStatement.Of(Accounts.Of(Accounting.Approximate, uniform, table, stated)).Mechanisms.Select(account => account.Lower).ToList();
+
+        Assert.Equal((0, 1 / 21.0), (lower[0].Epsilon!.Value, lower[0].Delta!.Value), (left, right) => Math.Abs(left.Item1 - right.Item1) + Math.Abs(left.Item2 - right.Item2) < 1e-15);
+        Assert.InRange(lower[1].Delta!.Value, 0.1, 0.7 - (0.3 * Math.Exp(lower[1].Epsilon!.Value)) + 1e-12);
+        Assert.InRange(lower[1].Epsilon!.Value, 0.693146, 0.693147);
+        Assert.Equal((0, 0), (lower[2].Epsilon, lower[2].Delta));
+    }
+
+    [Fact]
+    public void Curve_that_lies_below_the_declared_delta_is_shown_with_its_own_value()
+    {
+        var uniform = SmallRelease.Mechanism("u", LawName.DiscreteUniform, ("halfWidth", 10)) with { Spent = new DeclaredLoss(0, 0.0477, null) };
+        var step = BudgetStatement.Of(Accounts.Of(Accounting.Approximate, uniform)).Steps.Single(step => step.Key == AccountSteps.Curve);
+
+        Assert.Equal("δ(0) = 0.047619047619 ≤ 0.0477", step.Arithmetic);
+    }
+
+    // The mechanism has three cells.
+    [Theory]
+    [InlineData(Neighbouring.AddOrRemove, 2, null, false, "2", "declared")]
+    [InlineData(Neighbouring.AddOrRemove, 5, null, false, "min(5, 3) = 3", "cells-there-are")]
+    [InlineData(Neighbouring.AddOrRemove, 3, 2.0, false, "⌈2 ÷ 1⌉ = 2", "bounded-sum")]
+    [InlineData(Neighbouring.Replace, 1, null, false, "2 × 1 = 2", "both-records")]
+    [InlineData(Neighbouring.Replace, 2, null, false, "min(2 × 2, 3) = 3", "both-records")]
+    [InlineData(Neighbouring.Replace, 2, 1.0, false, "2 × ⌈1 ÷ 1⌉ = 2", "both-records")]
+    [InlineData(Neighbouring.Replace, 3, null, true, "3, by 2 × 1 = 2", "both-records")]
+    public void Cells_that_are_not_as_declared_are_worked_out(Neighbouring neighbouring, int cells, double? sum, bool isSigned, string arithmetic, string rule)
+    {
+        var mechanism = Accounts.Laplace(4) with { Sensitivity = new Sensitivity { CellsPerUnit = cells, PerCell = 1, PerUnit = sum, Signed = isSigned } };
+        var step = BudgetStatement.Of(Accounts.Of(Accounting.Pure, neighbouring, Accounts.SixAtOneInABillion, mechanism)).Steps[0];
+
+        Assert.Equal((arithmetic, rule), (step.Arithmetic, step.Rule.Key));
+    }
 }
