@@ -1,5 +1,7 @@
+using System.Text.Json;
 using AngleSharp.Dom;
 using AngleSharp.Html.Parser;
+using ReleaseKit.Downloads;
 using ReleaseKit.Noise.Errors;
 using ReleaseKit.Releases;
 using ReleaseKit.Tests.Appraisal;
@@ -66,6 +68,27 @@ public sealed class SiteTests : IDisposable
         Assert.Contains("at a coverage of 99 in 100", page, StringComparison.Ordinal);
         Assert.Contains("A headline with its figure, as picture (PNG)", page, StringComparison.Ordinal);
         Assert.Contains("The checksum (SHA-256) of each other file in this folder; pages and pictures have none", page, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Downloads_explain_every_column_of_the_long_file_and_every_key_of_a_line()
+    {
+        var page = ComposedPages().Single(page => page.Path == "downloads.html").Document;
+        var explained = page.QuerySelectorAll("dt").Select(term => term.TextContent).ToHashSet();
+        Assert.Superset(LongColumn.Of(PagesRelease.Make().Tables[0]).Where(column => column.Key is not null).Select(column => column.Name).ToHashSet(), explained);
+        using var line = JsonDocument.Parse(File.ReadLines(folder.In("site/downloads/late.jsonl")).First());
+        var own = line.RootElement.EnumerateObject().Select(key => key.Name).Where(key => !explained.Contains(JsonNamingPolicy.SnakeCaseLower.ConvertName(key)));
+        Assert.All(own, key => Assert.Contains($"“{key}”", page.QuerySelector("#columns")!.ParentElement!.TextContent, StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Methods_lead_to_the_list_of_chances_that_noise_was_drawn_by()
+    {
+        var release = PagesRelease.Make();
+        var drawn = SmallRelease.Mechanism("drawn", LawName.Tabulated) with { Tabulated = [(-1, 0.25m), (0, 0.5m), (1, 0.25m)] };
+        PagesRelease.Compose(release with { Noise = release.Noise with { Mechanisms = [.. release.Noise.Mechanisms, drawn] } }, folder.In("site"));
+        var link = new HtmlParser().ParseDocument(File.ReadAllText(folder.In("site/methods.html"))).QuerySelector("#mechanism-drawn a")!;
+        Assert.Equal(("list of chances", true), (link.TextContent, File.Exists(folder.In("site/" + link.GetAttribute("href")))));
     }
 
     [Fact]

@@ -46,7 +46,7 @@ internal static class TotalSteps
         var prime = Signs.Of(limit.EpsilonPrime.Value);
         var arithmetic = beta is { } share && limit.EpsilonPrime.IsFinite
             ? $"ε₀ = {Signs.Of(limit.At.Value)}, δ(ε₀) = {DeltaThere(limit, curve)}{Signs.Of(limit.DeltaThere.Value)}, β = {Signs.Of(share)}: ε′ = ε₀ − ln(1 − δ(ε₀) ÷ β) = {prime}; e^{prime} = {Signs.Of(odds)}"
-            : $"ε′ = {prime}; e^{prime} = {Signs.Of(odds)}";
+            : limit.EpsilonPrime.IsFinite ? $"ε′ = {prime}; e^{prime} = {Signs.Of(odds)}" : $"ε′ = {prime}";
         return new AccountStep(AccountSteps.Odds, arithmetic, odds, AccountRules.Odds);
     }
 
