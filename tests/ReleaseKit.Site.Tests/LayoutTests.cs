@@ -17,6 +17,25 @@ public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
         }).map(cell => cell.textContent)
         """;
 
+    /// <summary>A page wider than its window, words of a picture that lie on others, and names narrower than a few letters.</summary>
+    private const string Faults = """
+        () => {
+          const page = document.documentElement, faults = page.scrollWidth > page.clientWidth ? [`${page.scrollWidth} px wide`] : [];
+          for (const picture of document.querySelectorAll('main svg')) {
+            const words = [...picture.querySelectorAll('text')].filter(word => word.textContent.trim() && word.getClientRects().length > 0 && !word.closest('details:not([open])'));
+            const boxes = words.map(word => word.getBoundingClientRect());
+            for (let one = 0; one < words.length; one++)
+              for (let other = one + 1; other < words.length; other++)
+                if (Math.min(boxes[one].right, boxes[other].right) - Math.max(boxes[one].left, boxes[other].left) > 1
+                    && Math.min(boxes[one].bottom, boxes[other].bottom) - Math.max(boxes[one].top, boxes[other].top) > 4)
+                  faults.push(`${words[one].textContent} lies on ${words[other].textContent}`);
+          }
+          for (const name of document.querySelectorAll('.sheet .stub .nm'))
+            if (name.textContent.length > 8 && name.getBoundingClientRect().width < 50) faults.push(`${name.textContent} is ${name.getBoundingClientRect().width} px wide`);
+          return faults;
+        }
+        """;
+
     private const string ShownMeasures = """
         [...document.querySelectorAll('.sheet thead .meas')].filter(head => getComputedStyle(head).display !== 'none').map(head => head.className.split(' ').at(-1))
         """;
@@ -38,6 +57,42 @@ public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
         }
 
         Assert.Empty(wide);
+    }
+
+    [Fact]
+    public async Task Long_words_and_long_numbers_push_no_page_wide_and_run_into_nothing()
+    {
+        using var folder = new TemporaryFolder();
+        using var odd = OddRelease.Compose(folder, measures: 4, letters: 58);
+        var faults = new List<string>();
+        foreach (var path in odd.Pages)
+        {
+            await using var opened = await chromium.OpenAsync(odd, path, Widths[0]);
+            foreach (var width in Widths)
+            {
+                await opened.Page.SetViewportSizeAsync(width, 900);
+                faults.AddRange((await opened.Page.EvaluateAsync<string[]>(Faults)).Select(fault => $"{path} at {width}: {fault}"));
+            }
+        }
+
+        Assert.Empty(faults);
+    }
+
+    [Fact]
+    public async Task No_label_of_a_scale_runs_into_another()
+    {
+        var faults = new List<string>();
+        foreach (var path in sample.Pages.Where(path => path.StartsWith("tables/", StringComparison.Ordinal)))
+        {
+            await using var opened = await chromium.OpenAsync(sample, path, FigureWidths[0]);
+            foreach (var width in FigureWidths)
+            {
+                await opened.Page.SetViewportSizeAsync(width, 900);
+                faults.AddRange((await opened.Page.EvaluateAsync<string[]>(Faults)).Select(fault => $"{path} at {width}: {fault}"));
+            }
+        }
+
+        Assert.Empty(faults);
     }
 
     [Fact]

@@ -1,4 +1,5 @@
 using System.Text.RegularExpressions;
+using Microsoft.Playwright;
 using ReleaseKit.Site.Tests.Fixtures;
 
 namespace ReleaseKit.Site.Tests;
@@ -28,6 +29,34 @@ public sealed partial class PrintTests(ComposedSample sample, Chromium chromium)
 
         Assert.True(checkedNotes > 10, $"only {checkedNotes} notes in all table pages");
     }
+
+    [Theory]
+    [InlineData(1)]
+    [InlineData(7)]
+    [InlineData(8)]
+    [InlineData(12)]
+    public async Task Every_measures_title_stands_over_its_own_figures_on_paper(int measures)
+    {
+        using var folder = new TemporaryFolder();
+        using var odd = OddRelease.Compose(folder, measures);
+        await using var opened = await chromium.OpenAsync(odd, "tables/odd/index.html");
+        await opened.Page.EmulateMediaAsync(new() { Media = Media.Print });
+
+        var titles = await opened.Page.EvaluateAsync<double[][]>(TitlesAndFigures);
+
+        Assert.Equal(measures, titles.Length);
+        Assert.All(titles, title => Assert.True(title[0] <= title[2] && title[3] <= title[1], $"title {title[0]} to {title[1]}, figures {title[2]} to {title[3]}"));
+        Assert.All(titles.Zip(titles.Skip(1)), pair => Assert.True(pair.First[1] <= pair.Second[0] + 0.5, $"a title reaches to {pair.First[1]}, the next begins at {pair.Second[0]}"));
+    }
+
+    /// <summary>For each measure where its title's cell begins and ends, and where the digits and margins of its column do.</summary>
+    private const string TitlesAndFigures = """
+        [...document.querySelectorAll('.sheet > thead .meas')].map(title => {
+          const key = title.className.split(' ').at(-1), box = title.getBoundingClientRect();
+          const numbers = [...document.querySelectorAll(`.sheet > tbody td.v.${key} .num, .sheet > tbody td.mg.${key}`)].map(number => number.getBoundingClientRect());
+          return [box.left, box.right, Math.min(...numbers.map(number => number.left)), Math.max(...numbers.map(number => number.right))];
+        })
+        """;
 
     // Line ends, hyphens and spaces differ in a PDF; letters and digits do not.
     private static string Letters(string text) => NoLetter().Replace(text, "");

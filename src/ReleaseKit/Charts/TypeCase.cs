@@ -1,3 +1,4 @@
+using System.Globalization;
 using SkiaSharp;
 
 namespace ReleaseKit.Charts;
@@ -36,16 +37,40 @@ public sealed class TypeCase : IDisposable
         return font.MeasureText(text);
     }
 
-    /// <summary>The text in lines no wider than a width, broken between words; a word that is wider stands alone and sticks out.</summary>
+    /// <summary>The text in lines no wider than a width, broken between words; a word that is wider is broken between letters.</summary>
     public IReadOnlyList<string> Wrap(string text, Ink ink, double width)
     {
         var lines = new List<string>();
-        foreach (var word in text.Split(' ', StringSplitOptions.RemoveEmptyEntries))
+        foreach (var word in text.Split(' ', StringSplitOptions.RemoveEmptyEntries).SelectMany(word => Pieces(word, ink, width)))
             if (lines.Count > 0 && Width($"{lines[^1]} {word}", ink) <= width)
                 lines[^1] = $"{lines[^1]} {word}";
             else
                 lines.Add(word);
         return lines;
+    }
+
+    private IEnumerable<string> Pieces(string word, Ink ink, double width)
+    {
+        var piece = "";
+        var letters = Width(word, ink) <= width ? [word] : Letters(word);
+        foreach (var letter in letters)
+        {
+            if (piece.Length > 0 && Width(piece + letter, ink) > width)
+            {
+                yield return piece;
+                piece = "";
+            }
+            piece += letter;
+        }
+        yield return piece;
+    }
+
+    /// <summary>The letters of a word, each with the accents that stand on it.</summary>
+    private static IEnumerable<string> Letters(string word)
+    {
+        var letters = StringInfo.GetTextElementEnumerator(word);
+        while (letters.MoveNext())
+            yield return letters.GetTextElement();
     }
 
     public double WidestOf(IEnumerable<string> lines, Ink ink) => lines.Select(line => Width(line, ink)).DefaultIfEmpty().Max();

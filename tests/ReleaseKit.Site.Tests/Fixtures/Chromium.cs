@@ -15,9 +15,9 @@ public sealed class Chromium : IAsyncLifetime
     // Browsers wait long on a machine that also runs simulations; the default of 30 s would turn load into failures.
     private const float PatienceInMilliseconds = 180_000;
 
-    // Idle pages by (script, policy bypassed): a page is opened in one of them, since starting a browser's process for each takes longer than
+    // Idle pages by (site, script, policy bypassed): a page is opened in one of them, since starting a browser's process for each takes longer than
     // most of what is looked at.
-    private readonly ConcurrentDictionary<(bool Script, bool BypassPolicy), ConcurrentBag<OpenPage>> pages = new();
+    private readonly ConcurrentDictionary<(ComposedSample Sample, bool Script, bool BypassPolicy), ConcurrentBag<OpenPage>> pages = new();
     private IPlaywright? playwright;
     private IBrowser? browser;
 
@@ -35,11 +35,11 @@ public sealed class Chromium : IAsyncLifetime
     /// <summary>A page at a size, in the light theme; everything it asks for is answered from the site or recorded as foreign.</summary>
     public async Task<OpenPage> OpenAsync(ComposedSample sample, string path, int width = 1280, int height = 900, bool script = true, bool bypassPolicy = false)
     {
-        var idle = pages.GetOrAdd((script, bypassPolicy), _ => []);
+        var idle = pages.GetOrAdd((sample, script, bypassPolicy), _ => []);
         if (!idle.TryTake(out var opened))
             opened = await StartAsync(sample, script, bypassPolicy, idle);
         await opened.Page.SetViewportSizeAsync(width, height);
-        await opened.Page.EmulateMediaAsync(new() { ColorScheme = ColorScheme.Light });
+        await opened.Page.EmulateMediaAsync(new() { ColorScheme = ColorScheme.Light, Media = Media.Null });
         await opened.Page.GotoAsync($"{Origin}/{path}");
         return opened;
     }

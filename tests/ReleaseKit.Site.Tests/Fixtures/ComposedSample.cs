@@ -10,11 +10,19 @@ public sealed class ComposedSample : IDisposable
     private readonly TemporaryFolder folder = new();
 
     public ComposedSample()
+        : this(Repository.Sample)
     {
-        var answer = ReleaseKitProgram.Run(["compose", Repository.Sample, "--to", Site, "--quiet"]);
+    }
+
+    private ComposedSample(string release)
+    {
+        var answer = ReleaseKitProgram.Run(["compose", release, "--to", Site, "--quiet"]);
         if (answer.ExitCode != 0)
             throw new InvalidOperationException($"compose answered {answer.ExitCode}:\n{answer.Error}");
     }
+
+    /// <summary>Another release than the sample, composed in the same way.</summary>
+    public static ComposedSample Of(string release) => new(release);
 
     public string Site => folder.In("site");
 

@@ -112,7 +112,8 @@ public sealed class OrderedChartTests
     {
         using var type = TextBoxes.Type();
         var values = Enumerable.Range(0, rows).Select(row => (row * row * 17 % 1900).ToString(CultureInfo.InvariantCulture)).ToArray();
-        var names = values.Select((_, row) => row % 4 == 0 ? $"Ward number {row} of the old harbour, the long drove and the upper marsh" : $"Ward {row}").ToArray();
+        var names = values.Select((_, row) => row % 4 == 0 ? $"Ward number {row} of the old harbour, the long drove and the upper marsh"
+            : row % 4 == 1 ? $"Harbourmastersgatekeeperslodgeandlongdroveallotmentgardens{row}" : $"Ward {row}").ToArray();
 
         var drawing = Draw(Figures(values, names), wide, type).Drawing;
 

@@ -314,11 +314,46 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
     [Fact]
     public void Every_axis_keeps_its_outermost_ticks_where_columns_are_narrow() => Assert.All(page.QuerySelectorAll("svg.axis"), axis =>
     {
-        var ticks = axis.QuerySelectorAll("g");
-        Assert.True(ticks.Length >= 2, axis.TextContent);
-        Assert.False(ticks[0].ClassList.Contains("odd"));
-        Assert.False(ticks[^1].ClassList.Contains("odd"));
+        var rooms = axis.QuerySelectorAll("g").Select(RoomOf).ToList();
+        Assert.True(rooms.Count >= 2, axis.TextContent);
+        Assert.Equal(0, rooms[0]);
+        Assert.All(rooms.Skip(1), room => Assert.True(room >= rooms[^1], axis.InnerHtml));
     });
+
+    [Fact]
+    public void Tick_needs_the_room_of_the_labels_beside_it()
+    {
+        using var shares = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South").Figures(MeasureKind.Share, SmallRelease.DiscreteGaussian(1), "0", "100").Build());
+
+        var ticks = shares.Page().QuerySelectorAll("svg.axis g");
+
+        Assert.Equal(["0", "25", "50", "75", "100"], ticks.Select(tick => tick.TextContent));
+        // All of them need 7 + 21 + 5 px between 75 and 100, which stand 21 to 22 in 100 of the column apart; every other one half as much.
+        Assert.Equal([0, 10, 5, 10, 3], ticks.Select(RoomOf));
+    }
+
+    [Fact]
+    public void Column_of_margins_holds_the_longest()
+    {
+        using var wide = TableSite.Of(new SmallRelease().Stub("area", null, "North").Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(1_000_000), "5000000").Build());
+
+        Assert.Equal("c-mg k1 w10", wide.Page().QuerySelector("col.c-mg")!.ClassName);
+    }
+
+    [Theory]
+    [InlineData(1, "scroll sheet-scroll fits one")]
+    [InlineData(7, "scroll sheet-scroll wide")]
+    [InlineData(8, "scroll sheet-scroll huge")]
+    [InlineData(12, "scroll sheet-scroll huge bare")]
+    public void Sheet_takes_the_paper_that_its_columns_need(int measures, string classes)
+    {
+        var release = new SmallRelease().Stub("area", null, "North");
+        for (var measure = 0; measure < measures; measure++)
+            release = release.Figures(SmallRelease.Measure(MeasureKind.Count, $"m{measure}"), [new NoiseRule.FromMechanism(SmallRelease.DiscreteGaussian(5))], new byte[1], "100");
+        using var wide = TableSite.Of(release.Build());
+
+        Assert.Equal(classes, wide.Page().QuerySelector(".sheet-scroll")!.ClassName);
+    }
 
     [Fact]
     public void Axis_of_a_page_with_one_total_is_labelled_at_its_ends()
@@ -330,6 +365,9 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
         Assert.Equal(["axlab start", "axlab end"], labels.Select(label => label.ClassName));
         Assert.InRange(3418, Number(labels[0]), Number(labels[1]));
     }
+
+    /// <summary>The width of its column, in rem, from which a tick is shown.</summary>
+    private static int RoomOf(IElement tick) => tick.ClassName is { Length: > 0 } name ? int.Parse(name[1..], CultureInfo.InvariantCulture) : 0;
 
     private static double Number(IElement label) => double.Parse(label.TextContent, NumberStyles.AllowThousands, CultureInfo.InvariantCulture);
 

@@ -1,3 +1,4 @@
+using System.Globalization;
 using ReleaseKit.Appraisal;
 using ReleaseKit.Releases;
 using ReleaseKit.Wording;
@@ -18,8 +19,8 @@ internal sealed record Sheet
     /// <summary>Indices of the measures that are shown, in order.</summary>
     public required IReadOnlyList<int> Shown { get; init; }
 
-    /// <summary>For each of them the class of its column of figures.</summary>
-    public required IReadOnlyList<string> Widths { get; init; }
+    /// <summary>For each of them how wide its columns of numbers are.</summary>
+    public required IReadOnlyList<ColumnWidth> Widths { get; init; }
     public ILanguage Language => Site.Language;
 
     /// <summary>Whether the table stands on several pages.</summary>
@@ -42,13 +43,16 @@ internal sealed record Sheet
             Facts = site.Appraised.FactsOf(index),
             Notes = NoteMarks.Of(table),
             Shown = shown,
-            Widths = [.. shown.Select(measure => FigureWidth.Of(site.Appraised, index, measure, site.Language))],
+            Widths = [.. shown.Select(measure => ColumnWidth.Of(site.Appraised, index, measure, site.Language))],
         };
     }
 
     public AppraisedFigure Figure(int measure, int row) => Site.Appraised.Figure(new(Index, measure, row));
 
     public string Text(string key, params (string Name, string Value)[] fill) => Language.Text(key, fill);
+
+    /// <summary>A number in the names of classes.</summary>
+    public static string Digits(int number) => number.ToString(CultureInfo.InvariantCulture);
 
     public string Whole(long number) => Language.Number(new(number, 0));
 

@@ -7,40 +7,30 @@ namespace ReleaseKit.Pages.Tables;
 /// <summary>Writes the sheet of one page: boxhead, rows, and under each row the folded readings of its figures.</summary>
 internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales, PageDrawings drawings, PrintNotes notes, HtmlWriter html)
 {
-    /// <summary>A sheet that fits beside its stub needs no scrolling of its own: from 1121 px up so many measures, less one for each further stub column; from 1264 px one more.</summary>
-    private const int MeasuresThatFit = 3;
-    private const int MeasuresThatFitWide = 4;
-
-    /// <summary>On A4 laid across, where four go on upright A4; still wider sheets get A3 and no bars.</summary>
-    private const int MeasuresOnWidePaper = 7;
-
+    private readonly IReadOnlyList<SheetAxis> axes = [.. sheet.Shown.Select(measure => SheetAxis.Of(sheet, scales.HeadOf(measure)))];
+    private readonly List<string> bars = [];
     private readonly ReadingPanel panels = new(sheet, drawings.Curves, html);
 
     public void Write(IReadOnlyList<SheetRow> rows)
     {
-        html.Raw("<div class=\"scroll sheet-scroll"u8).Raw(Breadth()).Raw(sheet.Shown.Count == 1 ? " one"u8 : ""u8).Raw("\" role=\"region\" aria-labelledby=\"cap\" tabindex=\"0\">\n<table class=\"sheet"u8)
+        html.Raw("<div class=\"scroll sheet-scroll"u8).Raw(SheetBreadth.Of(sheet)).Raw(sheet.Shown.Count == 1 ? " one"u8 : ""u8).Raw("\" role=\"region\" aria-labelledby=\"cap\" tabindex=\"0\">\n<table class=\"sheet"u8)
             .Raw(sheet.Stub.IsHierarchy ? " tree"u8 : ""u8).Raw("\"><caption id=\"cap\">"u8)
             .Raw("<span class=\"vh\">"u8).Text(SheetHeadModel.TitleOf(sheet, page)).Raw("</span></caption>\n"u8);
+        bars.AddRange(axes.Select((axis, index) => SheetBreadth.BarsOf(sheet, index + 1, axis)));
         WriteColumns();
-        SheetBoxhead.Write(sheet, scales, html);
+        SheetBoxhead.Write(sheet, axes, html);
         WriteRows(rows);
         html.Raw("</table></div>\n"u8);
     }
-
-    private string Breadth() => (sheet.Shown.Count + sheet.Stub.Width - 1) switch
-    {
-        <= MeasuresThatFit => " fits",
-        <= MeasuresThatFitWide => " fits-wide",
-        <= MeasuresOnWidePaper => " wide",
-        _ => " huge",
-    };
 
     private void WriteColumns()
     {
         for (var column = 0; column < sheet.Stub.Width; column++)
             html.Raw("<col class=\"c-stub\">"u8);
         for (var column = 1; column <= sheet.Shown.Count; column++)
-            html.Raw("<col class=\"c-v"u8).Raw(KeyOf(column)).Raw(sheet.Widths[column - 1]).Raw("\"><col class=\"c-mg"u8).Raw(KeyOf(column)).Raw("\"><col class=\"c-b"u8).Raw(KeyOf(column)).Raw("\">"u8);
+            html.Raw("<col class=\"c-v"u8).Raw(KeyOf(column)).Raw(sheet.Widths[column - 1].FigureClass)
+                .Raw("\"><col class=\"c-mg"u8).Raw(KeyOf(column)).Raw(sheet.Widths[column - 1].MarginClass)
+                .Raw("\"><col class=\"c-b"u8).Raw(KeyOf(column)).Raw(axes[column - 1].WidthClass).Raw(bars[column - 1]).Raw("\">"u8);
         html.Raw("\n"u8);
     }
 
@@ -63,7 +53,7 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
         html.Raw(row.Kind switch { RowKind.Item => "<tr>"u8, RowKind.Group => "<tr class=\"band\">"u8, _ => "<tr class=\"band total\">"u8 });
         WriteHeadings(row, before);
         for (var column = 1; column <= figures.Count; column++)
-            WriteFigure(figures[column - 1], KeyOf(column), row);
+            WriteFigure(figures[column - 1], column, row);
         html.Raw("</tr>\n<tr class=\"unfold\"><td colspan=\""u8).Raw(Number(sheet.Stub.Width + (3 * figures.Count))).Raw("\">"u8);
         foreach (var figure in figures)
             panels.Write(figure, row);
@@ -87,8 +77,9 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
         }
     }
 
-    private void WriteFigure(AppraisedFigure figure, string key, SheetRow row)
+    private void WriteFigure(AppraisedFigure figure, int column, SheetRow row)
     {
+        var key = KeyOf(column);
         var note = notes.NumberFor(figure, row);
         if (!figure.HasNumber)
         {
@@ -100,7 +91,7 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
         html.Raw("<td class=\"v"u8).Raw(key).Raw("\"><a class=\"fig\" href=\"#"u8).Raw(figure.Id).Raw("\">"u8).Raw(FigureHtml.Number(figure, sheet.Language)).Raw("</a></td><td class=\"mg"u8)
             .Raw(key).Raw("\">"u8).Text(FigureHtml.Margin(figure, sheet.Language)).Raw(FigureHtml.Lozenge(figure, sheet.Language));
         WriteMarks(figure, note);
-        html.Raw("</td><td class=\"b"u8).Raw(key).Raw("\">"u8);
+        html.Raw("</td><td class=\"b"u8).Raw(key).Raw(bars[column - 1]).Raw("\">"u8);
         WriteBar(figure);
         html.Raw("</td>"u8);
     }
