@@ -53,6 +53,16 @@ public sealed class BudgetPageTests
     }
 
     [Fact]
+    public void Very_small_loss_takes_the_last_place_of_the_columns_and_digits_of_its_own_elsewhere()
+    {
+        var page = Read(new BudgetSample { Currency = LossCurrency.Epsilon, Authorised = 753.034261522, Amounts = [([0], "ward", 14.5), ([1], "ward", 0.175756404), ([2], "ward", 0.0000000000021)] });
+
+        Assert.Equal("14.6758 spent, of 753.0342 authorised", Text(page.QuerySelector(".spent-num")!));
+        Assert.Equal(["14.5000", "0.1758", "0.0001", "14.6758"], page.QuerySelectorAll(".ledger tbody .tot, .ledger tfoot tr:first-child .tot").Select(cell => cell.TextContent));
+        Assert.Contains("0.0000000000021", Text(page.QuerySelector(".mechanisms")!), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Without_a_limit_on_odds_the_page_says_so_and_names_no_share_of_outcomes()
     {
         var page = Read(new BudgetSample { WithExactFigures = false, WithLimit = false });
@@ -313,7 +323,9 @@ public sealed class BudgetPageTests
 
     private static IDocument Read(BudgetSample sample) => new HtmlParser().ParseDocument(sample.Page());
 
-    private static string Text(IDocument page) => string.Join(' ', page.QuerySelector("main")!.TextContent.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries));
+    private static string Text(IDocument page) => Text(page.QuerySelector("main")!);
+
+    private static string Text(IElement part) => string.Join(' ', part.TextContent.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries));
 
     // On a narrow page each number has its sign before it, as the column heads are gone.
     private static string Unlabelled(IElement cell) => cell.TextContent[(cell.QuerySelector(".lab")?.TextContent.Length ?? 0)..].Trim();

@@ -11,6 +11,9 @@ internal sealed class BudgetWords
     private const int DigitsOfSmallest = 2;
     private const int MostDecimals = 12;
 
+    /// <summary>What is far smaller than the total does not give every amount its decimals: rounded up, it stands in the last place.</summary>
+    private const int MostBeyondTotal = 2;
+
     public BudgetWords(SiteContext context)
     {
         Context = context;
@@ -23,7 +26,7 @@ internal sealed class BudgetWords
     public ILanguage Language => Context.Language;
     public Release Release => Context.Release;
 
-    /// <summary>Decimals of every amount on the page, so that columns can be added by eye.</summary>
+    /// <summary>Decimals of every amount in the columns of the account, so that they can be added by eye.</summary>
     public int Decimals { get; }
 
     /// <summary>"household".</summary>
@@ -37,6 +40,10 @@ internal sealed class BudgetWords
 
     /// <summary>An amount that was spent, rounded up.</summary>
     public string Amount(double amount) => LossPrint.OrNoBound(amount, number => LossPrint.Up(number, Decimals), Language);
+
+    /// <summary>An amount that stands in no column, with digits of its own if it is far smaller than the total.</summary>
+    public string AmountAlone(double amount) =>
+        LossPrint.OrNoBound(amount, number => LossPrint.Up(number, Math.Max(Decimals, LossPrint.DecimalsFor(number, DigitsOfSmallest))), Language);
 
     /// <summary>An amount that may be spent, rounded down.</summary>
     public string Allowance(double amount) => LossPrint.OrNoBound(amount, number => LossPrint.Down(number, Decimals), Language);
@@ -76,7 +83,7 @@ internal sealed class BudgetWords
         double[] amounts = [.. statement.Pieces.Select(piece => piece.Amount).Where(amount => amount > 0 && double.IsFinite(amount))];
         if (amounts.Length == 0 || !double.IsFinite(statement.Spent))
             return DigitsOfTotal;
-        return Math.Min(MostDecimals, Math.Max(
-            LossPrint.DecimalsFor(statement.Spent, DigitsOfTotal), LossPrint.DecimalsFor(amounts.Min(), DigitsOfSmallest)));
+        var ofTotal = LossPrint.DecimalsFor(statement.Spent, DigitsOfTotal);
+        return Math.Min(MostDecimals, Math.Clamp(LossPrint.DecimalsFor(amounts.Min(), DigitsOfSmallest), ofTotal, ofTotal + MostBeyondTotal));
     }
 }

@@ -26,7 +26,7 @@ internal static class MechanismsModel
             ["after"] = said.Afterwards(),
             ["clipped"] = said.Clipped(),
             ["declared"] = account.Declared is { } declared ? TotalsModel.InWords(declared, words, LossDigits.AsWritten) : words.Say("budget.not-declared"),
-            ["recomputed"] = words.Amount(account.Amount),
+            ["recomputed"] = words.AmountAlone(account.Amount),
             ["delta"] = account.Recomputed.Delta is { } delta and > 0 ? words.Say("budget.with-delta", ("delta", words.Language.Number(LossPrint.AsWritten(delta)))) : null,
             ["lower"] = TotalsModel.IsNothing(account.Lower) ? null : words.Say(
                 said.HasSteps ? "budget.mechanisms.lower.before-steps" : "budget.mechanisms.lower", ("lower", TotalsModel.InWords(account.Lower, words, LossDigits.Down))),
