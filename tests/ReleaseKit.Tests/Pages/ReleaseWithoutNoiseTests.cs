@@ -33,6 +33,7 @@ public sealed class ReleaseWithoutNoiseTests : IDisposable
             Assert.All(OfNoise, words => Assert.DoesNotContain(words, Text(page), StringComparison.Ordinal));
         Assert.Contains("No figure in this release carries noise.", Text("reading.html"), StringComparison.Ordinal);
         Assert.DoesNotContain("no less than", Text("budget.html"), StringComparison.OrdinalIgnoreCase);
+        Assert.Equal(isExact, !Text("budget.html").Contains("Shown: at most", StringComparison.Ordinal));
     }
 
     [Theory]
