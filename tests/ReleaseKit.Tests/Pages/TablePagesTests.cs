@@ -356,6 +356,27 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
     }
 
     [Fact]
+    public void Scale_holds_the_ranges_where_noise_is_larger_than_all_figures()
+    {
+        using var small = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South", "East", "West")
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(8), "0", "3", "6", "1").Build());
+
+        Assert.Empty(small.Page().QuerySelectorAll("td.b use[href='#ar'], td.b use[href='#al']"));
+    }
+
+    [Fact]
+    public void One_range_that_would_squeeze_all_others_ends_in_an_arrow()
+    {
+        var rules = Enumerable.Range(0, 4).Select(row => (NoiseRule)new NoiseRule.FromMechanism(SmallRelease.Mechanism($"m{row}", LawName.Laplace, ("scale", row == 3 ? 400 : 2)))).ToList();
+        using var means = TableSite.Of(new SmallRelease().Stub("area", null, "North", "South", "East", "West")
+            .Figures(SmallRelease.Measure(MeasureKind.Mean), rules, [0, 1, 2, 3], "20", "23", "26", "21").Build());
+
+        var arrows = means.Page().QuerySelectorAll("td.b").Select(cell => cell.QuerySelectorAll("use[href='#ar'], use[href='#al']").Length);
+
+        Assert.Equal([0, 0, 0, 2], arrows);
+    }
+
+    [Fact]
     public void Axis_of_a_page_with_one_total_is_labelled_at_its_ends()
     {
         using var cut = TableSite.Of(WardTable.Build(isCut: true));

@@ -19,6 +19,10 @@ internal sealed class ColumnExtent
     private double above = double.NegativeInfinity;
     private bool hasRanges;
 
+    /// <summary>Ranges of weak figures, as far as they are possible, and how wide the ranges of all figures are.</summary>
+    private readonly List<MarkRange> weak = [];
+    private readonly List<double> widths = [];
+
     public bool IsEmpty => low > high;
     public double Low => low;
     public double High => high;
@@ -33,12 +37,13 @@ internal sealed class ColumnExtent
             below = Math.Min(below, subject.Body.Low);
         if (subject.Value > subject.Highest)
             above = Math.Max(above, subject.Body.High);
-        // A weak figure's range may run off the scale (an arrow says so); all others are seen to the end of their tails.
-        if (!subject.Weak)
-        {
-            See(Math.Max(subject.Tail.Low, subject.Lowest));
-            See(Math.Min(subject.Tail.High, subject.Highest));
-        }
+        widths.Add(subject.Tail.High - subject.Tail.Low);
+        var possible = new MarkRange(Math.Max(subject.Tail.Low, subject.Lowest), Math.Min(subject.Tail.High, subject.Highest));
+        // Strong figures are seen to the end of their tails; a weak figure's range may run off the scale, and an arrow says so.
+        if (subject.Weak)
+            weak.Add(possible);
+        else
+            See(possible);
     }
 
     public void Add(ColumnExtent other)
@@ -46,6 +51,8 @@ internal sealed class ColumnExtent
         (low, high) = (Math.Min(low, other.low), Math.Max(high, other.high));
         (below, above) = (Math.Min(below, other.below), Math.Max(above, other.above));
         hasRanges |= other.hasRanges;
+        weak.AddRange(other.weak);
+        widths.AddRange(other.widths);
     }
 
     /// <summary>The scale of the parts: from zero where zero is not far, below it only for figures that are.</summary>
@@ -53,11 +60,32 @@ internal sealed class ColumnExtent
     {
         if (IsEmpty)
             return (0, 1);
-        var from = low > 0 && low < ZeroFits * high ? 0 : low;
-        var to = Math.Max(high, above);
+        var (lowest, highest) = WithWeak();
+        var from = lowest > 0 && lowest < ZeroFits * highest ? 0 : lowest;
+        var to = Math.Max(highest, above);
         from = Math.Min(from, below);
         var least = hasRanges ? 0 : LeastOfStems * Math.Max(Math.Abs(from), Math.Abs(to));
         return to - from > least ? (from, to) : (from - (least / 2), to + Math.Max(least / 2, 1));
+    }
+
+    /// <summary>
+    /// How far the scale reaches with weak figures: to the ends of their ranges, but for one that stands out further than the others are spread and ranges here are
+    /// wide: it would squeeze all others.
+    /// </summary>
+    private (double Low, double High) WithWeak()
+    {
+        var room = Math.Max(high - low, Median(widths));
+        return (
+            weak.Select(range => range.Low).Where(end => end >= low - room).Append(low).Min(),
+            weak.Select(range => range.High).Where(end => end <= high + room).Append(high).Max());
+    }
+
+    private static double Median(List<double> numbers) => numbers.Count == 0 ? 0 : numbers.Order().ElementAt(numbers.Count / 2);
+
+    private void See(MarkRange range)
+    {
+        See(range.Low);
+        See(range.High);
     }
 
     private void See(double value) => (low, high) = (Math.Min(low, value), Math.Max(high, value));
