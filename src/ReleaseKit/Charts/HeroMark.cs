@@ -26,8 +26,10 @@ internal sealed record HeroMark(MarkSize Size, double Width, double Height, doub
             svg.AppendPath("hair", $"M0 {SvgMark.Number(Size.Middle)}H{SvgMark.Number(Width)}");
         AppendGuides(svg, figure, scale);
         svg.Append(SvgMark.Paint(SwelledRule.Of(subject, scale, Size).Shapes));
+        if (!subject.IsStemAlone)
+            AppendHeading(svg, figure, language);
         for (var index = 0; index < subject.Ranges.Count; index++)
-            AppendMeasure(svg, figure.Ranges[index], scale, language, index);
+            AppendMeasure(svg, figure, scale, language, index);
         return svg.Append("</svg>").ToString();
     }
 
@@ -37,16 +39,24 @@ internal sealed record HeroMark(MarkSize Size, double Width, double Height, doub
         if (subject.IsStemAlone)
             return new(subject.Value - 1, subject.Value + 1, 0, Width);
         var longest = figure.Ranges.Max(range => Math.Max(NumberWidth(language, range.Printed.Low), NumberWidth(language, range.Printed.High)));
-        var inset = Math.Max(LeastInset, longest + (2 * LabelGap) + figure.Ranges.Max(range => LabelWidth.Of(ShareOf(range, language), LabelSize)));
+        var inset = Math.Max(LeastInset, longest + (2 * LabelGap) + figure.Ranges.Max(range => LabelWidth.Of(ShareOf(range, figure, language), LabelSize)));
         return new(subject.Tail.Low, subject.Tail.High, inset, Width - inset);
     }
 
     private static double NumberWidth(ILanguage language, PublishedValue value) => LabelWidth.Of(language.Number(value), LabelSize);
 
-    // A narrow drawing has room for the number of cases alone: "95" for "95 in 100", which stands in the description.
-    private string ShareOf(FigureRange range, ILanguage language) => IsWide
-        ? language.Share(range.Coverage)
-        : language.Number(new(NaturalFrequency.Of(range.Coverage).Cases, 0));
+    private string ShareOf(FigureRange range, AppraisedFigure figure, ILanguage language) => IsHeaded(figure)
+        ? language.Number(new(NaturalFrequency.Of(range.Coverage).Cases, 0))
+        : language.Share(range.Coverage);
+
+    // A narrow drawing has room for the number of cases alone, under words that say of how many: "95" for "95 in 100".
+    private bool IsHeaded(AppraisedFigure figure) => !IsWide && figure.Ranges.Select(range => NaturalFrequency.Of(range.Coverage).All).Distinct().Count() == 1;
+
+    private void AppendHeading(StringBuilder svg, AppraisedFigure figure, ILanguage language)
+    {
+        if (IsHeaded(figure))
+            svg.AppendLabel("dimlab", 0, FirstLine - LineStep + 9, language.Text("marks.in-all", ("all", language.Number(new(NaturalFrequency.Of(figure.Ranges[0].Coverage).All, 0)))));
+    }
 
     private void AppendGuides(StringBuilder svg, AppraisedFigure figure, Scale scale)
     {
@@ -56,21 +66,23 @@ internal sealed record HeroMark(MarkSize Size, double Width, double Height, doub
             svg.AppendPath("guide", $"M{SvgMark.Number(scale.At(end))} {SvgMark.Number(Size.Middle + 20)}V{SvgMark.Number(FirstLine + LineStep - 8)}");
     }
 
-    private void AppendMeasure(StringBuilder svg, FigureRange range, Scale scale, ILanguage language, int index)
+    private void AppendMeasure(StringBuilder svg, AppraisedFigure figure, Scale scale, ILanguage language, int index)
     {
+        var range = figure.Ranges[index];
         var y = FirstLine + (index * LineStep);
         var (left, right) = (scale.At(range.Low), scale.At(range.High));
         var (line, label) = index == 1 ? ("dim dim-main", "dimnum dimnum-main") : ("dim", "dimnum");
         svg.AppendPath(line, $"M{SvgMark.Number(left)} {y}H{SvgMark.Number(right)}{Cap(left, y)}{Cap(right, y)}")
             .AppendLabel(label, left - LabelGap, y + 5, language.Number(range.Printed.Low), atEnd: true)
             .AppendLabel(label, right + LabelGap, y + 5, language.Number(range.Printed.High));
-        AppendWords(svg, range, language, index, y + 5);
+        AppendWords(svg, figure, language, index, y + 5);
     }
 
-    private void AppendWords(StringBuilder svg, FigureRange range, ILanguage language, int index, double y)
+    private void AppendWords(StringBuilder svg, AppraisedFigure figure, ILanguage language, int index, double y)
     {
+        var range = figure.Ranges[index];
         var kind = index == 1 ? "dimlab dimnum-main" : "dimlab";
-        svg.AppendLabel(kind, 0, y, ShareOf(range, language));
+        svg.AppendLabel(kind, 0, y, ShareOf(range, figure, language));
         if (IsWide)
             svg.AppendLabel(kind, Width, y, language.Text("marks.margin", ("margin", language.Margin(range.Printed))), atEnd: true);
     }

@@ -219,7 +219,7 @@ public sealed class BudgetPageTests
     {
         var text = Read(new BudgetSample()).QuerySelector("#authority")!.ParentElement!.TextContent;
 
-        foreach (var words in new[] { "The Registrar", "4 September 2031", "NOPF/2031/7", "lapses", "one household, over the year 2031" })
+        foreach (var words in new[] { "The Registrar", "4\u00A0September 2031", "NOPF/2031/7", "lapses", "one household, over the year 2031" })
             Assert.Contains(words, text, StringComparison.Ordinal);
     }
 

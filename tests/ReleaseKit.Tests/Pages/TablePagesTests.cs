@@ -377,6 +377,23 @@ public sealed class TablePagesTests : IClassFixture<TablePagesTests.Wards>
     }
 
     [Fact]
+    public void Page_that_begins_within_a_group_repeats_its_heading_and_is_named_by_its_first_and_last_row()
+    {
+        string[] regions = ["All", .. Enumerable.Repeat("Hill", 151), .. Enumerable.Repeat("Dale", 151)];
+        string[] places = ["All", .. PlacesOf("Hill"), .. PlacesOf("Dale")];
+        using var cut = TableSite.Of(new SmallRelease().Stub("region", "All", regions).Stub("place", "All", places)
+            .Figures(MeasureKind.Count, SmallRelease.DiscreteGaussian(2), [.. places.Select((_, row) => $"{row}")]).Build());
+
+        var second = cut.Page("tables/table/rows-2.html");
+
+        Assert.Equal("Dale, continued", second.QuerySelector(".sheet tbody tr")!.TextContent);
+        Assert.Equal(["All to Dale 47, Dale", "Dale 48, Dale to Dale 150, Dale"], second.QuerySelectorAll(".parts a").Select(link => link.TextContent));
+        Assert.DoesNotContain("continued", cut.Html("tables/table/index.html"), StringComparison.Ordinal);
+    }
+
+    private static IEnumerable<string> PlacesOf(string region) => ["All", .. Enumerable.Range(1, 150).Select(place => $"{region} {place}")];
+
+    [Fact]
     public void Axis_of_a_page_with_one_total_is_labelled_at_its_ends()
     {
         using var cut = TableSite.Of(WardTable.Build(isCut: true));

@@ -17,7 +17,7 @@ public sealed class WordsOfPagesTests
     [InlineData("2031-01-01/2031-12-31", "2031")]
     [InlineData("2031-03", "March 2031")]
     [InlineData("2031-Q4", "October to December 2031")]
-    [InlineData("2031-03-09", "9 March 2031")]
+    [InlineData("2031-03-09", "9\u00A0March 2031")]
     [InlineData("2031-W01", "week 1 of 2031")]
     [InlineData("2031-W54", "2031-W54")]
     [InlineData("2031-W01/2031-W13", "weeks 1 to 13 of 2031")]
@@ -26,15 +26,15 @@ public sealed class WordsOfPagesTests
     [InlineData("2031-Q1/2031-Q2", "January to June 2031")]
     [InlineData("2030-Q4/2031-03", "October 2030 to March 2031")]
     [InlineData("2029/2031", "2029 to 2031")]
-    [InlineData("2031-04-01/2032-03-31", "1 April 2031 to 31 March 2032")]
+    [InlineData("2031-04-01/2032-03-31", "1\u00A0April 2031 to 31\u00A0March 2032")]
     [InlineData("2031-13", "2031-13")]
     [InlineData("P1Y", "P1Y")]
     public void Period_is_said_in_words(string iso, string words) => Assert.Equal(words, PeriodText.Of(iso, PagesRelease.English));
 
     [Theory]
-    [InlineData("2032-03-16T09:30:00+01:00", "16 March 2032, 09:30, UTC+1")]
-    [InlineData("2032-03-16T09:30:00Z", "16 March 2032, 09:30, UTC")]
-    [InlineData("2032-03-16T00:05:00-03:30", "16 March 2032, 00:05, UTC\u22123:30")]
+    [InlineData("2032-03-16T09:30:00+01:00", "16\u00A0March 2032, 09:30, UTC+1")]
+    [InlineData("2032-03-16T09:30:00Z", "16\u00A0March 2032, 09:30, UTC")]
+    [InlineData("2032-03-16T00:05:00-03:30", "16\u00A0March 2032, 00:05, UTC\u22123:30")]
     public void Moment_of_publication_is_said_with_its_distance_from_UTC(string moment, string words) =>
         Assert.Equal(words, MomentText.Of(DateTimeOffset.Parse(moment, CultureInfo.InvariantCulture), PagesRelease.English));
 

@@ -72,14 +72,14 @@ public sealed class LanguageTests
     public void Coverage_is_a_natural_frequency(double share, string expected) => Assert.Equal(expected, En.Share(Coverage.OfShare(share)));
 
     [Fact]
-    public void Date_is_day_month_year() => Assert.Equal("16 March 2032", En.Date(new DateOnly(2032, 3, 16)));
+    public void Date_is_day_month_year_and_its_day_stays_with_the_month() => Assert.Equal("16\u00A0March 2032", En.Date(new DateOnly(2032, 3, 16)));
 
     [Fact]
     public void Every_month_has_its_name()
     {
         // The invariant culture's month names are the English ones.
         for (var month = 1; month <= 12; month++)
-            Assert.Equal(new DateOnly(2032, month, 1).ToString("d MMMM yyyy", CultureInfo.InvariantCulture), En.Date(new DateOnly(2032, month, 1)));
+            Assert.Equal(new DateOnly(2032, month, 1).ToString("d\u00A0MMMM yyyy", CultureInfo.InvariantCulture), En.Date(new DateOnly(2032, month, 1)));
     }
 
     [Theory]

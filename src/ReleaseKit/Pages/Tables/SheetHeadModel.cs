@@ -34,14 +34,14 @@ internal static class SheetHeadModel
 
     private static string TableTitle(Sheet sheet) => sheet.Text("tables.title", ("number", sheet.Whole(sheet.Number)), ("title", sheet.Site.In(sheet.Table.Title)));
 
-    /// <summary>The part of the table that a page holds: a value of the cutting column, a run of rows, or null for the only or first page.</summary>
+    /// <summary>The part of the table that a page holds: a value of the cutting column, a run of rows named by its first and last, or null for the only or first page.</summary>
     private static string? PartOf(Sheet sheet, TablePage page)
     {
         var cut = sheet.Table.CutBy;
         var part = page.Part is { } label && cut is { } column ? LabelText.Of(sheet.Table.Stub[column], label, sheet.Language) : null;
         if (page.Number == 1)
             return part;
-        var run = sheet.Text("tables.part.run", ("number", sheet.Whole(page.Number)));
+        var run = RunOf(sheet, page);
         return part is null ? run : sheet.Text("tables.part.of", ("part", part), ("run", run));
     }
 
@@ -69,5 +69,8 @@ internal static class SheetHeadModel
     /// <summary>What the first page of a cut table holds: the totals of the cutting column under their name, or its first rows.</summary>
     private static string FirstPart(Sheet sheet, TablePage page) => sheet.Table.CutBy is { } cut
         ? LabelText.Of(sheet.Table.Stub[cut], page.Rows[0], sheet.Language)
-        : sheet.Text("tables.part.run", ("number", sheet.Whole(1)));
+        : RunOf(sheet, page);
+
+    private static string RunOf(Sheet sheet, TablePage page) =>
+        sheet.Text("tables.part.run", ("first", sheet.Stub.NameOf(page.Rows[0])), ("last", sheet.Stub.NameOf(page.Rows[^1])));
 }

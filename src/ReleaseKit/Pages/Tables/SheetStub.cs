@@ -44,6 +44,9 @@ internal sealed class SheetStub
     public bool BeginsGroup(int row, int? before) =>
         before is not { } previous || (IsHierarchy && table.Stub[0].Codes[row] != table.Stub[0].Codes[previous]);
 
+    /// <summary>The heading of the group that a row is a part of; null for a row that heads a group, or stands in none.</summary>
+    public string? GroupOf(SheetRow row) => IsHierarchy && row.Kind == RowKind.Item ? LabelText.Of(table.Stub[0], row.Row, language) : null;
+
     /// <summary>A row's name in words: its innermost heading first.</summary>
     public string NameOf(int row)
     {

@@ -11,6 +11,8 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
     private readonly List<string> bars = [];
     private readonly ReadingPanel panels = new(sheet, drawings.Curves, html);
 
+    private int Columns => sheet.Stub.Width + (3 * sheet.Shown.Count);
+
     public void Write(IReadOnlyList<SheetRow> rows)
     {
         html.Raw("<div class=\"scroll sheet-scroll"u8).Raw(SheetBreadth.Of(sheet)).Raw(sheet.Shown.Count == 1 ? " one"u8 : ""u8).Raw("\" role=\"region\" aria-labelledby=\"cap\" tabindex=\"0\">\n<table class=\"sheet"u8)
@@ -41,11 +43,18 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
         {
             if (sheet.Stub.BeginsGroup(row.Row, before))
                 html.Raw(before is null ? "<tbody>\n"u8 : "</tbody><tbody>\n"u8);
+            if (before is null && sheet.Stub.GroupOf(row) is { } group)
+                WriteContinued(group);
             WriteRow(row, before);
             before = row.Row;
         }
         html.Raw(before is null ? ""u8 : "</tbody>"u8);
     }
+
+    /// <summary>Over a page that begins within a group, whose own row stands on the page before.</summary>
+    private void WriteContinued(string group) => html
+        .Raw("<tr class=\"band\"><th scope=\"rowgroup\" class=\"stub\" colspan=\""u8).Raw(Number(Columns)).Raw("\"><span class=\"rn\"></span><span class=\"nm\">"u8)
+        .Text(sheet.Text("tables.part.continued", ("heading", group))).Raw("</span></th></tr>\n"u8);
 
     private void WriteRow(SheetRow row, int? before)
     {
@@ -54,7 +63,7 @@ internal sealed class SheetWriter(Sheet sheet, TablePage page, PageScales scales
         WriteHeadings(row, before);
         for (var column = 1; column <= figures.Count; column++)
             WriteFigure(figures[column - 1], column, row);
-        html.Raw("</tr>\n<tr class=\"unfold\"><td colspan=\""u8).Raw(Number(sheet.Stub.Width + (3 * figures.Count))).Raw("\">"u8);
+        html.Raw("</tr>\n<tr class=\"unfold\"><td colspan=\""u8).Raw(Number(Columns)).Raw("\">"u8);
         foreach (var figure in figures)
             panels.Write(figure, row);
         html.Raw("</td></tr>\n"u8);
