@@ -19,7 +19,8 @@ public sealed class LayoutTests(ComposedSample sample, Chromium chromium)
 
     /// <summary>A page wider than its window, words of a picture that lie on others, and names narrower than a few letters.</summary>
     private const string Faults = """
-        () => {
+        async () => {
+          await document.fonts.ready;
           const page = document.documentElement, faults = page.scrollWidth > page.clientWidth ? [`${page.scrollWidth} px wide`] : [];
           for (const picture of document.querySelectorAll('main svg')) {
             const words = [...picture.querySelectorAll('text')].filter(word => word.textContent.trim() && word.getClientRects().length > 0 && !word.closest('details:not([open])'));
