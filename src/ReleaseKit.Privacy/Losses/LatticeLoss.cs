@@ -5,7 +5,7 @@ namespace ReleaseKit.Privacy.Losses;
 /// <summary>What the lattice laws share: shifts counted in steps of the grid, and the curve of a law whose log ratio falls along the grid.</summary>
 internal abstract class LatticeLoss(LatticeLaw law) : LawLoss
 {
-    // Of the law's own probabilities and of e^ε.
+    // Of the law's own probabilities, and of e^ε times ε: where a law ends, nothing is left for e^ε to multiply.
     private const double RelativeError = 1e-15;
     private const double AbsoluteError = 1e-18;
 
@@ -54,6 +54,6 @@ internal abstract class LatticeLoss(LatticeLaw law) : LawLoss
             return (0, 0);
         var here = law.AtMost(last * law.Grid);
         var there = Math.Min(here, Math.Exp(epsilon.Value + Math.Log(law.AtMost((last - steps) * law.Grid))));
-        return (here - there, ((here + there) * RelativeError * (1 + epsilon.Value)) + AbsoluteError);
+        return (here - there, ((here + (there * (1 + epsilon.Value))) * RelativeError) + AbsoluteError);
     }
 }

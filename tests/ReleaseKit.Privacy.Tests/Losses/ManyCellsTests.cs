@@ -96,6 +96,31 @@ public sealed class ManyCellsTests
     public void Uniform_noise_on_two_cells_shows_the_shift_if_either_does() =>
         Assert.Equal(1 - (0.9 * 0.9), MechanismLoss.Of([new NoisedCells(UniformLaw.Of(5), 8)], new UnitContribution.PerCell(2, 1), AddOrRemove).DeltaAt(Epsilon.Of(3)).Upper.Value, 1e-12);
 
+    /// <summary>From Σd/t on, the steps that one of the laws reaches and the other does not are all that is left, in one cell or the other.</summary>
+    [Theory]
+    [InlineData(AddOrRemove, 2, 1, 2)]
+    [InlineData(AddOrRemove, 2, 2, 6)]
+    [InlineData(AddOrRemove, 2, 1, 14)]
+    [InlineData(Replace, 1, 1, 6)]
+    public void Truncated_law_on_two_cells_shows_the_shift_where_either_ends(NeighbourRelation relation, int cellsPerUnit, long most, double cutoff)
+    {
+        var law = TruncatedDiscreteLaplaceLaw.Of(2, cutoff);
+        var loss = MechanismLoss.Of([new NoisedCells(law, 4)], new UnitContribution.PerCell(cellsPerUnit, most), relation);
+        var exact = Enumerated.OfTwo(law, most, most);
+        foreach (var epsilon in new double[] { most, most + 0.3, 3, 50, 1e5, 1e12 })
+            ReferenceRow.Near(exact.Delta(Math.Min(epsilon, 50)), loss.DeltaAt(Epsilon.Of(epsilon)).Upper.Value, $"delta at {epsilon}");
+        Assert.InRange(exact.Delta(most / 4.0), 0, loss.DeltaAt(Epsilon.Of(most / 4.0)).Upper.Value);
+        Assert.InRange(loss.EpsilonAt(Delta.Of(exact.Delta(50) * (1 + 1e-6))).Upper.Value, 0, most * (1 + 1e-9));
+    }
+
+    [Fact]
+    public void Truncated_law_with_a_norm_shows_no_more_than_where_it_ends()
+    {
+        var law = TruncatedDiscreteLaplaceLaw.Of(2, 6);
+        foreach (UnitContribution unit in new UnitContribution[] { new UnitContribution.AbsoluteSum(2), new UnitContribution.Euclidean(1.4143) })
+            ReferenceRow.Near(Enumerated.Of(law, 2).Delta(50), MechanismLoss.Of([new NoisedCells(law, 2)], unit, AddOrRemove).DeltaAt(Epsilon.Of(1)).Upper.Value, unit.ToString());
+    }
+
     /// <summary>A shift of a third of a step still crosses one: three small shifts cost as much as three large ones.</summary>
     [Fact]
     public void Bound_on_a_units_sum_spares_no_law_of_steps()
