@@ -6,6 +6,7 @@ using ReleaseKit.Reading.Prose;
 using ReleaseKit.Reading.Tables;
 using ReleaseKit.Releases;
 using ReleaseKit.Review;
+using ReleaseKit.Review.Leaks;
 
 namespace ReleaseKit.Reading;
 
@@ -38,10 +39,13 @@ public static class ReleaseFolder
 
         public ReadOutcome Read()
         {
-            var draft = Json(ReleaseFileName, FindingOwner.Writer, "what is published, by whom and when") is { } release
-                ? ReleaseFile.Read(release, Context(FindingOwner.Writer)) : null;
-            var mechanisms = Json(MechanismsFileName, FindingOwner.Noise, "which noise was added and what it spent") is { } noise
-                ? MechanismsFile.Read(noise, draft?.Units ?? new Dictionary<string, Unit>(), files, Context(FindingOwner.Noise)) : MechanismsDraft.Unread;
+            var (release, noise) = (
+                Json(ReleaseFileName, FindingOwner.Writer, "what is published, by whom and when"), Json(MechanismsFileName, FindingOwner.Noise, "which noise was added and what it spent"));
+            CheckSeeds(release, FindingLevel.Caution, FindingOwner.Writer);
+            CheckSeeds(noise, FindingLevel.Stop, FindingOwner.Noise);
+            var draft = release is null ? null : ReleaseFile.Read(release, Context(FindingOwner.Writer));
+            var mechanisms = noise is null
+                ? MechanismsDraft.Unread : MechanismsFile.Read(noise, draft?.Units ?? new Dictionary<string, Unit>(), files, Context(FindingOwner.Noise));
             var signOff = SignOffFile.Read(OptionalJson(SignOffFile.FileName, FindingOwner.SignOff), Context(FindingOwner.SignOff));
             if (files.Exists("wording"))
                 log.Add(ReleaseProblems.WordingNotYet(new Place("wording"), FindingOwner.Writer));
@@ -99,6 +103,14 @@ public static class ReleaseFolder
                 Noise = mechanisms.Account!,
                 SignOff = signOff,
             };
+        }
+
+        // Where the noise is told of, a seed with its number is one; in titles and notes it can be something else.
+        private void CheckSeeds(JsonValue? root, FindingLevel level, FindingOwner owner)
+        {
+            foreach (var text in root is null ? [] : JsonTexts.In(root))
+                foreach (var (_, words) in SeedText.In(text.Value))
+                    log.Add(SeedText.Found(level, owner, text.At, words));
         }
 
         private JsonValue? Json(string file, FindingOwner owner, string contents)

@@ -41,5 +41,6 @@ public static class Checks
         new SameNumbersCheck(),
         new UndeclaredGridCheck(),
         new UnnoisedNameCheck(),
+        new SeedInProseCheck(),
     ];
 }

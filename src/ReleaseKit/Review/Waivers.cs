@@ -11,7 +11,7 @@ public static class Waivers
     /// <summary>Slugs of findings that may be waived.</summary>
     public static IReadOnlySet<string> Waivable { get; } = new HashSet<string>
     {
-        "formula-cell", "kind-not-given", "label-unused", "looks-like-period", "looks-like-total", "no-address", "no-licence", "prose-heading", "prose-html", "prose-may-disagree", "prose-rounded-far", "total-far-from-parts",
+        "formula-cell", "kind-not-given", "label-unused", "looks-like-period", "looks-like-total", "no-address", "no-licence", "prose-heading", "prose-html", "prose-may-disagree", "prose-rounded-far", "seed-given", "total-far-from-parts",
         "undeclared-unit",
     };
 
