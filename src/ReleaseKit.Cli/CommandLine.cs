@@ -23,9 +23,9 @@ public static class CommandLine
 
     private static int Answer(ParseResult parsed, TextWriter output, TextWriter error)
     {
-        if (parsed.Errors.Count > 0 && parsed.Action is not HelpTextAction)
+        if (CallFault.Of(parsed, parsed.Action is HelpTextAction) is { } fault)
         {
-            error.WriteLine($"releasekit: {parsed.Errors[0].Message} See 'releasekit {CommandName(parsed)}--help'.");
+            error.WriteLine($"releasekit: {fault} See 'releasekit {CommandName(parsed)}--help'.");
             return ExitCode.Unusable;
         }
 

@@ -13,6 +13,8 @@ internal static class ComposeCommand
     {
         var folder = new Argument<string>("FOLDER") { Description = "The release folder." };
         var site = new Option<string>("--to") { Description = "Where the publication goes.", HelpName = "SITE", Required = true };
+        folder.Validators.Add(result => CallFault.DemandName(result, "FOLDER"));
+        site.Validators.Add(result => CallFault.DemandName(result, "SITE"));
         var command = new Command("compose", "The publication: pages, charts, downloads.") { folder, site };
         command.SetAction(parsed => Run(parsed.GetRequiredValue(folder), parsed.GetRequiredValue(site), streams(parsed)));
         return command;
@@ -20,6 +22,7 @@ internal static class ComposeCommand
 
     private static int Run(string folder, string site, Streams streams)
     {
+        SiteFolder.DemandOutside(folder, site);
         var reviewed = ReviewedFolder.Of(folder, streams);
         foreach (var finding in PrintedFindings.Of(reviewed.Findings, folder))
             streams.Error.WriteLine(FindingText.Of(finding));

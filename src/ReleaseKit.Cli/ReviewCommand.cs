@@ -10,6 +10,7 @@ internal static class ReviewCommand
     {
         var folder = new Argument<string>("FOLDER") { Description = "The release folder." };
         var all = new Option<bool>("--all") { Description = "Every finding in full, however many of a kind." };
+        folder.Validators.Add(result => CallFault.DemandName(result, "FOLDER"));
         var command = new Command("review", "What stands in the way, and for whom.") { folder, all };
         command.SetAction(parsed => Run(parsed.GetRequiredValue(folder), parsed.GetValue(all), streams(parsed)));
         return command;

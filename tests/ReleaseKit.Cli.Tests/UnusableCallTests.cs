@@ -16,6 +16,60 @@ public sealed class UnusableCallTests
         AssertRefused(Call.Of(arguments));
     }
 
+    [Theory]
+    [InlineData("FOLDER", "review", "")]
+    [InlineData("FOLDER", "review", " ")]
+    [InlineData("FOLDER", "compose", "", "--to", "site")]
+    [InlineData("SITE", "compose", "folder", "--to", "")]
+    [InlineData("SITE", "compose", "folder", "--to", " ")]
+    public void An_empty_name_is_refused_by_its_place(string place, params string[] arguments)
+    {
+        var call = Call.Of(arguments);
+        AssertRefused(call);
+        Assert.Contains($"{place} is empty; name the folder.", call.Error);
+        Assert.DoesNotContain("Reading", call.Error);
+    }
+
+    [Theory]
+    [InlineData("draft")]
+    [InlineData("draft", "--help")]
+    [InlineData("audit", "-h")]
+    [InlineData("--help", "draft")]
+    [InlineData("draft", "--version")]
+    public void An_unknown_command_is_refused_whatever_follows_it(params string[] arguments)
+    {
+        var call = Call.Of(arguments);
+        AssertRefused(call);
+        Assert.Contains($"'{arguments.Single(word => word[0] != '-')}' is no command; the commands are review and compose.", call.Error);
+    }
+
+    [Theory]
+    [InlineData("'--al' is no option of review.", "review", "--al", "rel")]
+    [InlineData("'--al' is no option of review.", "review", "rel", "--al")]
+    [InlineData("'-q' is no option of compose.", "compose", "-q", "rel", "--to", "site")]
+    [InlineData("'--colour' is no option.", "--colour")]
+    public void An_unknown_option_is_named_and_not_the_word_after_it(string said, params string[] arguments)
+    {
+        var call = Call.Of(arguments);
+        AssertRefused(call);
+        Assert.Contains(said, call.Error);
+    }
+
+    [Theory]
+    [InlineData("release")]
+    [InlineData("release/")]
+    [InlineData("release/site")]
+    [InlineData("release/tables/../deep/site")]
+    public void A_target_in_the_release_folder_is_refused(string site)
+    {
+        using var folder = new TemporaryFolder();
+        folder.Write("release/release.json", "{}");
+        var call = Call.Of("compose", folder.In("release") + "/", "--to", Path.Combine(folder.Path, site));
+        AssertRefused(call);
+        Assert.Contains($"lies in the release folder {folder.In("release")}", call.Error);
+        Assert.Equal(["release.json"], Directory.EnumerateFileSystemEntries(folder.In("release")).Select(Path.GetFileName));
+    }
+
     [Fact]
     public void A_folder_that_is_missing_is_refused()
     {

@@ -33,6 +33,15 @@ public sealed class SiteFolder : IDisposable
     /// <summary>Paths written so far, in the site's notation with slashes, sorted.</summary>
     public IReadOnlyList<string> Written => [.. written.Keys.Order(StringComparer.Ordinal)];
 
+    /// <exception cref="SiteFolderException">The target is the release folder or lies in it.</exception>
+    public static void DemandOutside(string releaseFolder, string target)
+    {
+        var (release, site) = (Path.TrimEndingDirectorySeparator(Path.GetFullPath(releaseFolder)), Path.GetFullPath(target));
+        var way = Path.GetRelativePath(release, site);
+        if (!Path.IsPathRooted(way) && way.Split(Path.DirectorySeparatorChar)[0] != "..")
+            throw SiteFolderException.IsInRelease(site, release);
+    }
+
     /// <summary>Makes ready to compose into the target, and mends what a run that was cut off left behind.</summary>
     /// <exception cref="SiteFolderException">The target is not a missing, empty or own folder, or is in use, or cannot be written.</exception>
     public static SiteFolder Open(string target)

@@ -14,6 +14,9 @@ public sealed class SiteFolderException : Exception
     internal static SiteFolderException IsRoot(string target) =>
         new($"{target} is the root of a file system; give a folder of its own, such as {Path.Combine(target, "site")}.");
 
+    internal static SiteFolderException IsInRelease(string target, string release) =>
+        new($"{target} lies in the release folder {release}, which would then hold its own publication; nothing was changed. Give a folder outside it, such as {Path.Combine(Path.GetDirectoryName(release) ?? release, "site")}.");
+
     internal static SiteFolderException IsFile(string target) => new($"{target} is a file; give a folder that is missing, empty or was composed before.");
 
     internal static SiteFolderException IsLink(string target) => new($"{target} is a link; give the folder it points to.");
