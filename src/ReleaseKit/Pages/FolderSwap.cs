@@ -13,16 +13,31 @@ internal static partial class FolderSwap
 
     public static void Swap(SwapPaths paths)
     {
+        File.WriteAllText(SwapPaths.ArrivedIn(paths.New), "");
         if (!Directory.Exists(paths.Target))
             Directory.Move(paths.New, paths.Target);
-        else
-        {
-            if (TryExchange(paths.New, paths.Target))
-                Directory.Move(paths.New, paths.Old);
-            else
-                RenameTwice(paths);
+        else if (!TryExchange(paths.New, paths.Target))
+            RenameTwice(paths);
+        Settle(paths);
+    }
+
+    /// <summary>Whether a run was cut off, or failed, between its swap and the keeping of what it replaced.</summary>
+    public static bool HasReplaced(SwapPaths paths) =>
+        Directory.Exists(paths.Old) || File.Exists(SwapPaths.ArrivedIn(paths.Target)) && Directory.Exists(paths.New);
+
+    /// <summary>
+    /// What the swap leaves to do. While the new site bears the sign that it has arrived, what lies where it was written is the site that it replaced, and
+    /// no longer one that a run was cut off while writing. Cut off, it can be taken up again.
+    /// </summary>
+    public static void Settle(SwapPaths paths)
+    {
+        var arrived = File.Exists(SwapPaths.ArrivedIn(paths.Target));
+        if (arrived && Directory.Exists(paths.New))
+            Directory.Move(paths.New, paths.Old);
+        if (arrived)
+            File.Delete(SwapPaths.ArrivedIn(paths.Target));
+        if (Directory.Exists(paths.Old))
             Keep(paths);
-        }
     }
 
     /// <summary>

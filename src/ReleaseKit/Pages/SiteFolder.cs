@@ -12,6 +12,9 @@ public sealed class SiteFolder : IDisposable
     /// <summary>Name of the file that says a folder was composed here and may be replaced.</summary>
     public const string Marker = ".releasekit";
 
+    /// <summary>Name of the file that a site bears from its swap until what it replaced is kept.</summary>
+    internal const string Arrived = Marker + "-arrived";
+
     private const string MarkerText = "Composed by releasekit. The next composition replaces this folder whole.\n";
 
     private readonly SwapPaths paths;
@@ -116,10 +119,11 @@ public sealed class SiteFolder : IDisposable
         }
     }
 
-    /// <summary>Removes what was not swapped in.</summary>
+    /// <summary>Removes what was not swapped in; a site that was replaced and could not be kept stays for the next start.</summary>
     public void Dispose()
     {
-        FolderOwnership.Remove(paths.New);
+        if (!FolderSwap.HasReplaced(paths))
+            FolderOwnership.Remove(paths.New);
         hold.Dispose();
     }
 
@@ -139,11 +143,9 @@ public sealed class SiteFolder : IDisposable
     {
         if (Directory.Exists(paths.Old) && !Path.Exists(paths.Target))
             Directory.Move(paths.Old, paths.Target);
-        if (Directory.Exists(paths.Old))
-        {
+        if (FolderSwap.HasReplaced(paths))
             FolderOwnership.DemandBefore(paths.Before);
-            FolderSwap.Keep(paths);
-        }
+        FolderSwap.Settle(paths);
         FolderOwnership.Remove(paths.Gone);
         FolderOwnership.Remove(paths.New);
     }

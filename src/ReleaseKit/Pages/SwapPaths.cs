@@ -6,6 +6,9 @@ namespace ReleaseKit.Pages;
 /// </summary>
 internal sealed record SwapPaths(string Parent, string Target, string Before, string New, string Old, string Gone, string Hold)
 {
+    /// <summary>The sign of a new site that is put in its place and whose replaced one may not have been kept yet.</summary>
+    public static string ArrivedIn(string site) => Path.Combine(site, SiteFolder.Arrived);
+
     public static SwapPaths Beside(string target)
     {
         var full = Path.TrimEndingDirectorySeparator(Path.GetFullPath(target));

@@ -182,6 +182,81 @@ public sealed class SiteFolderTests : IDisposable
     }
 
     [Fact]
+    public void Run_cut_off_just_after_the_swap_keeps_the_replaced_site_even_if_nothing_changes_after()
+    {
+        Compose("zero");
+        Compose("two");
+        Arrive();
+        LeaveBehind(".site.releasekit-new", "one");
+        Assert.True(Compose("two")!.IsNone);
+        Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
+        AssertSettled("site", "site.before");
+    }
+
+    [Fact]
+    public void Run_cut_off_just_before_the_swap_is_cleared_away_and_the_kept_site_stays()
+    {
+        Compose("zero");
+        Compose("one");
+        LeaveBehind(".site.releasekit-new", "two");
+        File.WriteAllText(folder.In(".site.releasekit-new/.releasekit-arrived"), "");
+        using (SiteFolder.Open(Target))
+            Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("zero", File.ReadAllText(folder.In("site.before/index.html")));
+        AssertSettled("site", "site.before");
+    }
+
+    [Fact]
+    public void Run_cut_off_when_the_replaced_site_has_left_the_place_of_the_new_one_is_taken_up_again()
+    {
+        Compose("two");
+        Arrive();
+        LeaveBehind(".site.releasekit-old", "one");
+        using (SiteFolder.Open(Target))
+            Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
+        AssertSettled("site", "site.before");
+    }
+
+    [Fact]
+    public void First_run_cut_off_just_after_its_rename_leaves_the_site_alone()
+    {
+        Compose("one");
+        Arrive();
+        Assert.True(Compose("one")!.IsNone);
+        AssertSettled("site");
+    }
+
+    [Fact]
+    public void Run_cut_off_just_after_the_swap_with_an_empty_folder_keeps_nothing()
+    {
+        Compose("one");
+        Arrive();
+        Directory.CreateDirectory(folder.In(".site.releasekit-new"));
+        using (SiteFolder.Open(Target))
+            Assert.Equal("one", File.ReadAllText(folder.In("site/index.html")));
+        AssertSettled("site");
+    }
+
+    [Fact]
+    public void Replaced_site_that_cannot_be_kept_is_not_removed()
+    {
+        Compose("one");
+        using (var site = SiteFolder.Open(Target))
+        {
+            site.Write("index.html", "two"u8);
+            File.WriteAllText(folder.In(".site.releasekit-old"), "in the way");
+            Assert.Throws<SiteFolderException>(site.Finish);
+        }
+        Assert.Equal("one", File.ReadAllText(folder.In(".site.releasekit-new/index.html")));
+        File.Delete(folder.In(".site.releasekit-old"));
+        using (SiteFolder.Open(Target))
+            Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
+    }
+
+    [Fact]
     public void Run_cut_off_while_it_removes_what_is_no_longer_kept_leaves_the_kept_site_whole()
     {
         Compose("one");
@@ -272,6 +347,14 @@ public sealed class SiteFolderTests : IDisposable
         Directory.CreateDirectory(folder.In(name));
         File.WriteAllText(folder.In($"{name}/{SiteFolder.Marker}"), "");
         File.WriteAllText(folder.In($"{name}/index.html"), home);
+    }
+
+    private void Arrive() => File.WriteAllText(folder.In("site/.releasekit-arrived"), "");
+
+    private void AssertSettled(params string[] neighbours)
+    {
+        Assert.Equal(neighbours, Neighbours());
+        Assert.Empty(Directory.EnumerateFiles(folder.Path, "*arrived", SearchOption.AllDirectories));
     }
 
     private string[] Neighbours() =>
