@@ -8,6 +8,7 @@ internal static class ChangeText
     public static IEnumerable<string> Of(SiteChanges? changes, SiteFolder site) =>
     [
         .. changes is null ? [] : Changes(changes),
+        .. changes is { Unlisted.Count: > 0 } ? [Unlisted(changes.Unlisted, site)] : (IEnumerable<string>)[],
         $"To switch it on: copy what is in {site.Target} to the folder of your web server. index.html is its first page, and no program has to run there.",
         .. changes is null or { IsNone: true } ? [] : WayBack(site),
     ];
@@ -27,6 +28,9 @@ internal static class ChangeText
 
     private static IEnumerable<string> Line(string what, FileChanges files) =>
         files.IsNone ? [] : [$"  {what}: {Counts(files.New, files.Changed, files.Gone)}"];
+
+    private static string Unlisted(IReadOnlyList<string> files, SiteFolder site) =>
+        $"Gone, and kept in {site.Before} only until the next composing: {SiteChanges.Named(files)}. If one of them is your own, fetch it from there.";
 
     private static string Counts(int added, int changed, int gone) => $"{added} new, {changed} changed, {gone} gone";
 

@@ -54,7 +54,9 @@ public static class HelpText
         releasekit compose FOLDER --to SITE: the publication.
 
         FOLDER is reviewed first. With any stop nothing is written.
-        SITE must be missing, empty, or a folder that compose wrote before. The new
+        SITE must be missing, empty, or a folder that compose wrote before, and lie
+        outside FOLDER. Files of your own in it or in SITE.before are never lost: they
+        are named, and nothing is changed until you have moved them away. The new
         pages are made beside it and swapped in at the end, so a crash or a full
         disk leaves what stood. The site that was replaced is kept as SITE.before,
         only the last one. The last lines say what changed since, how to switch the

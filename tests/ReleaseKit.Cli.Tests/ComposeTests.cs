@@ -21,11 +21,37 @@ public sealed class ComposeTests
     {
         using var folder = new TemporaryFolder();
         Assert.Equal(0, Call.Of("compose", Repository.Release("example"), "--to", folder.In("site"), "--quiet").ExitCode);
-        File.WriteAllText(folder.In("site/stray.html"), "left over");
+        var first = File.ReadAllText(folder.In("site/downloads/arrears-long.csv"));
+        var changed = CopyOfExample(folder, "tables/arrears-by-ward.csv", csv => csv.Replace("1599,230", "1599,235"));
+        Assert.Equal(0, Call.Of("compose", changed, "--to", folder.In("site"), "--quiet").ExitCode);
+        Assert.NotEqual(first, File.ReadAllText(folder.In("site/downloads/arrears-long.csv")));
+        Assert.Equal(first, File.ReadAllText(folder.In("site.before/downloads/arrears-long.csv")));
+        Assert.Equal(["release", "site", "site.before"], Directory.EnumerateFileSystemEntries(folder.Path).Select(Path.GetFileName).Order());
+    }
+
+    [Fact]
+    public void A_file_of_somebody_in_a_composed_site_is_named_and_nothing_changes()
+    {
+        using var folder = new TemporaryFolder();
         Assert.Equal(0, Call.Of("compose", Repository.Release("example"), "--to", folder.In("site"), "--quiet").ExitCode);
-        Assert.False(File.Exists(folder.In("site/stray.html")));
-        Assert.Equal(["site", "site.before"], Directory.EnumerateFileSystemEntries(folder.Path).Select(Path.GetFileName).Order());
-        Assert.True(File.Exists(folder.In("site.before/stray.html")));
+        folder.Write("site/robots.txt", "mine");
+        var call = Call.Of("compose", Repository.Release("example"), "--to", folder.In("site"), "--quiet");
+        Assert.Equal(ExitCode.Unusable, call.ExitCode);
+        Assert.Contains("site holds a file that compose did not write: robots.txt.", call.Error);
+        Assert.Equal("", call.Output);
+        Assert.Equal("mine", File.ReadAllText(folder.In("site/robots.txt")));
+        Assert.Equal(["site"], Directory.EnumerateFileSystemEntries(folder.Path).Select(Path.GetFileName));
+    }
+
+    [Fact]
+    public void A_site_without_a_list_of_its_files_is_replaced_and_what_goes_is_named()
+    {
+        using var folder = new TemporaryFolder();
+        folder.Write("site/.releasekit", "Composed by releasekit. The next composition replaces this folder whole.\n");
+        folder.Write("site/robots.txt", "mine");
+        var call = Call.Of("compose", Repository.Release("example"), "--to", folder.In("site"), "--quiet");
+        Assert.Equal(0, call.ExitCode);
+        Assert.Contains($"Gone, and kept in {folder.In("site.before")} only until the next composing: robots.txt.", call.Output);
     }
 
     [Fact]

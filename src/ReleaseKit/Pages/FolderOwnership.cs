@@ -3,7 +3,7 @@ namespace ReleaseKit.Pages;
 /// <summary>Which folders may be replaced, and how they are removed.</summary>
 internal static class FolderOwnership
 {
-    /// <exception cref="SiteFolderException">The target is there and is not an empty folder or one of ours.</exception>
+    /// <exception cref="SiteFolderException">The target is there and is not an empty folder or one of ours, or holds files that were not composed.</exception>
     public static void Demand(string target)
     {
         if (File.Exists(target))
@@ -12,6 +12,7 @@ internal static class FolderOwnership
             throw SiteFolderException.IsLink(target);
         if (Directory.Exists(target) && !IsOurs(target))
             throw SiteFolderException.NotOurs(target);
+        DemandNoOthers(target);
     }
 
     /// <exception cref="SiteFolderException">The place where the replaced site is kept holds something that is not ours.</exception>
@@ -19,6 +20,7 @@ internal static class FolderOwnership
     {
         if (File.Exists(before) || new DirectoryInfo(before).LinkTarget is not null || Directory.Exists(before) && !IsOurs(before))
             throw SiteFolderException.BeforeIsNotOurs(before);
+        DemandNoOthers(before);
     }
 
     /// <summary>Whether the folder bears the marker of a composition.</summary>
@@ -36,6 +38,12 @@ internal static class FolderOwnership
         foreach (var file in Directory.EnumerateFiles(folder).Where(file => Path.GetFileName(file) != SiteFolder.Marker))
             File.Delete(file);
         Directory.Delete(folder, recursive: true);
+    }
+
+    private static void DemandNoOthers(string site)
+    {
+        if (WrittenList.OthersIn(site) is { Count: > 0 } others)
+            throw SiteFolderException.HoldsOthers(site, others);
     }
 
     private static bool IsOurs(string folder) =>

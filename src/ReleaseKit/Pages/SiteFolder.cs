@@ -5,7 +5,7 @@ namespace ReleaseKit.Pages;
 /// <summary>
 /// The folder of a publication while it is being composed. Everything is written beside the target and swapped in by
 /// <see cref="Finish"/>: until then, and whatever happens, what stood before stands whole; afterwards it is kept as <see cref="Before"/>.
-/// A target must be missing, empty, or bear the marker that <see cref="Finish"/> leaves.
+/// A target must be missing, empty, or bear the marker that <see cref="Finish"/> leaves, and hold no files but those that the marker lists.
 /// </summary>
 public sealed class SiteFolder : IDisposable
 {
@@ -14,8 +14,6 @@ public sealed class SiteFolder : IDisposable
 
     /// <summary>Name of the file that a site bears from its swap until what it replaced is kept.</summary>
     internal const string Arrived = Marker + "-arrived";
-
-    private const string MarkerText = "Composed by releasekit. The next composition replaces this folder whole.\n";
 
     private readonly SwapPaths paths;
     private readonly FileStream hold;
@@ -61,7 +59,7 @@ public sealed class SiteFolder : IDisposable
                 if (FolderOwnership.IsComposed(paths.Target))
                     FolderOwnership.DemandBefore(paths.Before);
                 Directory.CreateDirectory(paths.New);
-                File.WriteAllText(Path.Combine(paths.New, Marker), MarkerText);
+                File.WriteAllText(MarkerIn(paths.New), WrittenList.Text([]));
                 return new SiteFolder(paths, hold);
             }
             catch
@@ -108,9 +106,12 @@ public sealed class SiteFolder : IDisposable
     {
         try
         {
+            File.WriteAllText(MarkerIn(paths.New), WrittenList.Text(Written));
             var changes = FolderOwnership.IsComposed(paths.Target) ? SiteChanges.Between(paths.Target, paths.New) : null;
             if (changes is not { IsNone: true })
                 FolderSwap.Swap(paths);
+            else if (!WrittenList.IsIn(paths.Target))
+                AddList();
             return changes;
         }
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
@@ -126,6 +127,16 @@ public sealed class SiteFolder : IDisposable
             FolderOwnership.Remove(paths.New);
         hold.Dispose();
     }
+
+    /// <summary>In one step: half a list would say of our own files that they are somebody's.</summary>
+    private void AddList()
+    {
+        var list = Path.Combine(paths.New, Marker + "-list");
+        File.Copy(MarkerIn(paths.New), list);
+        File.Move(list, MarkerIn(paths.Target), overwrite: true);
+    }
+
+    private static string MarkerIn(string site) => Path.Combine(site, Marker);
 
     private static FileStream Hold(SwapPaths paths)
     {

@@ -24,6 +24,10 @@ public sealed class SiteFolderException : Exception
     internal static SiteFolderException NotOurs(string target) =>
         new($"{target} holds files that were not composed here; nothing was changed. Give a folder that is missing, empty or was composed before.");
 
+    internal static SiteFolderException HoldsOthers(string site, IReadOnlyList<string> others) =>
+        new($"{site} holds {(others.Count == 1 ? "a file" : $"{others.Count} files")} that compose did not write: {SiteChanges.Named(others)}. Composing would lose {(others.Count == 1 ? "it" : "them")}, so nothing was changed. "
+            + "Move what is named out of there and compose again; what the web server needs beside the pages can be put back after, or kept where the web server's copy is.");
+
     internal static SiteFolderException BeforeIsNotOurs(string before) =>
         new($"{before} was not composed here, and the site that is replaced is to be kept there; nothing was changed. Move it away, or compose to another folder.");
 

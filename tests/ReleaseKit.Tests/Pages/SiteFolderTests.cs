@@ -301,6 +301,99 @@ public sealed class SiteFolderTests : IDisposable
     }
 
     [Theory]
+    [InlineData("robots.txt")]
+    [InlineData(".htaccess")]
+    [InlineData("tables/notes.html")]
+    [InlineData(".well-known/security.txt")]
+    public void File_of_others_put_into_a_composed_site_is_named_and_never_lost(string own)
+    {
+        Compose("one", "tables/a.html");
+        Put($"site/{own}");
+        var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
+        Assert.Contains($"site holds a file that compose did not write: {own}. Composing would lose it", fault.Message, StringComparison.Ordinal);
+        Assert.DoesNotContain('\n', fault.Message);
+        Assert.Equal("mine", File.ReadAllText(folder.In($"site/{own}")));
+        Assert.Equal(["site"], Neighbours());
+        File.Delete(folder.In($"site/{own}"));
+        Compose("two");
+        Put($"site/{own}");
+        Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+    }
+
+    [Fact]
+    public void File_of_others_in_the_kept_site_is_named_and_never_lost()
+    {
+        Compose("one");
+        Compose("two");
+        Put("site.before/robots.txt");
+        var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
+        Assert.Contains("site.before holds a file that compose did not write: robots.txt", fault.Message, StringComparison.Ordinal);
+        Assert.Equal("one", File.ReadAllText(folder.In("site.before/index.html")));
+    }
+
+    [Fact]
+    public void Many_files_of_others_are_counted_and_the_first_named()
+    {
+        Compose("one");
+        foreach (var number in Enumerable.Range(10, 14))
+            Put($"site/own-{number}.txt");
+        var fault = Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
+        Assert.Contains("holds 14 files that compose did not write: own-10.txt, own-11.txt", fault.Message, StringComparison.Ordinal);
+        Assert.Contains("own-21.txt and 2 more. Composing would lose them", fault.Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Link_in_a_composed_site_is_a_file_of_others_and_is_not_followed()
+    {
+        Compose("one");
+        Put("elsewhere/letter.txt");
+        File.CreateSymbolicLink(folder.In("site/link"), folder.In("elsewhere"));
+        Assert.Contains("did not write: link.", Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target)).Message, StringComparison.Ordinal);
+        Assert.Equal("mine", File.ReadAllText(folder.In("elsewhere/letter.txt")));
+    }
+
+    [Fact]
+    public void File_that_a_file_browser_leaves_is_no_hindrance()
+    {
+        Compose("one");
+        Put("site/.DS_Store");
+        Compose("two");
+        Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
+    }
+
+    [Fact]
+    public void Site_without_a_list_is_replaced_as_ever_and_the_files_that_go_are_named()
+    {
+        LeaveBehind("site", "one");
+        Put("site/robots.txt");
+        Put("site/a/page.html");
+        Assert.Equal(["robots.txt", "a/page.html"], Compose("two")!.Unlisted);
+        Assert.Equal("mine", File.ReadAllText(folder.In("site.before/robots.txt")));
+        Assert.Empty(Compose("three", "b.html")!.Unlisted);
+        Assert.Empty(Compose("four")!.Unlisted);
+    }
+
+    [Fact]
+    public void Site_without_a_list_gets_one_though_nothing_changed()
+    {
+        LeaveBehind("site", "one");
+        Assert.True(Compose("one")!.IsNone);
+        Put("site/robots.txt");
+        Assert.Throws<SiteFolderException>(() => SiteFolder.Open(Target));
+        Assert.Equal(["site"], Neighbours());
+    }
+
+    [Fact]
+    public void List_is_the_same_whatever_the_order_of_writing()
+    {
+        Compose("one", "b.html", "a/c.html");
+        var list = File.ReadAllText(folder.In("site/.releasekit"));
+        Compose("two", "a/c.html", "b.html");
+        Assert.Equal(list, File.ReadAllText(folder.In("site/.releasekit")));
+        Assert.EndsWith("a/c.html\nb.html\nindex.html\n", list, StringComparison.Ordinal);
+    }
+
+    [Theory]
     [InlineData("../escape.html")]
     [InlineData("/etc/escape.html")]
     [InlineData("tables/../../escape.html")]
@@ -347,6 +440,12 @@ public sealed class SiteFolderTests : IDisposable
         Directory.CreateDirectory(folder.In(name));
         File.WriteAllText(folder.In($"{name}/{SiteFolder.Marker}"), "");
         File.WriteAllText(folder.In($"{name}/index.html"), home);
+    }
+
+    private void Put(string path)
+    {
+        Directory.CreateDirectory(Path.GetDirectoryName(folder.In(path))!);
+        File.WriteAllText(folder.In(path), "mine");
     }
 
     private void Arrive() => File.WriteAllText(folder.In("site/.releasekit-arrived"), "");
