@@ -22,6 +22,9 @@ public sealed record Measure
     /// <summary>Pages print shares of one in 100.</summary>
     public int PrintFactor => InOnes ? 100 : 1;
 
+    /// <summary>For a share or rate, what its numerator is multiplied by: 100, 1 or <see cref="Per"/>; null where that is not said.</summary>
+    public double? Whole => Kind == MeasureKind.Share ? (InOnes ? 1 : 100) : Per;
+
     /// <summary>Factor from the CSV's number to the figure's unit; 1 unless the CSV counts in thousands. ValueAt gives the CSV's number.</summary>
     public double Multiplier { get; init; } = 1;
 

@@ -54,6 +54,14 @@ internal static class BudgetText
         _ => "Its law",
     };
 
+    /// <summary>What a sensitivity was declared by: "perCell", 1.</summary>
+    public static (string Key, double Value) Declared(Sensitivity sensitivity) => sensitivity switch
+    {
+        { CellsPerUnit: not null, PerCell: { } most } => ("perCell", most),
+        { L1: { } sum } => ("l1", sum),
+        _ => ("l2", sensitivity.L2 ?? 0),
+    };
+
     /// <summary>"1 cell a household, 1 a cell".</summary>
     public static string Contribution(Sensitivity sensitivity, NoiseAccount account) => sensitivity switch
     {
@@ -85,6 +93,14 @@ internal static class BudgetText
     public static string Written(Accounting accounting) => accounting.ToString().ToLowerInvariant();
 
     public static string Written(MeasureKind kind) => kind.ToString().ToLowerInvariant();
+
+    /// <summary>Figures of a kind: "means"; of one that adds up, "sums".</summary>
+    public static string Several(MeasureKind kind) => kind switch
+    {
+        MeasureKind.Count or MeasureKind.Amount => "sums",
+        MeasureKind.Index => "indices",
+        _ => $"{Written(kind)}s",
+    };
 
     /// <summary>What is said of further figures of so many in all; {0} is how many.</summary>
     public static string More(int count, string one, string several, string whose) => count switch

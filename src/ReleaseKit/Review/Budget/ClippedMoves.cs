@@ -3,8 +3,8 @@ using ReleaseKit.Releases;
 namespace ReleaseKit.Review.Budget;
 
 /// <summary>
-/// How far one unit can move the sums or means of one measure at least: what it can put into a sum (its contribution is clipped), divided by the
-/// public denominator of a mean. Only what is certain counts: one cell; a cell with the totals above it; the smallest moves on every level and in
+/// How far one unit can move the sums, means, shares or rates of one measure at least: what it can put into a sum (its contribution is clipped; of a
+/// share or rate of units it is 1 of the numerator), divided by the public denominator. Only what is certain counts: one cell; a cell with the totals above it; the smallest moves on every level and in
 /// every period; and the same for a unit that is replaced by one of another cell, so that both cells move.
 /// </summary>
 internal sealed class ClippedMoves
@@ -44,21 +44,29 @@ internal sealed class ClippedMoves
     /// <summary>Whether two cells in which a unit is not counted together move by more than one does.</summary>
     public bool IsApart { get; private set; }
 
-    /// <summary>Null where the mechanism does not say enough, or no mean of the measure carries it.</summary>
-    public static ClippedMoves? Of(Table table, Measure measure, Mechanism mechanism, Neighbouring neighbouring)
+    /// <summary>Null where the folder does not say enough, or no figure of the measure carries the mechanism.</summary>
+    public static ClippedMoves? Of(Table table, Measure measure, Mechanism mechanism, NoiseAccount account)
     {
-        if (mechanism.Clipped is not { } clipped || NumbersOf(table, measure, mechanism) is not { } numbers)
+        if (ContributionOf(measure, mechanism, account) is not { } contribution || NumbersOf(table, measure, mechanism) is not { } numbers)
             return null;
         var rows = Enumerable.Range(0, table.RowCount).Where(row => measure.HasNumber(row) && numbers(row) > 0
             && measure.RuleAt(row) is NoiseRule.FromMechanism from && from.Mechanism.Id == mechanism.Id).ToList();
-        return rows.Count == 0 ? null : new(table, rows.ToDictionary(row => row, numbers), clipped, neighbouring, mechanism.Sensitivity.Moves);
+        return rows.Count == 0 ? null : new(table, rows.ToDictionary(row => row, numbers), contribution, account.Neighbouring, mechanism.Sensitivity.Moves);
     }
 
-    /// <summary>By what the sum of a row is divided: 1 for an amount, or for what else is clipped without a denominator; for a mean the denominators, which stand in a column that is declared as public or is a measure itself.</summary>
+    // A share or rate of what may stand several times in the numerator for one unit is bounded by nothing that was said.
+    private static ClippedTo? ContributionOf(Measure measure, Mechanism mechanism, NoiseAccount account) => measure switch
+    {
+        { Kind: not (MeasureKind.Share or MeasureKind.Rate) } => mechanism.Clipped,
+        { Whole: > 0 and var whole } when BudgetText.IsUnitOfPrivacy(measure.Unit, account) => new ClippedTo(0, whole),
+        _ => null,
+    };
+
+    /// <summary>By what the sum of a row is divided: 1 for an amount, or for what else is clipped without a denominator; for a mean, share or rate the denominators, which stand in a column that is declared as public or is a measure itself.</summary>
     private static Func<int, double>? NumbersOf(Table table, Measure measure, Mechanism mechanism) => (measure.Kind, mechanism.DenominatorColumn) switch
     {
         (MeasureKind.Amount, _) or (MeasureKind.Count or MeasureKind.Estimate, null) => _ => 1,
-        (MeasureKind.Mean, { } column) => NumbersOf(table, column),
+        (MeasureKind.Mean or MeasureKind.Share or MeasureKind.Rate, { } column) => NumbersOf(table, column),
         _ => null,
     };
 

@@ -1,3 +1,4 @@
+using ReleaseKit.Review;
 using ReleaseKit.Tests.Folders;
 using Xunit;
 
@@ -155,6 +156,95 @@ public sealed class ClippedSensitivityTests
         Assert.Contains("Do: if the denominators are public, add \"denominator\": { \"public\": \"lamps\" };", text, StringComparison.Ordinal);
     }
 
+    // Shares of the unit of privacy over 50, 200 and 400: 100 ÷ 50 = 2, in ones 0.02, a rate per 1,000 20. Replaced by one of another street: 100 ÷ 50 + 100 ÷ 200 = 2.5.
+    [Theory]
+    [InlineData("\"kind\": \"share\"", "\"l1\": 1.99", "shares of column \"lit\" by 2.", "\"l1\": 2 or more")]
+    [InlineData("\"kind\": \"share\"", "\"l2\": 1.99", "shares of column \"lit\" by 2.", "\"l2\": 2 or more")]
+    [InlineData("\"kind\": \"share\"", "\"cellsPerUnit\": 1, \"perCell\": 0.01", "shares of column \"lit\" by 2.", "\"perCell\": 2 or more")]
+    [InlineData("\"kind\": \"share\", \"in\": \"ones\"", "\"l1\": 0.0001", "shares of column \"lit\" by 0.02.", "\"l1\": 0.02 or more")]
+    [InlineData("\"kind\": \"rate\", \"per\": 1000", "\"l1\": 19", "rates of column \"lit\" by 20.", "\"l1\": 20 or more")]
+    [InlineData("\"kind\": \"share\"", "\"l1\": 2.4", "shares of column \"lit\" by 2.5 in all", "\"l1\": 2.5 or more, or \"moves\": false", true)]
+    public void Share_of_units_moves_by_one_of_its_numerator(string kind, string sensitivity, string found, string write, bool replaced = false)
+    {
+        using var folder = Shares(kind, sensitivity);
+        if (replaced)
+            folder.Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace);
+        var text = folder.Text("sensitivity-too-small");
+        Assert.StartsWith("Stop mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains(found, text, StringComparison.Ordinal);
+        Assert.Contains("That follows from \"unit\": each keeper is 1 of the numerator", text, StringComparison.Ordinal);
+        Assert.Contains($"Do: write {write}", text, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("\"kind\": \"share\"", "\"l1\": 2")]
+    [InlineData("\"kind\": \"share\", \"in\": \"ones\"", "\"l2\": 0.02")]
+    [InlineData("\"kind\": \"rate\", \"per\": 1000", "\"cellsPerUnit\": 1, \"perCell\": 20")]
+    public void Share_of_units_with_a_norm_that_holds_passes(string kind, string sensitivity)
+    {
+        using var folder = Shares(kind, sensitivity);
+        Assert.Empty(folder.Review().Where(finding => finding.Level != FindingLevel.Note || finding.Slug.StartsWith("sensitivity", StringComparison.Ordinal)).Select(finding => $"{finding.Slug} {finding.Found}"));
+    }
+
+    // How many lamps one keeper is in the numerator is not said: a note, until the page that shows how is named.
+    [Fact]
+    public void Share_of_something_else_is_noted_as_stated()
+    {
+        using var folder = Shares("\"kind\": \"share\"", "\"l1\": 0.01", unit: "lamp");
+        folder.HasNo("sensitivity-too-small");
+        Assert.Contains("can move the shares of column \"lit\" in table \"lamps\": what \"lamps-lit\" declares is taken as it stands.", folder.Text("sensitivity-as-stated"), StringComparison.Ordinal);
+        folder.Edit("mechanisms.json", "\"denominator\"", "\"describedAt\": \"https://office.example/shares\", \"denominator\"");
+        folder.HasNo("sensitivity-as-stated");
+    }
+
+    [Theory]
+    [InlineData("\"kind\": \"share\"", "\"l1\": 2", "Stop", "shares")]
+    [InlineData("\"kind\": \"share\"", "\"cellsPerUnit\": 1, \"perCell\": 2", "Caution", "shares")]
+    [InlineData("\"kind\": \"rate\", \"per\": 1000", "\"l2\": 20", "Stop", "rates")]
+    public void Share_without_a_denominator_is_told_as_a_mean_is(string kind, string sensitivity, string level, string shares)
+    {
+        using var folder = Shares(kind, sensitivity, denominator: "");
+        var text = folder.Text("denominator-missing");
+        Assert.StartsWith(level, text, StringComparison.Ordinal);
+        Assert.Contains($"for the {shares} of column \"lit\"", text, StringComparison.Ordinal);
+        Assert.Contains("add \"denominator\": { \"public\": \"lamps\" }; else publish both counts, each with a mechanism of its own.", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Share_that_is_said_to_move_from_end_to_end_needs_no_denominator()
+    {
+        using var folder = Shares("\"kind\": \"share\"", "\"cellsPerUnit\": 1, \"perCell\": 100", denominator: "");
+        folder.HasNo("denominator-missing");
+    }
+
+    [Theory]
+    [InlineData("\"l1\": 0.0001", "\"kind\": \"mean\"", "\"clipped\": { \"from\": 0, \"to\": LIMIT }; else")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 3", "\"kind\": \"amount\"", "\"clipped\": { \"from\": 0, \"to\": 3 } if these are the limits; else")]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 3, \"signed\": true", "\"kind\": \"amount\"", "\"clipped\": { \"from\": -3, \"to\": 3 } if these are the limits; else")]
+    public void Contribution_that_nothing_bounds_is_a_caution_until_it_is_clipped(string sensitivity, string kind, string remedy)
+    {
+        using var folder = Folder(sensitivity).Edit("release.json", "\"kind\": \"mean\"", kind).Edit("mechanisms.json", "\"clipped\": { \"from\": 0, \"to\": 20 }, ", "");
+        var text = folder.Text("contribution-not-bounded");
+        Assert.StartsWith("Caution mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains("nothing in the folder says how much one keeper can add to them.", text, StringComparison.Ordinal);
+        Assert.Contains(remedy, text, StringComparison.Ordinal);
+        folder.Edit("mechanisms.json", "\"sensitivity\": { " + sensitivity, $"\"clipped\": {{ \"from\": {(sensitivity.Contains("signed", StringComparison.Ordinal) ? "-3" : "0")}, \"to\": {(kind.Contains("mean", StringComparison.Ordinal) ? "0.005" : "3")} }}, \"sensitivity\": {{ {sensitivity}");
+        folder.HasNo("contribution-not-bounded");
+        folder.HasNo("sensitivity-too-small");
+    }
+
+    [Theory]
+    [InlineData("median", "medians")]
+    [InlineData("index", "indices")]
+    [InlineData("estimate", "estimates")]
+    public void Sensitivity_that_nothing_can_be_held_against_is_a_note(string kind, string figures)
+    {
+        using var folder = Folder("\"l1\": 0.0001", rest: "").Edit("release.json", "\"kind\": \"mean\"", $"\"kind\": \"{kind}\"").Edit("mechanisms.json", "\"clipped\": { \"from\": 0, \"to\": 20 }, ", "");
+        var text = folder.Text("sensitivity-as-stated");
+        Assert.StartsWith("Note mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains($"can move the {figures} of column \"lit\"", text, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Cells_of_a_mean_without_a_denominator_are_a_stop()
     {
@@ -208,6 +298,12 @@ public sealed class ClippedSensitivityTests
     }
 
     private static TestFolder Replaced(string sensitivity, string clipped) => Folder(sensitivity, clipped).Edit("mechanisms.json", "\"neighbouring\": \"add-or-remove\"", Replace);
+
+    private static TestFolder Shares(string kind, string sensitivity, string unit = "keeper", string denominator = "\"denominator\": { \"public\": \"lamps\" }, ") => Folder(sensitivity, rest: denominator)
+        .Edit("mechanisms.json", "\"clipped\": { \"from\": 0, \"to\": 20 }, ", "")
+        .With("tables/lamps.csv", "street,lit,broken,lamps\nAll,0.60,9,650\nKiln Row,0.31,4,50\nQuay,0.20,5,200\nWeir Lane,0.90,-1,400\n")
+        .Edit("release.json", "\"units\": {", "\"units\": { \"keeper\": { \"en\": { \"one\": \"keeper\", \"other\": \"keepers\" } }, ")
+        .Edit("release.json", "\"unit\": \"hour\", \"kind\": \"mean\"", $"\"unit\": \"{unit}\", {kind}");
 
     private static TestFolder Periods(string sensitivity) => Folder(sensitivity)
         .With("tables/lamps.csv", "street,lit,broken,lamps\n2031,2.00,5,200\n2032,9.00,-1,400\n")

@@ -31,6 +31,24 @@ public sealed class CountSensitivityTests
         Assert.Contains($"Do: write {write} or more;", text, StringComparison.Ordinal);
     }
 
+    // A weight of at most 0.01, or in two cells together at most 0.01: that is said by "clipped".
+    [Theory]
+    [InlineData("\"cellsPerUnit\": 1, \"perCell\": 0.01", "\"add-or-remove\"", "write as \"perCell\" the largest weight; or, if no weight is above 0.01,", "0.01")]
+    [InlineData("\"l1\": 0.01", "\"replace\"", "write as \"l1\" 2 times the largest weight; or, if no weight is above 0.005,", "0.005")]
+    public void Estimate_of_units_moves_by_a_weight_that_is_seldom_below_one(string sensitivity, string relation, string remedy, string weight)
+    {
+        using var folder = Folder(sensitivity).Edit("release.json", "\"Lamps lit\", \"unit\": \"lamp\", \"kind\": \"count\"", "\"Lamps lit\", \"unit\": \"lamp\", \"kind\": \"estimate\"")
+            .Edit("mechanisms.json", "\"add-or-remove\"", relation);
+        var text = folder.Text("sensitivity-below-one");
+        Assert.StartsWith("Caution mechanisms.json:7:", text, StringComparison.Ordinal);
+        Assert.Contains("estimates lamps: ", text, StringComparison.Ordinal);
+        Assert.Contains($"Do: {remedy} say so: \"clipped\": {{ \"from\": 0, \"to\": {weight} }}", text, StringComparison.Ordinal);
+        folder.HasNo("sensitivity-as-stated");
+        folder.Edit("mechanisms.json", "\"law\": \"laplace\"", $"\"clipped\": {{ \"from\": 0, \"to\": {weight} }}, \"law\": \"laplace\"");
+        folder.HasNo("sensitivity-below-one");
+        folder.HasNo("sensitivity-too-small");
+    }
+
     // A lamp of one street in place of one of another: both streets by 1; Δ₁ = 2, Δ₂ = √2 = 1.414214 rounded up.
     [Theory]
     [InlineData("\"l1\": 1", "laplace", "\"l1\": 2")]
