@@ -18,7 +18,7 @@ public sealed class ApproximateAccountant : Accountant
     {
         if (spending.Loss is not { } loss)
             return AsStated(spending.Mechanism);
-        var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
+        var delta = DeclaredDelta.Taken(loss, DeltaOf(spending.Mechanism.Spent?.Delta));
         var rule = delta == Delta.Zero ? AccountRules.Law(loss.PureTerms[0].Loss.Source) : AccountRules.CurveOf(loss);
         return Of(DeclaredDelta.EpsilonAt(loss, delta.Value).Upper, delta, rule);
     }
@@ -28,7 +28,7 @@ public sealed class ApproximateAccountant : Accountant
     {
         if (spending.Loss is not { } loss)
             return Of(Epsilon.Zero, Delta.Zero, AccountRules.Pair);
-        var delta = DeltaOf(spending.Mechanism.Spent?.Delta);
+        var delta = DeclaredDelta.Taken(loss, DeltaOf(spending.Mechanism.Spent?.Delta));
         var epsilon = DeclaredDelta.EpsilonAt(loss, delta.Value).Lower;
         return Of(epsilon, epsilon.IsFinite ? DeclaredDelta.Shown(loss, epsilon, delta) : delta, AccountRules.Pair);
     }

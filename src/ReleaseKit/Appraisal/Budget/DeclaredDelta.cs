@@ -7,6 +7,11 @@ namespace ReleaseKit.Appraisal.Budget;
 internal static class DeclaredDelta
 {
     private const double Tolerance = 1e-9;
+    private static readonly Epsilon Farthest = Epsilon.Of(1e5);
+
+    /// <summary>The δ that a loss is taken at: as declared; where the law never comes as low, and the lowest that it comes to was declared rounded down, that one.</summary>
+    public static Delta Taken(MechanismLoss loss, Delta declared) =>
+        !EpsilonAt(loss, declared.Value).Upper.IsFinite && loss.DeltaAt(Farthest).Upper is var lowest && RoundedNumber.Is(declared.Value, lowest.Value) ? lowest : declared;
 
     /// <summary>The δ that a loss is shown to have at an ε, at most the declared one; that one where the curve meets it to a billionth, as it does where ε was worked out from it.</summary>
     public static Delta Shown(MechanismLoss loss, Epsilon epsilon, Delta declared) =>

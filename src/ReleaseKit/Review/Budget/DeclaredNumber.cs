@@ -1,5 +1,5 @@
-using System.Globalization;
 using ReleaseKit.Appraisal.Budget;
+using ReleaseKit.Privacy;
 using ReleaseKit.Privacy.Losses;
 using ReleaseKit.Releases;
 
@@ -9,15 +9,17 @@ namespace ReleaseKit.Review.Budget;
 internal sealed record DeclaredNumber(string Name, double Declared, double Lower, double Upper)
 {
     private const double Tolerance = 1e-9;
-    private const double FurthestRounding = 0.05;
 
-    /// <summary>The delta that an epsilon is declared with; null without one.</summary>
+    /// <summary>The delta that an epsilon is declared with, or that the law comes down to where it was declared rounded; null without one.</summary>
     public double? Delta { get; init; }
 
-    /// <summary>The upper bound as it can be pasted: a number, or the pair that "spent" is to hold.</summary>
-    public string Pasted => Delta is { } delta ? $"\"spent\": {{ \"epsilon\": {BudgetText.Paste(Upper)}, \"delta\": {BudgetText.Plain(delta)} }}" : BudgetText.Paste(Upper);
+    /// <summary>The delta at the declared epsilon, where what was declared is that rounded down; else null.</summary>
+    public double? UnroundedDelta { get; init; }
 
-    public bool IsEnough => Declared >= Upper * (1 - Tolerance);
+    /// <summary>The upper bound as it can be pasted: a number, or the pair that "spent" is to hold.</summary>
+    public string Pasted => Delta is { } delta ? $"\"spent\": {{ \"epsilon\": {BudgetText.Paste(Upper)}, \"delta\": {BudgetText.Paste(delta)} }}" : BudgetText.Paste(Upper);
+
+    public bool IsEnough => UnroundedDelta is null && Declared >= Upper * (1 - Tolerance);
 
     public bool IsBelowLower => Declared < Lower * (1 - Tolerance);
 
@@ -30,20 +32,22 @@ internal sealed record DeclaredNumber(string Name, double Declared, double Lower
             yield return new DeclaredNumber("rho", rho, loss.Concentrated.Lower.Value, loss.Concentrated.Upper.Value);
         if (declared.Epsilon is not { } epsilon)
             yield break;
-        var bounds = DeclaredDelta.EpsilonAt(loss, declared.Delta);
-        var name = declared.Delta is > 0 and var delta ? $"epsilon at delta {BudgetText.Plain(delta)}" : "epsilon";
-        yield return new DeclaredNumber(name, epsilon, bounds.Lower.Value, bounds.Upper.Value) { Delta = declared.Delta is > 0 ? declared.Delta : null };
+        yield return declared.Delta is > 0 and var delta ? Pair(epsilon, Privacy.Delta.AtMost(delta), loss)
+            : new DeclaredNumber("epsilon", epsilon, loss.Pure.Lower.Value, loss.Pure.Upper.Value);
     }
 
     /// <summary>Whether a number, rounded to the declared digits and not far from it, is the declared one.</summary>
-    public bool RoundsTo(double value)
+    public bool RoundsTo(double value) => RoundedNumber.Is(Declared, value);
+
+    private static DeclaredNumber Pair(double epsilon, Delta delta, MechanismLoss loss)
     {
-        if (!(Declared > 0) || !double.IsFinite(value) || Math.Abs(value - Declared) > FurthestRounding * value)
-            return false;
-        var digits = Declared.ToString("R", CultureInfo.InvariantCulture);
-        var decimals = digits.Contains('E', StringComparison.Ordinal) || !digits.Contains('.', StringComparison.Ordinal) ? 0 : digits.Length - digits.IndexOf('.', StringComparison.Ordinal) - 1;
-        return decimals is > 0 and <= 15
-            ? Math.Round(value, decimals, MidpointRounding.AwayFromZero) == Declared
-            : Math.Abs(value - Declared) <= Tolerance * Declared;
+        var taken = DeclaredDelta.Taken(loss, delta);
+        var bounds = DeclaredDelta.EpsilonAt(loss, taken.Value);
+        var isMet = taken == delta && epsilon >= bounds.Upper.Value * (1 - Tolerance);
+        return new DeclaredNumber($"epsilon at delta {BudgetText.Plain(delta.Value)}", epsilon, bounds.Lower.Value, bounds.Upper.Value)
+        {
+            Delta = taken.Value,
+            UnroundedDelta = !isMet && loss.DeltaAt(Epsilon.Of(epsilon)).Upper.Value is var exact && RoundedNumber.Is(delta.Value, exact) ? exact : null,
+        };
     }
 }

@@ -20,6 +20,8 @@ internal sealed class SpentCheck : IReviewCheck
 
     private static Finding Found(MechanismSpending spending, DeclaredNumber number, NoiseAccount account)
     {
+        if (number.UnroundedDelta is { } delta)
+            return SpentProblems.RoundedDelta(spending.Mechanism, number, delta);
         if (number.IsRounded)
             return SpentProblems.Rounded(spending.Mechanism, number);
         return number.IsBelowLower

@@ -27,6 +27,12 @@ internal static class SpentProblems
         "a rounded loss must not be smaller than the loss; the totals use the computed value.",
         $"write {number.Pasted}.");
 
+    public static Finding RoundedDelta(Mechanism mechanism, DeclaredNumber number, double delta) => new(
+        FindingLevel.Caution, "spent-rounded", FindingOwner.Noise, BudgetText.PlaceOf(mechanism, "spent"),
+        $"{Declares(mechanism, number)}; that delta is {BudgetText.Plain(delta)} rounded down.",
+        "a rounded delta must not be smaller than the delta of the law; the totals use what is computed.",
+        $"write \"spent\": {{ \"epsilon\": {BudgetText.Plain(number.Declared)}, \"delta\": {BudgetText.Paste(delta)} }}.");
+
     // Without a pair of its own such a law has no loss at all in approximate accounting.
     private static string Else(DeclaredNumber number) => number.Delta is null
         ? "leave \"spent\" out and the computed value is used"

@@ -116,6 +116,33 @@ public sealed class SpentCheckTests
         folder.HasNo("spent-too-low");
     }
 
+    /// <summary>1 ÷ 4001 = 0.000249937515…; moved by 1, noise on ±2000 has that delta at every epsilon.</summary>
+    [Theory]
+    [InlineData("0", "0.0002499375", "0")]
+    [InlineData("0.5", "2.499e-4", "0.5")]
+    public void Delta_rounded_down_to_its_digits_is_a_caution_with_the_pair_to_paste(string epsilon, string delta, string written)
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"").Edit("mechanisms.json", "\"delta\": 1e-9", "\"delta\": 0.05");
+        folder.WithLit($$"""{ "id": "lamps-lit", "law": "discrete-uniform", "halfWidth": 2000, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": {{epsilon}}, "delta": {{delta}} } }""");
+        var text = folder.Text("spent-rounded");
+        Assert.StartsWith("Caution ", text, StringComparison.Ordinal);
+        Assert.Contains("that delta is 0.000249937515621 rounded down.", text, StringComparison.Ordinal);
+        Assert.Contains($"Do: write \"spent\": {{ \"epsilon\": {written}, \"delta\": 0.0002499376 }}.", text, StringComparison.Ordinal);
+        Assert.DoesNotContain(folder.Review(), finding => finding.Level == ReleaseKit.Review.FindingLevel.Stop);
+        folder.Edit("mechanisms.json", $"\"delta\": {delta}", "\"delta\": 0.0002499376");
+        folder.HasNo("spent-rounded");
+    }
+
+    [Fact]
+    public void Delta_below_what_its_digits_allow_is_no_rounding()
+    {
+        using var folder = new TestFolder();
+        folder.Edit("mechanisms.json", "\"concentrated\"", "\"approximate\"").Edit("mechanisms.json", "\"delta\": 1e-9", "\"delta\": 0.05");
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-uniform", "halfWidth": 2000, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 }, "spent": { "epsilon": 0, "delta": 0.0002499374 } }""");
+        Assert.Contains("\"delta\": 0.0002499378 }", folder.Text("spent-needed"), StringComparison.Ordinal);
+    }
+
     /// <summary>By hand: moved by 1, the table's end (0.1) has no counterpart, and elsewhere the chances differ by the factor 2 at most, so δ(ln 2) = 0.1.</summary>
     [Fact]
     public void Pair_that_a_table_meets_exactly_is_enough()
