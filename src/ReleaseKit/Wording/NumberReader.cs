@@ -27,7 +27,8 @@ internal sealed class NumberReader
         var sign = $@"(?<!\w)(?:{Regex.Escape(texts.Template("number.minus-in-tables"))}|[-–])(?=\d)|\b{Regex.Escape(texts.Template("number.minus-in-prose"))}\s+";
         var digits = $@"(?<digits>\d{{1,3}}(?:{Spaces}\d{{3}})+(?:{dot}\d+)?(?![.,'’]?\d)|\d(?:[\d.,'’{marks}]*\d)?)(?:{words.Scale})*(?<ordinal>(?:{NumberWords.AnyOf(texts.Template("number.ordinal-ends").Split('|'))})(?!\w))?";
         var below = $@"(?<below>(?:\s+\p{{L}}+)?\s+(?:{NumberWords.AnyOf(texts.Template("number.below-zero").Split('|'))})(?!\w|[.,]\d))";
-        number = new($@"(?:(?<margin>{margin})\s*|(?<minus>{sign}))?(?:{digits}|(?<run>{words.Run})){below}?", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
+        var bound = new BoundWords(texts);
+        number = new($@"(?<before>{bound.Before})?(?<number>(?:(?<margin>{margin})\s*|(?<minus>{sign}))?(?:{digits}|(?<run>{words.Run})){below}?(?:{bound.Behind})?)", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
         form = new($@"^(?:[0-9]{{1,3}}(?:(?:{group}|{Spaces})[0-9]{{3}})+|[0-9]+)(?:{dot}[0-9]+)?$", RegexOptions.CultureInvariant);
         groupMarks = new($"{group}|{Spaces}", RegexOptions.CultureInvariant);
     }
@@ -37,7 +38,14 @@ internal sealed class NumberReader
 
     private IEnumerable<WrittenNumber> Read(Match match)
     {
-        var written = new WrittenNumber(match.Value, null, match.Groups["margin"].Success) { Start = match.Index, End = match.Index + match.Length };
+        var number = match.Groups["number"];
+        var written = new WrittenNumber(number.Value, null, match.Groups["margin"].Success)
+        {
+            Start = number.Index,
+            End = number.Index + number.Length,
+            Bound = BoundWords.In(match),
+            Before = match.Groups["before"].Value,
+        };
         return match.Groups["run"] is { Success: true } run
             ? words.In(run.Value).Select(value => written with { Value = Signed(value, match), Step = StepOf(value), IsInLetters = true })
             : [InDigits(written, match)];

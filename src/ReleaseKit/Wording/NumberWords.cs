@@ -19,6 +19,8 @@ internal sealed class NumberWords
     public NumberWords(WordingTexts texts)
     {
         (numbers, scales) = (Values(texts, "number.words"), Values(texts, "number.scales"));
+        foreach (var none in texts.Template("number.none").Split('|', StringSplitOptions.RemoveEmptyEntries))
+            numbers.TryAdd(none, 0);
         var tokens = AnyOf([.. numbers.Keys, .. scales.Keys.Where(scale => scale.Length > LongestAbbreviation), .. texts.Template("number.fractions").Split('|')]);
         and = texts.Template("number.words.and");
         token = new($@"(?<and>\b{Regex.Escape(and)}\s+)?\b(?<word>{tokens})\b", Words);

@@ -29,8 +29,8 @@ internal static class SaidNumbers
     private static IReadOnlyList<SaidNumber> Compared(string text, AppraisedFigure figure, FigureScale scale, ILanguage language) =>
     [
         .. Ratios(language.NumbersIn(text), text, figure, language)
-            .Where(number => !number.IsArticle)
-            .Select(number => SaidNumber.Of(number, figure, scale, !number.IsInLetters)),
+            .Where(number => !number.IsArticle && (figure.HasNumber || !SaidNothing.Is(number) || SaidNothing.OfTheUnit(number, text, figure, language)))
+            .Select(number => SaidNumber.Of(number, figure, scale, !number.IsInLetters || SaidNothing.IsSurelyFalse(number, text, figure, language))),
     ];
 
     /// <summary>An end of the range that stands alone, or a margin that is not called so, reads as the figure.</summary>

@@ -18,6 +18,12 @@ public readonly record struct WrittenNumber(string Text, decimal? Value, bool Is
     /// <summary>Whether it is written in letters alone.</summary>
     public bool IsInLetters { get; init; }
 
+    /// <summary>What the words by it make of it.</summary>
+    public NumberBound Bound { get; init; }
+
+    /// <summary>The words of a bound that stand before it, "more than "; empty if there are none.</summary>
+    public string Before { get; init; } = "";
+
     /// <summary>Where it begins in the text, and where it has ended.</summary>
     public int Start { get; init; }
     public int End { get; init; }

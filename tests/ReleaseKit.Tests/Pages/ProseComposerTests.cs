@@ -34,9 +34,19 @@ public sealed class ProseComposerTests
     }
 
     [Fact]
-    public void Citation_in_own_words_keeps_them_and_gives_the_margin_at_the_first_mention_only() => Assert.Equal(
-        $"<p><a href=\"{HrefOfAll}\" class=\"cite\">So many</a> <span class=\"cite-margin\">(±\u00A019)</span> and <a href=\"{HrefOfAll}\" class=\"cite\">again</a></p>\n",
+    public void Citation_in_own_words_keeps_them_and_gives_the_figure_with_its_margin_at_the_first_mention_only() => Assert.Equal(
+        $"<p><a href=\"{HrefOfAll}\" class=\"cite\">So many</a> <span class=\"cite-margin\">(<data value=\"1240\">1,240</data>&#160;±\u00A019)</span> and <a href=\"{HrefOfAll}\" class=\"cite\">again</a></p>\n",
         Html("[So many](figure:all-late) and [again](<figure:late/late?district=All&ward=All>)"));
+
+    [Theory]
+    [InlineData("1,240")]
+    [InlineData("exactly 1,240 homes, more than 1,200")]
+    public void Citation_that_says_the_figure_has_the_margin_alone_behind_it_at_the_first_mention(string words) => Assert.Equal(
+        1, Regex.Count(Html($"[{words}](figure:all-late), [{words}](figure:all-late)"), "<span class=\"cite-margin\">\\(±\u00A019\\)</span>"));
+
+    [Fact]
+    public void Citation_without_a_number_of_an_exact_figure_has_nothing_behind_it() =>
+        Assert.DoesNotContain("cite-margin", Html("[the cards](<figure:paid/paid?kind=Card>)"), StringComparison.Ordinal);
 
     [Fact]
     public void Citation_that_rounds_the_figure_has_the_figure_and_its_margin_behind_it() => Assert.Contains(
@@ -47,12 +57,19 @@ public sealed class ProseComposerTests
     [InlineData("1.2 thousand")]
     [InlineData("over a thousand")]
     [InlineData("about 1,000")]
+    [InlineData("fewer than 2,000")]
+    [InlineData("more than 1,230")]
+    [InlineData("nearly 1,250")]
     public void Citation_that_rounds_the_figure_has_it_behind_at_every_mention(string words) => Assert.Equal(
         3, Regex.Count(Html($"[{words}](figure:all-late), [{words}](figure:all-late), [value](figure:all-late)"), "<data value=\"1240\">1,240</data>"));
 
     [Fact]
     public void Size_of_a_figure_below_zero_has_the_sign_behind_it() =>
         Assert.Contains("a lack of 4</a> <span class=\"cite-margin\">(<data value=\"-4\">minus\u00A04</data>", Html($"[a lack of 4](<{Mill}>)"), StringComparison.Ordinal);
+
+    [Fact]
+    public void Range_in_own_words_has_the_figure_behind_it() => Assert.Contains(
+        "1,221 to 1,259</a> <span class=\"cite-margin\">(<data value=\"1240\">1,240</data>", Html("[1,221 to 1,259](figure:all-late)"), StringComparison.Ordinal);
 
     [Fact]
     public void Citation_in_own_words_after_a_generated_one_gives_no_margin_again() =>

@@ -1,3 +1,4 @@
+using System.Text.RegularExpressions;
 using ReleaseKit.Review;
 using ReleaseKit.Tests.Folders;
 using Xunit;
@@ -38,6 +39,13 @@ public sealed class ProseNumberFormTests
     [InlineData(Seven, "1,206 – 1,222")]
     [InlineData(Seven, "one thousand two hundred and fourteen")]
     [InlineData(Seven, "1,214 in one of two wards")]
+    [InlineData(Seven, "nearly 1,220")]
+    [InlineData(Seven, "almost 1,215")]
+    [InlineData(Seven, "just over 1,210 lamps")]
+    [InlineData(Seven, "over $1,200")]
+    [InlineData(Nine, "more than 1.2 million")]
+    [InlineData(Nine, "up to two million lamps")]
+    [InlineData("lamps/broken?ward=7", "fewer than 10")]
     [InlineData(Seven, "a few hundred, several hundred, a third, two-thirds, half a million, the twenty-first, a five-year plan")]
     [InlineData(Seven, "1,214 on the 2nd floor")]
     [InlineData(BrokenInNine, "a share of one")]
@@ -54,6 +62,8 @@ public sealed class ProseNumberFormTests
     [InlineData("1 in 14")]
     [InlineData("7 lamps in every 100")]
     [InlineData("one in fourteen")]
+    [InlineData("more than 6 in 100")]
+    [InlineData("under 10%")]
     public void Hundred_of_a_share_belongs_to_its_form(string words) => Assert.Empty(Found(New, words));
 
     [Theory]
@@ -128,6 +138,8 @@ public sealed class ProseNumberFormTests
     [InlineData("million crowns", "12,345 thousand crowns")]
     [InlineData("million crowns", "12.345")]
     [InlineData("metres", "12.3m")]
+    [InlineData("million crowns", "over 10 million crowns")]
+    [InlineData("million crowns", "fewer than 20,000 thousand crowns")]
     public void Scale_of_the_unit_is_understood(string unit, string words) => Assert.Empty(Found("lamps/new?ward=9", words, folder => Amount(folder, unit)));
 
     [Theory]
@@ -136,6 +148,31 @@ public sealed class ProseNumberFormTests
     [InlineData("crowns", "12.3m")]
     public void Another_scale_than_that_of_the_unit_is_a_stop(string unit, string words) =>
         Assert.Equal("prose-disagrees", Assert.Single(Found("lamps/new?ward=9", words, folder => Amount(folder, unit))).Slug);
+
+    [Theory]
+    [InlineData("a loss of more than 10 crowns", "")]
+    [InlineData("a loss of nearly 12.5 crowns", "")]
+    [InlineData("fewer than 5 crowns", "prose-may-disagree")]
+    [InlineData("more than 10 crowns", "prose-may-disagree")]
+    [InlineData("a loss of more than 20 crowns", "prose-disagrees")]
+    public void Bound_of_a_figure_below_zero_is_one_of_its_size(string words, string slug) => Assert.Equal(slug, string.Join(' ', Found("lamps/new?ward=9", words, folder =>
+    {
+        Amount(folder, "crowns");
+        folder.Edit("tables/lamps.csv", "12.345", "-12.345").Edit("release.json", "\"lowest\": 0", "\"lowest\": -100");
+    }).Select(finding => finding.Slug)));
+
+    [Theory]
+    [InlineData("more than 11,000 crowns")]
+    [InlineData("under 13,000 crowns")]
+    [InlineData("under 20")]
+    public void Bound_in_an_unsaid_scale_is_a_caution(string words) => Assert.Equal(
+        "prose-may-disagree", Assert.Single(Found("lamps/new?ward=9", words, folder => Amount(folder, "million crowns"))).Slug);
+
+    [Theory]
+    [InlineData("two million")]
+    [InlineData("about 1,000")]
+    [InlineData("more than 1,210")]
+    public void Waiver_is_offered_once(string words) => Assert.Equal(1, Regex.Count(Assert.Single(Found(Seven, words)).Do, "signoff.json"));
 
     private static void Amount(TestFolder folder, string unit) => folder
         .Edit("release.json", "\"unit\": \"lamp\", \"kind\": \"share\"", $"\"unit\": \"{unit}\", \"kind\": \"amount\", \"lowest\": 0");

@@ -37,7 +37,14 @@ public sealed class ProseNumberTests
 
     [Theory]
     [InlineData("about 200 lamps", "200")]
-    [InlineData("more than 65", "65")]
+    [InlineData("more than 74", "more than 74")]
+    [InlineData("fewer than 46", "fewer than 46")]
+    [InlineData("40 or fewer", "40 or fewer")]
+    [InlineData("nearly 6,000", "nearly 6,000")]
+    [InlineData("almost 45", "almost 45")]
+    [InlineData("no lamps", "no")]
+    [InlineData("None", "None")]
+    [InlineData("zero", "zero")]
     [InlineData("65 lamps", "65")]
     [InlineData("*6*5 lamps", "65")]
     [InlineData("6&#48;0 lamps", "600")]
@@ -58,6 +65,66 @@ public sealed class ProseNumberTests
         Assert.Contains($"say \"{written}\", but lamps/lit?street=All is 60 (± 14); its range is 46 to 74", stop.Found.Replace('\u00A0', ' '), StringComparison.Ordinal);
         Assert.StartsWith($"write {Citation}, or 60 in the words", stop.Do, StringComparison.Ordinal);
     }
+
+    [Theory]
+    [InlineData("more than 40 lamps")]
+    [InlineData("at least 46")]
+    [InlineData("no fewer than 46 lamps")]
+    [InlineData("over forty")]
+    [InlineData("45 lamps or more")]
+    [InlineData("fewer than 75")]
+    [InlineData("up to 74")]
+    [InlineData("no more than 74")]
+    [InlineData("74 or fewer")]
+    [InlineData("nearly 65")]
+    [InlineData("just over 50")]
+    [InlineData("60, up to 14 either way,")]
+    [InlineData("no fewer lamps than 60")]
+    public void Bound_that_the_whole_range_keeps_passes(string words) => Passes($"[{words}](figure:lamps/lit?street=All)");
+
+    [Theory]
+    [InlineData("more than 65")]
+    [InlineData("more than 46")]
+    [InlineData("at least 47")]
+    [InlineData("under 74")]
+    [InlineData("at most 73 lamps")]
+    [InlineData("nearly 55")]
+    [InlineData("just over 60")]
+    public void Bound_within_the_range_is_a_caution_whose_remedy_settles_it(string words)
+    {
+        using var broken = new Broken(folder => folder.Edit(Prose, Citation, $"[{words}](figure:lamps/lit?street=All)"));
+        var caution = Assert.Single(broken.Review());
+        Assert.Equal(("prose-may-disagree", FindingLevel.Caution), (caution.Slug, caution.Level));
+        Assert.StartsWith($"write at least 46 lamps or at most 74 lamps, or {Citation}", caution.Do, StringComparison.Ordinal);
+        Passes("[at least 46 lamps](figure:lamps/lit?street=All), [at most 74 lamps](figure:lamps/lit?street=All)");
+    }
+
+    [Theory]
+    [InlineData("nobody lit any")]
+    [InlineData("no wonder")]
+    public void Word_for_nothing_that_may_mean_something_else_is_a_caution(string words)
+    {
+        using var broken = new Broken(folder => folder.Edit(Prose, Citation, $"[{words}](figure:lamps/lit?street=All)"));
+        Assert.Equal("prose-may-disagree Caution", string.Join(", ", broken.Review().Select(finding => $"{finding.Slug} {finding.Level}")));
+    }
+
+    [Theory]
+    [InlineData("[1](figure:lamps/broken?street=Weir%20Lane) was broken. It fell.")]
+    [InlineData("[1 lamp](figure:lamps/broken?street=Weir%20Lane) was broken.")]
+    [InlineData("[up to 1](figure:lamps/broken?street=Weir%20Lane) was broken.")]
+    public void Figure_below_zero_without_its_sign_is_a_caution_whose_remedy_settles_it(string text)
+    {
+        using var broken = new Broken(folder => folder.Edit(Prose, Citation, text));
+        var caution = Assert.Single(broken.Review());
+        Assert.Equal(("prose-may-disagree", FindingLevel.Caution), (caution.Slug, caution.Level));
+        Passes("[minus 1](figure:lamps/broken?street=Weir%20Lane) was broken.");
+    }
+
+    [Theory]
+    [InlineData("It fell by [1 lamp](figure:lamps/broken?street=Weir%20Lane).")]
+    [InlineData("*[1](figure:lamps/broken?street=Weir%20Lane)* below zero.")]
+    [InlineData("A [negative 1](figure:lamps/broken?street=Weir%20Lane).")]
+    public void Sign_in_words_of_the_sentence_is_one(string text) => Passes(text);
 
     [Fact]
     public void Number_with_marks_of_another_language_is_told_those_of_its_own() => Broken.Stops("prose-disagrees", Prose, "[60,0", "or 60 in the words, with the marks of 1,234.5",
@@ -80,15 +147,32 @@ public sealed class ProseNumberTests
 
     [Fact]
     public void Number_for_a_hidden_figure_is_a_stop() => Broken.Stops("prose-disagrees", Prose, "[20 lamps]", "write [value and margin](figure:lamps/lit?street=Quay); a number",
-        folder => folder.With("tables/lamps.csv", "street,lit,broken,lit_status\nAll,40,9,\nKiln Row,31,4,\nQuay,,5,Q\nWeir Lane,9,-1,\n")
-            .Edit("release.json", "\"figures\": [\n", "\"hidden\": { \"by\": \"public-rule\", \"inTotals\": false }, \"statuses\": { \"column\": \"*_status\" }, \"figures\": [\n")
-            .Edit(Prose, Citation, "[20 lamps](figure:lamps/lit?street=Quay)"));
+        folder => Hide(folder, "20 lamps"));
+
+    [Fact]
+    public void Number_for_a_hidden_figure_is_not_told_of_a_margin()
+    {
+        using var broken = new Broken(folder => Hide(folder, "20 lamps"));
+        Assert.Equal("the words would be printed as they stand, with a number that is not published.", broken.Review().Single(finding => finding.Slug == "prose-disagrees").Why);
+    }
+
+    [Fact]
+    public void No_number_can_be_said_of_a_hidden_figure()
+    {
+        using var broken = new Broken(folder => Hide(folder, "no number"));
+        Assert.DoesNotContain(broken.Review(), finding => finding.Slug.StartsWith("prose-", StringComparison.Ordinal));
+    }
 
     [Theory]
     [InlineData("In 2031, after 12 years, [so many](figure:lamps/lit?street=All)")]
     [InlineData("See [table 3](https://office.example/3)")]
     [InlineData("`[65](figure:lamps/lit?street=All)`")]
     public void Number_outside_a_citation_is_not_compared(string text) => Passes(text);
+
+    private static void Hide(TestFolder folder, string words) => folder
+        .With("tables/lamps.csv", "street,lit,broken,lit_status\nAll,40,9,\nKiln Row,31,4,\nQuay,,5,Q\nWeir Lane,9,-1,\n")
+        .Edit("release.json", "\"figures\": [\n", "\"hidden\": { \"by\": \"public-rule\", \"inTotals\": false }, \"statuses\": { \"column\": \"*_status\" }, \"figures\": [\n")
+        .Edit(Prose, Citation, $"[{words}](figure:lamps/lit?street=Quay)");
 
     private static void Passes(string text)
     {

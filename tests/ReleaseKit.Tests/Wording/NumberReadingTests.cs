@@ -24,6 +24,8 @@ public sealed class NumberReadingTests : IDisposable
     [InlineData("wonder, tend, often", "")]
     [InlineData("2 hundred thousand", "200000")]
     [InlineData("the 16th", "")]
+    [InlineData("no lamps, none, nobody, not one", "0 0 0 0")]
+    [InlineData("no more than ten, no-go, notable", "10")]
     public void Number_in_letters_is_read_by_its_words(string text, string expected) => Assert.Equal(expected, Values(English.Language, text));
 
     [Theory]
@@ -48,6 +50,9 @@ public sealed class NumberReadingTests : IDisposable
     [InlineData("", "one hundred and ")]
     [InlineData("1", " -")]
     [InlineData("", "plus or minus ")]
+    [InlineData("", "no more than ")]
+    [InlineData("1", " or")]
+    [InlineData("", "no ")]
     public void Long_row_of_marks_is_read_through(string start, string again) =>
         Assert.InRange(English.Language.NumbersIn(start + string.Concat(Enumerable.Repeat(again, 3000)) + "x").Count, 0, 6000);
 
@@ -65,7 +70,7 @@ public sealed class NumberReadingTests : IDisposable
             "number.words" => words,
             "number.scales" => "miljo=1000000",
             "number.below-zero" => "sub nul",
-            "number.fractions" or "number.words.and" or "number.plus-or-minus" or "number.ordinal-ends" => "",
+            "number.fractions" or "number.words.and" or "number.plus-or-minus" or "number.ordinal-ends" or "number.none" => "",
             _ => English.Texts.Template(key),
         });
         File.WriteAllText(Path.Combine(folder, "all.json"), System.Text.Json.JsonSerializer.Serialize(texts));

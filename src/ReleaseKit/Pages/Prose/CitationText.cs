@@ -17,25 +17,35 @@ internal sealed class CitationText(Release release, ILanguage language)
         : $"<a class=\"cite\" href=\"{HtmlText.Encode(href)}\">{Generated(form, figure, place.About)}{Base(form, figure, place)}</a>";
 
     /// <summary>
-    /// What follows the writer's own words: " (1,240 ± 19)" wherever they round the figure, else " (± 19)" at its first mention; nothing for a figure that
-    /// needs neither.
+    /// What follows the writer's own words: " (± 19)" at the first mention if they say the figure, " (1,240 ± 19)" there if they do not, and wherever they
+    /// round it or bound it; nothing for a figure that needs neither.
     /// </summary>
-    public string After(string words, AppraisedFigure figure, bool isFirst)
+    public string After(string words, AppraisedFigure figure, bool isFirst, CitationPlace place)
     {
-        var isRounded = SaidNumbers.In(words, figure, release, language).Any(number => number.IsRounded);
-        if (!isRounded && !isFirst)
-            return "";
-        var text = (isRounded, figure.Main) switch
+        var said = SaidNumbers.In(words, figure, release, language);
+        var text = (IsThere: said.Any(number => number.IsTheFigure) && !said.Any(number => number.IsRoundedMargin), IsNeeded: said.Any(number => number.NeedsTheFigure), isFirst) switch
         {
-            (true, null) => Value(figure, about: ""),
-            (true, { Printed.IsUneven: true }) => $"{Value(figure, about: "")}, {Range(figure, about: "")}",
-            (true, _) => ValueAndMargin(figure, about: ""),
-            (false, null) => "",
-            (false, { Printed.IsUneven: true }) => Range(figure, about: ""),
-            (false, { } range) => HtmlText.Encode(language.Margin(range.Printed)),
+            (IsThere: true, _, isFirst: true) => MarginAlone(figure),
+            (IsThere: false, IsNeeded: true, _) => WithMargin(figure, place),
+            (IsThere: false, _, isFirst: true) when figure.Main is not null => WithMargin(figure, place),
+            _ => "",
         };
         return text.Length == 0 ? "" : $" <span class=\"cite-margin\">({text})</span>";
     }
+
+    private string MarginAlone(AppraisedFigure figure) => figure.Main switch
+    {
+        null => "",
+        { Printed.IsUneven: true } => Range(figure, about: ""),
+        var range => HtmlText.Encode(language.Margin(range.Printed)),
+    };
+
+    private string WithMargin(AppraisedFigure figure, CitationPlace place) => figure.Main switch
+    {
+        null => Value(figure, about: ""),
+        { Printed.IsUneven: true } => $"{Value(figure, about: "")}, {Range(figure, about: "")}",
+        _ => ValueAndMargin(figure, about: ""),
+    } + Base(CitationForm.ValueAndMargin, figure, place);
 
     private static string Base(CitationForm form, AppraisedFigure figure, CitationPlace place) =>
         figure.HasNumber && form != CitationForm.Margin && place.Base.Length > 0 ? " " + HtmlText.Encode(place.Base) : "";

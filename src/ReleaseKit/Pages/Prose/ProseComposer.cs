@@ -104,7 +104,8 @@ public sealed class ProseComposer(SiteContext context, string page, int deeper)
         var figure = context.Appraised.FigureAt(address);
         link.Url = Link.From(page, context.Pages.Of(figure.Ref));
         link.GetAttributes().AddClass("cite");
-        if (citations.After(words, figure, mentioned.Add(figure.Address)) is { Length: > 0 } after)
+        var place = CitationPlace.Of(link, figure.Measure, context.Language);
+        if (citations.After(words, figure, mentioned.Add(figure.Address), place) is { Length: > 0 } after)
             link.InsertAfter(new HtmlInline(after));
     }
 

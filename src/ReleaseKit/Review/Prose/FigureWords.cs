@@ -1,5 +1,6 @@
 using ReleaseKit.Appraisal;
 using ReleaseKit.Reading.Keys;
+using ReleaseKit.Releases;
 using ReleaseKit.Wording;
 
 namespace ReleaseKit.Review.Prose;
@@ -19,6 +20,11 @@ internal sealed record FigureWords(AppraisedFigure Figure, ILanguage Language)
     };
 
     public string Number => Plain(Language.NumberInProse(Figure.Printed));
+
+    /// <summary>The bounds that the whole range keeps, with the unit: "at least 1,386 households or at most 1,458 households"; empty without a range.</summary>
+    public string Bounds => Figure.Main is { Printed: var range } ? $"at least {WithUnit(range.Low)} or at most {WithUnit(range.High)}" : "";
+
+    private string WithUnit(PublishedValue value) => Plain(Language.WithUnit(value, Figure.Measure));
 
     /// <summary>A number with every mark that the language writes in numbers: "1,234.5".</summary>
     public string Marks => Plain(Language.NumberInProse(new(12345, 1)));

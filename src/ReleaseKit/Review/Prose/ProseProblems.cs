@@ -57,7 +57,7 @@ internal static class ProseProblems
     public static Finding Disagrees(Place at, IReadOnlyList<string> written, bool isUnread, FigureWords figure, string destination, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-disagrees", owner, at,
         $"The words of this citation say {Quoted(written)}, but {figure.NameIs}.",
-        "the words would be printed as they stand, with the margin of another number behind them.",
+        $"the words would be printed as they stand, {Beside(figure)}.",
         $"write {Instead(figure, destination)}{(isUnread ? $", with the marks of {figure.Marks}" : "")}; {NotMeant}.")
     {
         Address = figure.Figure.Address,
@@ -66,8 +66,26 @@ internal static class ProseProblems
     public static Finding MayDisagree(Place at, IReadOnlyList<string> written, FigureWords figure, string destination, FindingOwner owner) => new(
         FindingLevel.Caution, "prose-may-disagree", owner, at,
         $"The words of this citation hold {Quoted(written)}, and {figure.NameIs}.",
-        "a number within a citation reads as the figure, and cannot be told here from one that means something else.",
-        $"if the figure is meant, write {Instead(figure, destination)}; {NotMeant}, or waive prose-may-disagree in signoff.json and say why.")
+        "a number within a citation reads as the figure.",
+        $"if the figure is meant, write {Instead(figure, destination)}; {NotMeant}.")
+    {
+        Address = figure.Figure.Address,
+    };
+
+    public static Finding BoundInRange(Place at, IReadOnlyList<string> written, bool isRounding, FigureWords figure, string destination, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-may-disagree", owner, at,
+        $"The words of this citation say {Quoted(written)}, and {figure.NameIs}.",
+        isRounding ? "the figure does not round to it so." : "the number before noise may lie on the other side of it.",
+        $"write {(figure.Bounds is { Length: > 0 } bounds ? $"{bounds}, or " : "")}{Instead(figure, destination)}.")
+    {
+        Address = figure.Figure.Address,
+    };
+
+    public static Finding SignLost(Place at, IReadOnlyList<string> written, FigureWords figure, FindingOwner owner) => new(
+        FindingLevel.Caution, "prose-may-disagree", owner, at,
+        $"The words of this citation say {Quoted(written)}, and {figure.NameIs}.",
+        "without its sign the number reads as one above zero.",
+        $"write {figure.Number}, or say in the same sentence that it is a loss or below zero.")
     {
         Address = figure.Figure.Address,
     };
@@ -75,13 +93,21 @@ internal static class ProseProblems
     public static Finding RoundedFar(Place at, IReadOnlyList<string> written, FigureWords figure, string destination, FindingOwner owner) => new(
         FindingLevel.Caution, "prose-rounded-far", owner, at,
         $"The words of this citation round to {Quoted(written)}, and {figure.NameIs}.",
-        "that moves the figure by more than 5 in 100, and out of its range; the figure will stand behind the words.",
-        $"round less: write {Instead(figure, destination)}, or waive prose-rounded-far in signoff.json and say why.")
+        "that moves the figure by more than 5 in 100, and out of its range.",
+        $"round less: write {Instead(figure, destination)}.")
     {
         Address = figure.Figure.Address,
     };
 
-    private const string NotMeant = "a number that is not meant for this figure, such as a year, goes before or behind the link";
+    private const string NotMeant = "a number that means something else goes outside the link";
+
+    /// <summary>What would stand by the wrong number on the page.</summary>
+    private static string Beside(FigureWords figure) => figure.Figure switch
+    {
+        { HasNumber: false } => "with a number that is not published",
+        { Main: null } => "and the table says another number",
+        _ => "with the margin of another number behind them",
+    };
 
     private static string Quoted(IReadOnlyList<string> written) => string.Join(" and ", written.Select(number => $"\"{KeyProblems.Cut(number)}\""));
 
