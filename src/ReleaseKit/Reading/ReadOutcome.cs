@@ -15,6 +15,9 @@ public sealed record ReadOutcome(Release? Release, IReadOnlyList<Finding> Findin
     /// <summary>Whether every table could be read whole; if not, addresses that lead nowhere are no further fault.</summary>
     public bool TablesAreWhole { get; init; } = true;
 
+    /// <summary>Ids of the tables of which rows could not be read: what does not add up there is no further fault.</summary>
+    public IReadOnlyCollection<string> TablesInPart { get; init; } = [];
+
     /// <summary>Whether every noise rule could be read; if not, a mechanism that nothing uses is no further fault.</summary>
     public bool RulesAreWhole { get; init; } = true;
 

@@ -36,6 +36,7 @@ public static class ReleaseFolder
         private readonly FindingLog log = new();
         private bool tablesAreWhole = true;
         private bool rulesAreWhole = true;
+        private IReadOnlyCollection<string> tablesInPart = [];
 
         public ReadOutcome Read()
         {
@@ -50,7 +51,14 @@ public static class ReleaseFolder
             if (files.Exists("wording"))
                 log.Add(ReleaseProblems.WordingNotYet(new Place("wording"), FindingOwner.Writer));
             var formed = draft is null ? LoneTables() : Form(draft, mechanisms, signOff);
-            return new ReadOutcome(formed, CellPlaces.Fill(log.ToList(), files)) { Files = files, Noise = mechanisms.Account, TablesAreWhole = tablesAreWhole, RulesAreWhole = rulesAreWhole };
+            return new ReadOutcome(formed, CellPlaces.Fill(log.ToList(), files))
+            {
+                Files = files,
+                Noise = mechanisms.Account,
+                TablesAreWhole = tablesAreWhole,
+                TablesInPart = tablesInPart,
+                RulesAreWhole = rulesAreWhole,
+            };
         }
 
         private Release? Form(ReleaseDraft draft, MechanismsDraft mechanisms, SignOff signOff)
@@ -62,6 +70,7 @@ public static class ReleaseFolder
             var release = Assemble(draft, tables, prose, mechanisms, signOff);
             FolderChecks.Run(draft, tables, mechanisms, release, log);
             tablesAreWhole = draft.HasAllTables && tables.All(table => table.IsWhole);
+            tablesInPart = [.. tables.Where(table => !table.IsWhole).Select(table => table.Table.Id)];
             rulesAreWhole = tablesAreWhole && tables.All(table => RuleChecks.AreWhole(table, mechanisms));
             if (tablesAreWhole)
                 labels.CheckUsed(release.Tables, Context(FindingOwner.Writer));

@@ -75,6 +75,21 @@ public sealed class FollowOnTests
         Assert.Equal(Enumerable.Repeat("doubled-row", doubled), stops);
     }
 
+    // Without the row that could not be read, a total is far from its parts, and of two hidden parts one is left.
+    [Theory]
+    [InlineData("Quay,20\n", "csv-ragged")]
+    [InlineData("\"Quay,20,5,\n", "csv-quotes")]
+    public void Row_that_could_not_be_read_is_no_gap_between_a_total_and_its_parts(string row, string slug)
+    {
+        const string Rows = "street,lit,broken,lit_status\nAll,60,9000,\nKiln Row,31,4,\nWeir Lane,,-1,Q\n";
+        using var broken = new Broken(folder => folder.With("tables/lamps.csv", Rows + row).With("narrative/summary.md", "# Summary\n")
+            .Edit(Release, "\"figures\": [\n", "\"hidden\": { \"by\": \"public-rule\", \"inTotals\": true }, \"statuses\": { \"column\": \"*_status\" }, \"adds\": [ { \"figure\": \"broken\", \"over\": \"street\" } ], \"figures\": [\n"));
+        var slugs = broken.Review().Select(finding => finding.Slug).ToList();
+        Assert.Contains(slug, slugs);
+        Assert.DoesNotContain("total-far-from-parts", slugs);
+        Assert.DoesNotContain("hidden-given-back", slugs);
+    }
+
     [Fact]
     public void Address_of_several_figures_is_still_told_where_a_row_stands_there_twice()
     {

@@ -17,7 +17,7 @@ internal sealed class TotalGapCheck : IReviewCheck
     private const double UnlikelyEqual = 1e-6;
 
     public IEnumerable<Finding> Check(ReviewSubject subject) => subject is { Release: { } release, Origins: { } origins }
-        ? release.Tables.SelectMany((table, at) => AddedRows.Of(table).SelectMany(added => CheckTotals(added, at, origins)))
+        ? release.Tables.SelectMany((table, at) => subject.Read.TablesInPart.Contains(table.Id) ? [] : AddedRows.Of(table).SelectMany(added => CheckTotals(added, at, origins)))
         : [];
 
     private static IEnumerable<Finding> CheckTotals(AddedRows added, int table, FigureOrigins origins)
