@@ -25,8 +25,12 @@ internal sealed class AuthorisedCheck : IReviewCheck
         $"Authorised is {BudgetText.Authorised(account.Authorised)}.\nThe mechanisms spend {BudgetText.Spent(total)} in {BudgetText.Written(account.Accounting)} accounting{atBest}.",
         "the release would cost more than the office allowed.",
         accountant.AuthorisedIn(account.Authorised) is > 0 and var allowed
-            ? $"add noise until the mechanisms spend at most {BudgetText.Down(allowed)} together, publish less, or have more authorised."
+            ? $"add noise until the mechanisms spend at most {Limit(account, allowed, accountant.Currency)} together, publish less, or have more authorised."
             : "give \"authorised\" in numbers that this accounting can meet: epsilon and delta, or rho.");
+
+    private static string Limit(NoiseAccount account, double allowed, LossCurrency currency) => currency == LossCurrency.Rho
+        ? $"rho {BudgetText.Down(allowed)}"
+        : $"epsilon {BudgetText.Down(allowed)}{(account is { Accounting: Accounting.Approximate, Authorised.Delta: > 0 and var delta } ? $" and delta {BudgetText.Plain(delta)}" : "")}";
 
     // In the terms of what was authorised: no delta is spoken of where none was given.
     private static string AtBest(Authorised authorised, Accounting accounting, ProvenBounds bounds, IReadOnlyList<MechanismSpending> spendings) => authorised.Rho is null

@@ -28,7 +28,19 @@ public sealed class BudgetCheckTests
         Assert.Contains("mechanisms.json:5:", text, StringComparison.Ordinal);
         Assert.Contains("Authorised is rho 0.05.\nThe mechanisms spend rho 0.14134", text, StringComparison.Ordinal);
         Assert.DoesNotContain("delta", text, StringComparison.Ordinal);
-        Assert.Contains("add noise until the mechanisms spend at most 0.05 together", text, StringComparison.Ordinal);
+        Assert.Contains("add noise until the mechanisms spend at most rho 0.05 together", text, StringComparison.Ordinal);
+    }
+
+    // 1 ÷ 4 and 2 ÷ 3 are 0.9166667 together.
+    [Theory]
+    [InlineData("approximate", "\"delta\": 1e-9", "spend at most epsilon 0.01 and delta 0.000000001 together")]
+    [InlineData("pure", "\"delta\": 0", "spend at most epsilon 0.01 together")]
+    public void Limit_is_told_in_the_numbers_of_the_accounting(string accounting, string delta, string limit)
+    {
+        using var folder = new TestFolder();
+        folder.WithLit("""{ "id": "lamps-lit", "law": "discrete-laplace", "scale": 4, "sensitivity": { "cellsPerUnit": 1, "perCell": 1 } }""")
+            .Edit("mechanisms.json", "\"concentrated\"", $"\"{accounting}\"").Edit("mechanisms.json", "\"epsilon\": 6.0, \"delta\": 1e-9", $"\"epsilon\": 0.01, {delta}");
+        Assert.Contains(limit, folder.Text("authorised-exceeded"), StringComparison.Ordinal);
     }
 
     [Fact]
