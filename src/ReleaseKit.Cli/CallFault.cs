@@ -13,7 +13,7 @@ internal static class CallFault
             return $"'{command}' is no command; the commands are {string.Join(" and ", parsed.RootCommandResult.Command.Subcommands.Select(known => known.Name))}.";
         if (isHelp)
             return null;
-        return UnknownOption(parsed) is { } option ? $"'{option}' is no option{Command(parsed)}." : parsed.Errors.FirstOrDefault()?.Message;
+        return UnknownOption(parsed) is { } option ? $"'{option}' is no option{Command(parsed)}." : FirstOfParser(parsed);
     }
 
     /// <summary>An empty or blank name is a variable that was not set; taken as it stands it would name the present folder, or make one called " ".</summary>
@@ -22,6 +22,8 @@ internal static class CallFault
         if (result.Tokens.Any(token => string.IsNullOrWhiteSpace(token.Value)))
             result.AddError($"{name} is empty; name the folder.");
     }
+
+    private static string? FirstOfParser(ParseResult parsed) => parsed.Errors.Count > 0 ? parsed.Errors[0].Message : null;
 
     private static string? UnknownCommand(ParseResult parsed) =>
         parsed.CommandResult.Command is RootCommand ? parsed.UnmatchedTokens.FirstOrDefault(token => !IsOption(token)) : null;

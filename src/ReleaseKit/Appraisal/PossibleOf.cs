@@ -8,14 +8,15 @@ public static class PossibleOf
 {
     public static PossibleValues Measure(Measure measure)
     {
-        var (lowest, highest) = Kind(measure);
+        var (lowest, highest) = OfKind(measure);
         return new(
             Math.Max(lowest, measure.Lowest ?? double.NegativeInfinity),
             Math.Min(highest, measure.Highest ?? double.PositiveInfinity),
             measure.Kind == MeasureKind.Count);
     }
 
-    private static (double Lowest, double Highest) Kind(Measure measure) => measure.Kind switch
+    /// <summary>The bounds that the kind alone sets.</summary>
+    internal static (double Lowest, double Highest) OfKind(Measure measure) => measure.Kind switch
     {
         MeasureKind.Count or MeasureKind.Estimate => (0, double.PositiveInfinity),
         MeasureKind.Share => (0, measure.InOnes ? 1 : 100),

@@ -27,10 +27,20 @@ internal static class SignOffFile
         var waiver = finding is null || reason is null || by is null || on is null
             ? null
             : new Waiver(finding, keys.Text("at"), reason, by, on.Value, Date(keys, "until")) { Place = keys.At };
+        var isFilledIn = IsFilledIn(keys, "reason", reason) & IsFilledIn(keys, "by", by);
         if (finding is null || Waivers.Waivable.Contains(finding))
-            return waiver;
+            return isFilledIn ? waiver : null;
         context.Add(WaiverProblems.CannotBeWaived(keys.PlaceOf("finding"), finding, context.Owner));
         return null;
+    }
+
+    /// <summary>False for the dots of the pattern that a finding gives to paste.</summary>
+    private static bool IsFilledIn(ObjectReader keys, string key, string? text)
+    {
+        if (text is null || text.AsSpan().ContainsAnyExcept(" .\u2026"))
+            return true;
+        keys.Context.Add(WaiverProblems.NotFilledIn(keys.PlaceOf(key), key, keys.Context.Owner));
+        return false;
     }
 
     private static Approval? ReadApproval(JsonValue value, ReadContext context) =>

@@ -8,11 +8,17 @@ internal static class WaiverProblems
 {
     public static Finding CannotBeWaived(Place at, string slug, FindingOwner owner) => new(
         FindingLevel.Stop, "cannot-be-waived", owner, at,
-        $"\"{KeyProblems.Cut(slug)}\" cannot be waived.",
-        "what is wrong with the budget, a margin that is missing and a leak cannot be signed away.",
+        $"\"{KeyProblems.Cut(slug)}\" is none of the findings that can be waived.",
+        $"what is wrong with the budget, a margin that is missing and a leak cannot be signed away; these can: {string.Join(", ", Waivers.Waivable)}.",
         Nearest.Of(slug, Waivers.Waivable) is { } near
-            ? $"write \"{near}\" if that is meant; else take the waiver out and mend what the finding names."
-            : "take the waiver out and mend what the finding names.");
+            ? $"write \"{near}\" if that is meant; else take the waiver out, and if there is such a finding, mend what the finding names."
+            : "take the waiver out, and if there is such a finding, mend what the finding names.");
+
+    public static Finding NotFilledIn(Place at, string key, FindingOwner owner) => new(
+        FindingLevel.Stop, "waiver-not-filled-in", owner, at,
+        $"\"{key}\" of this waiver still holds the dots of the pattern.",
+        "a waiver is the record of who let a finding stand, and why; nobody has signed this one.",
+        key == "by" ? "write the name or office of whoever takes it upon themselves, or take the waiver out." : "write why the finding may stand, or take the waiver out.");
 
     public static Finding HasEnded(Waiver waiver) => new(
         FindingLevel.Caution, "waiver-without-effect", FindingOwner.SignOff, waiver.Place,

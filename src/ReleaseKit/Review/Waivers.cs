@@ -39,6 +39,6 @@ public static class Waivers
 
     /// <summary>A caution says with which waiver it may stand, ready to paste; the day is to be put right by whoever signs.</summary>
     private static Finding WithWaiver(Finding finding, Release? release) => release is not null && finding.Level == FindingLevel.Caution && Waivable.Contains(finding.Slug)
-        ? finding with { Do = FormattableString.Invariant($$"""{{finding.Do}} If it may stand, write in signoff.json: { "waivers": [ { "finding": "{{finding.Slug}}", "at": "{{finding.Address ?? finding.At.ToString()}}", "reason": "…", "by": "…", "on": "{{release.Published.Date:yyyy-MM-dd}}" } ] }""") }
+        ? finding with { Do = FormattableString.Invariant($$"""{{finding.Do}} If it may stand, write in signoff.json, with words of your own for the dots: { "waivers": [ { "finding": "{{finding.Slug}}", "at": "{{finding.Address ?? finding.At.ToString()}}", "reason": "…", "by": "…", "on": "{{release.Published.Date:yyyy-MM-dd}}" } ] }""") }
         : finding;
 }

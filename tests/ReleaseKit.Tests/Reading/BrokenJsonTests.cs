@@ -89,6 +89,13 @@ public sealed class BrokenJsonTests
     public void Wrong_type_is_said_in_words() => Broken.Stops("wrong-type", Mechanisms, "\"4.0\"", "write \"sigma\": 4.0",
         folder => folder.Edit(Mechanisms, "\"sigma\": 4.0", "\"sigma\": \"4.0\""));
 
+    [Theory]
+    [InlineData("8,0", "write \"sigma\": 8.0")]
+    [InlineData("1,240", "write a number without quotation marks, such as \"sigma\": 1")]
+    [InlineData("eight", "write a number without quotation marks, such as \"sigma\": 1")]
+    public void Text_in_the_place_of_a_number_is_told_the_number_only_if_it_is_sure(string text, string remedy) => Broken.Stops("wrong-type", Mechanisms, $"\"{text}\"", remedy,
+        folder => folder.Edit(Mechanisms, "\"sigma\": 4.0", $"\"sigma\": \"{text}\""));
+
     [Fact]
     public void Unknown_value_is_told_the_nearest() => Broken.Stops("unknown-value", Mechanisms, "\"discrete-gausian\"", "write \"law\": \"discrete-gaussian\"",
         folder => folder.Edit(Mechanisms, "discrete-gaussian", "discrete-gausian"));

@@ -36,10 +36,27 @@ public sealed class BrokenTableTests
     [InlineData("+31", "without it")]
     [InlineData("\u221231", "hyphen")]
     [InlineData("31%", "share")]
-    [InlineData("NaN", "marks")]
-    [InlineData("many", "declare the mark")]
+    [InlineData("NaN", "\"statuses\": { \"marks\": { \"NaN\": \"O\" } }")]
+    [InlineData("many", "declare the mark: \"statuses\": { \"marks\": { \"many\": \"O\" } }")]
+    [InlineData("#REF!", "mend the formula")]
+    [InlineData("#N/A", "mend the formula")]
+    [InlineData("a\\b", "leave the cell empty if there is none.")]
     public void Other_ways_to_write_a_number_are_named(string text, string remedy) => Broken.Stops("csv-number", Csv, text, remedy,
         folder => folder.Edit(Csv, "Kiln Row,31,", $"Kiln Row,{text},").Edit(Csv, "All,60,", "All,29,"));
+
+    [Theory]
+    [InlineData("NaN", "NaN")]
+    [InlineData("n/a", "n/a")]
+    [InlineData("many", "many")]
+    [InlineData("#REF!", "")]
+    public void Remedy_of_a_mark_settles_it(string text, string settled)
+    {
+        using var broken = new Broken(folder => folder.Edit(Csv, "Quay,20,5", $"Quay,20,{text}"));
+        var remedy = Assert.Single(broken.Review(), finding => finding.Slug == "csv-number").Do;
+        var marks = settled.Length == 0 ? "" : remedy[remedy.IndexOf("\"statuses\"", StringComparison.Ordinal)..(remedy.IndexOf("} }", StringComparison.Ordinal) + 3)] + ", ";
+        using var mended = new Broken(folder => folder.Edit(Csv, "Quay,20,5", $"Quay,20,{settled}").Edit(Release, "\"figures\": [\n", marks + "\"figures\": [\n"));
+        Assert.DoesNotContain(mended.Review(), finding => finding.Level == FindingLevel.Stop);
+    }
 
     [Theory]
     [InlineData("\"1,100\"", "bare digits: 1100.")]

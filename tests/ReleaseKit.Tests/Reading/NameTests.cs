@@ -30,6 +30,19 @@ public sealed class NameTests
     public void Id_with_other_letters_is_told_its_slug() => Broken.Stops("bad-id", Release, "\"Str\u00E4\u00DFen 1\"", "write \"strassen-1\"",
         folder => folder.Edit(Release, "\"id\": \"by-street\"", "\"id\": \"Str\u00E4\u00DFen 1\"").Edit("narrative/summary.md", "(chart:by-street)", "(<chart:Str\u00E4\u00DFen 1>)"));
 
+    [Theory]
+    [InlineData("con", "con-1")]
+    [InlineData("CON", "con-1")]
+    [InlineData("con.a", "con-1.a")]
+    [InlineData("_com1", "com1-1")]
+    public void Id_that_is_proposed_can_be_one(string id, string proposed)
+    {
+        using var folder = new TestFolder().Edit(Release, "\"id\": \"lamps\"", $"\"id\": \"{id}\"");
+        Assert.Equal($"write \"{proposed}\".", Assert.Single(folder.Read().Findings, finding => finding.Slug == "bad-id").Do);
+        using var mended = new TestFolder().Edit(Release, "\"id\": \"lamps\"", $"\"id\": \"{proposed}\"");
+        Assert.DoesNotContain(mended.Read().Findings, finding => finding.Slug == "bad-id");
+    }
+
     [Fact]
     public void Headline_that_leads_nowhere_is_told_the_nearest() => Broken.Stops("unknown-figure", Release, "\"lamps/lit?street=Al\"", "write All.",
         folder => folder.Edit(Release, "\"lamps/lit?street=All\"", "\"lamps/lit?street=Al\""));

@@ -36,6 +36,30 @@ public sealed class FollowOnTests
     public void Rule_that_cannot_be_read_leaves_the_rules_after_it_unjudged(string where, string slug) => OnlyStop(slug, folder => folder
         .Edit(Release, "\"noise\": [ { \"mechanism\": \"lamps-broken\" } ]", $"\"noise\": [ {{ \"where\": {where}, \"mechanism\": \"lamps-broken\" }}, {{ \"mechanism\": \"lamps-lit\" }} ]"));
 
+    [Theory]
+    [InlineData("\"column\": \"street\"", "\"column\": \"stret\"")]
+    [InlineData("\"column\": \"lit\"", "\"column\": \"litt\"")]
+    public void Column_mistyped_is_one_finding(string from, string to) => OnlyStop("missing-column", folder => folder.Edit(Release, from, to));
+
+    [Fact]
+    public void Declared_law_without_its_loss_is_one_finding_that_settles_it()
+    {
+        const string declared = "\"mechanisms\": [ { \"id\": \"rows\", \"law\": \"declared\", \"use\": \"choice-of-rows\" },";
+        OnlyStop("spent-missing", folder => folder.Edit(Mechanisms, "\"mechanisms\": [", declared));
+        Assert.Empty(StopsOf(folder => folder.Edit(Mechanisms, "\"mechanisms\": [", declared.Replace(" },", ", \"spent\": { \"epsilon\": 0.1 } },", StringComparison.Ordinal))));
+    }
+
+    [Theory]
+    [InlineData("lamp-lit", "write \"lamps-lit\"")]
+    [InlineData("nope", "take it out, or name one of: lamps-lit, lamps-broken.")]
+    public void Unknown_mechanism_in_composition_is_about_its_loss(string id, string remedy)
+    {
+        using var folder = new TestFolder().Edit(Mechanisms, "\"practice\": {", $"\"composition\": {{ \"together\": [ \"lamps-broken\", \"{id}\" ] }}, \"practice\": {{");
+        var found = folder.OnlyStop("unknown-mechanism");
+        Assert.DoesNotContain("margin", found.Why, StringComparison.Ordinal);
+        Assert.Contains(remedy, found.Do, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Column_named_in_another_finding_does_not_hide_a_law_without_a_number() => Assert.Contains("loss-unknown", StopsOf(folder => folder
         .With("tables/lamps.csv", "street,lit,broken,lamps-broken\nAll,60,9,1\nKiln Row,31,4,1\nQuay,20,5,1\nWeir Lane,9,-1,1\n")

@@ -43,6 +43,30 @@ public sealed class WaiverTests
     public void Budget_margin_and_leak_findings_cannot_be_waived(string slug) => Broken.Stops("cannot-be-waived", "signoff.json", $"\"{slug}\"", "mend what the finding names",
         folder => folder.With("signoff.json", $$"""{ "waivers": [ { "finding": "{{slug}}", "reason": "r", "by": "b", "on": "2032-01-01" } ] }"""));
 
+    [Fact]
+    public void Finding_that_there_is_not_is_not_said_to_be_about_the_budget_and_what_can_be_waived_is_listed()
+    {
+        var found = Single("cannot-be-waived", """{ "finding": "nope", "reason": "r", "by": "b", "on": "2032-03-01" }""");
+        Assert.Equal("\"nope\" is none of the findings that can be waived.", found.Found);
+        Assert.Contains("these can: formula-cell, kind-not-given,", found.Why, StringComparison.Ordinal);
+        Assert.Contains("write \"prose-html\"", Single("cannot-be-waived", """{ "finding": "prose-htm", "reason": "r", "by": "b", "on": "2032-03-01" }""").Do, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("reason", "\u2026", "Registrar", "write why")]
+    [InlineData("by", "It is a quotation.", "...", "write the name")]
+    [InlineData("by", "It is a quotation.", " \u2026 ", "write the name")]
+    public void Waiver_with_the_dots_of_its_pattern_is_a_stop_and_has_no_effect(string key, string reason, string by, string remedy)
+    {
+        var waiver = $$"""{ "finding": "prose-html", "reason": "{{reason}}", "by": "{{by}}", "on": "2032-03-01" }""";
+        var found = Single("waiver-not-filled-in", waiver);
+        Assert.Equal((FindingLevel.Stop, "signoff.json"), (found.Level, found.At.File));
+        Assert.Contains($"\"{key}\" of this waiver", found.Found, StringComparison.Ordinal);
+        Assert.Contains(remedy, found.Do, StringComparison.Ordinal);
+        Assert.Equal(16 + waiver.IndexOf($"\"{key}\": \"", StringComparison.Ordinal) + key.Length + 4, found.At.Column);
+        Assert.Equal(FindingLevel.Caution, Single("prose-html", waiver).Level);
+    }
+
     public static TheoryData<string, string, string, string> Waivable => new()
     {
         { "prose-html", Html, "lamps were lit", "lamps <b>were lit" },
@@ -74,6 +98,7 @@ public sealed class WaiverTests
         foreach (var at in new[] { found.At.ToString(), found.At.File, found.Address }.OfType<string>())
         {
             var pasted = found.Do[found.Do.IndexOf("{ \"waivers\"", StringComparison.Ordinal)..].Replace(found.Address ?? found.At.ToString(), at, StringComparison.Ordinal);
+            pasted = pasted.Replace("\"\u2026\"", "\"Registrar\"", StringComparison.Ordinal);
             using var settled = new Broken(folder => { Damage(folder); folder.With("signoff.json", pasted); });
             Assert.DoesNotContain(settled.Review(), finding => finding.Slug == "waiver-without-effect" || finding is { For: FindingOwner.SignOff, Level: FindingLevel.Stop });
             Assert.Equal(FindingLevel.Note, Assert.Single(settled.Review(), finding => finding.Slug == slug).Level);

@@ -11,7 +11,7 @@ public sealed record NumberRange(string Words, Func<double, bool> Holds, string 
     /// <summary>The smallest rounding unit.</summary>
     private const double Finest = 1e-9;
 
-    public static NumberRange Any { get; } = new("a number within 1e15 of zero", value => Math.Abs(value) <= Largest, "0");
+    public static NumberRange Any { get; } = new("a number within 1e15 of zero", value => Math.Abs(value) <= Largest, "1");
 
     public static NumberRange Positive { get; } = new("above 0 and at most 1e15", value => value is > 0 and <= Largest, "1");
 

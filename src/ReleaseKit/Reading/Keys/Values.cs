@@ -1,6 +1,7 @@
 using System.Globalization;
 using System.Text.RegularExpressions;
 using ReleaseKit.Reading.Json;
+using ReleaseKit.Reading.Tables;
 using ReleaseKit.Releases;
 
 namespace ReleaseKit.Reading.Keys;
@@ -34,7 +35,7 @@ internal static partial class Values
     {
         if (value is not JsonNumber number)
         {
-            context.Add(KeyProblems.WrongType(value, key, "a number", $"\"{key}\": {Meant(value, range) ?? range.Example}", context.Owner));
+            context.Add(KeyProblems.WrongType(value, key, "a number", NumberToPaste(value, key, range), context.Owner));
             return null;
         }
         if (range.Holds(number.Value))
@@ -77,8 +78,12 @@ internal static partial class Values
         return null;
     }
 
+    private static string NumberToPaste(JsonValue value, string key, NumberRange range) =>
+        Meant(value, range) is { } meant ? $"\"{key}\": {meant}" : $"a number without quotation marks, such as \"{key}\": {range.Example}";
+
     /// <summary>The number that stands between quotation marks, if it is one that the key can have.</summary>
-    private static string? Meant(JsonValue value, NumberRange range) => value is JsonText { Value: var text }
+    private static string? Meant(JsonValue value, NumberRange range) => value is JsonText { Value: var written }
+        && (MeantNumber.OfDecimalComma(written) ?? written) is var text
         && double.TryParse(text, NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out var number)
         && double.IsFinite(number) && range.Holds(number)
             ? Bare(text, number)

@@ -1,3 +1,4 @@
+using ReleaseKit.Reading.Files;
 using ReleaseKit.Reading.Keys;
 using ReleaseKit.Releases;
 using ReleaseKit.Review;
@@ -27,14 +28,28 @@ internal static class MechanismProblems
     public static Finding BadId(Place at, string id, FindingOwner owner) => new(
         FindingLevel.Stop, "bad-id", owner, at,
         $"\"{KeyProblems.Cut(id)}\" cannot be an id.",
-        "ids become parts of addresses and file names: a to z, 0 to 9, - _ and the point only, beginning with a letter or digit.",
-        Slug.Of(id) is { Length: > 0 } slug ? $"write \"{slug}\"." : "write a short name in these letters.");
+        Slug.IsOne(id) ? "it becomes the name of a folder, and Windows keeps this one for a device." : "ids become parts of addresses and file names: a to z, 0 to 9, - _ and the point only, beginning with a letter or digit.",
+        Usable(id) is { } usable ? $"write \"{usable}\"." : "write a short name in these letters.");
 
     public static Finding JoinsTogether(Place at, string id, FindingOwner owner) => new(
         FindingLevel.Note, "joins-together", owner, at,
         $"\"{id}\" is not named in \"composition\"; its loss is added to the others.",
         "adding is never too little.",
         $"nothing, or name \"{id}\" under \"together\".");
+
+    private static string? Usable(string id)
+    {
+        var slug = Slug.IsOne(id) ? id : Slug.Of(id).TrimStart('_', '-');
+        var name = slug.Split('.')[0];
+        var usable = PathRules.IsDevice(name) ? $"{name}-1{slug[name.Length..]}" : slug;
+        return Slug.IsOne(usable) ? usable : null;
+    }
+
+    public static Finding NotInComposition(Place at, string id, IReadOnlyCollection<string> known, FindingOwner owner) => new(
+        FindingLevel.Stop, "unknown-mechanism", owner, at,
+        $"\"composition\" names \"{KeyProblems.Cut(id)}\", which is no mechanism of mechanisms.json.",
+        "a loss that was meant to be added to the others may be missing.",
+        Nearest.Of(id, known) is { } near ? $"write \"{near}\", or take it out." : $"take it out{(known.Count > 0 ? $", or name one of: {string.Join(", ", known)}" : "")}.");
 
     public static Finding UnknownMechanism(Place at, string id, IReadOnlyCollection<string> known, FindingOwner owner) => new(
         FindingLevel.Stop, "unknown-mechanism", owner, at,

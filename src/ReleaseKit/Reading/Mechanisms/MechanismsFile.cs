@@ -142,7 +142,7 @@ internal static class MechanismsFile
         }
         var id = Values.Text(value, "together", context);
         if (id is not null && !ids.Contains(id))
-            context.Add(MechanismProblems.UnknownMechanism(value.At, id, ids, context.Owner));
+            context.Add(MechanismProblems.NotInComposition(value.At, id, ids, context.Owner));
         return id;
     }
 }

@@ -8,7 +8,7 @@ internal static class CellProblems
 {
     public static Finding Number(Place at, string column, string text, NumberFault fault, FindingOwner owner)
     {
-        var (slug, what, how) = Say(fault, MeantNumber.Of(text, fault));
+        var (slug, what, how) = Say(fault, text, MeantNumber.Of(text, fault));
         return new Finding(
             FindingLevel.Stop, slug, owner, at,
             $"\"{KeyProblems.Cut(text)}\" in column \"{column}\" {what}.",
@@ -16,7 +16,7 @@ internal static class CellProblems
             how);
     }
 
-    private static (string Slug, string What, string How) Say(NumberFault fault, string? meant) => fault switch
+    private static (string Slug, string What, string How) Say(NumberFault fault, string text, string? meant) => fault switch
     {
         NumberFault.DecimalComma => ("csv-decimal-comma", "has a decimal comma",
             $"export the table with a point as decimal sign: {meant ?? "12.5"}. In a spreadsheet set the language of the file to English before saving."),
@@ -28,10 +28,15 @@ internal static class CellProblems
         NumberFault.Percent => ("csv-number", "has a per cent sign", "write the number alone, and \"kind\": \"share\" in release.json."),
         NumberFault.TooLong => ("csv-overflow", $"has more than 18 digits, or more than {FigureParser.MostDecimals} after the point",
             "no figure is known that well: round it as declared in \"afterwards\", or give it in a larger unit."),
-        NumberFault.NoNumber => ("csv-number", "is no number",
-            "leave the cell empty if there is no figure, or say what it means: \"statuses\": { \"marks\": { \"NA\": \"O\" } }."),
-        _ => ("csv-number", "is no number", "write a number, or declare the mark: \"statuses\": { \"marks\": { \"[c]\": \"Q\" } }."),
+        NumberFault.SpreadsheetError => ("csv-number", "is the error of a formula in a spreadsheet", "mend the formula and export the table again; leave the cell empty if there is no figure."),
+        NumberFault.NoNumber => ("csv-number", "is no number", $"leave the cell empty if there is no figure{(IsMark(text) ? $", or say what it means: {Marks(text)}" : "")}."),
+        _ => ("csv-number", "is no number", $"write a number, or leave the cell empty if there is none{(IsMark(text) ? $"; if it is a mark, declare the mark: {Marks(text)}" : "")}."),
     };
+
+    /// <summary>Whether it can be pasted as a key of JSON as it stands.</summary>
+    private static bool IsMark(string text) => text == KeyProblems.Cut(text) && text.AsSpan().IndexOfAny('"', '\\') < 0;
+
+    private static string Marks(string text) => $"\"statuses\": {{ \"marks\": {{ \"{text}\": \"O\" }} }} for a figure that is not available, \"Q\" in the place of \"O\" for one that is hidden";
 
     public static Finding CountNotWhole(Place at, string column, string text, FindingOwner owner) => new(
         FindingLevel.Stop, "count-not-whole", owner, at,

@@ -3,7 +3,7 @@ using System.Text;
 
 namespace ReleaseKit.Reading.Tables;
 
-internal enum NumberFault { None, Empty, DecimalComma, ThousandsMarks, Exponent, PlusSign, OtherMinus, Percent, NoNumber, TooLong, Text }
+internal enum NumberFault { None, Empty, DecimalComma, ThousandsMarks, Exponent, PlusSign, OtherMinus, Percent, NoNumber, SpreadsheetError, TooLong, Text }
 
 /// <summary>Reads a figure's digits exactly: -12.50 becomes −1250 with 2 decimals. Nothing passes through a double. Whatever else stands there is named.</summary>
 internal static class FigureParser
@@ -54,8 +54,10 @@ internal static class FigureParser
             return NumberFault.PlusSign;
         if (text[^1] == '%' && char.IsAsciiDigit(text[0]))
             return NumberFault.Percent;
-        if (text.ToLowerInvariant().TrimStart('-') is "nan" or "inf" or "infinity" or "na" or "n/a" or "null" or "none" or "#n/a")
+        if (text.ToLowerInvariant().TrimStart('-') is "nan" or "inf" or "infinity" or "na" or "n/a" or "null" or "none")
             return NumberFault.NoNumber;
+        if (text.ToUpperInvariant() is "#N/A" or "#REF!" or "#VALUE!" or "#NAME?" or "#DIV/0!" or "#NULL!" or "#NUM!" or "#SPILL!" or "#CALC!")
+            return NumberFault.SpreadsheetError;
         return Grouped(text.AsSpan().TrimStart('-'));
     }
 

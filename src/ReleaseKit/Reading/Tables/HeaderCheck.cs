@@ -9,11 +9,14 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
 {
     private readonly IReadOnlyList<string> headers = rows.Headers;
 
+    /// <summary>Columns that a name without a column probably means: the finding about that name says so, and what else follows is none of its own.</summary>
+    public IReadOnlySet<string> Meant { get; } = MeantIn(draft, rows.Headers);
+
     /// <summary>Whether every column that is needed is there; what is not is reported, as is a column that nobody declared.</summary>
     public bool Run()
     {
         var isWhole = true;
-        foreach (var (column, at) in Needed().Where(needed => !headers.Contains(needed.Column)))
+        foreach (var (column, at) in Needed(draft).Where(needed => !headers.Contains(needed.Column)))
         {
             draft.Context.Add(TableProblems.MissingColumn(at, column, draft.File, headers, draft.Context.Owner));
             isWhole = false;
@@ -25,7 +28,10 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
         return isWhole;
     }
 
-    private IEnumerable<(string Column, Place At)> Needed() => draft.Stub.Select(stub => (stub.Column, stub.At))
+    private static HashSet<string> MeantIn(TableDraft draft, IReadOnlyList<string> headers) =>
+        [.. Needed(draft).Where(needed => !headers.Contains(needed.Column)).Select(needed => Nearest.Of(needed.Column, headers)).OfType<string>()];
+
+    private static IEnumerable<(string Column, Place At)> Needed(TableDraft draft) => draft.Stub.Select(stub => (stub.Column, stub.At))
         .Concat(draft.Figures.Select(figure => (figure.Column, figure.At)))
         .Concat(draft.Figures.Where(figure => figure.UnadjustedColumn is not null).Select(figure => (figure.UnadjustedColumn!, figure.At)))
         .Concat(draft.Columns.Select(column => (column.Column, column.At)));
@@ -48,10 +54,10 @@ internal sealed class HeaderCheck(TableDraft draft, MechanismsDraft mechanisms, 
 
     private void CheckUndeclared()
     {
-        var declared = Needed().Select(needed => needed.Column)
+        var declared = Needed(draft).Select(needed => needed.Column)
             .Concat(draft.Figures.Select(figure => draft.Statuses.ColumnOf(figure.Column)).OfType<string>()).ToHashSet();
         for (var index = 0; index < headers.Count; index++)
-            if (!declared.Contains(headers[index]))
+            if (!declared.Contains(headers[index]) && !Meant.Contains(headers[index]))
                 draft.Context.Add(TableProblems.UndeclaredColumn(rows.PlaceOfHeader(index), headers[index], FindingOwner.Noise));
     }
 }

@@ -18,6 +18,10 @@ internal static class MeantNumber
         _ => null,
     };
 
+    /// <summary>The number with a point in the place of its decimal comma; null where there is none, or where the comma may part thousands.</summary>
+    public static string? OfDecimalComma(string text) =>
+        FigureParser.Parse(System.Text.Encoding.UTF8.GetBytes(text), out _, out _) == NumberFault.DecimalComma ? Of(text, NumberFault.DecimalComma) : null;
+
     /// <summary>Digits, a minus before them and one mark; all that parts thousands is gone.</summary>
     private static string Bare(string text, char mark) => new([.. text.Where(letter => char.IsAsciiDigit(letter) || letter == '-' || letter == mark)]);
 

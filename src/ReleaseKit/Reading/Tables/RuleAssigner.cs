@@ -4,7 +4,7 @@ using ReleaseKit.Releases;
 namespace ReleaseKit.Reading.Tables;
 
 /// <summary>Which rule decides each row of a measure: the first whose "where" fits. Rows that no rule fits get <see cref="NoiseRule.NotGiven"/>, added last, and are reported by the checks. Where one rule could not be read, it is not known which rows the others would have: none has a rule.</summary>
-internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> stub, int rowCount, MechanismsDraft mechanisms)
+internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> stub, int rowCount, MechanismsDraft mechanisms, IReadOnlySet<string> meant)
 {
     private readonly Dictionary<int, (List<NoiseRule> Rules, List<int[]> Wanted)> byMeasure = [];
 
@@ -59,7 +59,7 @@ internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> s
     private NoiseRule.SumOver? SumOver(RuleEnd.SumOver sum)
     {
         var index = StubIndex(sum.Column);
-        if (index < 0)
+        if (index < 0 && !meant.Contains(sum.Column))
             draft.Context.Add(TableProblems.NotAStub(sum.At, "sumOver", sum.Column, stub.Select(column => column.Column), Review.FindingOwner.Noise));
         return index < 0 ? null : new NoiseRule.SumOver(index);
     }
@@ -72,7 +72,7 @@ internal sealed class RuleAssigner(TableDraft draft, IReadOnlyList<StubColumn> s
         foreach (var (column, value) in rule.Where)
             if (StubIndex(column) is >= 0 and var index)
                 wanted[index] = CodeOf(index, value, rule);
-            else
+            else if (!meant.Contains(column))
                 draft.Context.Add(TableProblems.NotAStub(rule.WhereAt, "where", column, stub.Select(one => one.Column), Review.FindingOwner.Noise));
         return wanted.Contains(NotThere) ? null : wanted;
     }

@@ -14,6 +14,7 @@ internal sealed class TableReader(TableDraft draft, MechanismsDraft mechanisms, 
     private StubBuilder[] stub = [];
     private MeasureBuilder[] measures = [];
     private SideBuilder[] sides = [];
+    private IReadOnlySet<string> meant = new HashSet<string>();
 
     public ReadTable Read(FolderFiles files)
     {
@@ -21,11 +22,18 @@ internal sealed class TableReader(TableDraft draft, MechanismsDraft mechanisms, 
         var file = files.Find(draft.File, draft.FileAt, draft.Context);
         using var rows = file is null ? null : CsvFile.Open(file, draft.File, context);
         var headers = rows?.Headers ?? [];
-        var isWhole = rows is not null && new HeaderCheck(draft, mechanisms, rows).Run();
+        var isWhole = rows is not null && CheckHeaders(rows);
         Prepare(headers);
         if (rows is not null && isWhole)
             isWhole = ReadRows(rows);
         return Build(isWhole);
+    }
+
+    private bool CheckHeaders(CsvFile rows)
+    {
+        var check = new HeaderCheck(draft, mechanisms, rows);
+        meant = check.Meant;
+        return check.Run();
     }
 
     private void Prepare(IReadOnlyList<string> headers)
@@ -59,7 +67,7 @@ internal sealed class TableReader(TableDraft draft, MechanismsDraft mechanisms, 
     private ReadTable Build(bool isWhole)
     {
         var columns = stub.Select(column => column.Build(labels, draft.Context)).ToList();
-        var rules = new RuleAssigner(draft, columns, lines.Count, mechanisms);
+        var rules = new RuleAssigner(draft, columns, lines.Count, mechanisms, meant);
         var table = new Table
         {
             Id = draft.Id,
@@ -87,7 +95,8 @@ internal sealed class TableReader(TableDraft draft, MechanismsDraft mechanisms, 
         var names = draft.Stub.Select(column => column.Column).ToList();
         if (names.IndexOf(name.Value) is >= 0 and var index)
             return index;
-        draft.Context.Add(TableProblems.NotAStub(name.At, key, name.Value, names, draft.Context.Owner));
+        if (!meant.Contains(name.Value))
+            draft.Context.Add(TableProblems.NotAStub(name.At, key, name.Value, names, draft.Context.Owner));
         return null;
     }
 

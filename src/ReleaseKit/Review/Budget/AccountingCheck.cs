@@ -12,9 +12,12 @@ internal sealed class AccountingCheck : IReviewCheck
         if (subject.Noise is not { } account)
             return [];
         var accountant = Accountant.Of(account.Accounting);
-        return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))) && !IsToldByColumn(spending, subject.Read))
+        return subject.Spendings.Where(spending => double.IsInfinity(accountant.AmountOf(accountant.Upper(spending))) && !IsToldByReading(spending.Mechanism) && !IsToldByColumn(spending, subject.Read))
             .Select(spending => Found(spending, account, new ProposedPair(subject.Spendings, account)));
     }
+
+    // A declared law has its loss from "spent" alone; one that is missing is told where the mechanism is read.
+    private static bool IsToldByReading(Mechanism mechanism) => mechanism is { Law: LawName.Declared, Spent: null };
 
     // A column that gives a parameter and is not there, not declared or without numbers is told where it stands; so is a rule that could not be read.
     private static bool IsToldByColumn(MechanismSpending spending, Reading.ReadOutcome read)

@@ -83,7 +83,7 @@ internal sealed class BeyondNoiseCheck : IReviewCheck
             FindingLevel.Stop, "beyond-noise", FindingOwner.Noise, Place.OfCell(table.File, worst.Row, measure.Column),
             $"{address} is {measure.ValueAt(worst.Row)}; the {side} value before noise that is possible there is {BudgetText.Plain(bound)}. {chance}",
             "noise as declared does not make such a value: its margin, and what the mechanism is said to have spent, are those of other noise.",
-            $"correct the value, or declare in mechanisms.json the noise that was added; or, if values before noise {(isBelow ? "below" : "above")} {BudgetText.Plain(bound)} are possible, {Widen(measure, isBelow)}.")
+            $"correct the value, or declare in mechanisms.json the noise that was added; or, if values before noise {(isBelow ? "below" : "above")} {BudgetText.Plain(bound)} are possible, {Widen(measure, isBelow, bound)}.")
         {
             Address = address,
         };
@@ -112,12 +112,14 @@ internal sealed class BeyondNoiseCheck : IReviewCheck
         _ => $" {count - 1} more figures of its rule are out of reach.",
     };
 
-    private static string Widen(Measure measure, bool isBelow) => (isBelow, measure) switch
+    /// <summary>The key that sets the bound: the kind, unless a declared one is narrower.</summary>
+    private static string Widen(Measure measure, bool isBelow, double bound)
     {
-        (true, { Lowest: not null, Kind: not (MeasureKind.Count or MeasureKind.Estimate or MeasureKind.Share) }) => "correct \"lowest\" in release.json",
-        (false, { Highest: not null }) => "correct \"highest\" in release.json",
-        _ => $"correct \"kind\" in release.json, which is \"{BudgetText.Written(measure.Kind)}\"",
-    };
+        var (lowest, highest) = PossibleOf.OfKind(measure);
+        return bound == (isBelow ? lowest : highest)
+            ? $"correct \"kind\" in release.json, which is \"{BudgetText.Written(measure.Kind)}\""
+            : $"correct \"{(isBelow ? "lowest" : "highest")}\" in release.json";
+    }
 
     /// <summary>How many figures and rules are looked at: a chance counts for all of them together.</summary>
     private readonly record struct Counts(long Figures, int Rules);

@@ -47,6 +47,18 @@ public sealed class BeyondNoiseTests
         Assert.Contains("4 figures of its rule lie beyond it.", found.Found, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("\"count\"", "correct \"kind\" in release.json, which is \"count\".", "-5000")]
+    [InlineData("\"count\", \"lowest\": 500", "correct \"lowest\" in release.json.", "-1")]
+    [InlineData("\"amount\", \"lowest\": 500", "correct \"lowest\" in release.json.", "-1")]
+    [InlineData("\"share\"", "correct \"kind\" in release.json, which is \"share\".", "5000")]
+    [InlineData("\"share\", \"highest\": 50", "correct \"highest\" in release.json.", "5000")]
+    public void Remedy_names_the_key_that_sets_the_bound(string kind, string remedy, string value)
+    {
+        using var broken = new Broken(folder => folder.Edit("release.json", "\"kind\": \"count\", \"noise\": [ { \"mechanism\": \"lamps-broken\"", $"\"kind\": {kind}, \"noise\": [ {{ \"mechanism\": \"lamps-broken\"").Edit("tables/lamps.csv", ",-1\n", $",{value}\n"));
+        Assert.EndsWith(remedy, Assert.Single(broken.Review(), finding => finding.Slug == "beyond-noise").Do, StringComparison.Ordinal);
+    }
+
     private static IEnumerable<Finding> FindingsOf(string law, string end)
     {
         using var broken = new Broken(folder => folder.Edit("mechanisms.json", Scale, law).Edit("tables/lamps.csv", ",-1\n", end));
