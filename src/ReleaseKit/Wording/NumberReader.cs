@@ -28,7 +28,7 @@ internal sealed class NumberReader
         var digits = $@"(?<digits>\d{{1,3}}(?:{Spaces}\d{{3}})+(?:{dot}\d+)?(?![.,'’]?\d)|\d(?:[\d.,'’{marks}]*\d)?)(?:{words.Scale})*(?<ordinal>(?:{NumberWords.AnyOf(texts.Template("number.ordinal-ends").Split('|'))})(?!\w))?";
         var below = $@"(?<below>(?:\s+\p{{L}}+)?\s+(?:{NumberWords.AnyOf(texts.Template("number.below-zero").Split('|'))})(?!\w|[.,]\d))";
         var bound = new BoundWords(texts);
-        number = new($@"(?<before>{bound.Before})?(?<number>(?:(?<margin>{margin})\s*|(?<minus>{sign}))?(?:{digits}|(?<run>{words.Run})){below}?(?:{bound.Behind})?)", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
+        number = new($@"(?<before>{bound.Before})?(?<number>(?:(?<margin>{margin})\s*|(?<minus>{sign}))?(?:{digits}|(?<run>{words.Run})){below}?)(?<behind>{bound.Behind})?", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
         form = new($@"^(?:[0-9]{{1,3}}(?:(?:{group}|{Spaces})[0-9]{{3}})+|[0-9]+)(?:{dot}[0-9]+)?$", RegexOptions.CultureInvariant);
         groupMarks = new($"{group}|{Spaces}", RegexOptions.CultureInvariant);
     }
@@ -42,9 +42,10 @@ internal sealed class NumberReader
         var written = new WrittenNumber(number.Value, null, match.Groups["margin"].Success)
         {
             Start = number.Index,
-            End = number.Index + number.Length,
+            End = match.Index + match.Length,
             Bound = BoundWords.In(match),
             Before = match.Groups["before"].Value,
+            Behind = match.Groups["behind"].Value,
         };
         return match.Groups["run"] is { Success: true } run
             ? words.In(run.Value).Select(value => written with { Value = Signed(value, match), Step = StepOf(value), IsInLetters = true })

@@ -14,6 +14,8 @@ internal sealed record SaidNumber(WrittenNumber Number, SaidAs As, bool IsSure)
     /// <summary>Whether the figure itself must stand behind the words, wherever they are.</summary>
     public bool NeedsTheFigure => As is SaidAs.DoubtfulBound or SaidAs.RoundedFar or SaidAs.Bound or SaidAs.Unsigned or SaidAs.Rounded;
 
+    public bool IsTheMargin => As is SaidAs.AsIs && Number.IsMargin;
+
     public bool IsRoundedMargin => Number.IsMargin && As is SaidAs.Rounded;
 
     /// <summary>Whether it says the figure in digits, so that numbers in letters beside it are about something else.</summary>

@@ -65,6 +65,8 @@ internal static class SaidNumbers
         Value = whole.Value is >= 1 ? part.Value / whole.Value * inEach : null,
         Step = whole.Value is >= 1 ? StepOf(part, whole.Value.Value, whole.Step) * inEach : 1,
         IsInLetters = part.IsInLetters && whole.IsInLetters,
+        Bound = part.Bound == NumberBound.None ? whole.Bound : part.Bound,
+        Behind = "",
         End = whole.End,
     };
 

@@ -21,10 +21,14 @@ public readonly record struct WrittenNumber(string Text, decimal? Value, bool Is
     /// <summary>What the words by it make of it.</summary>
     public NumberBound Bound { get; init; }
 
-    /// <summary>The words of a bound that stand before it, "more than "; empty if there are none.</summary>
+    /// <summary>The words of a bound that stand before it, "more than ", and behind it, " or more"; empty if there are none.</summary>
     public string Before { get; init; } = "";
+    public string Behind { get; init; } = "";
 
-    /// <summary>Where it begins in the text, and where it has ended.</summary>
+    /// <summary>As it is written, with the words of its bound.</summary>
+    public string InFull => Before + Text + Behind;
+
+    /// <summary>Where it begins in the text, and where it has ended with the words behind it.</summary>
     public int Start { get; init; }
     public int End { get; init; }
 

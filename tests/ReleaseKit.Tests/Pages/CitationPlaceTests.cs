@@ -40,6 +40,8 @@ public sealed class CitationPlaceTests
     [InlineData("It is [margin](figure:A?row=r2) here.", "It is <a>\u00b1\u00a03.1</a> here.")]
     [InlineData("Of 2,100 homes it was [value](figure:A?row=r2).", "Of 2,100 homes it was <a><data>51.6</data> in each 100</a>.")]
     [InlineData("It was [value](figure:A?row=r2) per cent.", "It was <a><data>51.6</data></a> per cent.")]
+    [InlineData("It was [a good half](figure:A?row=r2) here.", "It was <a>a good half</a> <span class=\"cite-margin\">(<data>51.6</data>&#160;\u00b1\u00a03.1 in each 100)</span> here.")]
+    [InlineData("It was [over 40%](figure:A?row=r2) here.", "It was <a>over 40%</a> <span class=\"cite-margin\">(<data>51.6</data>&#160;\u00b1\u00a03.1)</span> here.")]
     [InlineData("In each hundred it was [value](figure:A?row=r2).", "In each hundred it was <a><data>51.6</data></a>.")]
     public void Citation_of_a_share_says_in_each_100_unless_the_writer_does(string markdown, string expected) => Assert.Equal($"<p>{expected}</p>\n", Bare(markdown));
 
@@ -55,6 +57,7 @@ public sealed class CitationPlaceTests
 
     [Theory]
     [InlineData("It was [value and margin](figure:A?row=r1) here.", "It was <a><data>30</data> (0 to 40)</a> here.")]
+    [InlineData("It was [so many](figure:A?row=r1) here.", "It was <a>so many</a> <span class=\"cite-margin\">(<data>30</data>, 0 to 40)</span> here.")]
     [InlineData("It was [30 homes](figure:A?row=r1) here.", "It was <a>30 homes</a> <span class=\"cite-margin\">(0 to 40)</span> here.")]
     public void Citation_with_an_uneven_margin_gives_the_range(string markdown, string expected) => Assert.Equal(
         $"<p>{expected}</p>\n",

@@ -45,6 +45,10 @@ public sealed class ProseComposerTests
         1, Regex.Count(Html($"[{words}](figure:all-late), [{words}](figure:all-late)"), "<span class=\"cite-margin\">\\(±\u00A019\\)</span>"));
 
     [Fact]
+    public void Citation_that_says_the_figure_and_its_margin_has_nothing_behind_it() =>
+        Assert.DoesNotContain("cite-margin", Html("[1,240 ± 19](figure:all-late)"), StringComparison.Ordinal);
+
+    [Fact]
     public void Citation_without_a_number_of_an_exact_figure_has_nothing_behind_it() =>
         Assert.DoesNotContain("cite-margin", Html("[the cards](<figure:paid/paid?kind=Card>)"), StringComparison.Ordinal);
 

@@ -64,6 +64,7 @@ public sealed class ProseNumberFormTests
     [InlineData("one in fourteen")]
     [InlineData("more than 6 in 100")]
     [InlineData("under 10%")]
+    [InlineData("1 in 20 or more")]
     public void Hundred_of_a_share_belongs_to_its_form(string words) => Assert.Empty(Found(New, words));
 
     [Theory]
@@ -112,6 +113,7 @@ public sealed class ProseNumberFormTests
     [InlineData(BrokenInNine, "one billion billion billion billion billion")]
     [InlineData(Seven, "the size of 7")]
     [InlineData(BrokenInNine, "31 lamps")]
+    [InlineData(BrokenInNine, "with watts 16 or fewer")]
     [InlineData(BrokenInNine, "9 lamps")]
     public void Number_that_may_mean_something_else_is_a_caution(string figure, string words) => Assert.Equal("prose-may-disagree Caution", Said(figure, words));
 

@@ -31,7 +31,7 @@ internal readonly record struct CitationPlace(string About, string Base)
 
     /// <summary>Whether the words stand there, and not within a larger number: 2,100 does not say 100.</summary>
     private static bool Says(string text, string words) =>
-        Regex.IsMatch(text, $@"(?<!\d|\d,){Regex.Escape(words)}(?!\d|,\d)", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
+        Regex.IsMatch(text, $@"(?:(?!\d)|(?<!\d|\d,)){Regex.Escape(words)}(?!\d|,\d)", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant);
 
     private static string AboutAt(Inline citation, ILanguage language)
     {

@@ -25,7 +25,7 @@ internal sealed class CitationText(Release release, ILanguage language)
         var said = SaidNumbers.In(words, figure, release, language);
         var text = (IsThere: said.Any(number => number.IsTheFigure) && !said.Any(number => number.IsRoundedMargin), IsNeeded: said.Any(number => number.NeedsTheFigure), isFirst) switch
         {
-            (IsThere: true, _, isFirst: true) => MarginAlone(figure),
+            (IsThere: true, _, isFirst: true) => said.Any(number => number.IsTheMargin) ? "" : MarginAlone(figure),
             (IsThere: false, IsNeeded: true, _) => WithMargin(figure, place),
             (IsThere: false, _, isFirst: true) when figure.Main is not null => WithMargin(figure, place),
             _ => "",

@@ -46,7 +46,7 @@ internal sealed class ProseNumberCheck : IReviewCheck
             yield return ProseProblems.RoundedFar(at, far, figure, destination, FindingOwner.Writer);
     }
 
-    private static List<string> Written(IReadOnlyList<SaidNumber> said, Func<SaidNumber, bool> which) => [.. said.Where(which).Select(number => number.Number.Before + number.Number.Text)];
+    private static List<string> Written(IReadOnlyList<SaidNumber> said, Func<SaidNumber, bool> which) => [.. said.Where(which).Select(number => number.Number.InFull)];
 
     /// <summary>Null where the address is broken, which has been reported.</summary>
     private static AppraisedFigure? FigureAt(string address, IAppraisedRelease appraised)

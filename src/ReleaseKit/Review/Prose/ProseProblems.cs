@@ -57,7 +57,7 @@ internal static class ProseProblems
     public static Finding Disagrees(Place at, IReadOnlyList<string> written, bool isUnread, FigureWords figure, string destination, FindingOwner owner) => new(
         FindingLevel.Stop, "prose-disagrees", owner, at,
         $"The words of this citation say {Quoted(written)}, but {figure.NameIs}.",
-        $"the words would be printed as they stand, {Beside(figure)}.",
+        $"the words would be printed as they stand, {(figure.Figure.HasNumber ? "and the table says something else" : "with a number that is not published")}.",
         $"write {Instead(figure, destination)}{(isUnread ? $", with the marks of {figure.Marks}" : "")}; {NotMeant}.")
     {
         Address = figure.Figure.Address,
@@ -100,14 +100,6 @@ internal static class ProseProblems
     };
 
     private const string NotMeant = "a number that means something else goes outside the link";
-
-    /// <summary>What would stand by the wrong number on the page.</summary>
-    private static string Beside(FigureWords figure) => figure.Figure switch
-    {
-        { HasNumber: false } => "with a number that is not published",
-        { Main: null } => "and the table says another number",
-        _ => "with the margin of another number behind them",
-    };
 
     private static string Quoted(IReadOnlyList<string> written) => string.Join(" and ", written.Select(number => $"\"{KeyProblems.Cut(number)}\""));
 
