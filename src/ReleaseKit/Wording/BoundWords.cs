@@ -2,7 +2,7 @@ using System.Text.RegularExpressions;
 
 namespace ReleaseKit.Wording;
 
-/// <summary>The words of one language that make a bound of a number, before it or behind it, as patterns.</summary>
+/// <summary>The words of one language that make a bound of a number, before it or behind it, as patterns; and the signs that every language has.</summary>
 internal sealed class BoundWords(WordingTexts texts)
 {
     private static readonly (NumberBound Bound, string Key)[] Keys =
@@ -15,8 +15,13 @@ internal sealed class BoundWords(WordingTexts texts)
         (NumberBound.JustOver, "number.just-over"),
     ];
 
-    /// <summary>"More than ", perhaps with the sign of a currency.</summary>
-    public string Before { get; } = $@"(?<![\w-])(?:{string.Join('|', Keys.Select(pair => Pattern(pair.Bound, texts.Template(pair.Key))))})\s+(?:\p{{Sc}}\s*)?";
+    private static readonly string Signs = string.Join('|',
+        Pattern(NumberBound.AtLeast, "≥|>="), Pattern(NumberBound.AtMost, "≤|<="), Pattern(NumberBound.Over, ">"), Pattern(NumberBound.Under, "<"));
+
+    /// <summary>"More than ", "at least about ", "> ", perhaps with the sign of a currency.</summary>
+    public string Before { get; } =
+        $@"(?:(?<![\w-])(?:{string.Join('|', Keys.Select(pair => Pattern(pair.Bound, texts.Template(pair.Key))))})\s+|(?:{Signs})\s*)"
+        + $@"(?:(?:{NumberWords.AnyOf(texts.Template("number.bound-about").Split('|'))})\s+)?(?:\p{{Sc}}\s*)?";
 
     /// <summary>" or more", perhaps behind a word for what is counted.</summary>
     public string Behind { get; } =

@@ -28,7 +28,7 @@ internal static class SaidNumbers
 
     private static IReadOnlyList<SaidNumber> Compared(string text, AppraisedFigure figure, FigureScale scale, ILanguage language) =>
     [
-        .. Ratios(language.NumbersIn(text), text, figure, language)
+        .. EnclosingNumbers.In([.. Ratios(language.NumbersIn(text), text, figure, language)], text, language)
             .Where(number => !number.IsArticle && (figure.HasNumber || !SaidNothing.Is(number) || SaidNothing.OfTheUnit(number, text, figure, language)))
             .Select(number => SaidNumber.Of(number, figure, scale, !number.IsInLetters || SaidNothing.IsSurelyFalse(number, text, figure, language))),
     ];

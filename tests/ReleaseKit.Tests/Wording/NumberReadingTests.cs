@@ -53,6 +53,8 @@ public sealed class NumberReadingTests : IDisposable
     [InlineData("", "no more than ")]
     [InlineData("1", " or")]
     [InlineData("", "no ")]
+    [InlineData("", "> ")]
+    [InlineData("", "over about ")]
     public void Long_row_of_marks_is_read_through(string start, string again) =>
         Assert.InRange(English.Language.NumbersIn(start + string.Concat(Enumerable.Repeat(again, 3000)) + "x").Count, 0, 6000);
 
