@@ -29,7 +29,7 @@ public sealed record SiteChanges(IReadOnlyList<FigureChanges> Figures, FileChang
     private static bool IsPage(string path) => path.EndsWith(".html", StringComparison.Ordinal);
 
     private static HashSet<string> FilesOf(string folder) =>
-        [.. Directory.EnumerateFiles(folder, "*", SearchOption.AllDirectories).Select(file => Path.GetRelativePath(folder, file).Replace('\\', '/')).Where(path => !WrittenList.IsMark(path))];
+        [.. Directory.EnumerateFiles(folder, "*", SearchOption.AllDirectories).Select(file => Path.GetRelativePath(folder, file).Replace('\\', '/')).Where(path => !WrittenList.IsLeftOver(path))];
 }
 
 /// <summary>How many files are new, changed and gone.</summary>

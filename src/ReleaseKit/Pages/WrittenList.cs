@@ -27,10 +27,9 @@ internal static class WrittenList
         return File.Exists(marker) ? [.. File.ReadLines(marker).Skip(1).Where(line => line.Length > 0)] : [];
     }
 
-    /// <summary>The marker and the signs of a run, whose names begin as it does; no page's does.</summary>
-    public static bool IsMark(string path) => path.StartsWith(SiteFolder.Marker, StringComparison.Ordinal);
-
-    private static bool IsLeftOver(string path) => IsMark(path) || LeftByFileBrowsers.Contains(Path.GetFileName(path));
+    /// <summary>The marker and the signs of a run, whose names begin as it does and no page's does, and what file browsers leave.</summary>
+    public static bool IsLeftOver(string path) =>
+        path.StartsWith(SiteFolder.Marker, StringComparison.Ordinal) || LeftByFileBrowsers.Contains(Path.GetFileName(path));
 
     /// <summary>Links are files of their own here: nothing behind them lies in the site.</summary>
     private static FileSystemEnumerable<string> FilesOf(string site) =>

@@ -357,7 +357,8 @@ public sealed class SiteFolderTests : IDisposable
     {
         Compose("one");
         Put("site/.DS_Store");
-        Compose("two");
+        Assert.True(Compose("one")!.IsNone);
+        Assert.Equal(0, Compose("two")!.Others.Gone);
         Assert.Equal("two", File.ReadAllText(folder.In("site/index.html")));
     }
 
