@@ -8,9 +8,10 @@ internal static class Elementary
     public static double ExpM1(double x)
     {
         var u = Math.Exp(x);
-        if (u == 1)
-            return x;
-        return u == 0 || double.IsInfinity(u) ? u - 1 : (u - 1) * (x / Math.Log(u));
+        // Away from 0 nothing cancels, and the logarithm of a u too small for a full double has lost digits.
+        if (Math.Abs(x) > 1)
+            return u - 1;
+        return u == 1 ? x : (u - 1) * (x / Math.Log(u));
     }
 
     /// <summary>ln(1 + x), x &gt; −1 (Higham 2002, problem 1.5, after W. Kahan; from memory).</summary>

@@ -59,4 +59,21 @@ public sealed class ExtremesTests
         Assert.True(range.Low <= range.High, $"{range}");
         Assert.True(range.Low >= 0 && double.IsFinite(range.High), $"{range}");
     }
+
+    /// <summary>Between these cutoffs a^cutoff is no full double any more; the law is that without a cutoff to the last digits.</summary>
+    [Theory]
+    [InlineData(700)]
+    [InlineData(720)]
+    [InlineData(739.811)]
+    [InlineData(744)]
+    [InlineData(800)]
+    public void Cutoff_far_out_changes_no_digit(double cutoffInScales)
+    {
+        var (cut, whole) = (TruncatedDiscreteLaplaceLaw.Of(1000, 1000 * cutoffInScales), DiscreteLaplaceLaw.Of(1000));
+        Assert.All(Enumerable.Range(-5, 11), step =>
+        {
+            Assert.Equal(whole.Probability(step), cut.Probability(step), 1e-14 * whole.Probability(step));
+            Assert.Equal(whole.AtMostStep(step), cut.AtMostStep(step), 1e-15);
+        });
+    }
 }
