@@ -10,6 +10,12 @@ public sealed class BrokenJsonTests
     private const string Release = "release.json";
     private const string Mechanisms = "mechanisms.json";
 
+    [Theory]
+    [InlineData("\"epsilon\": 6.0, \"delta\": 1e-9, \"rho\": 5")]
+    [InlineData("\"delta\": 1e-9, \"rho\": 5")]
+    public void Limit_given_in_two_ways_is_a_stop(string limits) => Broken.Stops(
+        "authorised-twice", "mechanisms.json", $"{{ {limits}", "keep the one that the office decided", folder => folder.Edit("mechanisms.json", "\"epsilon\": 6.0, \"delta\": 1e-9", limits));
+
     [Fact]
     public void Missing_comma_is_found_at_its_place() => Broken.Stops("json-broken", Release, "\"identifier\"", "a comma between two members",
         folder => folder.Edit(Release, "\"Lamps counted\",", "\"Lamps counted\""));

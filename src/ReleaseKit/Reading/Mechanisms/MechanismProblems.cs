@@ -8,6 +8,12 @@ namespace ReleaseKit.Reading.Mechanisms;
 /// <summary>What can be wrong in mechanisms.json beyond single keys, one factory a failure.</summary>
 internal static class MechanismProblems
 {
+    public static Finding AuthorisedTwice(Place at, FindingOwner owner) => new(
+        FindingLevel.Stop, "authorised-twice", owner, at,
+        "What is authorised is given twice: as epsilon and delta, and as rho.",
+        "they are two different limits, and the release would be held against one while the budget page promises both.",
+        "keep the one that the office decided, \"epsilon\" and \"delta\" or \"rho\", and take the other out.");
+
     public static Finding AuthorisedIncomplete(Place at, Accounting accounting, FindingOwner owner) => new(
         FindingLevel.Stop, "authorised-incomplete", owner, at,
         $"What is authorised is not given in numbers that {accounting.ToString().ToLowerInvariant()} accounting can be held against.",

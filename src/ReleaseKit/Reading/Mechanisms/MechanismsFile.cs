@@ -93,6 +93,8 @@ internal static class MechanismsFile
         };
         if (NumbersOf(authorised) != AuthorisedNumbers.Count(keys.Has))
             authorised = authorised with { Epsilon = null, Delta = null, Rho = null };
+        if (keys.Has("rho") && (keys.Has("epsilon") || keys.Has("delta")))
+            keys.Context.Add(MechanismProblems.AuthorisedTwice(keys.At, keys.Context.Owner));
         if (accounting is null || IsComplete(keys, accounting.Value))
             return authorised;
         keys.Context.Add(MechanismProblems.AuthorisedIncomplete(keys.At, accounting.Value, keys.Context.Owner));
